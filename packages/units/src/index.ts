@@ -1,0 +1,5 @@
+export * from './kind.ts'
+export * from './quantity.ts'
+export * from './convert.ts'
+export * from './parse.ts'
+export * from './format.ts'
