@@ -12,11 +12,29 @@ export type Comparison = '<' | '<=' | '>' | '>=' | '='
  * A number may carry a unit, as in `3[L]` or `14.696[psia]`; its value is then in the SI unit of the unit's kind.
  */
 export type Tree =
-  | { readonly type: 'number'; readonly value: number; readonly text: string; readonly unit?: string; readonly at: Columns }
+  | {
+      readonly type: 'number'
+      readonly value: number
+      readonly text: string
+      readonly unit?: string
+      readonly at: Columns
+    }
   | { readonly type: 'symbol'; readonly name: string; readonly at: Columns }
   | { readonly type: 'negate'; readonly operand: Tree; readonly at: Columns }
-  | { readonly type: 'binary'; readonly operator: BinaryOperator; readonly left: Tree; readonly right: Tree; readonly at: Columns }
-  | { readonly type: 'compare'; readonly operator: Comparison; readonly left: Tree; readonly right: Tree; readonly at: Columns }
+  | {
+      readonly type: 'binary'
+      readonly operator: BinaryOperator
+      readonly left: Tree
+      readonly right: Tree
+      readonly at: Columns
+    }
+  | {
+      readonly type: 'compare'
+      readonly operator: Comparison
+      readonly left: Tree
+      readonly right: Tree
+      readonly at: Columns
+    }
   | { readonly type: 'call'; readonly name: string; readonly args: readonly Tree[]; readonly at: Columns }
 
 /** What is wrong with a formula, and where. Collected, never thrown. */

@@ -1,0 +1,7 @@
+export * from './tree.ts'
+export * from './function.ts'
+export * from './box.ts'
+export { builtinNames } from './builtins.ts'
+export { MAX_FORMULA_DEPTH, MAX_FORMULA_LENGTH, formulaTree, parseFormula } from './parse.ts'
+export { compile, type Functions, type Values } from './evaluate.ts'
+export { symbolsIn } from './symbols-in.ts'
