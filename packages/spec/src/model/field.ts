@@ -68,3 +68,57 @@ export type Fields = Readonly<Record<string, Field>>
 
 /** What the reader hands on for a table of fields: each key that was written and understood, with its place. */
 export type ReadFields<T extends Fields> = { readonly [Key in keyof T]?: Located<FieldValue<T[Key]>> }
+
+interface QuantityOptions {
+  readonly fallback?: string
+  readonly required?: true
+  readonly least?: number
+  readonly positive?: true
+}
+
+/** A number with a unit of one of `kinds`; the first kind is the usual one. */
+export const quantity = <const K extends Kind>(
+  kinds: readonly [K, ...K[]],
+  doc: string,
+  example: string,
+  options: QuantityOptions = {},
+): QuantityField<K> => ({ field: 'quantity', kinds, doc, example, ...options })
+
+/** One of a few trade words. `choices` holds a line for each that explains it. */
+export const choice = <const C extends string>(
+  choices: Readonly<Record<C, string>>,
+  doc: string,
+  example: NoInfer<C>,
+  options: { readonly fallback?: string; readonly required?: true } = {},
+): ChoiceField<C> => ({ field: 'choice', choices, doc, example, ...options })
+
+export const text = (doc: string, example: string, options: { readonly fallback?: string } = {}): TextField => ({
+  field: 'text',
+  doc,
+  example,
+  ...options,
+})
+
+export const integer = (
+  least: number,
+  doc: string,
+  example: string,
+  options: { readonly fallback?: string; readonly required?: true } = {},
+): IntegerField => ({ field: 'integer', least, doc, example, ...options })
+
+export const number = (
+  doc: string,
+  example: string,
+  options: { readonly fallback?: string; readonly least?: number } = {},
+): NumberField => ({ field: 'number', doc, example, ...options })
+
+export const yesNo = (
+  doc: string,
+  example: 'yes' | 'no',
+  options: { readonly fallback?: string } = {},
+): YesNoField => ({
+  field: 'yes or no',
+  doc,
+  example,
+  ...options,
+})

@@ -25,8 +25,19 @@ interface LineBase {
 /** What holds the water. `count` is 1 where not written. */
 export type ContentLine = LineBase &
   (
-    | { readonly holds: 'equipment'; readonly name: string; readonly volume: Located<Quantity<'volume'>>; readonly count: number; readonly material?: Material }
-    | { readonly holds: 'pipe'; readonly family: string; readonly size: string; readonly length: Located<Quantity<'length'>> }
+    | {
+        readonly holds: 'equipment'
+        readonly name: string
+        readonly volume: Located<Quantity<'volume'>>
+        readonly count: number
+        readonly material?: Material
+      }
+    | {
+        readonly holds: 'pipe'
+        readonly family: string
+        readonly size: string
+        readonly length: Located<Quantity<'length'>>
+      }
     | { readonly holds: 'estimate'; readonly emitter: string; readonly output: Located<Quantity<'power'>> }
     | { readonly holds: 'volume'; readonly volume: Located<Quantity<'volume'>>; readonly material?: Material }
   )
@@ -46,7 +57,13 @@ export interface DemandModel {
 export type SelectionModel =
   | { readonly choose: 'auto' }
   | { readonly choose: 'none' }
-  | { readonly choose: 'row'; readonly maker: string; readonly model: string; readonly path: string; readonly range: Range }
+  | {
+      readonly choose: 'row'
+      readonly maker: string
+      readonly model: string
+      readonly path: string
+      readonly range: Range
+    }
 
 export type VesselModel = {
   [K in VesselKind]: {
@@ -111,7 +128,18 @@ export interface Vocabulary {
   readonly pipes: Readonly<Record<string, readonly { readonly size: string; readonly spellings: readonly string[] }[]>>
   /** Emitter class → one line: content per output and its range. */
   readonly emitters: Readonly<Record<string, string>>
-  readonly assumptions: Readonly<Record<string, { readonly name: string; readonly value: string; readonly because: string; readonly kinds: readonly string[]; readonly choices?: readonly string[] }>>
+  readonly assumptions: Readonly<
+    Record<
+      string,
+      {
+        readonly name: string
+        readonly value: string
+        readonly because: string
+        readonly kinds: readonly string[]
+        readonly choices?: readonly string[]
+      }
+    >
+  >
   /** Vessel kind → method name → one line. A method that is not here is not offered and not accepted. */
   readonly methods: Readonly<Record<string, Readonly<Record<string, string>>>>
   /** Vessel kinds that the engine sizes. */

@@ -1,0 +1,6 @@
+export * from './finding.ts'
+export * from './model/field.ts'
+export * from './model/project.ts'
+export * from './model/spec-model.ts'
+export * from './model/system.ts'
+export * from './model/vessel.ts'

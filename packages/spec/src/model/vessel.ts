@@ -1,0 +1,514 @@
+import { choice, type Fields, integer, number, quantity, text } from './field.ts'
+import { hydronicServices, type Service } from './system.ts'
+
+/**
+ * An input outside the vessel without which no method of the kind gives a size: one of `keys` (paths inside the system) must be
+ * there. `only` and `unless` narrow it to some values of a key of the vessel; a value that is not written counts as `fallback`.
+ */
+export interface Need {
+  readonly keys: readonly [string, ...string[]]
+  /** What it is for, after the words "ET-1 needs … ": "to know how hot the water gets". */
+  readonly to: string
+  readonly only?: { readonly key: string; readonly is: readonly string[] }
+  readonly unless?: { readonly key: string; readonly is: readonly string[] }
+}
+
+export interface VesselKindDefinition {
+  /** For headings: "Expansion tanks". */
+  readonly title: string
+  readonly doc: string
+  /** A whole vessel in one line, as in `ET-1: { … }`. */
+  readonly example: string
+  readonly services: readonly Service[]
+  readonly fields: Fields
+  readonly needs: readonly Need[]
+}
+
+const quantityField = integer(1, 'Number of equal vessels that share the volume.', '1', { fallback: '1' })
+
+/** Keys of every vessel. `kind` and `selection` are keys of every vessel too and are read apart. */
+const common = {
+  quantity: quantityField,
+  serves: text('What the vessel serves, for the schedule.', 'Boilers B-1 and B-2', {
+    fallback: 'the title of the system',
+  }),
+  location: text('Where the vessel stands.', 'Mechanical room 012'),
+  note: text('A remark printed under the schedule.', 'Mount on the suction header'),
+}
+
+const material = choice(
+  {
+    steel: 'growth of steel pipe is credited',
+    copper: 'growth of copper pipe is credited',
+    none: 'no credit, as for plastic pipe',
+  },
+  'What most of the piping is made of. Pipe that grows with heat makes room for water.',
+  'steel',
+  { fallback: 'steel, and then an assumption' },
+)
+
+const closedConstruction = choice(
+  { diaphragm: 'gas and water parted by a fixed diaphragm', bladder: 'water held in a bladder that can be replaced' },
+  'How gas and water are kept apart.',
+  'diaphragm',
+  { fallback: 'diaphragm' },
+)
+
+const precharge = quantity(['gauge pressure'], 'Pressure of the gas when the vessel is empty of water.', '22 psi', {
+  fallback: 'the pressure at which the vessel starts to take water',
+  positive: true,
+})
+
+const reliefMargin = quantity(
+  ['ratio', 'pressure difference'],
+  'How far below the relief valve this vessel stays. It replaces the margin of the system.',
+  '10 %',
+  { fallback: 'the relief-margin of the system', least: 0 },
+)
+
+const usableFraction = quantity(['ratio'], 'Part of the volume that can be used.', '70 %', {
+  fallback: '70 % where the method asks for it, and then an assumption',
+  positive: true,
+})
+
+const solarContents = {
+  'collector-volume': quantity(['volume'], 'Content of all collectors.', '12 L', { positive: true }),
+  'piping-above': quantity(['volume'], 'Content of the pipes that stand above the collector connection.', '6 L', {
+    least: 0,
+  }),
+}
+
+const drinkingWater: readonly Service[] = ['domestic hot water', 'domestic cold water']
+
+/** Every kind of vessel that the language knows. Which of them this version sizes is said by the vocabulary. */
+export const vesselKinds = {
+  'expansion tank': {
+    title: 'Expansion tanks',
+    doc: 'Takes up the growth of the water in a closed or open heating or cooling loop.',
+    example: '{ kind: expansion tank, construction: bladder, method: ashrae }',
+    services: hydronicServices,
+    fields: {
+      ...common,
+      construction: choice(
+        {
+          diaphragm: 'closed, gas and water parted by a fixed diaphragm',
+          bladder: 'closed, water held in a bladder that can be replaced',
+          'plain steel': 'closed, gas and water meet',
+          open: 'open to the air, above the highest point of the system',
+        },
+        'How the vessel is built. It decides the formula.',
+        'bladder',
+        { fallback: 'diaphragm' },
+      ),
+      method: choice(
+        {
+          ashrae: 'growth of the water less growth of the pipes, gas law between fill and maximum pressure',
+          'en 12828': 'European standard for heating systems in buildings, with a water reserve',
+          'une 100155': 'Spanish standard, with its own expansion coefficient',
+          'bs 7074': 'British standard, with a check of the final pressure',
+          'code minimum': 'least volume in the mechanical code, a legal floor and not a design method',
+        },
+        'Method by which the vessel is sized. The method moves the answer by up to 40 %.',
+        'ashrae',
+        { fallback: 'ashrae' },
+      ),
+      material,
+      precharge,
+      'relief-margin': reliefMargin,
+      'water-reserve': quantity(
+        ['volume', 'ratio'],
+        'Water kept in the vessel when the system is cold, as a volume or as a part of the contents.',
+        '3 L',
+        {
+          fallback: 'the larger of 0.5 % of the contents and 3 L under en 12828, none under ashrae',
+          least: 0,
+        },
+      ),
+    },
+    needs: [
+      { keys: ['contents'], to: 'to know how much water expands' },
+      { keys: ['temperatures.high'], to: 'to know how hot the water gets' },
+      { keys: ['temperatures.low', 'temperatures.fill'], to: 'to know how cold the water gets' },
+      {
+        keys: ['pressure.static-height', 'pressure.fill'],
+        to: 'to know the fill pressure',
+        unless: { key: 'construction', is: ['open'] },
+      },
+      {
+        keys: ['pressure.relief-valve', 'pressure.maximum'],
+        to: 'to know the highest pressure allowed',
+        unless: { key: 'construction', is: ['open'] },
+      },
+    ],
+  },
+  'thermal expansion tank': {
+    title: 'Thermal expansion tanks',
+    doc: 'Takes up the growth of heated drinking water behind a backflow preventer or check valve.',
+    example: '{ kind: thermal expansion tank }',
+    services: ['domestic hot water'],
+    fields: {
+      ...common,
+      construction: closedConstruction,
+      method: choice(
+        {
+          aspe: 'growth of the water less growth of tank and pipes, gas law between supply and maximum pressure',
+          'din 4807-5': 'German standard for vessels in drinking water systems',
+        },
+        'Method by which the vessel is sized.',
+        'aspe',
+        { fallback: 'aspe' },
+      ),
+      material: choice(
+        {
+          steel: 'growth of steel is credited for contents that name no material',
+          copper: 'growth of copper is credited for contents that name no material',
+          none: 'no growth is credited for contents that name no material',
+        },
+        'What the heater and pipes are made of where the contents do not say.',
+        'none',
+        { fallback: 'none, and then an assumption' },
+      ),
+      precharge,
+      'relief-margin': reliefMargin,
+    },
+    needs: [
+      { keys: ['contents'], to: 'to know how much water is heated' },
+      { keys: ['temperatures.cold'], to: 'to know how cold the water comes in' },
+      { keys: ['temperatures.storage'], to: 'to know how hot the water is stored' },
+      { keys: ['pressure.regulator', 'pressure.supply'], to: 'to know the pressure at the vessel' },
+      { keys: ['pressure.relief-valve', 'pressure.maximum'], to: 'to know the highest pressure allowed' },
+    ],
+  },
+  'storage tank': {
+    title: 'Storage tanks',
+    doc: 'Stores hot water for the peak.',
+    example: '{ kind: storage tank, method: ashrae fixture }',
+    services: ['domestic hot water'],
+    fields: {
+      ...common,
+      method: choice(
+        {
+          'ashrae fixture': 'hourly demand of the fixtures, demand factor, storage factor',
+          'aspe fixture': 'the same, divided by the usable fraction',
+          'per person': 'volume that a person draws in the peak',
+          'per apartment': 'hourly demand of an apartment by the number of apartments',
+          'recovery and storage': 'readings from a curve of recovery against storage, typed by you',
+          'din 4708': 'German standard, demand index N of a group of dwellings',
+        },
+        'Method by which storage and recovery are found. Two methods may differ by 40 %.',
+        'ashrae fixture',
+        { required: true },
+      ),
+      'usable-fraction': usableFraction,
+      'demand-level': choice(
+        { low: 'few draw at once', medium: 'usual', high: 'many draw at once' },
+        'How heavy the demand of a person is.',
+        'medium',
+        { fallback: 'medium' },
+      ),
+      'peak-time': quantity(['time'], 'Length of the peak that the store carries.', '30 min', { positive: true }),
+      recovery: quantity(['hourly flow'], 'Reading of the curve: recovery for each unit served.', '1.1 gph', {
+        positive: true,
+      }),
+      storage: quantity(['volume'], 'Reading of the curve: usable storage for each unit served.', '12 gal', {
+        positive: true,
+      }),
+      'units-served': integer(
+        1,
+        'Number of people, beds or apartments to which the readings of the curve apply.',
+        '300',
+      ),
+      'demand-index': number('Demand index N of the dwellings, where it is known.', '12', { least: 0 }),
+    },
+    needs: [
+      {
+        keys: ['demand.fixtures'],
+        to: 'to know what draws hot water',
+        only: { key: 'method', is: ['ashrae fixture', 'aspe fixture'] },
+      },
+      {
+        keys: ['demand.building'],
+        to: 'to know which row of the demand table holds',
+        only: { key: 'method', is: ['ashrae fixture', 'aspe fixture'] },
+      },
+      { keys: ['demand.people'], to: 'to know how many draw hot water', only: { key: 'method', is: ['per person'] } },
+      {
+        keys: ['demand.apartments'],
+        to: 'to know how many draw hot water',
+        only: { key: 'method', is: ['per apartment'] },
+      },
+    ],
+  },
+  'buffer tank': {
+    title: 'Buffer tanks',
+    doc: 'Adds water to a loop so that the source does not start too often.',
+    example:
+      '{ kind: buffer tank, source-minimum: 96 MBH, load-minimum: 10 MBH, run-time: 10 min, temperature-band: 20 °F }',
+    services: hydronicServices,
+    fields: {
+      ...common,
+      method: choice(
+        {
+          'run time': 'holds what the source makes beyond the load in its least run time',
+          'volume per ton': 'water of the whole loop for each ton of cooling',
+          'en 303-5': 'store of a solid fuel boiler that burns one charge',
+          defrost: 'holds the heat that a heat pump takes to defrost',
+        },
+        'Method by which the vessel is sized.',
+        'run time',
+        { fallback: 'run time' },
+      ),
+      'source-minimum': quantity(['power'], 'Least output of the smallest source.', '96 MBH', { positive: true }),
+      'load-minimum': quantity(['power'], 'Least load that can call alone.', '10 MBH', { least: 0 }),
+      'run-time': quantity(['time'], 'Least time that the source runs once it has started.', '10 min', {
+        positive: true,
+      }),
+      'temperature-band': quantity(
+        ['temperature difference'],
+        'Change of temperature of the buffer between start and stop of the source.',
+        '20 °F',
+        {
+          positive: true,
+        },
+      ),
+      credit: quantity(['volume'], 'Water of the circuit that always flows. It is taken off.', '60 gal', {
+        fallback: 'none',
+        least: 0,
+      }),
+      'cooling-capacity': quantity(['power'], 'Capacity of the chillers that run.', '40 ton', { positive: true }),
+      'volume-per-ton': quantity(['volume per power'], 'Water of the loop for each unit of cooling.', '6 gal/ton', {
+        positive: true,
+      }),
+      'boiler-output': quantity(['power'], 'Rated output of the solid fuel boiler.', '30 kW', { positive: true }),
+      'boiler-minimum': quantity(['power'], 'Least output of the solid fuel boiler.', '15 kW', { positive: true }),
+      'heat-load': quantity(['power'], 'Design heat load of the building.', '25 kW', { positive: true }),
+      'burn-time': quantity(['time'], 'Time that one charge of fuel burns.', '5 h', { positive: true }),
+      'defrost-energy': quantity(['energy'], 'Heat that one defrost takes.', '3 kWh', { positive: true }),
+    },
+    needs: [],
+  },
+  'pressure tank': {
+    title: 'Pressure tanks',
+    doc: 'Gives water between two starts of a pump.',
+    example: '{ kind: pressure tank, pump-flow: 50 gpm, starts-per-hour: 6 }',
+    services: ['domestic cold water'],
+    fields: {
+      ...common,
+      construction: closedConstruction,
+      method: choice(
+        {
+          drawdown: 'the drawdown is given',
+          'run time': 'the flow of the pump for its least run time',
+          'starts per hour': 'a quarter of a cycle at half the flow of the pump',
+        },
+        'How the drawdown is found.',
+        'starts per hour',
+        { fallback: 'the method whose keys are given' },
+      ),
+      'pump-flow': quantity(['flow'], 'Flow of one pump at cut-in.', '50 gpm', { positive: true }),
+      'starts-per-hour': number('Most starts of the pump in an hour.', '6', { least: 0 }),
+      'run-time': quantity(['time'], 'Least time that the pump runs.', '2 min', { positive: true }),
+      drawdown: quantity(['volume'], 'Water given between cut-out and cut-in.', '25 gal', { positive: true }),
+      precharge: quantity(['gauge pressure'], 'Pressure of the gas when the vessel is empty of water.', '38 psi', {
+        fallback: '2 psi below cut-in, and then an assumption',
+        positive: true,
+      }),
+    },
+    needs: [
+      { keys: ['pressure.cut-in'], to: 'to know when the pump starts' },
+      { keys: ['pressure.cut-out'], to: 'to know when the pump stops' },
+    ],
+  },
+  'solar expansion tank': {
+    title: 'Solar expansion tanks',
+    doc: 'Takes up the growth of the fluid in a solar loop and the content of the collectors when they boil.',
+    example: '{ kind: solar expansion tank, collector-volume: 12 L, piping-above: 6 L }',
+    services: ['solar thermal'],
+    fields: {
+      ...common,
+      ...solarContents,
+      construction: closedConstruction,
+      'expansion-fraction': quantity(['ratio'], 'Growth of the fluid as a part of the contents.', '8.5 %', {
+        fallback: '8.5 %, and then an assumption',
+        positive: true,
+      }),
+      'water-reserve': quantity(['volume'], 'Fluid kept in the vessel when the loop is cold.', '3 L', {
+        fallback: '3 L, and then an assumption',
+        least: 0,
+      }),
+      precharge,
+      'relief-margin': reliefMargin,
+    },
+    needs: [
+      { keys: ['contents'], to: 'to know how much fluid expands' },
+      { keys: ['pressure.static-height', 'pressure.fill'], to: 'to know the fill pressure' },
+      { keys: ['pressure.relief-valve', 'pressure.maximum'], to: 'to know the highest pressure allowed' },
+    ],
+  },
+  'glycol feeder': {
+    title: 'Glycol feeders',
+    doc: 'A tank and pump that make up a glycol loop.',
+    example: '{ kind: glycol feeder, make-up: 3 %, drum: 55 gal }',
+    services: hydronicServices,
+    fields: {
+      ...common,
+      'make-up': quantity(['ratio'], 'Make-up held, as a part of the contents of the system.', '3 %', {
+        positive: true,
+      }),
+      drum: quantity(['volume'], 'Content of the drum from which the tank is filled.', '55 gal', { positive: true }),
+      'pump-flow': quantity(['flow'], 'Flow of the feed pump.', '1.5 gpm', { positive: true }),
+    },
+    needs: [{ keys: ['contents'], to: 'to know how much fluid is made up' }],
+  },
+  'air and dirt separator': {
+    title: 'Air and dirt separators',
+    doc: 'Takes air bubbles, dirt or both out of the flow.',
+    example: '{ kind: air and dirt separator, flow: 100 gpm }',
+    services: hydronicServices,
+    fields: {
+      ...common,
+      removes: choice(
+        { air: 'air only', dirt: 'dirt only', 'air and dirt': 'both' },
+        'What it takes out of the flow.',
+        'air and dirt',
+        { fallback: 'air and dirt' },
+      ),
+      flow: quantity(['flow'], 'Design flow through the separator.', '100 gpm', { required: true, positive: true }),
+      'entering-velocity': quantity(['velocity'], 'Highest velocity at the inlet.', '4 ft/s', { positive: true }),
+    },
+    needs: [],
+  },
+  'hydraulic separator': {
+    title: 'Hydraulic separators',
+    doc: 'Parts the flow of the sources from the flow of the loads.',
+    example: '{ kind: hydraulic separator, source-flow: 80 gpm, load-flow: 100 gpm }',
+    services: hydronicServices,
+    fields: {
+      ...common,
+      'source-flow': quantity(['flow'], 'Design flow on the side of the sources.', '80 gpm', {
+        required: true,
+        positive: true,
+      }),
+      'load-flow': quantity(['flow'], 'Design flow on the side of the loads.', '100 gpm', {
+        required: true,
+        positive: true,
+      }),
+      'body-velocity': quantity(['velocity'], 'Highest velocity in the body.', '0.4 ft/s', { positive: true }),
+    },
+    needs: [],
+  },
+  'drain-back tank': {
+    title: 'Drain-back tanks',
+    doc: 'Takes the content of the collectors when the pump stops.',
+    example: '{ kind: drain-back tank, collector-volume: 10 gal, piping-above: 4 gal }',
+    services: ['solar thermal'],
+    fields: {
+      ...common,
+      ...solarContents,
+      'water-reserve': quantity(['volume'], 'Water that stays in the tank when the loop is full.', '5 gal', {
+        least: 0,
+      }),
+    },
+    needs: [],
+  },
+  'flash tank': {
+    title: 'Flash tanks',
+    doc: 'Lets hot condensate flash at a lower pressure.',
+    example: '{ kind: flash tank, condensate-flow: 2000 lb/h, condensate-pressure: 100 psi, flash-pressure: 5 psi }',
+    services: ['steam'],
+    fields: {
+      ...common,
+      'condensate-flow': quantity(['mass flow'], 'Condensate that enters.', '2000 lb/h', {
+        required: true,
+        positive: true,
+      }),
+      'condensate-pressure': quantity(
+        ['gauge pressure'],
+        'Pressure of the steam that the condensate comes from.',
+        '100 psi',
+        {
+          required: true,
+          positive: true,
+        },
+      ),
+      'flash-pressure': quantity(['gauge pressure'], 'Pressure in the flash tank.', '5 psi', {
+        required: true,
+        least: 0,
+      }),
+      'steam-velocity': quantity(['velocity'], 'Highest velocity of the flash steam in the tank.', '10 ft/s', {
+        positive: true,
+      }),
+    },
+    needs: [],
+  },
+  'blowdown separator': {
+    title: 'Blowdown separators',
+    doc: 'Cools and vents the water that is blown out of a steam boiler.',
+    example: '{ kind: blowdown separator, blown-volume: 60 gal, boiler-pressure: 100 psi }',
+    services: ['steam'],
+    fields: {
+      ...common,
+      'blown-volume': quantity(['volume'], 'Water blown out at once.', '60 gal', { positive: true }),
+      'water-surface': quantity(['area'], 'Area of the water surface in the boiler at its normal level.', '48 ft2', {
+        positive: true,
+      }),
+      'level-drop': quantity(['length'], 'Drop of the water level in one blow.', '4 in', { positive: true }),
+      'boiler-pressure': quantity(['gauge pressure'], 'Working pressure of the boiler.', '100 psi', {
+        required: true,
+        positive: true,
+      }),
+      'drain-temperature': quantity(['temperature'], 'Hottest water that the drain may take.', '140 °F'),
+    },
+    needs: [],
+  },
+  'condensate receiver': {
+    title: 'Condensate receivers',
+    doc: 'Collects condensate ahead of a pump.',
+    example: '{ kind: condensate receiver, steaming-rate: 3450 lb/h }',
+    services: ['steam'],
+    fields: {
+      ...common,
+      duty: choice(
+        { condensate: 'returns condensate', 'boiler feed': 'feeds the boiler' },
+        'What the pump of the receiver does.',
+        'condensate',
+        { fallback: 'condensate' },
+      ),
+      'steaming-rate': quantity(['mass flow'], 'Steam that the boilers make at full load.', '3450 lb/h', {
+        required: true,
+        positive: true,
+      }),
+      'pump-factor': number('Flow of the pump as a multiple of the steaming rate.', '3', { least: 1 }),
+      'holding-time': quantity(['time'], 'Time for which the receiver holds the flow.', '1 min', { positive: true }),
+      'usable-fraction': usableFraction,
+    },
+    needs: [],
+  },
+  'break tank': {
+    title: 'Break tanks',
+    doc: 'Parts a drinking water system from the main and stores for its failure.',
+    example: '{ kind: break tank, peak-flow: 60 gpm, holding-time: 30 min }',
+    services: drinkingWater,
+    fields: {
+      ...common,
+      'peak-flow': quantity(['flow'], 'Flow out of the tank at the peak.', '60 gpm', {
+        required: true,
+        positive: true,
+      }),
+      'refill-flow': quantity(['flow'], 'Flow from the main into the tank.', '20 gpm', { least: 0 }),
+      'holding-time': quantity(['time'], 'Length of the peak or of the failure of the main.', '30 min', {
+        required: true,
+        positive: true,
+      }),
+      'usable-fraction': usableFraction,
+    },
+    needs: [],
+  },
+} satisfies Record<string, VesselKindDefinition>
+
+export type VesselKind = keyof typeof vesselKinds
+export type VesselFieldsOf<K extends VesselKind> = (typeof vesselKinds)[K]['fields']
+
+export const vesselKindNames = Object.keys(vesselKinds) as readonly VesselKind[]
+
+export const isVesselKind = (name: string): name is VesselKind => Object.hasOwn(vesselKinds, name)
