@@ -16,7 +16,7 @@ const one = (evaluate: (value: number) => number, slope: (value: number) => numb
 const two = (evaluate: (first: number, second: number) => number): Builtin => ({
   least: 2,
   most: 2,
-  evaluate: evaluate as Builtin['evaluate'],
+  evaluate: evaluate,
 })
 const flat = () => 0
 
@@ -27,7 +27,7 @@ const BUILTINS: Readonly<Record<string, Builtin>> = {
   min: { least: 2, most: Infinity, evaluate: Math.min },
   max: { least: 2, most: Infinity, evaluate: Math.max },
   /** `when(condition, a, b)`: only the branch taken is evaluated, so compile and differentiate treat it themselves. */
-  when: { least: 3, most: 3, evaluate: (condition, a, b) => (condition ? a! : b!) },
+  when: { least: 3, most: 3, evaluate: (condition, a, b) => (condition ? a : b) },
   sqrt: one(Math.sqrt, (x) => 0.5 / Math.sqrt(x)),
   abs: one(Math.abs, Math.sign),
   exp: one(Math.exp, Math.exp),

@@ -43,6 +43,7 @@ const binary = (tree: Extract<Tree, { type: 'binary' }>, functions: Functions): 
     case '/':
       return (values) => left(values) / right(values)
     case '^':
+    default:
       return (values) => left(values) ** right(values)
   }
 }
@@ -79,7 +80,8 @@ export const compile = (tree: Tree, functions: Functions): Evaluate => {
       const holds = COMPARE[tree.operator]
       return (values) => (holds(left(values), right(values)) ? 1 : 0)
     }
-    case 'call': {
+    case 'call':
+    default: {
       const args = tree.args.map((arg) => compile(arg, functions))
       if (tree.name === 'when') {
         const [condition, a, b] = args

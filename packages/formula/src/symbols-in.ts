@@ -13,6 +13,7 @@ export const children = (tree: Tree): readonly Tree[] => {
     case 'compare':
       return [tree.left, tree.right]
     case 'call':
+    default:
       return tree.args
   }
 }
