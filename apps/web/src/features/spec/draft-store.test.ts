@@ -1,0 +1,54 @@
+import { describe, expect, it } from 'vitest'
+import { draftsOf, dropDraft, keepDraft } from './draft-store.ts'
+
+const shelf = (): Storage => {
+  const kept = new Map<string, string>()
+  return {
+    get length() {
+      return kept.size
+    },
+    key: (at) => [...kept.keys()][at] ?? null,
+    getItem: (key) => kept.get(key) ?? null,
+    setItem: (key, value) => void kept.set(key, value),
+    removeItem: (key) => void kept.delete(key),
+    clear: () => kept.clear(),
+  }
+}
+const owner = { user: 'u1', project: 'FC-241' }
+
+describe('drafts of a spec', () => {
+  it('keeps one draft for each version it was begun on, newest first', () => {
+    const store = shelf()
+    keepDraft(store, owner, { text: 'old', baseVersion: 3, at: '2026-11-01T10:00:00Z' })
+    keepDraft(store, owner, { text: 'new', baseVersion: 4, at: '2026-11-02T10:00:00Z' })
+    keepDraft(store, owner, { text: 'newer', baseVersion: 4, at: '2026-11-02T11:00:00Z' })
+    expect(draftsOf(store, owner).map((draft) => draft.text)).toEqual(['newer', 'old'])
+  })
+
+  it('shows no draft of another person or another project', () => {
+    const store = shelf()
+    keepDraft(store, owner, { text: 'mine', baseVersion: 1, at: '2026-11-01T10:00:00Z' })
+    expect(draftsOf(store, { ...owner, user: 'u' })).toEqual([])
+    expect(draftsOf(store, { ...owner, project: 'FC-24' })).toEqual([])
+  })
+
+  it('drops only the draft of the version that was saved', () => {
+    const store = shelf()
+    keepDraft(store, owner, { text: 'one', baseVersion: 1, at: '2026-11-01T10:00:00Z' })
+    keepDraft(store, owner, { text: 'two', baseVersion: 2, at: '2026-11-01T10:00:00Z' })
+    dropDraft(store, owner, 1)
+    expect(draftsOf(store, owner).map((draft) => draft.text)).toEqual(['two'])
+  })
+
+  it('passes over what another program left under its key', () => {
+    const store = shelf()
+    store.setItem('coldfill.draft.u1.FC-241.9', '{"text":1}')
+    store.setItem('coldfill.draft.u1.FC-241.8', 'not json')
+    expect(draftsOf(store, owner)).toEqual([])
+  })
+
+  it('says so where the browser keeps nothing', () => {
+    const store = { ...shelf(), setItem: () => { throw new Error('quota') } }
+    expect(keepDraft(store, owner, { text: 'x', baseVersion: 1, at: '' })).toBe(false)
+  })
+})
