@@ -1,0 +1,61 @@
+import { BuilderElement, MathRun, type XmlComponent } from 'docx'
+import type { Box } from '@coldfill/formula'
+
+/** An Office Math element with its children. */
+const element = (name: string, children: readonly XmlComponent[] = []): XmlComponent =>
+  new BuilderElement({ name: `m:${name}`, children })
+
+const property = (name: string, value: string): XmlComponent =>
+  new BuilderElement<{ value: string }>({ name: `m:${name}`, attributes: { value: { key: 'm:val', value } } })
+
+const arg = (name: 'e' | 'num' | 'den' | 'sub' | 'sup', box: Box): XmlComponent => element(name, ommlOf(box))
+
+/** Upright text in the document's font. LibreOffice reads words such as `in` or `over` inside an equation as commands unless they are normal text. */
+const upright = (text: string): XmlComponent => new MathRun({ text, normalText: true })
+
+const fenced = (open: string, close: string, inside: readonly XmlComponent[]): XmlComponent =>
+  element('d', [element('dPr', [property('begChr', open), property('endChr', close)]), element('e', inside)])
+
+/** A drawn formula as elements of a native Word equation. Brackets come from the boxes; none is added here. */
+export const ommlOf = (box: Box): XmlComponent[] => {
+  switch (box.box) {
+    case 'row':
+      return box.items.flatMap(ommlOf)
+    case 'identifier':
+      return [new MathRun(box.text)]
+    case 'number':
+      return [new MathRun({ text: box.text, style: 'plain' })]
+    case 'word':
+      return [upright(box.text)]
+    case 'operator':
+      return [new MathRun({ text: box.text, style: 'plain' })]
+    case 'fraction':
+      return [element('f', [arg('num', box.top), arg('den', box.bottom)])]
+    case 'subscript':
+      return [element('sSub', [arg('e', box.base), arg('sub', box.sub)])]
+    case 'superscript':
+      return [element('sSup', [arg('e', box.base), arg('sup', box.sup)])]
+    case 'radical':
+      return [element('rad', [element('radPr', [property('degHide', '1')]), element('deg'), arg('e', box.inside)])]
+    case 'fence':
+      return [fenced(box.open, box.close, ommlOf(box.inside))]
+    case 'cases':
+      return [
+        fenced('{', '', [
+          element(
+            'eqArr',
+            box.cases.map(({ value, condition }) =>
+              element('e', [
+                ...ommlOf(value),
+                ...(condition === null ? [upright('  otherwise')] : [upright('  if '), ...ommlOf(condition)]),
+              ]),
+            ),
+          ),
+        ]),
+      ]
+  }
+}
+
+/** An equation on its own line, set from the left. */
+export const displayEquation = (box: Box): XmlComponent =>
+  element('oMathPara', [element('oMathParaPr', [property('jc', 'left')]), element('oMath', ommlOf(box))])

@@ -1,0 +1,52 @@
+import { Bookmark, Paragraph, Tab, TextRun, type ParagraphChild } from 'docx'
+import type { Box } from '@coldfill/formula'
+import { displayEquation } from './omml.ts'
+import { plainText } from './plain-text.ts'
+import { STYLE } from './styles.ts'
+
+type Style = (typeof STYLE)[keyof typeof STYLE] | 'Title' | 'Subtitle' | 'Caption' | 'Normal'
+
+export const paragraph = (text: string, style: Style = 'Normal'): Paragraph =>
+  new Paragraph({ style, children: [new TextRun(plainText(text))] })
+
+/** A paragraph with some words in the built-in style Strong. */
+export const strongThenText = (strong: string, text: string, style: Style = 'Normal'): Paragraph =>
+  new Paragraph({
+    style,
+    children: [new TextRun({ text: plainText(strong), style: 'Strong' }), new TextRun(plainText(text))],
+  })
+
+/** A note behind its number, on a hanging indent. */
+export const numberedNote = (number: string, text: string): Paragraph =>
+  new Paragraph({
+    style: STYLE.note,
+    children: [new TextRun({ children: [plainText(number), new Tab(), plainText(text)] })],
+  })
+
+export const equationParagraph = (box: Box, keepNext: boolean): Paragraph =>
+  new Paragraph({
+    style: STYLE.equation,
+    keepNext,
+    // The paragraph takes any element; the type of the library only knows the equations it can build itself.
+    children: [displayEquation(box) as unknown as ParagraphChild],
+  })
+
+export interface HeadingEntry {
+  readonly text: string
+  readonly level: 1 | 2 | 3
+  readonly anchor: string
+}
+
+/** Headings of a document with the anchors that its contents list points to. */
+export class Headings {
+  readonly entries: HeadingEntry[] = []
+
+  heading(text: string, level: 1 | 2 | 3): Paragraph {
+    const anchor = `_Toc${String(100_000 + this.entries.length)}`
+    this.entries.push({ text: plainText(text), level, anchor })
+    return new Paragraph({
+      style: `Heading${level}`,
+      children: [new Bookmark({ id: anchor, children: [new TextRun(plainText(text))] })],
+    })
+  }
+}

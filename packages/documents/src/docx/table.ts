@@ -1,0 +1,133 @@
+import {
+  BuilderElement,
+  Paragraph,
+  SimpleField,
+  Table,
+  TableCell,
+  TableLayoutType,
+  TableRow,
+  TextRun,
+  WidthType,
+  type XmlComponent,
+} from 'docx'
+import { plainText } from './plain-text.ts'
+import { STYLE, TABLE_STYLE } from './styles.ts'
+
+export interface TableColumn {
+  readonly heading: string
+  /** Share of the width. */
+  readonly width: number
+  readonly align?: 'left' | 'right' | 'center'
+}
+
+export interface TableContent {
+  readonly columns: readonly TableColumn[]
+  readonly rows: readonly (readonly string[])[]
+  /** Said by a screen reader and shown in the properties of the table. */
+  readonly title: string
+  readonly description: string
+  /** Twips. */
+  readonly width: number
+  readonly size?: 'table' | 'schedule'
+  /** Words of the first column in the built-in style Strong. */
+  readonly strongFirst?: boolean
+  /** Least height of body rows in twips, for cells that a person fills in. */
+  readonly rowHeight?: number
+}
+
+const STYLES = {
+  table: { head: STYLE.tableHead, text: STYLE.tableText, number: STYLE.tableNumber },
+  schedule: { head: STYLE.scheduleHead, text: STYLE.scheduleText, number: STYLE.scheduleNumber },
+}
+
+/** Widths in whole twips that add up to `total`. */
+const shares = (columns: readonly TableColumn[], total: number): number[] => {
+  const sum = columns.reduce((all, column) => all + column.width, 0)
+  const widths = columns.map((column) => Math.floor((column.width / sum) * total))
+  const last = widths.length - 1
+  widths[last] = (widths[last] ?? 0) + total - widths.reduce((all, width) => all + width, 0)
+  return widths
+}
+
+class DescribedTable extends Table {
+  describe(title: string, description: string): this {
+    const properties = this.root[0] as XmlComponent
+    for (const [name, value] of [
+      ['w:tblCaption', title],
+      ['w:tblDescription', description],
+    ] as const) {
+      properties.addChildElement(
+        new BuilderElement<{ value: string }>({
+          name,
+          attributes: { value: { key: 'w:val', value: plainText(value) } },
+        }),
+      )
+    }
+    return this
+  }
+}
+
+/** A table with a repeating head row, rows that stay whole, and nothing merged. */
+export const table = (content: TableContent): Table => {
+  const { columns, rows, width } = content
+  const widths = shares(columns, width)
+  const style = STYLES[content.size ?? 'table']
+  const cell = (text: string, index: number, paragraphStyle: string, strong = false) =>
+    new TableCell({
+      width: { size: widths[index] ?? 0, type: WidthType.DXA },
+      children: [
+        new Paragraph({
+          style: paragraphStyle,
+          children: [new TextRun({ text: plainText(text), ...(strong ? { style: 'Strong' } : {}) })],
+        }),
+      ],
+    })
+  return new DescribedTable({
+    style: TABLE_STYLE,
+    layout: TableLayoutType.FIXED,
+    width: { size: width, type: WidthType.DXA },
+    columnWidths: widths,
+    tableLook: { firstRow: true, lastRow: false, firstColumn: false, lastColumn: false, noHBand: true, noVBand: true },
+    rows: [
+      new TableRow({
+        tableHeader: true,
+        cantSplit: true,
+        children: columns.map((column, index) => cell(column.heading, index, style.head)),
+      }),
+      ...rows.map(
+        (row) =>
+          new TableRow({
+            cantSplit: true,
+            ...(content.rowHeight === undefined
+              ? {}
+              : { height: { value: content.rowHeight, rule: 'atLeast' as const } }),
+            children: columns.map((column, index) =>
+              cell(
+                row[index] ?? '',
+                index,
+                column.align === 'right' ? style.number : style.text,
+                content.strongFirst === true && index === 0,
+              ),
+            ),
+          }),
+      ),
+    ],
+  }).describe(content.title, content.description)
+}
+
+/** Numbers the tables of a document; the caption stands above its table. */
+export class Captions {
+  #tables = 0
+
+  next(text: string): Paragraph {
+    this.#tables += 1
+    return new Paragraph({
+      style: 'Caption',
+      children: [
+        new TextRun('Table '),
+        new SimpleField('SEQ Table \\* ARABIC', String(this.#tables)),
+        new TextRun(plainText(`. ${text}`)),
+      ],
+    })
+  }
+}

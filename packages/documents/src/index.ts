@@ -1,0 +1,11 @@
+export { CONSTRUCTION_STATUS, type DocumentOptions, type RevisionEntry, type TitleBlock } from './document-options.ts'
+export { fileName, type DocumentKind } from './file-name.ts'
+export {
+  headerText,
+  scheduleKinds,
+  scheduleTable,
+  type ScheduleCell,
+  type ScheduleColumn,
+  type ScheduleRow,
+  type ScheduleTable,
+} from './schedules/schedule-table.ts'

@@ -1,0 +1,27 @@
+import { defineSchedule, inputNumber, resultNumber } from './schedule.ts'
+import * as shared from './shared-columns.ts'
+
+export const expansionTanks = defineSchedule({
+  kind: 'expansion tank',
+  title: 'Expansion tanks',
+  purpose:
+    'Closed and open tanks that take up the expansion of the water in hydronic loops. Pressures are gauge, at the vessel connection.',
+  columns: [
+    shared.serves,
+    shared.construction,
+    shared.fluid,
+    shared.count,
+    resultNumber('system-volume', 'System volume', 9, 'volume'),
+    inputNumber('low-temperature', 'Lowest temp.', 8, 'temperature', ['t_l', 't_low']),
+    inputNumber('high-temperature', 'Highest temp.', 8, 'temperature', ['t_h', 't_high', 't_max']),
+    resultNumber('expansion-volume', 'Expansion volume', 10, 'volume'),
+    resultNumber('required-volume', 'Required volume', 9, 'volume'),
+    shared.selectedVolume,
+    resultNumber('fill-pressure', 'Fill pressure', 9, 'gauge pressure'),
+    resultNumber('precharge', 'Precharge', 10, 'gauge pressure'),
+    resultNumber('maximum-pressure', 'Maximum pressure', 10, 'gauge pressure'),
+    shared.reliefSet,
+    shared.method,
+    shared.assumptions,
+  ],
+})

@@ -1,0 +1,18 @@
+import { methodWords, numbersOf, sentenceCase } from '../words/vessel-words.ts'
+import { quantity, words } from './schedule.ts'
+
+/** Columns that every schedule has in the same words and place. */
+export const serves = words('serves', 'Serves', 18, ({ vessel, system }) => vessel.serves || (system?.title ?? ''))
+export const fluid = words('fluid', 'Fluid', 11, ({ vessel }) => sentenceCase(vessel.fluid))
+export const construction = words('construction', 'Type', 10, ({ vessel }) => sentenceCase(vessel.construction ?? ''))
+export const count = words('quantity', 'Qty', 4, ({ vessel }) => String(vessel.quantity), 'center')
+export const method = words('method', 'Method', 10, ({ vessel }) => methodWords(vessel.method))
+export const assumptions = words('assumptions', 'Assumptions', 10, ({ vessel, result }) =>
+  numbersOf(vessel.assumptions, result),
+)
+export const selectedVolume = quantity('selected-volume', 'Selected volume', 9, 'volume', ({ vessel }) =>
+  vessel.selected === null ? null : vessel.selected.volume,
+)
+export const reliefSet = quantity('relief-set', 'Relief set', 8, 'gauge pressure', ({ system }) =>
+  system?.relief ? system.relief.set : null,
+)

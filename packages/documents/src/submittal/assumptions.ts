@@ -1,0 +1,41 @@
+import { paragraph } from '../docx/paragraph.ts'
+import { table } from '../docx/table.ts'
+import { citationWords } from '../words/source-words.ts'
+import type { Section } from './section.ts'
+
+/** The numbered register of every default that the results lean on, and of what replaced one. */
+export const assumptions: Section = ({ result, headings, captions, width }) => {
+  const { assumptions: used } = result
+  if (used.length === 0) {
+    return [headings.heading('Assumptions', 1), paragraph('Every value is given in the spec; nothing is assumed.')]
+  }
+  return [
+    headings.heading('Assumptions', 1),
+    paragraph(
+      'Each stands in where the spec is silent, or was changed there with a reason. The numbers are those of the schedules.',
+    ),
+    captions.next('Assumptions'),
+    table({
+      title: 'Assumptions',
+      description: 'Number, name, value, source and reason of every assumption, and the vessels that lean on it',
+      width,
+      strongFirst: true,
+      columns: [
+        { heading: 'No.', width: 6 },
+        { heading: 'Assumption', width: 22 },
+        { heading: 'Value', width: 12 },
+        { heading: 'Source', width: 24 },
+        { heading: 'Why', width: 24 },
+        { heading: 'Used by', width: 12 },
+      ],
+      rows: used.map((assumption) => [
+        assumption.number,
+        assumption.name,
+        assumption.overridden ? `${assumption.value} (default ${assumption.defaultValue})` : assumption.value,
+        citationWords(assumption.source, result),
+        assumption.overridden && assumption.reason ? `Changed: ${assumption.reason}` : assumption.because,
+        assumption.usedBy.join(', '),
+      ]),
+    }),
+  ]
+}

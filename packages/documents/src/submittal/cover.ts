@@ -1,0 +1,82 @@
+import { revisionWords } from '../document-options.ts'
+import { paragraph } from '../docx/paragraph.ts'
+import { STYLE } from '../docx/styles.ts'
+import { table } from '../docx/table.ts'
+import { caution } from '../words/cautions.ts'
+import type { Section } from './section.ts'
+
+const DISPOSITIONS = ['Accepted', 'Accepted as noted', 'Revise and resubmit', 'Rejected', 'For information']
+
+/** Title block, revision block and disposition block on the first page. */
+export const cover: Section = ({ result, options, width }) => {
+  const { project } = result
+  const { titleBlock, revisions, contentHash } = options
+  const sections = Object.entries(project.specSections).map(([kind, section]) => `${section} (${kind})`)
+  const codes = Object.entries(project.codes).map(([kind, code]) => `${code} (${kind})`)
+  const fields: [string, string][] = [
+    ['Project', `${project.number}, ${project.title}`],
+    ['Client', project.client],
+    ['Location', project.location],
+    ['Document', 'Submittal: vessel schedules and calculations'],
+    ['Spec sections', sections.join(', ')],
+    ['Adopted codes', codes.join(', ')],
+    ['Office', titleBlock.office],
+    ['Prepared', titleBlock.preparedBy ?? ''],
+    ['Checked', titleBlock.checkedBy ?? ''],
+    ['Approved', titleBlock.approvedBy ?? ''],
+    ['Date of issue', titleBlock.date.slice(0, 10)],
+    ['Revision', revisionWords(titleBlock.revision)],
+    ['Status', titleBlock.status],
+    ['Units', options.units],
+    ['Sized with', `Coldfill engine ${result.engine}, spec version ${result.spec}`],
+    ...(contentHash === undefined ? [] : [['Content hash (SHA-256)', contentHash] as [string, string]]),
+  ]
+  const kept = fields.filter(([label, value]) => value !== '' || ['Prepared', 'Checked', 'Approved'].includes(label))
+  return [
+    paragraph('SUBMITTAL', STYLE.zone),
+    paragraph(project.title, 'Title'),
+    paragraph('Expansion tanks and vessels: schedules and calculations', 'Subtitle'),
+    table({
+      title: 'Title block',
+      description: 'Project, office, people, date, revision and status of this submittal',
+      width,
+      strongFirst: true,
+      columns: [
+        { heading: 'Title block', width: 22 },
+        { heading: '', width: 78 },
+      ],
+      rows: kept,
+    }),
+    paragraph('REVISIONS', STYLE.zone),
+    table({
+      title: 'Revision block',
+      description: 'Issues of this submittal, newest first',
+      width,
+      columns: [
+        { heading: 'Rev', width: 12 },
+        { heading: 'Date', width: 14 },
+        { heading: 'Purpose', width: 52 },
+        { heading: 'By', width: 22 },
+      ],
+      rows:
+        revisions.length > 0
+          ? revisions.map((entry) => [entry.revision || '–', entry.date.slice(0, 10), entry.purpose, entry.by])
+          : [['–', '', 'Not issued yet', '']],
+    }),
+    paragraph('DISPOSITION', STYLE.zone),
+    table({
+      title: 'Disposition block',
+      description: 'One row an outcome; the reviewer signs the row that applies. Revise and Rejected need a reason.',
+      width,
+      rowHeight: 340,
+      columns: [
+        { heading: 'Outcome', width: 24 },
+        { heading: 'Reviewer', width: 24 },
+        { heading: 'Date', width: 14 },
+        { heading: 'Reason or remarks', width: 38 },
+      ],
+      rows: DISPOSITIONS.map((outcome) => [outcome, '', '', '']),
+    }),
+    paragraph(caution, STYLE.remark),
+  ]
+}

@@ -1,0 +1,60 @@
+import { paragraph } from '../docx/paragraph.ts'
+import { table } from '../docx/table.ts'
+import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
+import { sentenceCase, statusWords } from '../words/vessel-words.ts'
+import type { Section } from './section.ts'
+
+const counted = (count: number, one: string): string => `${count} ${one}${count === 1 ? '' : 's'}`
+
+/** Every vessel on one table, and in words how many could not be sized. */
+export const summary: Section = ({ result, options, headings, captions, width }) => {
+  const { vessels } = result
+  const tables = new Map(scheduleKinds(result).map((kind) => [kind, scheduleTable(result, kind, options.units)]))
+  /** The same digits as the schedule, with the unit behind them. */
+  const shown = (vessel: (typeof vessels)[number], key: string): string => {
+    const schedule = tables.get(vessel.kind)
+    const cell = schedule?.rows.find((row) => row.mark === vessel.mark && row.system === vessel.system)?.cells[key]
+    const unit = schedule?.columns.find((column) => column.key === key)?.unit ?? ''
+    if (!cell) return '—'
+    return cell.value === null ? cell.text : `${cell.text} ${unit}`.trimEnd()
+  }
+  const unsized = vessels.filter((vessel) => vessel.status !== 'sized')
+  const sentences = [
+    `This submittal covers ${counted(vessels.length, 'vessel')} in ${counted(result.systems.length, 'system')}.`,
+    ...(unsized.length === 0
+      ? ['Every vessel is sized.']
+      : [
+          `${counted(unsized.length, 'vessel')} ${unsized.length === 1 ? 'has' : 'have'} no size; the reason stands in the table and in the notes of the schedule.`,
+        ]),
+    'Each number is worked out under Calculations, each default is listed under Assumptions.',
+  ]
+  return [
+    headings.heading('Summary', 1),
+    paragraph(sentences.join(' ')),
+    captions.next('Vessels of the project'),
+    table({
+      title: 'Vessels of the project',
+      description: 'Mark, system served, kind, required volume, chosen vessel, precharge and state of every vessel',
+      width,
+      strongFirst: true,
+      columns: [
+        { heading: 'Mark', width: 10 },
+        { heading: 'Serves', width: 20 },
+        { heading: 'Kind', width: 20 },
+        { heading: 'Required volume', width: 12, align: 'right' },
+        { heading: 'Precharge', width: 12, align: 'right' },
+        { heading: 'State', width: 26 },
+      ],
+      rows: vessels.map((vessel) => [
+        vessel.mark,
+        vessel.serves,
+        sentenceCase(vessel.kind),
+        shown(vessel, 'required-volume'),
+        shown(vessel, 'precharge'),
+        vessel.status === 'sized' || !vessel.reason
+          ? statusWords[vessel.status]
+          : `${statusWords[vessel.status]}: ${vessel.reason}`,
+      ]),
+    }),
+  ]
+}
