@@ -128,7 +128,9 @@ export interface ProjectResult {
   readonly assumptions: readonly UsedAssumption[]
   readonly findings: readonly Finding[]
   /** Titles of the sources cited anywhere in this result, by id. */
-  readonly sources: Readonly<Record<string, { readonly title: string; readonly edition: string }>>
+  readonly sources: Readonly<
+    Record<string, { readonly title: string; readonly edition: string; readonly publisher: string }>
+  >
 }
 
 export type { Citation, Origin, TraceSection }

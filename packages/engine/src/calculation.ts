@@ -1,0 +1,126 @@
+import { compile, formulaTree, type FormulaFunction } from '@coldfill/formula'
+import type { Kind } from '@coldfill/units'
+import type { Method, MethodCheck, ValidityRange } from './method.ts'
+import type { Origin, TraceEntry, TraceSection } from './trace.ts'
+
+/** A value for an input of a method, in the SI unit of its kind, with where it comes from. */
+export interface GivenValue {
+  readonly value: number
+  readonly origin: Origin
+  /** As the person wrote it. */
+  readonly authored?: string
+}
+
+export interface RunOutcome {
+  readonly failed: readonly MethodCheck[]
+  readonly warnings: readonly ValidityRange[]
+  /** Symbol of the first step without a finite value, where a check did not already say why. */
+  readonly notFinite: string | null
+}
+
+/**
+ * One vessel's calculation: methods are run into it one after the other, and it keeps every input and step in order.
+ * A symbol means one thing in a calculation; giving it twice is a programmer's mistake and throws.
+ */
+export class Calculation {
+  readonly mark: string
+  readonly functions: Readonly<Record<string, FormulaFunction>>
+  private readonly numbers: Record<string, number> = {}
+  private readonly byId = new Map<string, TraceEntry>()
+  private readonly bySymbol = new Map<string, TraceEntry>()
+  private readonly parts: { title: string; entries: TraceEntry[] }[] = []
+
+  constructor(mark: string, functions: Readonly<Record<string, FormulaFunction>>) {
+    this.mark = mark
+    this.functions = functions
+  }
+
+  has(symbol: string): boolean {
+    return this.bySymbol.has(symbol)
+  }
+
+  /** Value in SI units. An unknown symbol throws. */
+  value(symbol: string): number {
+    const value = this.numbers[symbol]
+    if (value === undefined) throw new Error(`${this.mark}: no symbol ${symbol} in the calculation yet`)
+    return value
+  }
+
+  entry(symbol: string): TraceEntry {
+    const entry = this.bySymbol.get(symbol)
+    if (!entry) throw new Error(`${this.mark}: no symbol ${symbol} in the calculation yet`)
+    return entry
+  }
+
+  get values(): Readonly<Record<string, number>> {
+    return this.numbers
+  }
+
+  get trace(): readonly TraceSection[] {
+    return this.parts
+  }
+
+  /** Opens a section; inputs and steps that follow belong to it. */
+  section(title: string): void {
+    if (this.parts.at(-1)?.title !== title) this.parts.push({ title, entries: [] })
+  }
+
+  private put(entry: TraceEntry): void {
+    if (this.bySymbol.has(entry.symbol)) throw new Error(`${this.mark}: symbol ${entry.symbol} is given twice`)
+    const part = this.parts.at(-1)
+    if (!part) throw new Error(`${this.mark}: no section is open`)
+    part.entries.push(entry)
+    this.bySymbol.set(entry.symbol, entry)
+    this.byId.set(entry.id, entry)
+    this.numbers[entry.symbol] = entry.value
+  }
+
+  private idFor(name: string): string {
+    const base = `${this.mark}/${name
+      .toLowerCase()
+      .replace(/[^a-z0-9]+/g, '-')
+      .replace(/^-|-$/g, '')}`
+    let id = base
+    for (let n = 2; this.byId.has(id); n += 1) id = `${base}-${n}`
+    return id
+  }
+
+  input(symbol: string, kind: Kind, name: string, given: GivenValue): void {
+    const { value, origin, authored } = given
+    const entry = { entry: 'input', id: this.idFor(name), symbol, name, kind, value, origin } as const
+    this.put(authored === undefined ? entry : { ...entry, authored })
+  }
+
+  /**
+   * Gives the inputs that the calculation does not have yet, evaluates the steps in order and then the checks.
+   * A step whose value was `stated` is an input instead (a worked example that states a rounded property).
+   */
+  run(
+    method: Method,
+    given: Readonly<Record<string, GivenValue>>,
+    stated: Readonly<Record<string, GivenValue>> = {},
+  ): RunOutcome {
+    for (const [symbol, input] of Object.entries(method.inputs)) {
+      if (this.has(symbol)) continue
+      const value = given[symbol]
+      if (!value) throw new Error(`${method.id}: input ${symbol} is not given`)
+      this.input(symbol, input.kind, input.name, value)
+    }
+    let notFinite: string | null = null
+    for (const [symbol, step] of Object.entries(method.steps)) {
+      const known = stated[symbol]
+      if (known) {
+        this.input(symbol, step.kind, step.name, known)
+        continue
+      }
+      const value = compile(formulaTree(step.formula), this.functions)(this.numbers)
+      if (!Number.isFinite(value)) notFinite ??= symbol
+      const { kind, name, formula, source } = step
+      this.put({ entry: 'step', id: this.idFor(name), symbol, name, kind, value, formula, source, method: method.id })
+    }
+    const holds = (condition: string) => compile(formulaTree(condition), this.functions)(this.numbers) === 1
+    const failed = method.checks.filter((check) => !holds(check.condition))
+    const warnings = (method.validity ?? []).filter((range) => !holds(range.condition))
+    return { failed, warnings, notFinite: failed.length > 0 ? null : notFinite }
+  }
+}

@@ -1,0 +1,53 @@
+import type { Method } from '../method.ts'
+import { site } from '../sections/site.ts'
+import { ashraeDiaphragm, ashraeDiaphragmOtherCharge } from './expansion-tank/ashrae-diaphragm.ts'
+import { ashraeOpen } from './expansion-tank/ashrae-open.ts'
+import { ashraePlainSteel } from './expansion-tank/ashrae-plain-steel.ts'
+import { bs7074Bladder, bs7074Diaphragm, checkBackBs7074 } from './expansion-tank/bs-7074.ts'
+import { checkBackDiaphragm, checkBackOtherCharge, checkBackPlainSteel } from './expansion-tank/check-back.ts'
+import { codeMinimumDiaphragm, codeMinimumPlainSteel } from './expansion-tank/code-minimum.ts'
+import { din4807 } from './expansion-tank/din-4807.ts'
+import { checkBackEuropean, en12828Glycol, en12828Water } from './expansion-tank/en-12828.ts'
+import { checkBackUne, une100155Glycol, une100155Water } from './expansion-tank/une-100155.ts'
+import { din4807Part5Vessel } from './thermal-expansion-tank/din-4807-5.ts'
+import { ashrae, ashraeMaterials, aspe, aspeMaterials } from './thermal-expansion-tank/gas-law.ts'
+
+/** Every method, the more particular before the more general of one name: the first that fits is used. */
+const all: readonly Method[] = [
+  site,
+  ashraeDiaphragmOtherCharge,
+  ashraeDiaphragm,
+  ashraePlainSteel,
+  ashraeOpen,
+  en12828Glycol,
+  en12828Water,
+  din4807,
+  une100155Glycol,
+  une100155Water,
+  bs7074Diaphragm,
+  bs7074Bladder,
+  codeMinimumDiaphragm,
+  codeMinimumPlainSteel,
+  aspeMaterials,
+  aspe,
+  ashraeMaterials,
+  ashrae,
+  din4807Part5Vessel,
+  checkBackDiaphragm,
+  checkBackOtherCharge,
+  checkBackPlainSteel,
+  checkBackEuropean,
+  checkBackUne,
+  checkBackBs7074,
+]
+
+export const methods: Readonly<Record<string, Method>> = Object.fromEntries(all.map((method) => [method.id, method]))
+
+/** Methods that size a vessel of a kind, by the name a spec gives them, in order of choice. */
+export const methodsFor = (kind: string, method: string): readonly Method[] =>
+  all.filter((candidate) => candidate.vessel?.kind === kind && candidate.vessel.method === method)
+
+/** Names of the methods for a kind, first the default. */
+export const methodNames = (kind: string): readonly string[] => [
+  ...new Set(all.filter((m) => m.vessel?.kind === kind).map((m) => m.vessel?.method ?? '')),
+]

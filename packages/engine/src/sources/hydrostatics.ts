@@ -1,0 +1,9 @@
+import type { Source } from '../citation.ts'
+
+export const hydrostatics: Source = {
+  id: 'hydrostatics',
+  title: 'Elementary hydrostatics',
+  publisher: 'none',
+  edition: 'none',
+  year: null,
+}

@@ -1,0 +1,57 @@
+import type { Source } from '../citation.ts'
+import { ashraeFundamentals } from './ashrae-fundamentals.ts'
+import { ashraeHvacSe } from './ashrae-hvac-se.ts'
+import { ashraeServiceWater } from './ashrae-service-water.ts'
+import { asmeB319 } from './asme-b31-9.ts'
+import { aspeDomesticHotWater } from './aspe-domestic-hot-water.ts'
+import { aspeExpansion } from './aspe-expansion.ts'
+import { boyle } from './boyle.ts'
+import { bs7074 } from './bs-7074.ts'
+import { bs7074Sheet } from './bs-7074-sheet.ts'
+import { commonPractice } from './common-practice.ts'
+import { din4807Part2 } from './din-4807-2.ts'
+import { din4807Part5 } from './din-4807-5.ts'
+import { en12828 } from './en-12828.ts'
+import { frenchHeatingMethod } from './french-heating-method.ts'
+import { geometry } from './geometry.ts'
+import { hydrostatics } from './hydrostatics.ts'
+import { imc } from './imc.ts'
+import { ipc } from './ipc.ts'
+import { michiganR4084272 } from './michigan-r408-4272.ts'
+import { raccoltaR } from './raccolta-r.ts'
+import { umc } from './umc.ts'
+import { une100155 } from './une-100155.ts'
+import { uneWorkedSheet } from './une-worked-sheet.ts'
+import { upc } from './upc.ts'
+import { verificationEvaluation } from './verification-evaluation.ts'
+
+const all: readonly Source[] = [
+  ashraeFundamentals,
+  ashraeHvacSe,
+  ashraeServiceWater,
+  asmeB319,
+  aspeDomesticHotWater,
+  aspeExpansion,
+  boyle,
+  bs7074,
+  bs7074Sheet,
+  commonPractice,
+  din4807Part2,
+  din4807Part5,
+  en12828,
+  frenchHeatingMethod,
+  geometry,
+  hydrostatics,
+  imc,
+  ipc,
+  michiganR4084272,
+  raccoltaR,
+  umc,
+  une100155,
+  uneWorkedSheet,
+  upc,
+  verificationEvaluation,
+]
+
+/** Every publication the program cites, by id. */
+export const sources: Readonly<Record<string, Source>> = Object.fromEntries(all.map((source) => [source.id, source]))

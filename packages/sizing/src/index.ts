@@ -1,0 +1,7 @@
+export * from './result.ts'
+export { engineVersion } from './engine-version.ts'
+export { engineeringCodes } from './engineering-codes.ts'
+export { resultJson } from './result-json.ts'
+export { sizeProject } from './size-project.ts'
+export { sizeSpec } from './size-spec.ts'
+export { vocabulary } from './vocabulary.ts'

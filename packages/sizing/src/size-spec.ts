@@ -1,0 +1,33 @@
+import { readSpec } from '@coldfill/spec'
+import { engineVersion } from './engine-version.ts'
+import { inReadingOrder } from './collect-findings.ts'
+import type { ProjectResult } from './result.ts'
+import { sizeProject } from './size-project.ts'
+import { vocabulary } from './vocabulary.ts'
+
+const nothing = (findings: ProjectResult['findings']): ProjectResult => ({
+  engine: engineVersion,
+  spec: 1,
+  project: {
+    number: '',
+    title: '',
+    client: '',
+    location: '',
+    units: 'US',
+    elevation: 0,
+    atmosphere: 101325,
+    codes: {},
+    specSections: {},
+  },
+  systems: [],
+  vessels: [],
+  assumptions: [],
+  findings,
+  sources: {},
+})
+
+/** Reads a spec and sizes its vessels. For any text there is a result; what is wrong with the text is among its findings. */
+export const sizeSpec = (text: string): ProjectResult => {
+  const { model, findings, acceptances } = readSpec(text, vocabulary)
+  return model ? sizeProject(model, findings, acceptances) : nothing(inReadingOrder(findings))
+}

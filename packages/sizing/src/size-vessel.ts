@@ -1,0 +1,201 @@
+import { Calculation, type Fluid, type Method, methodNames, type RunOutcome } from '@coldfill/engine'
+import type { Finding, SpecModel, SystemModel, VesselModel } from '@coldfill/spec'
+import { chooseMethod } from './choose-method.ts'
+import type { AssumptionRegister } from './assumption-register.ts'
+import { bindInputs } from './bind-inputs.ts'
+import { runSection } from './calculate-sections.ts'
+import { checkVessel } from './checks/check-vessel.ts'
+import type { ResultValue, VesselResult, VesselStatus } from './result.ts'
+import { report, type VesselContext } from './vessel-context.ts'
+
+interface Outcome {
+  readonly status: VesselStatus
+  readonly reason?: string
+}
+
+const sized: Outcome = { status: 'sized' }
+
+/** What stands in the way after a method or section ran: the first failed check, or a step without a value. */
+const obstacle = (context: VesselContext, outcome: RunOutcome): Outcome | null => {
+  const [check] = outcome.failed
+  if (check) {
+    report(context, check.code as never, { message: `${context.vessel.mark}: ${check.message}`, hint: check.hint })
+    return { status: 'infeasible', reason: check.message }
+  }
+  if (outcome.notFinite !== null) {
+    const name = context.calculation.entry(outcome.notFinite).name
+    const message = `the ${name} has no finite value with these inputs.`
+    report(context, 'CF-E005', {
+      message: `${context.vessel.mark}: ${message}`,
+      hint: 'Check the temperatures and pressures.',
+    })
+    return { status: 'infeasible', reason: message }
+  }
+  for (const range of outcome.warnings) {
+    report(context, 'CF-E013', {
+      message: `${context.vessel.mark}: ${range.message}`,
+      hint: 'Size by another method, or accept the finding with a reason.',
+    })
+  }
+  return null
+}
+
+const blockedByMissing = (context: VesselContext): Outcome | null => {
+  const [first] = context.missing
+  if (first === undefined) return null
+  const message = `${context.vessel.mark} needs ${first}.`
+  report(context, 'CF-E001', { message, hint: 'Add the key that is named.' })
+  return { status: 'blocked', reason: message }
+}
+
+const outsideFluid = (context: VesselContext): Outcome | null => {
+  const { fluid, system, vessel } = context
+  for (const located of Object.values(system.temperatures)) {
+    if (!located) continue
+    const kelvin = located.value.value
+    if (kelvin >= fluid.validity.least && kelvin <= fluid.validity.most) continue
+    const celsius = (value: number) => `${Math.round((value - 273.15) * 10) / 10} °C`
+    const message = `${located.value.authored ?? celsius(kelvin)} is outside the range of the data for ${fluid.label}, ${celsius(fluid.validity.least)} to ${celsius(fluid.validity.most)}.`
+    const hint =
+      fluid.base === 'water'
+        ? 'Check the temperature; water data hold from the freezing point up.'
+        : 'Raise the strength of the solution, or check the temperature.'
+    report(context, 'CF-E003', { message, hint, at: located })
+    return { status: 'blocked', reason: `${vessel.mark}: ${message}` }
+  }
+  return null
+}
+
+const run = (context: VesselContext, method: Method, atmosphere: number): Outcome => {
+  const outside = outsideFluid(context)
+  if (outside) return outside
+  for (const section of method.sections ?? []) {
+    const outcome = runSection(context, section, atmosphere)
+    const stop = blockedByMissing(context) ?? (outcome ? obstacle(context, outcome) : null)
+    if (stop) return stop
+  }
+  for (const id of method.assumes ?? []) context.register.words(id, context.reference)
+  context.calculation.section('Vessel')
+  const given = bindInputs(context, method, atmosphere)
+  const missing = blockedByMissing(context)
+  if (missing) return missing
+  return obstacle(context, context.calculation.run(method, given)) ?? sized
+}
+
+const resultsOf = (context: VesselContext, method: Method): Record<string, ResultValue> => {
+  const { calculation } = context
+  const results: Record<string, ResultValue> = {}
+  for (const [name, symbol] of Object.entries(method.results)) {
+    if (!calculation.has(symbol)) continue
+    const entry = calculation.entry(symbol)
+    results[name] = { kind: entry.kind, value: entry.value, name: entry.name, entry: entry.id }
+  }
+  return results
+}
+
+const shareEqually = (context: VesselContext, method: Method, quantity: number): Record<string, ResultValue> => {
+  const answer = method.results['required-volume']
+  if (quantity <= 1 || answer === undefined) return {}
+  const { calculation } = context
+  calculation.section('Vessel')
+  const name = 'required volume of each vessel'
+  calculation.input('N_v', 'count', 'number of equal vessels', {
+    value: quantity,
+    origin: { from: 'spec', path: `${context.vessel.path}.quantity` },
+  })
+  calculation.run(
+    {
+      id: 'shared-equally',
+      revision: 1,
+      title: 'Equal vessels',
+      inputs: {},
+      steps: {
+        V_each: {
+          kind: 'volume',
+          name,
+          formula: `${answer} / N_v`,
+          source: { source: 'geometry', locator: 'equal shares' },
+        },
+      },
+      checks: [],
+      results: {},
+      basis: '',
+      examples: [],
+    },
+    {},
+  )
+  const entry = calculation.entry('V_each')
+  return { 'required-volume-each': { kind: 'volume', value: entry.value, name, entry: entry.id } }
+}
+
+export interface SizingInput {
+  readonly spec: SpecModel
+  readonly system: SystemModel
+  readonly vessel: VesselModel
+  readonly fluid: Fluid
+  readonly register: AssumptionRegister
+  /** Pa abs */
+  readonly atmosphere: number
+}
+
+/** Sizes one vessel. An infeasible or blocked vessel is a result with its reason; findings come beside it. */
+export const sizeVessel = (input: SizingInput): { result: VesselResult; findings: readonly Finding[] } => {
+  const { spec, system, vessel, fluid, register, atmosphere } = input
+  const reference = `${system.id}/${vessel.mark}`
+  const context: VesselContext = {
+    spec,
+    system,
+    vessel,
+    fluid,
+    register,
+    reference,
+    calculation: new Calculation(vessel.mark, fluid.functions),
+    missing: [],
+    findings: [],
+  }
+  const choice = chooseMethod(context)
+  const quantity = vessel.fields.quantity?.value ?? 1
+  const base = {
+    system: system.id,
+    mark: vessel.mark,
+    path: vessel.path,
+    kind: vessel.kind,
+    method: choice.name,
+    methodId: choice.method?.id ?? '',
+    methodTitle: choice.method?.title ?? '',
+    methodRevision: choice.method?.revision ?? 0,
+    ...(choice.construction === undefined ? {} : { construction: choice.construction }),
+    quantity,
+    serves: vessel.fields.serves?.value ?? system.title?.value ?? system.id,
+    service: system.service?.value ?? '',
+    fluid: fluid.label,
+    selected: null,
+    headroom: [],
+    notes: vessel.fields.note ? [vessel.fields.note.value] : [],
+  }
+  let outcome: Outcome
+  let results: Record<string, ResultValue> = {}
+  if (!vessel.sound || !system.sound) {
+    const whose = vessel.sound ? 'its system' : 'its inputs'
+    outcome = { status: 'blocked', reason: `An error in ${whose} has to be mended first; see the findings.` }
+  } else if (!choice.method) {
+    const message = `${vessel.mark}: the method "${choice.name}" has no form for this ${choice.construction ?? 'vessel'}.`
+    report(context, 'CF-E004', { message, hint: `Choose one of: ${methodNames(vessel.kind).join(', ')}.` })
+    outcome = { status: 'blocked', reason: message }
+  } else {
+    outcome = run(context, choice.method, atmosphere)
+    if (outcome.status === 'sized') {
+      results = { ...resultsOf(context, choice.method), ...shareEqually(context, choice.method, quantity) }
+      results = { ...results, ...checkVessel(context, choice.method, results, atmosphere) }
+    }
+  }
+  const result: VesselResult = {
+    ...base,
+    status: outcome.status,
+    ...(outcome.reason === undefined ? {} : { reason: outcome.reason }),
+    results,
+    trace: context.calculation.trace.filter((section) => section.entries.length > 0),
+    assumptions: register.usedBy(reference),
+  }
+  return { result, findings: context.findings }
+}

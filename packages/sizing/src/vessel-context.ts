@@ -1,0 +1,57 @@
+import type { Calculation, Fluid, GivenValue } from '@coldfill/engine'
+import type { Finding, Located, Range, Severity, SpecModel, SystemModel, VesselModel } from '@coldfill/spec'
+import type { Quantity } from '@coldfill/units'
+import type { AssumptionRegister } from './assumption-register.ts'
+import { engineeringCodes, type EngineeringCode } from './engineering-codes.ts'
+
+/** What sizing one vessel has at hand. */
+export interface VesselContext {
+  readonly spec: SpecModel
+  readonly system: SystemModel
+  readonly vessel: VesselModel
+  readonly fluid: Fluid
+  readonly calculation: Calculation
+  readonly register: AssumptionRegister
+  /** `HWS/ET-1`, as assumptions name the vessels that lean on them. */
+  readonly reference: string
+  /** Words for inputs that are missing; the vessel is blocked when there is one. */
+  readonly missing: string[]
+  readonly findings: Finding[]
+}
+
+/** A value written in the spec as an input of a calculation. */
+export const fromSpec = (located: Located<Quantity>): GivenValue => {
+  const { value, authored } = located.value
+  const given = { value, origin: { from: 'spec', path: located.path } } as const
+  return authored === undefined ? given : { ...given, authored }
+}
+
+/** A plain number written in the spec. */
+export const numberFromSpec = (located: Located<number>): GivenValue => ({
+  value: located.value,
+  origin: { from: 'spec', path: located.path },
+  authored: String(located.value),
+})
+
+interface FindingDetails {
+  readonly message: string
+  readonly hint: string
+  readonly at?: { readonly path: string; readonly range: Range } | undefined
+  readonly severity?: Severity
+  readonly related?: Finding['related']
+}
+
+/** Adds an engineering finding; without a place of its own it stands at the mark of the vessel. */
+export const report = (context: VesselContext, code: EngineeringCode, details: FindingDetails): void => {
+  const at = details.at ?? context.vessel
+  context.findings.push({
+    code,
+    severity: details.severity ?? engineeringCodes[code].severity,
+    message: details.message,
+    hint: details.hint,
+    path: at.path,
+    range: at.range,
+    related: details.related ?? [],
+    fixes: [],
+  })
+}
