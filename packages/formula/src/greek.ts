@@ -17,6 +17,6 @@ export const greekLetter = (name: string): string => letterOf.get(name) ?? name
 export const spelledOut = (symbol: string): string => {
   const name = nameOf.get(symbol.charAt(0))
   if (name === undefined) return symbol
-  const rest = symbol.slice(1)
+  const rest = spelledOut(symbol.slice(1))
   return rest === '' || rest.startsWith('_') ? name + rest : `${name}_${rest}`
 }
