@@ -14,7 +14,7 @@ export const Flag = ({ number, state = 'open' }: { readonly number: number | str
 
 /** Revision triangle beside what changed with a revision. */
 export const RevisionTriangle = ({ letter }: { readonly letter: string }) => (
-  <svg width="18" height="16" viewBox="0 0 18 16" role="img" aria-label={`changed since revision ${letter || 'first issue'}`} className="keeps-colour inline-block shrink-0 align-middle">
+  <svg width="18" height="16" viewBox="0 0 18 16" role="img" aria-label={letter === "" ? "changed since the last issue" : `changed in revision ${letter}`} className="keeps-colour inline-block shrink-0 align-middle">
     <path d="M9 1.2 17 14.8 1 14.8Z" className="fill-none stroke-redline" strokeWidth="1.6" />
     <text x="9" y="13" textAnchor="middle" fontSize="9" className="fill-redline font-mono font-semibold">
       {letter || '–'}

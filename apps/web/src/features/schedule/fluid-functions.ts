@@ -1,0 +1,19 @@
+import type { FormulaFunction } from '@coldfill/formula'
+import type { Kind } from '@coldfill/units'
+
+/** A fluid property as it is drawn. Its values come computed with the trace; here it is never evaluated. */
+const drawn = (name: string, result: Kind, words: string): FormulaFunction => ({
+  name,
+  parameters: ['temperature'],
+  result,
+  words,
+  symbol: name,
+  evaluate: () => Number.NaN,
+  partials: () => [Number.NaN],
+})
+
+export const fluidFunctions: Readonly<Record<string, FormulaFunction>> = {
+  v_sat: drawn('v_sat', 'specific volume', 'specific volume of the saturated liquid at'),
+  rho: drawn('rho', 'density', 'density of the saturated liquid at'),
+  c_p: drawn('c_p', 'specific heat', 'specific heat of the liquid at'),
+}

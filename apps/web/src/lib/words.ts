@@ -1,0 +1,20 @@
+import type { Outcome, ProjectState, RevisionState } from '@coldfill/contract'
+import { capital } from './format.ts'
+
+const states: Partial<Record<ProjectState | RevisionState, string>> = {
+  revise: 'Revise and resubmit',
+  'in review': 'Issued for review',
+}
+
+/** The word of a state as it stands in the title strip and in tables. */
+export const stateWord = (state: ProjectState | RevisionState): string => states[state] ?? capital(state)
+
+/** Good, bad or neither: never shown by colour alone, the word stands beside it. */
+export const stateTone = (state: ProjectState | RevisionState): 'good' | 'held' | 'plain' => {
+  if (state === 'accepted' || state === 'issued for construction') return 'good'
+  if (state === 'revise' || state === 'rejected' || state === 'withdrawn') return 'held'
+  return 'plain'
+}
+
+export const outcomeTone = (outcome: Outcome): 'good' | 'held' | 'plain' =>
+  outcome === 'accepted' || outcome === 'accepted_noted' ? 'good' : outcome === 'information' ? 'plain' : 'held'
