@@ -11,3 +11,7 @@ export { closedPressures, type ClosedPressureFacts, type PressureRule } from './
 export { domesticPressures, type DomesticPressureFacts } from './sections/domestic-pressures.ts'
 export { site } from './sections/site.ts'
 export { sources } from './sources/index.ts'
+export * from './fluids/index.ts'
+export { pipeFamilies, pipeFamilyAliases, type PipeFamily, type PipeRow } from './pipes/families.ts'
+export { findPipe, findPipeFamily, type PipeSearch } from './pipes/find-pipe.ts'
+export { emitterClasses } from './assumptions/emitters.ts'

@@ -1,5 +1,6 @@
 import type { Assumption } from '../assumption.ts'
 import { averageTemperature } from './average-temperature.ts'
+import { emitterClasses } from './emitters.ts'
 import { copperExpansion, domesticMaterial, steelExpansion, systemMaterial } from './material.ts'
 import {
   pressureTankPrecharge,
@@ -32,6 +33,7 @@ const all: readonly Assumption[] = [
   steelExpansion,
   copperExpansion,
   averageTemperature,
+  ...Object.values(emitterClasses),
 ]
 
 /** Every documented default by id. */

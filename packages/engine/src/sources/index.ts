@@ -18,6 +18,7 @@ import { hydrostatics } from './hydrostatics.ts'
 import { imc } from './imc.ts'
 import { ipc } from './ipc.ts'
 import { michiganR4084272 } from './michigan-r408-4272.ts'
+import { propertySources } from './properties.ts'
 import { raccoltaR } from './raccolta-r.ts'
 import { umc } from './umc.ts'
 import { une100155 } from './une-100155.ts'
@@ -51,6 +52,7 @@ const all: readonly Source[] = [
   uneWorkedSheet,
   upc,
   verificationEvaluation,
+  ...propertySources,
 ]
 
 /** Every publication the program cites, by id. */
