@@ -9,6 +9,7 @@ import { boyle } from './boyle.ts'
 import { bs7074 } from './bs-7074.ts'
 import { bs7074Sheet } from './bs-7074-sheet.ts'
 import { commonPractice } from './common-practice.ts'
+import { din4708Part2 } from './din-4708-2.ts'
 import { din4807Part2 } from './din-4807-2.ts'
 import { din4807Part5 } from './din-4807-5.ts'
 import { en12828 } from './en-12828.ts'
@@ -37,6 +38,7 @@ const all: readonly Source[] = [
   bs7074,
   bs7074Sheet,
   commonPractice,
+  din4708Part2,
   din4807Part2,
   din4807Part5,
   en12828,
