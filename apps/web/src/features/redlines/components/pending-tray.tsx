@@ -1,7 +1,7 @@
 import type { Redline } from '@coldfill/contract'
 import { Link } from 'react-router-dom'
 import { buttonClass } from '#components/ui/button.tsx'
-import { paths, withQuery } from '#config/paths.ts'
+import { paths } from '#config/paths.ts'
 import { plural } from '#lib/format.ts'
 
 /** On every sheet while redlines wait to be sent, so that none is forgotten. */
@@ -13,8 +13,8 @@ export const PendingTray = ({ project, redlines }: { readonly project: string; r
       <p>
         <strong className="font-semibold">{plural(pending.length, 'redline')} pending.</strong> Nobody else sees {pending.length === 1 ? 'it' : 'them'} until you send the review.
       </p>
-      <Link to={withQuery(paths.redlines(project), { send: 1 })} className={buttonClass('plain', true)}>
-        Go to Send review
+      <Link to={paths.redlines(project)} className={buttonClass('plain', true)}>
+        See them
       </Link>
     </div>
   )

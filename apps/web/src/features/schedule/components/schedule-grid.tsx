@@ -6,7 +6,8 @@ import type { Row, Schedule } from '../schedule-table.ts'
 
 /** What stands on a cell beside its value: flags of redlines, the value before, a cloud. */
 export interface CellMarks {
-  readonly before?: ReactNode
+  /** In place of the value: what was and what is. */
+  readonly value?: ReactNode
   readonly after?: ReactNode
   readonly around?: ReactNode
 }
@@ -136,8 +137,7 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                     className={`relative border-b border-b-hair px-2.5 py-1.5 align-top outline-offset-[-3px] ${ground} ${column?.figures ? 'figures text-right whitespace-nowrap' : 'min-w-20'} ${column?.mono ? 'font-mono' : ''}`}
                   >
                     {own.around}
-                    {own.before}
-                    {cell.getValue() as string}
+                    {own.value ?? (cell.getValue() as string)}
                     {own.after ? <span className="ml-1.5 inline-flex gap-1 align-middle">{own.after}</span> : null}
                   </td>
                 )
