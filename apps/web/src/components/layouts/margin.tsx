@@ -2,7 +2,7 @@ import type { ReactNode } from 'react'
 import { createStore, useStore } from '#lib/store.ts'
 
 /** Whether the margin is drawn out; kept while the page is open. */
-export const marginOpen = createStore(true)
+export const marginOpen = createStore(typeof window === 'undefined' || window.matchMedia('(width >= 1100px)').matches)
 
 /** The drawer at the right: trace, redlines, help of the focused thing. A sheet from below on narrow screens. */
 export const Margin = ({ title, children }: { readonly title: string; readonly children: ReactNode }) => {

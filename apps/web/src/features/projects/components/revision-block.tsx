@@ -1,0 +1,53 @@
+import { OUTCOME_LABELS, revisionSegment, type Project } from '@coldfill/contract'
+import { Link } from 'react-router-dom'
+import { Cell, HeadCell, RowHead, RuledTable } from '#components/ui/ruled-table.tsx'
+import { RevisionTriangle } from '#components/ui/review-marks.tsx'
+import { StateWord } from '#components/ui/state-word.tsx'
+import { paths, withQuery } from '#config/paths.ts'
+import { day } from '#lib/format.ts'
+
+/** Revision block of a title block: newest first. */
+export const RevisionBlock = ({ project }: { readonly project: Project }) => (
+  <RuledTable
+    caption="Revisions"
+    className="min-w-150"
+    head={
+      <tr>
+        <HeadCell>Rev</HeadCell>
+        <HeadCell>Date</HeadCell>
+        <HeadCell>Note</HeadCell>
+        <HeadCell>Status</HeadCell>
+        <HeadCell>Prepared</HeadCell>
+        <HeadCell>Disposition</HeadCell>
+      </tr>
+    }
+  >
+    {project.revisions.map((revision) => (
+      <tr key={revision.id}>
+        <RowHead className="font-mono">
+          <Link to={withQuery(paths.schedule(project.number), { rev: revisionSegment(revision.label) })} className="inline-flex items-center gap-1.5">
+            {revision.label === '' ? 'First' : <RevisionTriangle letter={revision.label} />}
+          </Link>
+        </RowHead>
+        <Cell figures={false} className="figures whitespace-nowrap">
+          {day(revision.issuedAt)}
+        </Cell>
+        <Cell className="max-w-[40ch]">{revision.note || '—'}</Cell>
+        <Cell>
+          <StateWord state={revision.state} />
+        </Cell>
+        <Cell>{revision.issuedBy.name}</Cell>
+        <Cell>
+          {revision.dispositions.length === 0
+            ? '—'
+            : revision.dispositions.map((disposition) => (
+                <span key={disposition.reviewer.id} className="block">
+                  {OUTCOME_LABELS[disposition.outcome]}, {disposition.reviewer.initials}
+                  {disposition.stale ? ', stale' : ''}
+                </span>
+              ))}
+        </Cell>
+      </tr>
+    ))}
+  </RuledTable>
+)
