@@ -83,6 +83,8 @@ export interface Method {
   readonly vessel?: {
     readonly kind: string
     readonly method: string
+    /** Where the spec names no method, this one is meant when all these keys of the vessel are written. */
+    readonly impliedBy?: readonly string[]
     /** The first method of the kind and name whose conditions hold is used. */
     readonly when?: {
       readonly construction?: readonly string[]

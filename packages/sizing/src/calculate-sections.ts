@@ -30,8 +30,9 @@ const lineFrom = (context: VesselContext, line: ContentLine, index: number): Con
       return line.material ? { ...read, material: line.material } : read
     }
     case 'pipe': {
-      const row = findPipe(line.family, line.size)
-      if (!('insideDiameter' in row)) return null
+      const search = findPipe(line.family, line.size)
+      if (!search.ok) return null
+      const { row } = search
       const insideDiameter = { value: row.insideDiameter, origin: { from: 'table', citation: row.citation } } as const
       return { holds: 'pipe', label: `${line.family}, ${line.size}`, insideDiameter, length: fromSpec(line.length) }
     }

@@ -29,12 +29,21 @@ const fits = (context: VesselContext, method: Method, construction: string | und
   return true
 }
 
+/** The method whose keys the vessel has, where it names none. */
+const impliedMethod = ({ vessel }: VesselContext): string | undefined => {
+  const fields: Readonly<Record<string, unknown>> = vessel.fields
+  return methodNames(vessel.kind).find((name) =>
+    methodsFor(vessel.kind, name).some((method) => method.vessel?.impliedBy?.every((key) => fields[key] !== undefined)),
+  )
+}
+
 /** The method that sizes the vessel: as written, or the documented default of its kind. */
 export const chooseMethod = (context: VesselContext): MethodChoice => {
   const { vessel, register, reference } = context
   const byDefault = assumptions[assumptionForMethod(vessel.kind)]
   const name =
     written(vessel.fields, 'method') ??
+    impliedMethod(context) ??
     (byDefault ? register.words(byDefault.id, reference) : (methodNames(vessel.kind)[0] ?? ''))
   const candidates = methodsFor(vessel.kind, name)
   const asksConstruction = candidates.some((candidate) => candidate.vessel?.when?.construction)

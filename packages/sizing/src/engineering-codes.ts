@@ -131,6 +131,22 @@ export const engineeringCodes = {
     'Check the supply and the regulator setting.',
     'The method of the vessel.',
   ),
+  'CF-E024': code(
+    'error',
+    'Cut-out not above cut-in',
+    'The pump stops at or below the pressure at which it starts.',
+    'The tank would give no water.',
+    'Raise `cut-out` or lower `cut-in`.',
+    'Law of Boyle and Mariotte.',
+  ),
+  'CF-E025': code(
+    'error',
+    'Precharge above cut-in',
+    'The gas charge of a pressure tank is above the pressure at which the pump starts.',
+    'The tank is empty before the pump starts, and the pressure collapses.',
+    'Charge the tank to about 2 psi below cut-in.',
+    'Common practice, no source.',
+  ),
   'CF-E030': code(
     'error',
     'The chosen vessel is too small',

@@ -1,6 +1,7 @@
 import type { Assumption } from '../assumption.ts'
 import { averageTemperature } from './average-temperature.ts'
 import { emitterClasses } from './emitters.ts'
+import { bufferCredit, bufferLoadMinimum, bufferVolumePerTon } from './buffer.ts'
 import { copperExpansion, domesticMaterial, steelExpansion, systemMaterial } from './material.ts'
 import {
   pressureTankPrecharge,
@@ -33,6 +34,9 @@ const all: readonly Assumption[] = [
   steelExpansion,
   copperExpansion,
   averageTemperature,
+  bufferLoadMinimum,
+  bufferCredit,
+  bufferVolumePerTon,
   ...Object.values(emitterClasses),
 ]
 

@@ -1,5 +1,9 @@
 import type { Method } from '../method.ts'
 import { site } from '../sections/site.ts'
+import { bufferDefrost } from './buffer-tank/defrost.ts'
+import { bufferEn3035 } from './buffer-tank/en-303-5.ts'
+import { bufferRunTime } from './buffer-tank/run-time.ts'
+import { bufferVolumePerTon } from './buffer-tank/volume-per-ton.ts'
 import { ashraeDiaphragm, ashraeDiaphragmOtherCharge } from './expansion-tank/ashrae-diaphragm.ts'
 import { ashraeOpen } from './expansion-tank/ashrae-open.ts'
 import { ashraePlainSteel } from './expansion-tank/ashrae-plain-steel.ts'
@@ -9,6 +13,7 @@ import { codeMinimumDiaphragm, codeMinimumPlainSteel } from './expansion-tank/co
 import { din4807 } from './expansion-tank/din-4807.ts'
 import { checkBackEuropean, en12828Glycol, en12828Water } from './expansion-tank/en-12828.ts'
 import { checkBackUne, une100155Glycol, une100155Water } from './expansion-tank/une-100155.ts'
+import { pressureTankMethods } from './pressure-tank/pressure-tank.ts'
 import { din4807Part5Vessel } from './thermal-expansion-tank/din-4807-5.ts'
 import { ashrae, ashraeMaterials, aspe, aspeMaterials } from './thermal-expansion-tank/gas-law.ts'
 
@@ -33,6 +38,11 @@ const all: readonly Method[] = [
   ashraeMaterials,
   ashrae,
   din4807Part5Vessel,
+  bufferRunTime,
+  bufferVolumePerTon,
+  bufferEn3035,
+  bufferDefrost,
+  ...pressureTankMethods,
   checkBackDiaphragm,
   checkBackOtherCharge,
   checkBackPlainSteel,

@@ -25,6 +25,21 @@ import { umc } from './umc.ts'
 import { une100155 } from './une-100155.ts'
 import { uneWorkedSheet } from './une-worked-sheet.ts'
 import { upc } from './upc.ts'
+import { heatBalance } from './heat-balance.ts'
+import { hydronicsColumn } from './hydronics-column.ts'
+import { en3035 } from './en-303-5.ts'
+import { chillerPractice } from './chiller-practice.ts'
+import { groundwaterColumn } from './groundwater-column.ts'
+import { waDoh } from './wa-doh.ts'
+import { tenStates } from './ten-states.ts'
+import { idaho580108 } from './idaho-58-01-08.ts'
+import { idae022 } from './idae-022.ts'
+import { hydronicsArticle } from './hydronics-article.ts'
+import { nb27 } from './nb-27.ts'
+import { iapwsSr186 } from './iapws-sr1-86.ts'
+import { ashraeFlashArticle } from './ashrae-flash-article.ts'
+import { steamColumnist } from './steam-columnist.ts'
+import { en806 } from './en-806.ts'
 import { verificationEvaluation } from './verification-evaluation.ts'
 
 const all: readonly Source[] = [
@@ -53,6 +68,21 @@ const all: readonly Source[] = [
   une100155,
   uneWorkedSheet,
   upc,
+  heatBalance,
+  hydronicsColumn,
+  en3035,
+  chillerPractice,
+  groundwaterColumn,
+  waDoh,
+  tenStates,
+  idaho580108,
+  idae022,
+  hydronicsArticle,
+  nb27,
+  iapwsSr186,
+  ashraeFlashArticle,
+  steamColumnist,
+  en806,
   verificationEvaluation,
   ...propertySources,
 ]

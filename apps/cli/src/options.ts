@@ -1,0 +1,65 @@
+import { parseArgs } from 'node:util'
+import type { Severity } from '@coldfill/spec'
+import type { UnitSystem } from '@coldfill/units'
+import { exitStatus, Stop } from './exit-status.ts'
+
+export type ReportFormat = 'text' | 'json' | 'github' | 'sarif'
+
+export interface Options {
+  readonly files: readonly string[]
+  readonly format: ReportFormat
+  readonly failOn: Severity
+  readonly out?: string
+  readonly catalogue?: string
+  readonly units?: UnitSystem
+  readonly fluid?: string
+  readonly temperature?: string
+  readonly pressure?: string
+}
+
+const known = {
+  format: { type: 'string', default: 'text' },
+  'fail-on': { type: 'string', default: 'error' },
+  out: { type: 'string', short: 'o' },
+  catalogue: { type: 'string' },
+  units: { type: 'string' },
+  fluid: { type: 'string' },
+  temperature: { type: 'string' },
+  pressure: { type: 'string' },
+} as const
+
+export type OptionName = keyof typeof known
+
+const oneOf = <T extends string>(name: string, value: string, choices: readonly T[]): T => {
+  const found = choices.find((choice) => choice === value)
+  if (!found) throw new Stop(exitStatus.usage, `--${name} takes ${choices.join(', ')}; not "${value}".`)
+  return found
+}
+
+/** Reads the arguments after the verb. `allowed` are the options the verb has; anything else is a usage error. */
+export const readOptions = (verb: string, args: readonly string[], allowed: readonly OptionName[], files: number): Options => {
+  let parsed
+  try {
+    parsed = parseArgs({ args: [...args], options: known, allowPositionals: true, strict: true })
+  } catch (error) {
+    throw new Stop(exitStatus.usage, `${verb}: ${error instanceof Error ? error.message : String(error)}`)
+  }
+  const { values, positionals } = parsed
+  for (const name of Object.keys(values) as OptionName[]) {
+    const isDefault = (name === 'format' && values.format === 'text') || (name === 'fail-on' && values['fail-on'] === 'error')
+    if (!isDefault && !allowed.includes(name)) throw new Stop(exitStatus.usage, `${verb} has no option --${name}.`)
+  }
+  if (positionals.length !== files)
+    throw new Stop(exitStatus.usage, `${verb} takes ${files === 0 ? 'no file' : files === 1 ? 'one FILE' : `${files} files`}; ${positionals.length} given.`)
+  return {
+    files: positionals,
+    format: oneOf('format', values.format, ['text', 'json', 'github', 'sarif']),
+    failOn: oneOf('fail-on', values['fail-on'], ['error', 'warning', 'note']),
+    ...(values.out === undefined ? {} : { out: values.out }),
+    ...(values.catalogue === undefined ? {} : { catalogue: values.catalogue }),
+    ...(values.units === undefined ? {} : { units: oneOf('units', values.units.toUpperCase(), ['US', 'SI']) }),
+    ...(values.fluid === undefined ? {} : { fluid: values.fluid }),
+    ...(values.temperature === undefined ? {} : { temperature: values.temperature }),
+    ...(values.pressure === undefined ? {} : { pressure: values.pressure }),
+  }
+}
