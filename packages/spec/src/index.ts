@@ -4,3 +4,17 @@ export * from './model/project.ts'
 export * from './model/spec-model.ts'
 export * from './model/system.ts'
 export * from './model/vessel.ts'
+export * from './diagnostics.ts'
+export * from './parse/limits.ts'
+export * from './parse/line-index.ts'
+export {
+  type SourceEntry,
+  type SourceList,
+  type SourceMap,
+  type SourceNode,
+  type SourceText,
+  isWithin,
+} from './parse/source-tree.ts'
+export { type Acceptance, applyAcceptances } from './read/acceptance.ts'
+export * from './read-spec.ts'
+export * from './spec-path.ts'

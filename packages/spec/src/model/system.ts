@@ -42,6 +42,9 @@ export const temperatureFields = {
   }),
   low: quantity(['temperature'], 'Coldest that the water gets, shutdown included.', '50 °F'),
   high: quantity(['temperature'], 'Hottest that the water gets, shutdown included.', '180 °F'),
+  average: quantity(['temperature'], 'Average temperature in operation, which the code equation asks for.', '170 °F', {
+    fallback: 'high, and then an assumption',
+  }),
   cold: quantity(['temperature'], 'Coldest water that enters the heater.', '45 °F'),
   storage: quantity(['temperature'], 'Temperature at which hot water is stored.', '140 °F'),
 }
@@ -128,7 +131,7 @@ interface ServiceKeys {
 }
 
 const hydronic: ServiceKeys = {
-  temperatures: ['fill', 'low', 'high'],
+  temperatures: ['fill', 'low', 'high', 'average'],
   pressure: [
     'static-height',
     'top-margin',

@@ -2,8 +2,9 @@ import { choice, type Fields, integer, number, quantity, text } from './field.ts
 import { hydronicServices, type Service } from './system.ts'
 
 /**
- * An input outside the vessel without which no method of the kind gives a size: one of `keys` (paths inside the system) must be
- * there. `only` and `unless` narrow it to some values of a key of the vessel; a value that is not written counts as `fallback`.
+ * An input without which the vessel has no size: one of `keys` must be there. A key is a path inside the system
+ * (`temperatures.high`), or begins with `vessel.` and is a key of the vessel. `only` and `unless` narrow the need to some
+ * values of a key of the vessel; an empty text stands for a key that is not written.
  */
 export interface Need {
   readonly keys: readonly [string, ...string[]]
@@ -104,6 +105,7 @@ export const vesselKinds = {
         {
           ashrae: 'growth of the water less growth of the pipes, gas law between fill and maximum pressure',
           'en 12828': 'European standard for heating systems in buildings, with a water reserve',
+          'din 4807': 'German standard for closed heating systems, expansion counted from 10 °C',
           'une 100155': 'Spanish standard, with its own expansion coefficient',
           'bs 7074': 'British standard, with a check of the final pressure',
           'code minimum': 'least volume in the mechanical code, a legal floor and not a design method',
@@ -152,6 +154,7 @@ export const vesselKinds = {
       method: choice(
         {
           aspe: 'growth of the water less growth of tank and pipes, gas law between supply and maximum pressure',
+          ashrae: 'the same by the equations of the handbook',
           'din 4807-5': 'German standard for vessels in drinking water systems',
         },
         'Method by which the vessel is sized.',
@@ -231,6 +234,22 @@ export const vesselKinds = {
         to: 'to know which row of the demand table holds',
         only: { key: 'method', is: ['ashrae fixture', 'aspe fixture'] },
       },
+      {
+        keys: ['vessel.recovery'],
+        to: 'to be sized from a curve',
+        only: { key: 'method', is: ['recovery and storage'] },
+      },
+      {
+        keys: ['vessel.storage'],
+        to: 'to be sized from a curve',
+        only: { key: 'method', is: ['recovery and storage'] },
+      },
+      {
+        keys: ['vessel.units-served', 'demand.people', 'demand.apartments'],
+        to: 'to know how many the readings of the curve hold for',
+        only: { key: 'method', is: ['recovery and storage'] },
+      },
+      { keys: ['vessel.demand-index'], to: 'to be sized by din 4708', only: { key: 'method', is: ['din 4708'] } },
       { keys: ['demand.people'], to: 'to know how many draw hot water', only: { key: 'method', is: ['per person'] } },
       {
         keys: ['demand.apartments'],
@@ -285,7 +304,24 @@ export const vesselKinds = {
       'burn-time': quantity(['time'], 'Time that one charge of fuel burns.', '5 h', { positive: true }),
       'defrost-energy': quantity(['energy'], 'Heat that one defrost takes.', '3 kWh', { positive: true }),
     },
-    needs: [],
+    needs: [
+      ...(['vessel.source-minimum', 'vessel.load-minimum', 'vessel.run-time', 'vessel.temperature-band'] as const).map(
+        (key): Need => ({ keys: [key], to: 'to be sized by run time', only: { key: 'method', is: ['', 'run time'] } }),
+      ),
+      ...(['vessel.cooling-capacity', 'vessel.volume-per-ton'] as const).map((key): Need => ({
+        keys: [key],
+        to: 'to be sized by volume per ton',
+        only: { key: 'method', is: ['volume per ton'] },
+      })),
+      ...(['vessel.boiler-output', 'vessel.boiler-minimum', 'vessel.heat-load', 'vessel.burn-time'] as const).map(
+        (key): Need => ({ keys: [key], to: 'to be sized by en 303-5', only: { key: 'method', is: ['en 303-5'] } }),
+      ),
+      ...(['vessel.defrost-energy', 'vessel.temperature-band'] as const).map((key): Need => ({
+        keys: [key],
+        to: 'to be sized for defrost',
+        only: { key: 'method', is: ['defrost'] },
+      })),
+    ],
   },
   'pressure tank': {
     title: 'Pressure tanks',
@@ -315,6 +351,19 @@ export const vesselKinds = {
       }),
     },
     needs: [
+      { keys: ['vessel.pump-flow', 'vessel.drawdown'], to: 'to know the drawdown' },
+      {
+        keys: ['vessel.starts-per-hour', 'vessel.run-time', 'vessel.drawdown'],
+        to: 'to know the drawdown',
+        only: { key: 'method', is: [''] },
+      },
+      { keys: ['vessel.drawdown'], to: 'to be sized by drawdown', only: { key: 'method', is: ['drawdown'] } },
+      { keys: ['vessel.run-time'], to: 'to be sized by run time', only: { key: 'method', is: ['run time'] } },
+      {
+        keys: ['vessel.starts-per-hour'],
+        to: 'to be sized by starts per hour',
+        only: { key: 'method', is: ['starts per hour'] },
+      },
       { keys: ['pressure.cut-in'], to: 'to know when the pump starts' },
       { keys: ['pressure.cut-out'], to: 'to know when the pump stops' },
     ],

@@ -1,0 +1,67 @@
+import type { Vocabulary } from '../model/spec-model.ts'
+import { choiceHint, wrongChoice } from '../read/choice.ts'
+import type { Context } from '../read/context.ts'
+import { oneOf } from '../read/nearest.ts'
+import type { At } from '../report.ts'
+
+/** Case, the kind of cross and doubled or missing spaces do not tell sizes apart. */
+const plainSize = (text: string): string =>
+  text
+    .trim()
+    .toLowerCase()
+    .replaceAll('×', 'x')
+    .replaceAll('″', '"')
+    .replace(/(\d)\s+(?=\d)/gu, '$1-')
+    .replace(/\s+/gu, '')
+    .replace(/(?:inches|inch)$/u, 'in')
+
+/** Whether a family has the size; undefined where there is no such family. */
+export const linkPipeFamily = (context: Context, at: At, name: string): string | undefined => {
+  const families = Object.keys(context.vocabulary.pipes)
+  if (families.includes(name)) return name
+  wrongChoice(context, 'CF-S040', at, name, families, `There is no pipe \`${name}\` in the pipe table.`)
+  return undefined
+}
+
+type Sizes = Vocabulary['pipes'][string]
+
+/** Rough size in mm, to find neighbours only. */
+const roughSize = (text: string): number | undefined => {
+  const plain = plainSize(text)
+  const fraction = /(?:(\d+)-)?(\d+)\/(\d+)/u.exec(plain)
+  if (fraction) return (Number(fraction[1] ?? 0) + Number(fraction[2]) / Number(fraction[3])) * 25.4
+  const number = /\d+(?:\.\d+)?/u.exec(plain)?.[0]
+  if (number === undefined) return undefined
+  return Number(number) * (/mm|dn|x|od|^d/u.test(plain) ? 1 : 25.4)
+}
+
+const neighbours = (sizes: Sizes, written: string): string[] => {
+  const asked = roughSize(written)
+  const names = sizes.map(({ size }) => size)
+  if (asked === undefined) return names.slice(0, 8)
+  const below = names.filter((name) => (roughSize(name) ?? 0) < asked).slice(-2)
+  const above = names.filter((name) => (roughSize(name) ?? 0) >= asked).slice(0, 2)
+  return [...below, ...above]
+}
+
+/** The size as the family names it. Undefined where the family does not have it. */
+export const linkPipeSize = (context: Context, at: At, family: string, written: string): string | undefined => {
+  const sizes = context.vocabulary.pipes[family] ?? []
+  const typed = plainSize(written)
+  const found = sizes.find(({ size, spellings }) => [size, ...spellings].some((each) => plainSize(each) === typed))
+  if (found) return found.size
+  const near = neighbours(sizes, written)
+  context.report.add('CF-S041', at, {
+    message: `\`${family}\` has no size \`${written}\`.`,
+    hint: near.length === 0 ? 'It has no sizes.' : `Sizes next to it are ${oneOf(near)}.`,
+    fixes: choiceHint(at, written, near).fixes,
+  })
+  return undefined
+}
+
+export const linkEmitter = (context: Context, at: At, name: string): string | undefined => {
+  const classes = Object.keys(context.vocabulary.emitters)
+  if (classes.includes(name)) return name
+  wrongChoice(context, 'CF-S042', at, name, classes, `There is no class of emitters \`${name}\`.`)
+  return undefined
+}
