@@ -1,4 +1,6 @@
 export { CONSTRUCTION_STATUS, type DocumentOptions, type RevisionEntry, type TitleBlock } from './document-options.ts'
+export { writeSchedule } from './xlsx/write-schedule.ts'
+export { writeSubmittal } from './submittal/write-submittal.ts'
 export { fileName, type DocumentKind } from './file-name.ts'
 export {
   headerText,

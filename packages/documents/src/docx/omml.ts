@@ -1,4 +1,4 @@
-import { BuilderElement, MathRun, type XmlComponent } from 'docx'
+import { BuilderElement, MathRun, type ParagraphChild, type XmlComponent } from 'docx'
 import type { Box } from '@coldfill/formula'
 
 /** An Office Math element with its children. */
@@ -56,6 +56,12 @@ export const ommlOf = (box: Box): XmlComponent[] => {
   }
 }
 
+// A paragraph takes any element; the library's type only lists the equations that it can build itself.
+const inParagraph = (component: XmlComponent): ParagraphChild => component as unknown as ParagraphChild
+
 /** An equation on its own line, set from the left. */
-export const displayEquation = (box: Box): XmlComponent =>
-  element('oMathPara', [element('oMathParaPr', [property('jc', 'left')]), element('oMath', ommlOf(box))])
+export const displayEquation = (box: Box): ParagraphChild =>
+  inParagraph(element('oMathPara', [element('oMathParaPr', [property('jc', 'left')]), element('oMath', ommlOf(box))]))
+
+/** An equation among words. */
+export const inlineEquation = (box: Box): ParagraphChild => inParagraph(element('oMath', ommlOf(box)))

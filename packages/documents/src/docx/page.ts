@@ -1,4 +1,3 @@
-import type { UnitSystem } from '@coldfill/units'
 import {
   Footer,
   Header,
@@ -10,6 +9,7 @@ import {
   type ISectionPropertiesOptions,
 } from 'docx'
 import { draftWarning, revisionWords, type DocumentOptions } from '../document-options.ts'
+import { paperOf } from '../paper.ts'
 import { plainText } from './plain-text.ts'
 import { STYLE } from './styles.ts'
 
@@ -20,9 +20,6 @@ const MARGIN = { left: 1300, right: 1100, top: 1300, bottom: 1150, header: 560, 
 const LANDSCAPE_MARGIN = { left: 900, right: 900, top: 1300, bottom: 1000, header: 560, footer: 460 }
 
 export type Orientation = 'portrait' | 'landscape'
-
-export const paperOf = (options: DocumentOptions): keyof typeof PAPER =>
-  options.paper ?? ({ US: 'Letter', SI: 'A4' } as const satisfies Record<UnitSystem, string>)[options.units]
 
 /** Width of the text in twips. */
 export const textWidth = (options: DocumentOptions, orientation: Orientation): number => {

@@ -1,8 +1,8 @@
-import { Bookmark, Paragraph, Tab, TextRun, type ParagraphChild } from 'docx'
+import { Bookmark, Paragraph, Tab, TextRun } from 'docx'
 import type { Box } from '@coldfill/formula'
 import { displayEquation } from './omml.ts'
 import { plainText } from './plain-text.ts'
-import { STYLE } from './styles.ts'
+import { SOURCE_STYLE, STYLE } from './styles.ts'
 
 type Style = (typeof STYLE)[keyof typeof STYLE] | 'Title' | 'Subtitle' | 'Caption' | 'Normal'
 
@@ -23,12 +23,21 @@ export const numberedNote = (number: string, text: string): Paragraph =>
     children: [new TextRun({ children: [plainText(number), new Tab(), plainText(text)] })],
   })
 
+/** The name of a step, and behind it where its formula comes from. */
+export const stepParagraph = (name: string, source: string): Paragraph =>
+  new Paragraph({
+    style: STYLE.step,
+    children: [
+      new TextRun({ text: plainText(name), style: 'Strong' }),
+      new TextRun({ text: plainText(`   ${source}`), style: SOURCE_STYLE }),
+    ],
+  })
+
 export const equationParagraph = (box: Box, keepNext: boolean): Paragraph =>
   new Paragraph({
     style: STYLE.equation,
     keepNext,
-    // The paragraph takes any element; the type of the library only knows the equations it can build itself.
-    children: [displayEquation(box) as unknown as ParagraphChild],
+    children: [displayEquation(box)],
   })
 
 export interface HeadingEntry {

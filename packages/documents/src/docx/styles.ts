@@ -18,6 +18,9 @@ export const STYLE = {
   note: 'KeyedNote',
 } as const
 
+/** Character style of where a value comes from. */
+export const SOURCE_STYLE = 'Source'
+
 export const TABLE_STYLE = 'ColdfillTable'
 
 const pen = (color: string, size: number) => ({ style: BorderStyle.SINGLE, size, color, space: 1 })
@@ -72,7 +75,18 @@ export const styles: IStylesOptions = {
       paragraph: { spacing: { before: 160, after: 60 }, keepNext: true },
     },
   },
+  characterStyles: [
+    { id: 'Strong', name: 'Strong', basedOn: 'DefaultParagraphFont', run: { bold: true } },
+    { id: SOURCE_STYLE, name: 'Source', basedOn: 'DefaultParagraphFont', run: { size: 16, color: PENCIL } },
+  ],
   paragraphStyles: [
+    {
+      id: 'ContentsHeading',
+      name: 'TOC Heading',
+      basedOn: 'Normal',
+      run: { size: 32, bold: true },
+      paragraph: { spacing: { before: 0, after: 160 }, border: { bottom: pen(INK, 12) } },
+    },
     {
       id: 'Subtitle',
       name: 'Subtitle',

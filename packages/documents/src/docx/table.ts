@@ -10,6 +10,8 @@ import {
   WidthType,
   type XmlComponent,
 } from 'docx'
+import type { Box } from '@coldfill/formula'
+import { inlineEquation } from './omml.ts'
 import { plainText } from './plain-text.ts'
 import { STYLE, TABLE_STYLE } from './styles.ts'
 
@@ -20,9 +22,12 @@ export interface TableColumn {
   readonly align?: 'left' | 'right' | 'center'
 }
 
+/** Words, or a symbol drawn as in an equation. */
+export type TableCellContent = string | Box
+
 export interface TableContent {
   readonly columns: readonly TableColumn[]
-  readonly rows: readonly (readonly string[])[]
+  readonly rows: readonly (readonly TableCellContent[])[]
   /** Said by a screen reader and shown in the properties of the table. */
   readonly title: string
   readonly description: string
@@ -72,13 +77,17 @@ export const table = (content: TableContent): Table => {
   const { columns, rows, width } = content
   const widths = shares(columns, width)
   const style = STYLES[content.size ?? 'table']
-  const cell = (text: string, index: number, paragraphStyle: string, strong = false) =>
+  const cell = (content: TableCellContent, index: number, paragraphStyle: string, strong = false) =>
     new TableCell({
       width: { size: widths[index] ?? 0, type: WidthType.DXA },
       children: [
         new Paragraph({
           style: paragraphStyle,
-          children: [new TextRun({ text: plainText(text), ...(strong ? { style: 'Strong' } : {}) })],
+          children: [
+            typeof content === 'string'
+              ? new TextRun({ text: plainText(content), ...(strong ? { style: 'Strong' } : {}) })
+              : inlineEquation(content),
+          ],
         }),
       ],
     })

@@ -1,4 +1,4 @@
-import { defineSchedule, inputNumber, resultNumber } from './schedule.ts'
+import { defineSchedule, inputNumber, optional, resultNumber } from './schedule.ts'
 import * as shared from './shared-columns.ts'
 
 export const expansionTanks = defineSchedule({
@@ -12,14 +12,18 @@ export const expansionTanks = defineSchedule({
     shared.fluid,
     shared.count,
     resultNumber('system-volume', 'System volume', 9, 'volume'),
-    inputNumber('low-temperature', 'Lowest temp.', 8, 'temperature', ['t_l', 't_low']),
-    inputNumber('high-temperature', 'Highest temp.', 8, 'temperature', ['t_h', 't_high', 't_max']),
+    inputNumber('low-temperature', 'Lowest temp.', 8, 'temperature', ['t_l']),
+    inputNumber('high-temperature', 'Highest temp.', 8, 'temperature', ['t_h']),
     resultNumber('expansion-volume', 'Expansion volume', 10, 'volume'),
     resultNumber('required-volume', 'Required volume', 9, 'volume'),
-    shared.selectedVolume,
+    optional(resultNumber('required-volume-each', 'Required, each', 9, 'volume')),
+    optional(resultNumber('code-minimum-volume', 'Code minimum', 9, 'volume')),
+    optional(resultNumber('water-reserve', 'Water reserve', 9, 'volume')),
+    optional(shared.selectedVolume),
     resultNumber('fill-pressure', 'Fill pressure', 9, 'gauge pressure'),
     resultNumber('precharge', 'Precharge', 10, 'gauge pressure'),
     resultNumber('maximum-pressure', 'Maximum pressure', 10, 'gauge pressure'),
+    optional(resultNumber('final-pressure', 'Final pressure', 9, 'gauge pressure')),
     shared.reliefSet,
     shared.method,
     shared.assumptions,

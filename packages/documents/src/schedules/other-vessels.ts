@@ -1,6 +1,6 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import { sentenceCase } from '../words/vessel-words.ts'
-import { defineSchedule, resultNumber, type ScheduleDefinition } from './schedule.ts'
+import { defineSchedule, optional, resultNumber, type ScheduleDefinition } from './schedule.ts'
 import * as shared from './shared-columns.ts'
 
 /** A schedule of any kind that has no columns of its own yet: every result that one of its vessels has, in order of first appearance. */
@@ -10,7 +10,7 @@ export const otherVessels = (kind: string, result: ProjectResult): ScheduleDefin
     if (vessel.kind !== kind) continue
     for (const [key, value] of Object.entries(vessel.results)) {
       if (!columns.has(key))
-        columns.set(key, resultNumber(key, value.name, Math.max(9, value.name.length / 2), value.kind))
+        columns.set(key, resultNumber(key, sentenceCase(value.name), Math.max(9, value.name.length / 2), value.kind))
     }
   }
   return defineSchedule({
@@ -21,7 +21,7 @@ export const otherVessels = (kind: string, result: ProjectResult): ScheduleDefin
       shared.serves,
       shared.count,
       ...columns.values(),
-      shared.selectedVolume,
+      optional(shared.selectedVolume),
       shared.method,
       shared.assumptions,
     ],

@@ -118,6 +118,7 @@ export const scheduleTable = (result: ProjectResult, kind: string, units: UnitSy
       const found = numberIn(column, context)
       return found && { ...found, value: fromSi(found.value, displayUnit(column.kind, units)) }
     })
+    if (column.optional && numbers.every((found) => found === null)) continue
     const decimals = decimalsFor(numbers.flatMap((found) => (found ? [found.value] : [])))
     columns.push({ key, heading, unit: unitLabel(column.kind, units), align: 'right', width, decimals })
     contexts.forEach(({ vessel }, row) => {

@@ -17,6 +17,8 @@ interface ColumnBase {
   readonly heading: string
   /** Width in characters of the body type. */
   readonly width: number
+  /** Left out of a schedule in which no vessel has a number for it. */
+  readonly optional?: true
 }
 
 /** A column as data: words, a number of the vessel's results, or a number found elsewhere in the project. */
@@ -75,3 +77,5 @@ export const quantity = (
   kind: Kind,
   number: (context: VesselContext) => number | null,
 ): ScheduleColumnDefinition => ({ shows: 'quantity', key, heading, width, kind, number })
+
+export const optional = (column: ScheduleColumnDefinition): ScheduleColumnDefinition => ({ ...column, optional: true })

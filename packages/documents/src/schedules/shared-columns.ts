@@ -5,7 +5,7 @@ import { quantity, words } from './schedule.ts'
 export const serves = words('serves', 'Serves', 18, ({ vessel, system }) => vessel.serves || (system?.title ?? ''))
 export const fluid = words('fluid', 'Fluid', 11, ({ vessel }) => sentenceCase(vessel.fluid))
 export const construction = words('construction', 'Type', 10, ({ vessel }) => sentenceCase(vessel.construction ?? ''))
-export const count = words('quantity', 'Qty', 4, ({ vessel }) => String(vessel.quantity), 'center')
+export const count = quantity('quantity', 'Qty', 4, 'count', ({ vessel }) => vessel.quantity)
 export const method = words('method', 'Method', 10, ({ vessel }) => methodWords(vessel.method))
 export const assumptions = words('assumptions', 'Assumptions', 10, ({ vessel, result }) =>
   numbersOf(vessel.assumptions, result),

@@ -1,4 +1,4 @@
-import { defineSchedule, inputNumber, resultNumber } from './schedule.ts'
+import { defineSchedule, inputNumber, optional, resultNumber } from './schedule.ts'
 import * as shared from './shared-columns.ts'
 
 export const thermalExpansionTanks = defineSchedule({
@@ -11,14 +11,16 @@ export const thermalExpansionTanks = defineSchedule({
     shared.construction,
     shared.count,
     resultNumber('system-volume', 'Heated volume', 9, 'volume'),
-    inputNumber('cold-temperature', 'Cold water temp.', 9, 'temperature', ['t_c', 't_cold', 't_l', 't_low']),
-    inputNumber('storage-temperature', 'Storage temp.', 8, 'temperature', ['t_h', 't_hot', 't_s', 't_high']),
+    inputNumber('cold-temperature', 'Cold water temp.', 9, 'temperature', ['t_c']),
+    inputNumber('storage-temperature', 'Storage temp.', 8, 'temperature', ['t_h']),
     resultNumber('expansion-volume', 'Expansion volume', 10, 'volume'),
     resultNumber('required-volume', 'Required volume', 9, 'volume'),
-    shared.selectedVolume,
-    resultNumber('fill-pressure', 'Supply pressure', 9, 'gauge pressure'),
+    optional(resultNumber('required-volume-each', 'Required, each', 9, 'volume')),
+    optional(shared.selectedVolume),
+    resultNumber('fill-pressure', 'Fill pressure', 9, 'gauge pressure'),
     resultNumber('precharge', 'Precharge', 10, 'gauge pressure'),
     resultNumber('maximum-pressure', 'Maximum pressure', 10, 'gauge pressure'),
+    optional(resultNumber('final-pressure', 'Final pressure', 9, 'gauge pressure')),
     shared.reliefSet,
     shared.method,
     shared.assumptions,

@@ -257,6 +257,7 @@ export const clinicProject = (functions: Readonly<Record<string, FormulaFunction
   return {
     engine: '0.1.0',
     spec: 1,
+    readable: true,
     project: {
       number: 'FC-241',
       title: 'Fernhollow Community Clinic',
@@ -374,13 +375,13 @@ export const clinicProject = (functions: Readonly<Record<string, FormulaFunction
       },
     ],
     sources: {
-      'ashrae-hvac-se': { title: 'ASHRAE Handbook, HVAC Systems and Equipment', edition: '2020' },
-      'ashrae-fundamentals': { title: 'ASHRAE Handbook, Fundamentals', edition: '2021' },
-      'astm-b88': { title: 'ASTM B88, Seamless copper water tube', edition: '2020' },
-      boyle: { title: "Boyle's law", edition: '' },
-      geometry: { title: 'Geometry', edition: '' },
-      'common-practice': { title: 'Common practice, no source', edition: '' },
-      upc: { title: 'Uniform Plumbing Code', edition: '2024' },
+      'ashrae-hvac-se': { title: 'ASHRAE Handbook, HVAC Systems and Equipment', edition: '2020', publisher: '' },
+      'ashrae-fundamentals': { title: 'ASHRAE Handbook, Fundamentals', edition: '2021', publisher: '' },
+      'astm-b88': { title: 'ASTM B88, Seamless copper water tube', edition: '2020', publisher: '' },
+      boyle: { title: "Boyle's law", edition: '', publisher: '' },
+      geometry: { title: 'Geometry', edition: '', publisher: '' },
+      'common-practice': { title: 'Common practice, no source', edition: '', publisher: '' },
+      upc: { title: 'Uniform Plumbing Code', edition: '2024', publisher: '' },
     },
   }
 }

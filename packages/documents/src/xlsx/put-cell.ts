@@ -5,7 +5,7 @@ import { cellText } from './plain-text.ts'
 export type CellContent =
   | { readonly text: string }
   | { readonly number: number; readonly format: string }
-  /** A formula without `=`, and the value that viewers show before they recalculate. */
+  /** A formula without `=`, and the value that viewers show before they recalculate; one that is not finite shows as an error. */
   | { readonly formula: string; readonly result: number | string; readonly format?: string }
   /** A jump to a cell of this workbook. */
   | { readonly text: string; readonly sheet: string }
@@ -13,6 +13,11 @@ export type CellContent =
 const finite = (value: number, cell: Cell): number => {
   if (!Number.isFinite(value)) throw new Error(`${cell.fullAddress.sheetName}!${cell.address} is given ${value}`)
   return value
+}
+
+const cached = (result: number | string): number | string | { error: '#NUM!' } => {
+  if (typeof result === 'string') return cellText(result)
+  return Number.isFinite(result) ? result : { error: '#NUM!' }
 }
 
 /** The one way into a cell. A number that is not finite or a formula with `=` in front is a programmer's mistake and throws. */
@@ -25,8 +30,7 @@ export const putCell = (cell: Cell, content: CellContent): void => {
   if ('formula' in content) {
     // oxlint-disable-next-line no-control-regex
     if (/^=|[\u0000-\u001f]/.test(content.formula)) throw new Error(`not a formula for a cell: ${content.formula}`)
-    const result = typeof content.result === 'number' ? finite(content.result, cell) : cellText(content.result)
-    cell.value = { formula: content.formula, result, date1904: false }
+    cell.value = { formula: content.formula, result: cached(content.result), date1904: false }
     if (content.format !== undefined) cell.numFmt = content.format
     return
   }

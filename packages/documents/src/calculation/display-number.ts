@@ -1,0 +1,11 @@
+import { displayUnit, fromSi, type Kind, type UnitSystem } from '@coldfill/units'
+
+/**
+ * Number in the unit in which `system` shows the kind. Noise of the conversion in the thirteenth digit and beyond is
+ * taken off, so that 40 °F is 40 and not 40.00000000000006; every other number stays as it is.
+ */
+export const displayNumber = (value: number, kind: Kind, system: UnitSystem): number => {
+  const number = fromSi(value, displayUnit(kind, system))
+  const rounded = Number(number.toPrecision(12))
+  return Math.abs(rounded - number) <= 1e-13 * Math.max(1, Math.abs(number)) ? rounded : number
+}

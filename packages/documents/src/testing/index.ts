@@ -1,0 +1,2 @@
+export { clinicProject, si } from './clinic-project.ts'
+export { documentOptions } from './document-options.ts'

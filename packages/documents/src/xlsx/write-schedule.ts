@@ -1,0 +1,98 @@
+import type { ProjectResult } from '@coldfill/sizing'
+import ExcelJS from 'exceljs'
+import { fixedArchive } from '../archive/fixed-archive.ts'
+import { fluidOf } from '../calculation/fluid-of.ts'
+import { vesselCalculation } from '../calculation/vessel-calculation.ts'
+import { dateOf, revisionWords, type DocumentOptions } from '../document-options.ts'
+import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
+import { sentenceCase } from '../words/vessel-words.ts'
+import { writeAssumptions } from './assumptions-sheet.ts'
+import { writeCalculation, type CalculationSheet } from './calculation-sheet.ts'
+import { writeCover, type ContentsEntry } from './cover-sheet.ts'
+import { writeFindings } from './findings-sheet.ts'
+import { writeFluidData, type GlycolBase } from './fluid-data-sheet.ts'
+import { cellText } from './plain-text.ts'
+import { writeScheduleSheet, type VesselCells } from './schedule-sheet.ts'
+import { SheetNames } from './sheet-names.ts'
+import { writeSources } from './sources-sheet.ts'
+
+/** The equipment schedule as an .xlsx file. The same result and options give the same bytes. */
+export const writeSchedule = async (result: ProjectResult, options: DocumentOptions): Promise<Uint8Array> => {
+  const { project } = result
+  const workbook = new ExcelJS.Workbook()
+  const date = dateOf(options.titleBlock)
+  Object.assign(workbook, {
+    created: date,
+    modified: date,
+    creator: cellText(options.titleBlock.preparedBy || options.titleBlock.office),
+    lastModifiedBy: cellText(options.titleBlock.preparedBy || options.titleBlock.office),
+    company: cellText(options.titleBlock.office),
+    title: cellText(`${project.number} ${project.title}: equipment schedule`),
+    subject: 'Vessel schedule with calculations',
+    keywords: cellText(`${project.number}, ${revisionWords(options.titleBlock.revision)}`),
+    description: options.contentHash === undefined ? '' : `Content hash ${options.contentHash}`,
+  })
+  workbook.calcProperties.fullCalcOnLoad = true
+
+  const names = new SheetNames()
+  const cover = names.take('Cover')
+  const schedules = scheduleKinds(result).map((kind) => {
+    const table = scheduleTable(result, kind, options.units)
+    return { table, name: names.take(table.title) }
+  })
+  const calculations = result.vessels
+    .filter((vessel) => vessel.trace.length > 0)
+    .map((vessel): CalculationSheet => {
+      const fluid = fluidOf(vessel.fluid)
+      return {
+        name: names.take(vessel.mark),
+        vessel,
+        fluid,
+        calculation: vesselCalculation(vessel, result, options.units, fluid.functions),
+      }
+    })
+  const assumptions = names.take('Assumptions')
+  const findings = names.take('Findings')
+  const sources = names.take('Sources')
+  const fluidData = names.take('Fluid data')
+  const contents: ContentsEntry[] = [
+    ...schedules.map(({ name, table }) => ({ sheet: name, about: table.purpose })),
+    ...calculations.map(({ name, vessel }) => ({
+      sheet: name,
+      about: `Calculation of ${vessel.mark}, ${sentenceCase(vessel.kind).toLowerCase()}, ${vessel.serves}`,
+    })),
+    { sheet: assumptions, about: 'Numbered register of the defaults that the results lean on' },
+    { sheet: findings, about: 'What the checks found, and what was accepted with a reason' },
+    { sheet: sources, about: 'Every publication cited, under the number it is cited by' },
+    { sheet: fluidData, about: 'Coefficients of the equations for fluid properties' },
+  ]
+
+  // Sheets stand in the order in which a reader turns to them, but each can only be written when what it refers to is.
+  writeCover(workbook, cover, result, options, contents)
+  const bases = [
+    ...new Set(calculations.flatMap(({ fluid }) => (fluid.massFraction > 0 ? [fluid.base as GlycolBase] : []))),
+  ]
+  const fluidCells = writeFluidData(workbook, fluidData, project, options, bases)
+  const vessels = new Map<string, VesselCells>()
+  for (const sheet of calculations) {
+    const cells = writeCalculation(workbook, sheet, project, options, fluidCells)
+    vessels.set(`${sheet.vessel.system}/${sheet.vessel.mark}`, { sheet: sheet.name, cells })
+  }
+  for (const { table, name } of schedules) writeScheduleSheet(workbook, name, table, vessels, project, options)
+  writeAssumptions(workbook, assumptions, result, options)
+  writeFindings(workbook, findings, result, options)
+  writeSources(workbook, sources, result, options)
+  inOrder(workbook, [cover, ...contents.map((entry) => entry.sheet)])
+
+  return fixedArchive(new Uint8Array(await workbook.xlsx.writeBuffer()))
+}
+
+/** Sorts the sheets, first one shown on opening. */
+const inOrder = (workbook: ExcelJS.Workbook, names: readonly string[]): void => {
+  names.forEach((name, index) => {
+    const sheet = workbook.getWorksheet(name)
+    // The library sorts by this field when it writes; its types do not list it.
+    if (sheet) (sheet as unknown as { orderNo: number }).orderNo = index
+  })
+  workbook.views = [{ x: 0, y: 0, width: 24_000, height: 14_000, firstSheet: 0, activeTab: 0, visibility: 'visible' }]
+}
