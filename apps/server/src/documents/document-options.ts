@@ -1,0 +1,66 @@
+import { CONSTRUCTION_STATUS, type DocumentOptions, type RevisionEntry } from '@coldfill/documents'
+import type { ProjectResult } from '@coldfill/sizing'
+import type { MakingRow, ProjectFacts, RevisionRow } from '../review/project-facts.ts'
+import { isAccepting, standingDispositions } from '../review/standing.ts'
+
+const REVIEW_STATUS = 'Issued for review'
+
+const day = (date: Date): string => date.toISOString().slice(0, 10)
+
+const constructionPurpose = (override: string | null): string =>
+  override === null ? CONSTRUCTION_STATUS : `${CONSTRUCTION_STATUS}. Gates overridden: ${override}`
+
+/** The revision block as it stands when these files are made, newest first. */
+const revisionBlock = (facts: ProjectFacts, revision: RevisionRow, making: MakingRow): RevisionEntry[] => {
+  const name = (id: string | null): string => (id === null ? '' : (facts.people.get(id)?.name ?? ''))
+  const entries: RevisionEntry[] = []
+  if (making.set === 'construction')
+    entries.push({
+      revision: revision.label,
+      date: day(making.askedAt),
+      purpose: constructionPurpose(making.overrideReason),
+      by: name(making.askedBy),
+    })
+  for (const row of facts.revisions) {
+    if (row.sequence > revision.sequence) continue
+    if (row.constructionAt && row.id !== revision.id)
+      entries.push({
+        revision: row.label,
+        date: day(row.constructionAt),
+        purpose: constructionPurpose(row.overrideReason),
+        by: name(row.constructionBy),
+      })
+    entries.push({ revision: row.label, date: day(row.issuedAt), purpose: REVIEW_STATUS, by: name(row.issuedBy) })
+  }
+  return entries
+}
+
+export const documentOptions = (
+  facts: ProjectFacts,
+  office: string,
+  revision: RevisionRow,
+  making: MakingRow,
+  result: ProjectResult,
+): DocumentOptions => {
+  const forConstruction = making.set === 'construction'
+  const accepting = standingDispositions(facts, revision).filter(({ row, stale }) => !stale && isAccepting(row))
+  const reviewers = accepting
+    .map(({ row }) => facts.people.get(row.reviewerId)?.name ?? '')
+    .filter((name) => name !== '')
+  const prepared = facts.people.get(revision.issuedBy)?.name
+  const approved = facts.people.get(making.askedBy)?.name
+  return {
+    units: result.project.units,
+    titleBlock: {
+      office,
+      ...(prepared === undefined ? {} : { preparedBy: prepared }),
+      ...(forConstruction && reviewers.length > 0 ? { checkedBy: reviewers.join(', ') } : {}),
+      ...(forConstruction && approved !== undefined ? { approvedBy: approved } : {}),
+      date: day(forConstruction ? making.askedAt : revision.issuedAt),
+      revision: revision.label,
+      status: forConstruction ? CONSTRUCTION_STATUS : REVIEW_STATUS,
+    },
+    revisions: revisionBlock(facts, revision, making),
+    contentHash: revision.contentHash,
+  }
+}

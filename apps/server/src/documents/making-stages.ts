@@ -1,0 +1,2 @@
+/** Stages of making the files of a revision, in order; a making holds the number of the one it is in. */
+export const MAKING_STAGES = ['Waiting', 'Writing the schedule', 'Writing the submittal', 'Storing the files'] as const

@@ -1,0 +1,47 @@
+import type { ChangedResult } from '@coldfill/contract'
+import type { ProjectResult, VesselResult } from '@coldfill/sizing'
+
+const keyOf = (vessel: VesselResult): string => `${vessel.system}/${vessel.mark}`
+
+const selectedWords = (vessel: VesselResult | undefined): string | null =>
+  vessel?.selected ? `${vessel.selected.maker} ${vessel.selected.model} × ${vessel.selected.quantity}` : null
+
+const compareVessel = (was: VesselResult | undefined, now: VesselResult | undefined): ChangedResult[] => {
+  const either = now ?? was
+  if (!either) return []
+  const { system, mark } = either
+  const changed: ChangedResult[] = []
+  const note = (
+    key: string,
+    name: string,
+    kind: string,
+    before: ChangedResult['was'],
+    after: ChangedResult['now'],
+  ): void => {
+    if (before !== after) changed.push({ system, mark, key, name, kind, was: before, now: after })
+  }
+  note('status', 'Status', 'words', was?.status ?? null, now?.status ?? null)
+  for (const key of new Set([...Object.keys(was?.results ?? {}), ...Object.keys(now?.results ?? {})])) {
+    const before = was?.results[key]
+    const after = now?.results[key]
+    note(
+      key,
+      (after ?? before)?.name ?? key,
+      (after ?? before)?.kind ?? 'ratio',
+      before?.value ?? null,
+      after?.value ?? null,
+    )
+  }
+  note('selected', 'Selected vessel', 'words', selectedWords(was), selectedWords(now))
+  return changed
+}
+
+/** Every result that differs between two results, in the order of the newer one; vessels that are gone come last. */
+export const changedResults = (was: ProjectResult, now: ProjectResult): ChangedResult[] => {
+  const before = new Map(was.vessels.map((vessel) => [keyOf(vessel), vessel]))
+  const after = new Set(now.vessels.map(keyOf))
+  return [
+    ...now.vessels.flatMap((vessel) => compareVessel(before.get(keyOf(vessel)), vessel)),
+    ...was.vessels.filter((vessel) => !after.has(keyOf(vessel))).flatMap((vessel) => compareVessel(vessel, undefined)),
+  ]
+}

@@ -1,0 +1,16 @@
+import { SizeTextRequest } from '@coldfill/contract'
+import { Router } from 'express'
+import type { Deps } from '../../deps.ts'
+import { accessIn } from '../../middleware/require-project.ts'
+import { parseBody } from '../../parse-request.ts'
+import { projectPermissions, requirePermission } from '../../policies/project-permissions.ts'
+import { projectFacts } from '../../review/project-facts.ts'
+
+/** Sizes a text as it is typed. Nothing is saved. */
+export const sizingRouter = (deps: Deps): Router =>
+  Router({ mergeParams: true }).post('/', async (req, res) => {
+    const access = accessIn(res)
+    requirePermission(projectPermissions(access, await projectFacts(deps.db, access.project)).editSpec)
+    const { json } = await deps.sizing.size(parseBody(SizeTextRequest, req).text)
+    res.type('application/json').send(json)
+  })
