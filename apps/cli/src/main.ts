@@ -1,19 +1,16 @@
 import { exitStatus, Stop } from './exit-status.ts'
-import { check } from './commands/check.ts'
-import { explain } from './commands/explain.ts'
-import { fluid } from './commands/fluid.ts'
-import { schema } from './commands/schema.ts'
-import { size } from './commands/size.ts'
-import { schedule, submittal } from './commands/write-document.ts'
 
-const verbs: Readonly<Record<string, (args: readonly string[]) => Promise<number>>> = {
-  check,
-  size,
-  schedule,
-  submittal,
-  fluid,
-  schema,
-  explain,
+type Verb = (args: readonly string[]) => Promise<number>
+
+// Loaded when asked for: `size` does not wait for the libraries that write documents.
+const verbs: Readonly<Record<string, () => Promise<Verb>>> = {
+  check: async () => (await import('./commands/check.ts')).check,
+  size: async () => (await import('./commands/size.ts')).size,
+  schedule: async () => (await import('./commands/write-document.ts')).schedule,
+  submittal: async () => (await import('./commands/write-document.ts')).submittal,
+  fluid: async () => (await import('./commands/fluid.ts')).fluid,
+  schema: async () => (await import('./commands/schema.ts')).schema,
+  explain: async () => (await import('./commands/explain.ts')).explain,
 }
 
 const usage = `coldfill VERB …
@@ -40,9 +37,9 @@ export const main = async (argv: readonly string[]): Promise<number> => {
     return exitStatus.ok
   }
   try {
-    const run = verb === undefined ? undefined : verbs[verb]
-    if (!run) throw new Stop(exitStatus.usage, verb === undefined ? usage : `There is no verb "${verb}".\n\n${usage}`)
-    return await run(args)
+    const load = verb !== undefined && Object.hasOwn(verbs, verb) ? verbs[verb] : undefined
+    if (!load) throw new Stop(exitStatus.usage, verb === undefined ? usage : `There is no verb "${verb}".\n\n${usage}`)
+    return await (await load())(args)
   } catch (error) {
     if (error instanceof Stop) {
       process.stderr.write(`${error.message}\n`)

@@ -122,6 +122,8 @@ export interface ProjectHeader {
 export interface ProjectResult {
   readonly engine: string
   readonly spec: 1
+  /** False where the text is no YAML, is refused, or is a spec of another version: then there is nothing but findings. */
+  readonly readable: boolean
   readonly project: ProjectHeader
   readonly systems: readonly SystemResult[]
   readonly vessels: readonly VesselResult[]

@@ -107,6 +107,7 @@ export const sizeProject = (
   return {
     engine: engineVersion,
     spec: 1,
+    readable: true,
     project: header(spec, elevation, atmosphere),
     systems,
     vessels,

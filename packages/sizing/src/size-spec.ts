@@ -8,6 +8,7 @@ import { vocabulary } from './vocabulary.ts'
 const nothing = (findings: ProjectResult['findings']): ProjectResult => ({
   engine: engineVersion,
   spec: 1,
+  readable: false,
   project: {
     number: '',
     title: '',
