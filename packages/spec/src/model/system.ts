@@ -1,5 +1,8 @@
 import { choice, quantity, text, yesNo } from './field.ts'
 
+/** A pressure is a gauge reading unless it says that it is absolute. */
+export const pressureReading = ['gauge pressure', 'absolute pressure'] as const
+
 export const serviceField = choice(
   {
     'heating water': 'closed loop that heats',
@@ -67,7 +70,7 @@ export const pressureFields = {
       least: 0,
     },
   ),
-  'relief-valve': quantity(['gauge pressure'], 'Set pressure of the relief valve.', '30 psi', { positive: true }),
+  'relief-valve': quantity(pressureReading, 'Set pressure of the relief valve.', '30 psi', { positive: true }),
   'relief-height': quantity(['length'], 'Height of the relief valve above (+) or below (-) the vessel.', '0 ft', {
     fallback: 'level with the vessel',
   }),
@@ -92,25 +95,20 @@ export const pressureFields = {
     'pump suction',
     { fallback: 'pump suction' },
   ),
-  fill: quantity(
-    ['gauge pressure'],
-    'Cold fill pressure at the vessel, given outright instead of worked out.',
-    '22 psi',
-    {
-      least: 0,
-    },
-  ),
+  fill: quantity(pressureReading, 'Cold fill pressure at the vessel, given outright instead of worked out.', '22 psi', {
+    least: 0,
+  }),
   maximum: quantity(
-    ['gauge pressure'],
+    pressureReading,
     'Highest pressure allowed at the vessel, given outright instead of worked out.',
     '27 psi',
     {
       positive: true,
     },
   ),
-  supply: quantity(['gauge pressure'], 'Pressure from the street main or the booster.', '95 psi', { positive: true }),
+  supply: quantity(pressureReading, 'Pressure from the street main or the booster.', '95 psi', { positive: true }),
   regulator: quantity(
-    ['gauge pressure'],
+    pressureReading,
     'Reduced pressure at the vessel, behind the pressure regulator. Left out where there is none.',
     '60 psi',
     {
@@ -118,8 +116,8 @@ export const pressureFields = {
     },
   ),
   'backflow-preventer': yesNo('Whether a backflow preventer or a check valve closes the system.', 'yes'),
-  'cut-in': quantity(['gauge pressure'], 'Pressure at which the pump starts.', '40 psi', { positive: true }),
-  'cut-out': quantity(['gauge pressure'], 'Pressure at which the pump stops.', '60 psi', { positive: true }),
+  'cut-in': quantity(pressureReading, 'Pressure at which the pump starts.', '40 psi', { positive: true }),
+  'cut-out': quantity(pressureReading, 'Pressure at which the pump stops.', '60 psi', { positive: true }),
 }
 
 export type TemperatureKey = keyof typeof temperatureFields

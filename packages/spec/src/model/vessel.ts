@@ -1,5 +1,5 @@
 import { choice, type Fields, integer, number, quantity, text } from './field.ts'
-import { hydronicServices, type Service } from './system.ts'
+import { hydronicServices, pressureReading, type Service } from './system.ts'
 
 /**
  * An input without which the vessel has no size: one of `keys` must be there. A key is a path inside the system
@@ -12,6 +12,8 @@ export interface Need {
   readonly to: string
   readonly only?: { readonly key: string; readonly is: readonly string[] }
   readonly unless?: { readonly key: string; readonly is: readonly string[] }
+  /** Keys of the vessel that ask for another method, so that this need does not hold. */
+  readonly liftedBy?: readonly string[]
 }
 
 export interface VesselKindDefinition {
@@ -55,7 +57,7 @@ const closedConstruction = choice(
   { fallback: 'diaphragm' },
 )
 
-const precharge = quantity(['gauge pressure'], 'Pressure of the gas when the vessel is empty of water.', '22 psi', {
+const precharge = quantity(pressureReading, 'Pressure of the gas when the vessel is empty of water.', '22 psi', {
   fallback: 'the pressure at which the vessel starts to take water',
   positive: true,
 })
@@ -275,7 +277,7 @@ export const vesselKinds = {
         },
         'Method by which the vessel is sized.',
         'run time',
-        { fallback: 'run time' },
+        { fallback: 'the method whose keys are given' },
       ),
       'source-minimum': quantity(['power'], 'Least output of the smallest source.', '96 MBH', { positive: true }),
       'load-minimum': quantity(['power'], 'Least load that can call alone.', '10 MBH', { least: 0 }),
@@ -305,9 +307,17 @@ export const vesselKinds = {
       'defrost-energy': quantity(['energy'], 'Heat that one defrost takes.', '3 kWh', { positive: true }),
     },
     needs: [
-      ...(['vessel.source-minimum', 'vessel.load-minimum', 'vessel.run-time', 'vessel.temperature-band'] as const).map(
-        (key): Need => ({ keys: [key], to: 'to be sized by run time', only: { key: 'method', is: ['', 'run time'] } }),
-      ),
+      ...(
+        ['vessel.source-minimum', 'vessel.load-minimum', 'vessel.run-time', 'vessel.temperature-band'] as const
+      ).flatMap((key): Need[] => [
+        { keys: [key], to: 'to be sized by run time', only: { key: 'method', is: ['run time'] } },
+        {
+          keys: [key],
+          to: 'to be sized by run time',
+          only: { key: 'method', is: [''] },
+          liftedBy: ['cooling-capacity', 'boiler-output', 'defrost-energy'],
+        },
+      ]),
       ...(['vessel.cooling-capacity', 'vessel.volume-per-ton'] as const).map((key): Need => ({
         keys: [key],
         to: 'to be sized by volume per ton',
@@ -345,7 +355,7 @@ export const vesselKinds = {
       'starts-per-hour': number('Most starts of the pump in an hour.', '6', { least: 0 }),
       'run-time': quantity(['time'], 'Least time that the pump runs.', '2 min', { positive: true }),
       drawdown: quantity(['volume'], 'Water given between cut-out and cut-in.', '25 gal', { positive: true }),
-      precharge: quantity(['gauge pressure'], 'Pressure of the gas when the vessel is empty of water.', '38 psi', {
+      precharge: quantity(pressureReading, 'Pressure of the gas when the vessel is empty of water.', '38 psi', {
         fallback: '2 psi below cut-in, and then an assumption',
         positive: true,
       }),
