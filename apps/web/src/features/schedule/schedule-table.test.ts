@@ -30,6 +30,7 @@ const vessel = (mark: string, more: Partial<Vessel>): Vessel => ({
 })
 const project = (vessels: readonly Vessel[]): ProjectResult => ({
   engine: '0',
+  readable: true,
   spec: 1,
   project: { number: 'N', title: 'T', client: '', location: '', units: 'US', elevation: 0, atmosphere: 101325, codes: {}, specSections: {} },
   systems: [{ id: 'HWS', title: 'Heating', path: 'systems.HWS', service: 'heating water', fluid: 'water', pressures: [], relief: null }],

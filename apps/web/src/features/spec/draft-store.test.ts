@@ -17,26 +17,26 @@ const shelf = (): Storage => {
 const owner = { user: 'u1', project: 'FC-241' }
 
 describe('drafts of a spec', () => {
-  it('keeps one draft for each version it was begun on, newest first', () => {
+  it('keeps one draft for each open editor, newest first', () => {
     const store = shelf()
-    keepDraft(store, owner, { text: 'old', baseVersion: 3, at: '2026-11-01T10:00:00Z' })
-    keepDraft(store, owner, { text: 'new', baseVersion: 4, at: '2026-11-02T10:00:00Z' })
-    keepDraft(store, owner, { text: 'newer', baseVersion: 4, at: '2026-11-02T11:00:00Z' })
+    keepDraft(store, owner, { slot: 'a', text: 'old', baseVersion: 4, at: '2026-11-01T10:00:00Z' })
+    keepDraft(store, owner, { slot: 'b', text: 'new', baseVersion: 4, at: '2026-11-02T10:00:00Z' })
+    keepDraft(store, owner, { slot: 'b', text: 'newer', baseVersion: 4, at: '2026-11-02T11:00:00Z' })
     expect(draftsOf(store, owner).map((draft) => draft.text)).toEqual(['newer', 'old'])
   })
 
   it('shows no draft of another person or another project', () => {
     const store = shelf()
-    keepDraft(store, owner, { text: 'mine', baseVersion: 1, at: '2026-11-01T10:00:00Z' })
+    keepDraft(store, owner, { slot: 'a', text: 'mine', baseVersion: 1, at: '2026-11-01T10:00:00Z' })
     expect(draftsOf(store, { ...owner, user: 'u' })).toEqual([])
     expect(draftsOf(store, { ...owner, project: 'FC-24' })).toEqual([])
   })
 
-  it('drops only the draft of the version that was saved', () => {
+  it('drops only the draft of the editor that saved', () => {
     const store = shelf()
-    keepDraft(store, owner, { text: 'one', baseVersion: 1, at: '2026-11-01T10:00:00Z' })
-    keepDraft(store, owner, { text: 'two', baseVersion: 2, at: '2026-11-01T10:00:00Z' })
-    dropDraft(store, owner, 1)
+    keepDraft(store, owner, { slot: 'a', text: 'one', baseVersion: 1, at: '2026-11-01T10:00:00Z' })
+    keepDraft(store, owner, { slot: 'b', text: 'two', baseVersion: 2, at: '2026-11-01T10:00:00Z' })
+    dropDraft(store, owner, 'a')
     expect(draftsOf(store, owner).map((draft) => draft.text)).toEqual(['two'])
   })
 
@@ -49,6 +49,6 @@ describe('drafts of a spec', () => {
 
   it('says so where the browser keeps nothing', () => {
     const store = { ...shelf(), setItem: () => { throw new Error('quota') } }
-    expect(keepDraft(store, owner, { text: 'x', baseVersion: 1, at: '' })).toBe(false)
+    expect(keepDraft(store, owner, { slot: 'a', text: 'x', baseVersion: 1, at: '' })).toBe(false)
   })
 })

@@ -1,8 +1,10 @@
 /**
- * Text of a spec that was typed and not saved, kept on this device until it is saved or thrown away. A draft belongs to a person,
- * a project and the version it was begun on, so that a newer version on the server never swallows it.
+ * Text of a spec that was typed and not saved, kept on this device until it is saved or thrown away. A draft belongs to a person
+ * and a project. It knows the version it was begun on, so that a newer one on the server never swallows it, and each open editor
+ * has a slot of its own, so that two tabs never overwrite each other's.
  */
 export interface Draft {
+  readonly slot: string
   readonly text: string
   readonly baseVersion: number
   /** ISO instant of the last keystroke kept. */
@@ -21,6 +23,8 @@ const prefix = (owner: DraftOwner) => `coldfill.draft.${encodeURIComponent(owner
 const isDraft = (value: unknown): value is Draft =>
   typeof value === 'object' &&
   value !== null &&
+  'slot' in value &&
+  typeof value.slot === 'string' &&
   'text' in value &&
   typeof value.text === 'string' &&
   'baseVersion' in value &&
@@ -41,16 +45,16 @@ const readDraft = (raw: string | null): Draft | null => {
 /** Says whether the draft was kept; a full or forbidden store says no, and the editor then warns. */
 export const keepDraft = (shelf: Shelf, owner: DraftOwner, draft: Draft): boolean => {
   try {
-    shelf.setItem(`${prefix(owner)}${draft.baseVersion}`, JSON.stringify(draft))
+    shelf.setItem(`${prefix(owner)}${draft.slot}`, JSON.stringify(draft))
     return true
   } catch {
     return false
   }
 }
 
-export const dropDraft = (shelf: Shelf, owner: DraftOwner, baseVersion: number): void => {
+export const dropDraft = (shelf: Shelf, owner: DraftOwner, slot: string): void => {
   try {
-    shelf.removeItem(`${prefix(owner)}${baseVersion}`)
+    shelf.removeItem(`${prefix(owner)}${slot}`)
   } catch {
     // Nothing is kept where the browser forbids it, so there is nothing to drop.
   }

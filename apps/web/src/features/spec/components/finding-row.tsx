@@ -1,0 +1,93 @@
+import { useState, type FormEvent } from 'react'
+import { Link } from 'react-router-dom'
+import { Button } from '#components/ui/button.tsx'
+import { TextField } from '#components/ui/field.tsx'
+import { SeverityMark } from '#components/ui/severity-mark.tsx'
+import { paths } from '#config/paths.ts'
+import type { Finding } from '#lib/sized-project.ts'
+
+interface Props {
+  readonly finding: Finding
+  /** Why the code matters, from the reference. */
+  readonly why: string | undefined
+  readonly readOnly: boolean
+  readonly chosen: boolean
+  readonly onJump: () => void
+  readonly onFix: (fix: Finding['fixes'][number]) => void
+  readonly onAccept: (reason: string) => void
+}
+
+const Accept = ({ onAccept, onCancel }: { readonly onAccept: (reason: string) => void; readonly onCancel: () => void }) => {
+  const [reason, setReason] = useState('')
+  return (
+    <form
+      className="flex max-w-xl items-end gap-2 pt-1"
+      onSubmit={(event: FormEvent) => {
+        event.preventDefault()
+        if (reason.trim() !== '') onAccept(reason)
+      }}
+    >
+      <div className="flex-1">
+        <TextField label="Accepted because" value={reason} onChange={(event) => setReason(event.target.value)} autoFocus />
+      </div>
+      <Button type="submit" why={reason.trim() === '' ? 'The reason is printed with the warning.' : null}>
+        Accept
+      </Button>
+      <Button look="quiet" onClick={onCancel}>
+        Cancel
+      </Button>
+    </form>
+  )
+}
+
+/** A finding in words: what, why, how to mend it, and the way to its place. */
+export const FindingRow = ({ finding, why, readOnly, chosen, onJump, onFix, onAccept }: Props) => {
+  const [accepting, setAccepting] = useState(false)
+  return (
+    <li className={`flex gap-2.5 border-b border-hair px-3 py-1.5 ${chosen ? 'bg-steel-wash' : ''}`}>
+      <span className="pt-0.5">
+        <SeverityMark severity={finding.severity} />
+      </span>
+      <div className="min-w-0 flex-1">
+        <button type="button" onClick={onJump} className="text-left hover:underline">
+          <span className="figures mr-2 text-pencil">Line {finding.range.start.line + 1}</span>
+          {finding.message}
+        </button>
+        {finding.accepted === undefined ? (
+          <p className="text-cell">
+            {finding.hint}
+            {why ? <span className="text-pencil"> {why}</span> : null}
+          </p>
+        ) : (
+          <p className="text-cell text-pencil">Accepted because {finding.accepted}</p>
+        )}
+        {accepting ? (
+          <Accept
+            onAccept={(reason) => {
+              setAccepting(false)
+              onAccept(reason)
+            }}
+            onCancel={() => setAccepting(false)}
+          />
+        ) : null}
+        {readOnly || accepting || finding.accepted !== undefined ? null : (
+          <div className="flex flex-wrap gap-2 empty:hidden">
+            {finding.fixes.map((fix) => (
+              <Button key={fix.title} small className="mt-1" onClick={() => onFix(fix)}>
+                {fix.title}
+              </Button>
+            ))}
+            {finding.severity === 'warning' ? (
+              <Button small className="mt-1" onClick={() => setAccepting(true)}>
+                Accept with a reason…
+              </Button>
+            ) : null}
+          </div>
+        )}
+      </div>
+      <Link to={paths.help(finding.code)} className="self-start font-mono text-cell" aria-label={`${finding.code}: help`}>
+        {finding.code}
+      </Link>
+    </li>
+  )
+}

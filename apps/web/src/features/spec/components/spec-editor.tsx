@@ -1,0 +1,114 @@
+import { indentWithTab } from '@codemirror/commands'
+import { yaml } from '@codemirror/lang-yaml'
+import { nextDiagnostic, previousDiagnostic } from '@codemirror/lint'
+import { openSearchPanel } from '@codemirror/search'
+import { EditorState, Prec, type Extension } from '@codemirror/state'
+import { EditorView, keymap } from '@codemirror/view'
+import CodeMirror from '@uiw/react-codemirror'
+import { useCallback, useEffect, useImperativeHandle, useMemo, useRef, useState, type Ref } from 'react'
+import type { Range } from '@coldfill/spec'
+import type { Finding } from '#lib/sized-project.ts'
+import { applyFix, findingGutter, offsetOf, showFindings } from '../editor/finding-marks.ts'
+import { resultMargin, showResults } from '../editor/result-margin.ts'
+import { editorTheme } from '../editor/theme.ts'
+import type { MarginEntry } from '../margin-lines.ts'
+
+export interface SpecEditorHandle {
+  readonly jumpTo: (range: Range) => void
+  readonly fix: (fix: Finding['fixes'][number]) => void
+  readonly insertLine: (line: number, insert: string) => void
+}
+
+interface Props {
+  readonly ref: Ref<SpecEditorHandle>
+  readonly text: string
+  readonly onChange: (text: string) => void
+  readonly onSave: () => void
+  readonly readOnly: boolean
+  readonly findings: readonly Finding[]
+  readonly entries: readonly MarginEntry[]
+  readonly stale: boolean
+  /** Zero-based line that has the cursor, and called for a click on a mark in the gutter. */
+  readonly onLine: (line: number) => void
+}
+
+const setup = { foldGutter: true, autocompletion: false, highlightActiveLine: true, lintKeymap: false, tabSize: 2 }
+const always: Extension = [
+  yaml(),
+  editorTheme(),
+  resultMargin(),
+  EditorView.lineWrapping,
+  EditorView.contentAttributes.of({ 'aria-label': 'Spec text. Press Escape, then Tab, to leave the editor.', spellcheck: 'false', autocorrect: 'off', autocapitalize: 'off' }),
+]
+
+/** The YAML editor of the spec: findings underlined and marked, results beside the lines. */
+export const SpecEditor = ({ ref, text, onChange, onSave, readOnly, findings, entries, stale, onLine }: Props) => {
+  const [view, setView] = useState<EditorView | null>(null)
+  const handlers = useRef({ onSave, onLine })
+  handlers.current = { onSave, onLine }
+
+  const jumpTo = useCallback(
+    (range: Range) => {
+      if (!view) return
+      const anchor = offsetOf(view.state.doc, range.start)
+      const head = Math.max(anchor, offsetOf(view.state.doc, range.end))
+      view.dispatch({ selection: { anchor, head }, effects: EditorView.scrollIntoView(anchor, { y: 'center' }) })
+      view.focus()
+    },
+    [view],
+  )
+  useImperativeHandle(
+    ref,
+    () => ({
+      jumpTo,
+      fix: (fix) => view && applyFix(view, fix),
+      insertLine: (line, insert) => view?.dispatch({ changes: { from: offsetOf(view.state.doc, { line, character: 0 }), insert }, userEvent: 'input' }),
+    }),
+    [jumpTo, view],
+  )
+
+  const extensions = useMemo(
+    () => [
+      always,
+      findingGutter((line) => handlers.current.onLine(line)),
+      Prec.highest(
+        keymap.of([
+          {
+            key: 'Mod-s',
+            preventDefault: true,
+            run: () => {
+              handlers.current.onSave()
+              return true
+            },
+          },
+          { key: 'F8', run: nextDiagnostic, shift: previousDiagnostic, preventDefault: true },
+          { key: 'Mod-f', run: openSearchPanel },
+        ]),
+      ),
+      keymap.of([indentWithTab]),
+      EditorState.readOnly.of(readOnly),
+    ],
+    [readOnly],
+  )
+
+  useEffect(() => {
+    if (view) view.dispatch(showFindings(view.state, findings))
+  }, [view, findings])
+  useEffect(() => {
+    if (view) view.dispatch(showResults(view.state, entries, stale))
+  }, [view, entries, stale])
+
+  return (
+    <CodeMirror
+      value={text}
+      onChange={onChange}
+      onCreateEditor={setView}
+      extensions={extensions}
+      basicSetup={setup}
+      indentWithTab={false}
+      theme="none"
+      height="100%"
+      className="h-full min-h-0"
+    />
+  )
+}
