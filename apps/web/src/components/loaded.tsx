@@ -27,7 +27,9 @@ export const Loaded = <T,>({ query, what, rows = 6, children }: Props<T>) => {
       }
     >
       {messageOf(query.error)}
-      {query.error instanceof ApiError && query.error.problem ? <span className="ml-2 font-mono text-cell text-pencil">{query.error.problem.instance}</span> : null}
+      {query.error instanceof ApiError && query.error.problem ? (
+        <span className="ml-2 font-mono text-cell text-pencil">{query.error.problem.instance}</span>
+      ) : null}
     </Band>
   ) : null
   if (query.data === undefined) return failed ?? <GhostRows rows={rows} what={what} />

@@ -8,12 +8,17 @@ import { ApiError, isStatus, messageOf } from '#lib/api-error.ts'
 export const RouteError = () => {
   const error = useRouteError()
   const { revalidate } = useRevalidator()
-  const missing = isStatus(error, 404) || isStatus(error, 403) || (typeof error === 'object' && error !== null && 'status' in error && error.status === 404)
+  const missing =
+    isStatus(error, 404) ||
+    isStatus(error, 403) ||
+    (typeof error === 'object' && error !== null && 'status' in error && error.status === 404)
   const reference = error instanceof ApiError ? error.problem?.instance : undefined
   if (!missing) console.error(error)
   return (
     <PlainSheet title={missing ? 'Not found' : 'This sheet did not open'}>
-      <p className="text-read">{missing ? 'There is nothing at this address, or it is not yours to see.' : messageOf(error)}</p>
+      <p className="text-read">
+        {missing ? 'There is nothing at this address, or it is not yours to see.' : messageOf(error)}
+      </p>
       {reference && !missing ? <p className="mt-2 font-mono text-cell text-pencil">Reference {reference}</p> : null}
       <div className="mt-6 flex gap-3">
         {missing ? null : (

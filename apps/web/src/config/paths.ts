@@ -17,9 +17,13 @@ export const paths = {
 }
 
 /** Adds query parameters to an address; empty ones are left out. */
-export const withQuery = (path: string, query: Readonly<Record<string, string | number | null | undefined>>): string => {
+export const withQuery = (
+  path: string,
+  query: Readonly<Record<string, string | number | null | undefined>>,
+): string => {
   const search = new URLSearchParams()
-  for (const [key, value] of Object.entries(query)) if (value !== null && value !== undefined && value !== '') search.set(key, String(value))
+  for (const [key, value] of Object.entries(query))
+    if (value !== null && value !== undefined && value !== '') search.set(key, String(value))
   const text = search.toString()
   return text === '' ? path : `${path}?${text}`
 }

@@ -31,7 +31,11 @@ const send = async (method: string, path: string, body: unknown, options: Option
 const read = async <T>(response: Response, schema: Schema<T>): Promise<T> => {
   const parsed = schema.safeParse(await response.json().catch(() => null))
   if (parsed.success) return parsed.data
-  throw new ApiError(response.status, 'unexpected_answer', 'The server and this page are of different versions. Reload the page.')
+  throw new ApiError(
+    response.status,
+    'unexpected_answer',
+    'The server and this page are of different versions. Reload the page.',
+  )
 }
 
 export const api = {

@@ -22,7 +22,11 @@ export const apiErrorFrom = async (response: Response): Promise<ApiError> => {
   const body: unknown = await response.json().catch(() => null)
   const problem = Problem.safeParse(body)
   if (!problem.success) {
-    return new ApiError(response.status, 'unreadable_answer', `The server answered ${response.status} without saying why.`)
+    return new ApiError(
+      response.status,
+      'unreadable_answer',
+      `The server answered ${response.status} without saying why.`,
+    )
   }
   return new ApiError(response.status, problem.data.code, problem.data.detail || problem.data.title, problem.data)
 }
@@ -33,8 +37,11 @@ export const messageOf = (error: unknown): string => {
   return 'Something in the page failed. Reload it; what you typed in the spec is kept on this device.'
 }
 
-export const isStatus = (error: unknown, status: number): boolean => error instanceof ApiError && error.status === status
+export const isStatus = (error: unknown, status: number): boolean =>
+  error instanceof ApiError && error.status === status
 
 /** The server's sentence about one field of the request, by JSON pointer. */
 export const fieldError = (error: unknown, pointer: string): string | null =>
-  error instanceof ApiError ? (error.problem?.errors?.find((issue) => issue.pointer === pointer)?.message ?? null) : null
+  error instanceof ApiError
+    ? (error.problem?.errors?.find((issue) => issue.pointer === pointer)?.message ?? null)
+    : null

@@ -10,7 +10,11 @@ describe('comparing two texts by lines', () => {
 
   it('sets a replaced line beside its replacement', () => {
     const rows = diffLines('a\nrelief: 30\nb', 'a\nrelief: 50\nb')
-    expect(rows[1]).toEqual({ kind: 'changed', left: { line: 2, text: 'relief: 30' }, right: { line: 2, text: 'relief: 50' } })
+    expect(rows[1]).toEqual({
+      kind: 'changed',
+      left: { line: 2, text: 'relief: 30' },
+      right: { line: 2, text: 'relief: 50' },
+    })
   })
 
   it('tells added and removed lines apart and keeps the line numbers of each side', () => {

@@ -25,7 +25,8 @@ const tails = (a: readonly string[], b: readonly string[]): Uint32Array[] => {
 type Step = { readonly take: 'both' | 'left' | 'right' }
 
 const middleSteps = (a: readonly string[], b: readonly string[]): Step[] => {
-  if (a.length * b.length > MOST_CELLS) return [...a.map((): Step => ({ take: 'left' })), ...b.map((): Step => ({ take: 'right' }))]
+  if (a.length * b.length > MOST_CELLS)
+    return [...a.map((): Step => ({ take: 'left' })), ...b.map((): Step => ({ take: 'right' }))]
   const table = tails(a, b)
   const steps: Step[] = []
   let i = 0
@@ -53,7 +54,8 @@ export const diffLines = (left: string, right: string): readonly DiffRow[] => {
   let head = 0
   while (head < a.length && head < b.length && a[head] === b[head]) head += 1
   let tail = 0
-  while (tail < a.length - head && tail < b.length - head && a[a.length - 1 - tail] === b[b.length - 1 - tail]) tail += 1
+  while (tail < a.length - head && tail < b.length - head && a[a.length - 1 - tail] === b[b.length - 1 - tail])
+    tail += 1
   const steps: Step[] = [
     ...Array.from({ length: head }, (): Step => ({ take: 'both' })),
     ...middleSteps(a.slice(head, a.length - tail), b.slice(head, b.length - tail)),

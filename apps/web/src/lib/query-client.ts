@@ -11,7 +11,9 @@ const noteSessionEnd = (error: unknown) => {
 
 export const queryClient = new QueryClient({
   // Asking who is signed in is answered by 401 before anyone is; that is no session that ended.
-  queryCache: new QueryCache({ onError: (error, query) => (query.queryKey[0] === 'session' ? undefined : noteSessionEnd(error)) }),
+  queryCache: new QueryCache({
+    onError: (error, query) => (query.queryKey[0] === 'session' ? undefined : noteSessionEnd(error)),
+  }),
   mutationCache: new MutationCache({ onError: noteSessionEnd }),
   defaultOptions: {
     queries: { staleTime: 10_000, retry: false, throwOnError: false },

@@ -54,7 +54,8 @@ export const useUnits = (ofProject: UnitSystem | undefined) => {
   const { get, change } = useAddress()
   const preferred = useStore(unitPreference)
   const asked = get('units')?.toUpperCase()
-  const units: UnitSystem = asked === 'US' || asked === 'SI' ? asked : preferred === 'project' ? (ofProject ?? 'US') : preferred
+  const units: UnitSystem =
+    asked === 'US' || asked === 'SI' ? asked : preferred === 'project' ? (ofProject ?? 'US') : preferred
   const setUnits = (next: UnitSystem) => change({ units: next.toLowerCase() }, { replace: true })
   return { units, setUnits }
 }

@@ -8,10 +8,12 @@ export type TraceStep = Extract<TraceEntry, { entry: 'step' }>
 export type TraceInput = Extract<TraceEntry, { entry: 'input' }>
 export type UsedAssumption = ProjectResult['assumptions'][number]
 export type Finding = ProjectResult['findings'][number]
-export type Citation = UsedAssumption['source']
 
 /** A citation in words: title, edition, locator, and the warning of one given from memory. */
-export const citationWords = (citation: Citation, sources: ProjectResult['sources']): string => {
+export const citationWords = (
+  citation: { readonly source: string; readonly locator: string; readonly fromMemory?: true | undefined },
+  sources: Readonly<Record<string, { readonly title: string; readonly edition: string }>>,
+): string => {
   const source = sources[citation.source]
   const title = source ? [source.title, source.edition].filter(Boolean).join(', ') : citation.source
   const memory = citation.fromMemory ? ' (from memory; verify against the adopted edition)' : ''

@@ -57,7 +57,12 @@ export function Component() {
         content: chosen ? (
           <div className="flex flex-col gap-4">
             {composing ? (
-              <RedlineComposer project={number} anchor={{ type: 'assumption', assumption: chosen.id }} quoted={chosen.value} onDone={() => setComposing(false)} />
+              <RedlineComposer
+                project={number}
+                anchor={{ type: 'assumption', assumption: chosen.id }}
+                quoted={chosen.value}
+                onDone={() => setComposing(false)}
+              />
             ) : (
               <>
                 <div>
@@ -72,7 +77,11 @@ export function Component() {
                     </Link>
                   </p>
                 ) : null}
-                <Button why={redline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')} showWhy onClick={() => setComposing(true)}>
+                <Button
+                  why={redline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')}
+                  showWhy
+                  onClick={() => setComposing(true)}
+                >
                   Start a redline
                 </Button>
               </>
@@ -92,9 +101,12 @@ export function Component() {
         {({ result }) => (
           <div className="flex max-w-5xl flex-col gap-8">
             <p className="text-read">
-              Every value that the spec leaves open, with its source and its reason. A value written in the spec takes the place of its assumption.
+              Every value that the spec leaves open, with its source and its reason. A value written in the spec takes
+              the place of its assumption.
             </p>
-            {used.length === 0 ? <p className="border-t-[3px] border-ink pt-3">Uses no assumption: every value is written in the spec.</p> : null}
+            {used.length === 0 ? (
+              <p className="border-t-[3px] border-ink pt-3">Uses no assumption: every value is written in the spec.</p>
+            ) : null}
             {groupAssumptions(used).map((group) => (
               <section key={group.title}>
                 <SectionHeading>{group.title}</SectionHeading>

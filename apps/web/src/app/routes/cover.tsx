@@ -9,18 +9,40 @@ import { RevisionBlock } from '#features/projects/components/revision-block.tsx'
 import { capital, plural } from '#lib/format.ts'
 import { useProjectNumber } from '#lib/route-params.ts'
 
-const memberWords = (member: Member): string => member.roles.map((role) => (role === 'reviewer' && member.requiredReviewer ? 'reviewer, required' : role)).join(', ')
+const memberWords = (member: Member): string =>
+  member.roles.map((role) => (role === 'reviewer' && member.requiredReviewer ? 'reviewer, required' : role)).join(', ')
 
 export function Component() {
   const number = useProjectNumber()
   const project = useProject(number)
   const working = project.workingCopyDiffers
-  const sheetStates: readonly { readonly sheet: 'spec' | 'schedule' | 'basis' | 'redlines' | 'issue'; readonly says: string }[] = [
-    { sheet: 'spec', says: project.permissions.editSpec.allowed ? (working === false ? 'Says what the newest revision says' : 'Has changes that are not issued') : (project.permissions.editSpec.why ?? 'Read only') },
-    { sheet: 'schedule', says: project.permissions.seeWorkingCopy.allowed ? 'Sizes of the working copy and of every revision' : 'Sizes of the issued revisions' },
+  const sheetStates: readonly {
+    readonly sheet: 'spec' | 'schedule' | 'basis' | 'redlines' | 'issue'
+    readonly says: string
+  }[] = [
+    {
+      sheet: 'spec',
+      says: project.permissions.editSpec.allowed
+        ? working === false
+          ? 'Says what the newest revision says'
+          : 'Has changes that are not issued'
+        : (project.permissions.editSpec.why ?? 'Read only'),
+    },
+    {
+      sheet: 'schedule',
+      says: project.permissions.seeWorkingCopy.allowed
+        ? 'Sizes of the working copy and of every revision'
+        : 'Sizes of the issued revisions',
+    },
     { sheet: 'basis', says: 'Assumptions, sources, accepted warnings' },
-    { sheet: 'redlines', says: project.openRedlines === 0 ? 'None open' : `${plural(project.openRedlines, 'redline')} open` },
-    { sheet: 'issue', says: project.revisions.length === 0 ? 'Nothing issued yet' : plural(project.revisions.length, 'revision') },
+    {
+      sheet: 'redlines',
+      says: project.openRedlines === 0 ? 'None open' : `${plural(project.openRedlines, 'redline')} open`,
+    },
+    {
+      sheet: 'issue',
+      says: project.revisions.length === 0 ? 'Nothing issued yet' : plural(project.revisions.length, 'revision'),
+    },
   ]
   return (
     <Sheet title={project.title} tab={`${project.number} Cover`}>
@@ -73,7 +95,10 @@ export function Component() {
             {sheetStates
               .filter(({ sheet }) => project.sheets.includes(sheet))
               .map(({ sheet, says }, at) => (
-                <li key={sheet} className="grid grid-cols-[1.5rem_7rem_minmax(0,1fr)] gap-x-3 border-b border-hair py-2">
+                <li
+                  key={sheet}
+                  className="grid grid-cols-[1.5rem_7rem_minmax(0,1fr)] gap-x-3 border-b border-hair py-2"
+                >
                   <span aria-hidden="true" className="font-mono text-pencil">
                     {at + 1}
                   </span>
@@ -87,7 +112,11 @@ export function Component() {
         </section>
         <section>
           <SectionHeading>Revision block</SectionHeading>
-          {project.revisions.length === 0 ? <p className="border-t-2 border-ink pt-2 text-pencil">No revision yet. The first issue has no letter.</p> : <RevisionBlock project={project} />}
+          {project.revisions.length === 0 ? (
+            <p className="border-t-2 border-ink pt-2 text-pencil">No revision yet. The first issue has no letter.</p>
+          ) : (
+            <RevisionBlock project={project} />
+          )}
         </section>
       </div>
     </Sheet>

@@ -14,7 +14,9 @@ import { requireParam, useProjectNumber } from '#lib/route-params.ts'
 import { useAddress, useUnits } from '#lib/search-params.ts'
 
 export const loader = ({ params, request }: LoaderFunctionArgs) =>
-  queryClient.ensureQueryData(handoverQuery(requireParam(params, 'project'), new URL(request.url).searchParams.get('rev')))
+  queryClient.ensureQueryData(
+    handoverQuery(requireParam(params, 'project'), new URL(request.url).searchParams.get('rev')),
+  )
 
 export function Component() {
   const number = useProjectNumber()
@@ -29,9 +31,22 @@ export function Component() {
         <TitleStrip
           fields={[
             { caption: 'Prepared for', value: handover?.project.client || '—', room: 'wide' },
-            { caption: 'Title', value: handover ? `${handover.project.number} ${handover.project.title}` : number, room: 'always', grows: true },
-            { caption: 'Status', value: handover?.current ? 'Issued for construction' : 'Not for construction', room: 'always' },
-            { caption: 'Revision', value: handover?.current ? handover.current.revision || 'First issue' : '—', room: 'always' },
+            {
+              caption: 'Title',
+              value: handover ? `${handover.project.number} ${handover.project.title}` : number,
+              room: 'always',
+              grows: true,
+            },
+            {
+              caption: 'Status',
+              value: handover?.current ? 'Issued for construction' : 'Not for construction',
+              room: 'always',
+            },
+            {
+              caption: 'Revision',
+              value: handover?.current ? handover.current.revision || 'First issue' : '—',
+              room: 'always',
+            },
             { caption: 'Prepared by', value: handover?.project.office ?? '—', room: 'wide' },
           ]}
         />

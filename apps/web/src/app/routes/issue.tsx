@@ -10,7 +10,11 @@ export function Component() {
   const number = useProjectNumber()
   const project = useProject(number)
   const newest = project.revisions[0]
-  const open = newest && newest.state !== 'issued for construction' && newest.state !== 'withdrawn' && newest.state !== 'superseded'
+  const open =
+    newest &&
+    newest.state !== 'issued for construction' &&
+    newest.state !== 'withdrawn' &&
+    newest.state !== 'superseded'
   const consultant = project.roles.includes('consultant')
   return (
     <Sheet title="Issue">
@@ -19,7 +23,9 @@ export function Component() {
         {consultant ? <ReviewIssue project={project} /> : null}
         <section className="flex flex-col gap-4">
           <SectionHeading>Revisions</SectionHeading>
-          {project.revisions.length === 0 ? <p className="border-t-2 border-ink pt-2 text-pencil">Nothing is issued yet.</p> : null}
+          {project.revisions.length === 0 ? (
+            <p className="border-t-2 border-ink pt-2 text-pencil">Nothing is issued yet.</p>
+          ) : null}
           {project.revisions.map((revision) => (
             <RevisionEntry key={revision.id} project={project} revision={revision} />
           ))}

@@ -12,7 +12,8 @@ import { useSession } from '#features/session/api/session.ts'
 import { queryClient } from '#lib/query-client.ts'
 import { requireParam, useProjectNumber } from '#lib/route-params.ts'
 
-export const loader = ({ params }: LoaderFunctionArgs) => queryClient.ensureQueryData(projectQuery(requireParam(params, 'project')))
+export const loader = ({ params }: LoaderFunctionArgs) =>
+  queryClient.ensureQueryData(projectQuery(requireParam(params, 'project')))
 
 type Drawn = Exclude<SheetName, 'handover'>
 const sheets: readonly { readonly sheet: Drawn; readonly name: string }[] = [
@@ -30,7 +31,10 @@ export function Component() {
   const session = useSession()
   const { pathname } = useLocation()
   const [search] = useSearchParams()
-  const redlines = useQuery({ ...redlinesQuery(number, search.get('rev')), enabled: project.sheets.includes('redlines') })
+  const redlines = useQuery({
+    ...redlinesQuery(number, search.get('rev')),
+    enabled: project.sheets.includes('redlines'),
+  })
   const kept = { units: search.get('units'), rev: search.get('rev') }
 
   const links: SheetLink[] = sheets.flatMap(({ sheet, name }, at) =>
@@ -59,11 +63,20 @@ export function Component() {
     { name: 'Help', to: paths.help() },
     { name: session.user.initials, to: paths.you() },
   ]
-  const here = sheets.findLastIndex(({ sheet }) => pathname === paths[sheet](number) || pathname.startsWith(`${paths[sheet](number)}/`))
+  const here = sheets.findLastIndex(
+    ({ sheet }) => pathname === paths[sheet](number) || pathname.startsWith(`${paths[sheet](number)}/`),
+  )
 
   return (
     <Frame
-      list={<SheetList label="Sheets" heading={<span className="font-mono font-semibold">{project.number}</span>} sheets={links} others={others} />}
+      list={
+        <SheetList
+          label="Sheets"
+          heading={<span className="font-mono font-semibold">{project.number}</span>}
+          sheets={links}
+          others={others}
+        />
+      }
       tray={<PendingTray project={number} redlines={redlines.data ?? []} />}
       strip={<ProjectStrip project={project} sheet={`${Math.max(here, 0)} of ${sheets.length - 1}`} />}
     >

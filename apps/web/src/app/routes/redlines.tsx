@@ -16,11 +16,21 @@ import { RevisionSwitch } from '#features/results/components/revision-switch.tsx
 import { useProjectNumber } from '#lib/route-params.ts'
 import { useAddress } from '#lib/search-params.ts'
 
-const ReviewMargin = ({ project, redlines, onSent }: { readonly project: Project; readonly redlines: readonly Redline[]; readonly onSent: () => void }) => {
+const ReviewMargin = ({
+  project,
+  redlines,
+  onSent,
+}: {
+  readonly project: Project
+  readonly redlines: readonly Redline[]
+  readonly onSent: () => void
+}) => {
   const { dispose } = project.permissions
   const newest = project.revisions[0]
-  if (!newest) return <p className="text-pencil">Nothing is issued for review yet, so there is nothing to set a disposition on.</p>
-  if (!project.roles.includes('reviewer')) return <p className="text-pencil">{dispose.why ?? 'Reviewers set the disposition.'}</p>
+  if (!newest)
+    return <p className="text-pencil">Nothing is issued for review yet, so there is nothing to set a disposition on.</p>
+  if (!project.roles.includes('reviewer'))
+    return <p className="text-pencil">{dispose.why ?? 'Reviewers set the disposition.'}</p>
   return (
     <SendReview
       project={project.number}
@@ -57,7 +67,13 @@ export function Component() {
       actions={<RevisionSwitch project={project} />}
       margin={{
         title: 'Review',
-        content: <ReviewMargin project={project} redlines={query.data ?? []} onSent={() => change({ filter: null, thread: null })} />,
+        content: (
+          <ReviewMargin
+            project={project}
+            redlines={query.data ?? []}
+            onSent={() => change({ filter: null, thread: null })}
+          />
+        ),
       }}
     >
       <Loaded query={query} what="Loading the redlines">
@@ -69,7 +85,11 @@ export function Component() {
                 <Dispositions dispositions={looked.dispositions} />
               </section>
             ) : null}
-            <RedlineFilters redlines={redlines} filter={filter} onChoose={(one) => change({ filter: one, thread: null }, { replace: true })} />
+            <RedlineFilters
+              redlines={redlines}
+              filter={filter}
+              onChoose={(one) => change({ filter: one, thread: null }, { replace: true })}
+            />
             {list.length === 0 ? (
               <div className="border-t-[3px] border-ink pt-3">
                 <p className="text-read">{filter === 'waiting' ? 'Nothing waits on you.' : 'No redline here.'}</p>
@@ -81,9 +101,17 @@ export function Component() {
               </div>
             ) : (
               <div className="grid gap-x-8 gap-y-6 zones:grid-cols-[minmax(0,20rem)_minmax(0,1fr)]">
-                <RedlineList redlines={list} chosen={thread?.number ?? null} onChoose={(one) => change({ thread: String(one) })} />
+                <RedlineList
+                  redlines={list}
+                  chosen={thread?.number ?? null}
+                  onChoose={(one) => change({ thread: String(one) })}
+                />
                 <div className="border-t-[3px] border-ink pt-3">
-                  {thread ? <RedlineThread key={thread.number} project={number} redline={thread} rev={rev} /> : <p className="text-pencil">Choose a redline to read it.</p>}
+                  {thread ? (
+                    <RedlineThread key={thread.number} project={number} redline={thread} rev={rev} />
+                  ) : (
+                    <p className="text-pencil">Choose a redline to read it.</p>
+                  )}
                 </div>
               </div>
             )}

@@ -30,9 +30,25 @@ interface Props {
 
 /** Margin of the schedule: the trace of the chosen cell, and the redlines that stand on it. */
 export const ScheduleMargin = (props: Props) => {
-  const { project, result, units, rev, row, column, heading, anchor, redlines, composing, onCompose, onComposed, sought } = props
-  if (sought !== null) return <p>There is no {sought} in this content. Its redlines are kept on the Redlines sheet, adrift.</p>
-  if (!result || !row || !anchor) return <p className="text-pencil">Choose a cell to see how its number was worked out.</p>
+  const {
+    project,
+    result,
+    units,
+    rev,
+    row,
+    column,
+    heading,
+    anchor,
+    redlines,
+    composing,
+    onCompose,
+    onComposed,
+    sought,
+  } = props
+  if (sought !== null)
+    return <p>There is no {sought} in this content. Its redlines are kept on the Redlines sheet, adrift.</p>
+  if (!result || !row || !anchor)
+    return <p className="text-pencil">Choose a cell to see how its number was worked out.</p>
 
   const value = row.vessel.results[column]
   const quoted = (of: Anchor): string => {
@@ -46,7 +62,13 @@ export const ScheduleMargin = (props: Props) => {
   return (
     <div className="flex flex-col gap-5">
       {composing ? (
-        <RedlineComposer key={placeOf(composing)} project={project.number} anchor={composing} quoted={quoted(composing)} onDone={onComposed} />
+        <RedlineComposer
+          key={placeOf(composing)}
+          project={project.number}
+          anchor={composing}
+          quoted={quoted(composing)}
+          onDone={onComposed}
+        />
       ) : (
         <>
           <TracePanel
@@ -60,7 +82,11 @@ export const ScheduleMargin = (props: Props) => {
             without={<WithoutTrace row={row} column={column} heading={heading} project={project} />}
           />
           <div className="border-t-2 border-ink pt-3">
-            <Button why={redline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')} showWhy onClick={onCompose}>
+            <Button
+              why={redline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')}
+              showWhy
+              onClick={onCompose}
+            >
               Start a redline
             </Button>
           </div>
@@ -76,16 +102,36 @@ export const ScheduleMargin = (props: Props) => {
 }
 
 /** What to say of a cell that has no calculation: why there is no size, or simply what it shows. */
-const WithoutTrace = ({ row, column, heading, project }: { readonly row: Row; readonly column: string; readonly heading: string; readonly project: Project }) => {
+const WithoutTrace = ({
+  row,
+  column,
+  heading,
+  project,
+}: {
+  readonly row: Row
+  readonly column: string
+  readonly heading: string
+  readonly project: Project
+}) => {
   const { vessel } = row
   const text = row.cells[column]?.text
   return (
     <div className="flex flex-col gap-2 text-ink">
       <p className="font-mono text-cell text-pencil">{vessel.mark}</p>
-      {column === 'mark' ? <p className="font-semibold">{vessel.serves}</p> : <p className="flex justify-between gap-3"><strong className="font-semibold">{heading}</strong><span>{text}</span></p>}
+      {column === 'mark' ? (
+        <p className="font-semibold">{vessel.serves}</p>
+      ) : (
+        <p className="flex justify-between gap-3">
+          <strong className="font-semibold">{heading}</strong>
+          <span>{text}</span>
+        </p>
+      )}
       {vessel.status === 'sized' ? null : (
         <p>
-          <strong className="font-semibold text-fault">{vessel.status === 'infeasible' ? 'No vessel can do it.' : 'Not sized: an input is missing or wrong.'}</strong> {vessel.reason}
+          <strong className="font-semibold text-fault">
+            {vessel.status === 'infeasible' ? 'No vessel can do it.' : 'Not sized: an input is missing or wrong.'}
+          </strong>{' '}
+          {vessel.reason}
         </p>
       )}
       {column === 'mark' ? (
@@ -93,7 +139,9 @@ const WithoutTrace = ({ row, column, heading, project }: { readonly row: Row; re
           {vessel.methodTitle}, method {vessel.method}
         </p>
       ) : null}
-      {project.sheets.includes('spec') ? <Link to={withQuery(paths.spec(project.number), { path: vessel.path })}>Go to {vessel.mark} in the spec</Link> : null}
+      {project.sheets.includes('spec') ? (
+        <Link to={withQuery(paths.spec(project.number), { path: vessel.path })}>Go to {vessel.mark} in the spec</Link>
+      ) : null}
     </div>
   )
 }

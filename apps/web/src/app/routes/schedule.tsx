@@ -39,7 +39,10 @@ export function Component() {
   const places = useMemo(() => redlinesByPlace(redlines.data ?? []), [redlines.data])
   const changed = results.data?.changedSince ?? null
   const showChanges = get('changed') !== '0'
-  const changes = useMemo(() => (changed && showChanges ? changesByPlace(changed.vessels) : null), [changed, showChanges])
+  const changes = useMemo(
+    () => (changed && showChanges ? changesByPlace(changed.vessels) : null),
+    [changed, showChanges],
+  )
   const letter = results.data?.revision ?? project.nextRevision
 
   // A row of the address is a mark, or a system and a mark where two systems use the same one.
@@ -69,12 +72,21 @@ export function Component() {
   }
 
   const marks = (of: Row, key: string): CellMarks => {
-    const flags = (places.get(key === 'mark' ? `row ${of.vessel.mark}` : `cell ${of.vessel.mark} ${key}`) ?? []).map((redline) => (
-      <Flag key={redline.number} number={redline.number} state={redline.state} />
-    ))
+    const flags = (places.get(key === 'mark' ? `row ${of.vessel.mark}` : `cell ${of.vessel.mark} ${key}`) ?? []).map(
+      (redline) => <Flag key={redline.number} number={redline.number} state={redline.state} />,
+    )
     const ownChanges = changes?.get(of.id)
     const own = ownChanges?.get(key)
-    if (key === 'mark') return { after: ownChanges || flags.length ? <>{ownChanges ? <RevisionTriangle letter={letter} /> : null}{flags}</> : null }
+    if (key === 'mark')
+      return {
+        after:
+          ownChanges || flags.length ? (
+            <>
+              {ownChanges ? <RevisionTriangle letter={letter} /> : null}
+              {flags}
+            </>
+          ) : null,
+      }
     const now = of.cells[key]?.text ?? '—'
     return {
       ...(own ? { around: <Scallop />, value: <WasNow was={changeWords(own, units, now)} now={now} /> } : {}),
@@ -90,11 +102,21 @@ export function Component() {
           <RevisionSwitch project={project} />
           {changed ? (
             <label className="inline-flex h-8 items-center gap-1.5 text-cell font-semibold">
-              <input type="checkbox" className="size-4 accent-steel" checked={showChanges} onChange={(event) => change({ changed: event.target.checked ? null : '0' }, { replace: true })} />
-              Changed since {changed.revision === '' ? 'the first issue' : `Rev ${changed.revision}`} ({changed.vessels.length})
+              <input
+                type="checkbox"
+                className="size-4 accent-steel"
+                checked={showChanges}
+                onChange={(event) => change({ changed: event.target.checked ? null : '0' }, { replace: true })}
+              />
+              Changed since {changed.revision === '' ? 'the first issue' : `Rev ${changed.revision}`} (
+              {changed.vessels.length})
             </label>
           ) : null}
-          <ColumnMenu tables={tables} hidden={hidden} onChange={(next) => change({ hide: [...next].join(',') || null }, { replace: true })} />
+          <ColumnMenu
+            tables={tables}
+            hidden={hidden}
+            onChange={(next) => change({ hide: [...next].join(',') || null }, { replace: true })}
+          />
           <UnitsSwitch units={units} onChoose={setUnits} />
         </>
       }
@@ -126,7 +148,10 @@ export function Component() {
             <div className="border-t-[3px] border-ink pt-3 text-read">
               <p>No vessels declared yet.</p>
               {project.sheets.includes('spec') ? (
-                <Link className={`${buttonClass('plain')} mt-3`} to={withQuery(paths.spec(number), { path: 'systems' })}>
+                <Link
+                  className={`${buttonClass('plain')} mt-3`}
+                  to={withQuery(paths.spec(number), { path: 'systems' })}
+                >
                   Declare one in the spec
                 </Link>
               ) : null}

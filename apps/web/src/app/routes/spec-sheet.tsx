@@ -46,8 +46,14 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
   const typed = useSizing(number, text, !readOnly)
   const saved = useQuery({ ...resultsQuery(number, null), enabled: readOnly })
   const newest = project.revisions[0]
-  const issued = useQuery({ ...resultsQuery(number, newest ? revisionSegment(newest.label) : null), enabled: newest !== undefined && !readOnly })
-  const savedAnswer = useMemo(() => (saved.data ? { result: saved.data.result, text: document.text, at: document.savedAt } : null), [saved.data, document])
+  const issued = useQuery({
+    ...resultsQuery(number, newest ? revisionSegment(newest.label) : null),
+    enabled: newest !== undefined && !readOnly,
+  })
+  const savedAnswer = useMemo(
+    () => (saved.data ? { result: saved.data.result, text: document.text, at: document.savedAt } : null),
+    [saved.data, document],
+  )
   const latest = readOnly ? savedAnswer : typed.latest
   const good = readOnly ? savedAnswer : typed.good
   const stale = good === null || good.text !== text
@@ -62,7 +68,10 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
   )
   const lastModel = useRef(reading?.model ?? null)
   if (reading?.model) lastModel.current = reading.model
-  const entries = useMemo(() => marginEntries(reading?.model ?? lastModel.current, good?.result ?? null, issued.data?.result ?? null, units), [reading, good, issued.data, units])
+  const entries = useMemo(
+    () => marginEntries(reading?.model ?? lastModel.current, good?.result ?? null, issued.data?.result ?? null, units),
+    [reading, good, issued.data, units],
+  )
 
   // An address may name a line or a path; it is gone to once.
   const gone = useRef(false)
@@ -96,13 +105,28 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
       actions={
         <>
           <span className="text-cell text-pencil" role="status">
-            {draft.saving ? 'Saving…' : dirty ? (draft.kept ? 'Not saved; kept on this device' : 'Not saved, and this browser keeps no draft') : `Saved ${clock(base.savedAt)}, version ${base.version}`}
+            {draft.saving
+              ? 'Saving…'
+              : dirty
+                ? draft.kept
+                  ? 'Not saved; kept on this device'
+                  : 'Not saved, and this browser keeps no draft'
+                : `Saved ${clock(base.savedAt)}, version ${base.version}`}
           </span>
           <UnitsSwitch units={units} onChoose={setUnits} />
-          <Button why={dirty ? null : 'Nothing differs from the saved text.'} aria-pressed={compared !== null} onClick={() => setCompared(compared ? null : { title: `Saved version ${base.version}`, text: base.text })}>
+          <Button
+            why={dirty ? null : 'Nothing differs from the saved text.'}
+            aria-pressed={compared !== null}
+            onClick={() => setCompared(compared ? null : { title: `Saved version ${base.version}`, text: base.text })}
+          >
             Compare
           </Button>
-          <Button look="main" busy={draft.saving} why={readOnly ? document.readOnly?.reason : dirty ? null : 'Everything is saved.'} onClick={() => void draft.save()}>
+          <Button
+            look="main"
+            busy={draft.saving}
+            why={readOnly ? document.readOnly?.reason : dirty ? null : 'Everything is saved.'}
+            onClick={() => void draft.save()}
+          >
             Save
           </Button>
         </>
@@ -117,7 +141,12 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
     >
       <div className="flex min-h-0 flex-1 border-t-2 border-ink">
         <div className="hidden w-52 shrink-0 zones:block">
-          <Outline model={reading?.model ?? lastModel.current} entries={entries} stale={stale} onJump={(range) => editor.current?.jumpTo(range)} />
+          <Outline
+            model={reading?.model ?? lastModel.current}
+            entries={entries}
+            stale={stale}
+            onJump={(range) => editor.current?.jumpTo(range)}
+          />
         </div>
         <div className="relative min-h-0 min-w-0 flex-1">
           <div className="absolute inset-0">

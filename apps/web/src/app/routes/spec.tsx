@@ -21,7 +21,15 @@ export function Component() {
   const document = useQuery(specQuery(number))
   const reference = useQuery(referenceQuery)
   if (document.data) {
-    return <SpecSheet key={`${user.id} ${number}`} project={project} user={user.id} document={document.data} reference={reference} />
+    return (
+      <SpecSheet
+        key={`${user.id} ${number}`}
+        project={project}
+        user={user.id}
+        document={document.data}
+        reference={reference}
+      />
+    )
   }
   return (
     <Sheet title="Spec">

@@ -44,7 +44,17 @@ export function Component() {
   }
 
   return (
-    <Sheet title="You" actions={<Button onClick={() => void leave()}>Sign out</Button>} bands={error ? <Band tone="error" live="alert">{messageOf(error)}</Band> : null}>
+    <Sheet
+      title="You"
+      actions={<Button onClick={() => void leave()}>Sign out</Button>}
+      bands={
+        error ? (
+          <Band tone="error" live="alert">
+            {messageOf(error)}
+          </Band>
+        ) : null
+      }
+    >
       <div className="flex max-w-3xl flex-col gap-8">
         <dl className="grid grid-cols-[8rem_minmax(0,1fr)] gap-y-1.5 border-t-[3px] border-ink pt-3">
           <dt className="text-pencil">Name</dt>
@@ -91,7 +101,10 @@ export function Component() {
           <SectionHeading>Keys</SectionHeading>
           <dl className="border-t border-hair">
             {shortcuts.map(([keys, where, does]) => (
-              <div key={keys} className="grid gap-x-4 border-b border-hair py-1.5 desk:grid-cols-[17rem_6rem_minmax(0,1fr)]">
+              <div
+                key={keys}
+                className="grid gap-x-4 border-b border-hair py-1.5 desk:grid-cols-[17rem_6rem_minmax(0,1fr)]"
+              >
                 <dt className="font-mono text-cell">{keys}</dt>
                 <dd className="text-pencil">{where}</dd>
                 <dd>{does}</dd>

@@ -47,7 +47,10 @@ export const Frame = ({ list, children, tray, strip }: Props) => {
             live="alert"
             title="Your session has ended."
             actions={
-              <a className={buttonClass('main')} href={paths.signIn(`${window.location.pathname}${window.location.search}`)}>
+              <a
+                className={buttonClass('main')}
+                href={paths.signIn(`${window.location.pathname}${window.location.search}`)}
+              >
                 Sign in again
               </a>
             }

@@ -44,7 +44,10 @@ interface Props {
 
 /** Navigation by sheet numbers: a column at the left, a row on top where the window is narrow. */
 export const SheetList = ({ label, heading, sheets, others }: Props) => (
-  <nav aria-label={label} className="flex min-h-0 min-w-0 border-ink bg-paper max-bench:items-center max-bench:border-b-2 bench:flex-col bench:overflow-y-auto bench:border-r-2 print:hidden">
+  <nav
+    aria-label={label}
+    className="flex min-h-0 min-w-0 border-ink bg-paper max-bench:items-center max-bench:border-b-2 bench:flex-col bench:overflow-y-auto bench:border-r-2 print:hidden"
+  >
     <div className="shrink-0 px-3 py-2 max-bench:py-0 bench:pt-3 bench:pb-4">{heading}</div>
     <div className="flex min-w-0 flex-1 overflow-x-auto bench:flex-col bench:overflow-x-visible">
       <ul className="flex bench:flex-col">

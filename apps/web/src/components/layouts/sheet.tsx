@@ -37,12 +37,20 @@ export const Sheet = ({ title, tab, actions, bands, fills = false, margin, child
   }, [tab, title])
   return (
     <>
-      <main id="sheet" tabIndex={-1} className="flex min-h-0 min-w-0 flex-col outline-none zones:pr-2 zones:pb-2 print:block">
+      <main
+        id="sheet"
+        tabIndex={-1}
+        className="flex min-h-0 min-w-0 flex-col outline-none zones:pr-2 zones:pb-2 print:block"
+      >
         <Zones side="top" />
         <div className="flex min-h-0 min-w-0 flex-1 print:block">
           <Zones side="left" />
-          <div className={`min-h-0 min-w-0 flex-1 bg-sheet zones:border-2 zones:border-ink print:border-0 ${fills ? 'flex flex-col' : 'overflow-y-auto print:overflow-visible'}`}>
-            <div className={`flex shrink-0 flex-wrap items-center justify-between gap-x-6 gap-y-2 px-4 pt-4 pb-3 desk:px-6 ${fills ? 'desk:pt-3 desk:pb-2' : 'desk:pt-5'}`}>
+          <div
+            className={`min-h-0 min-w-0 flex-1 bg-sheet zones:border-2 zones:border-ink print:border-0 ${fills ? 'flex flex-col' : 'overflow-y-auto print:overflow-visible'}`}
+          >
+            <div
+              className={`flex shrink-0 flex-wrap items-center justify-between gap-x-6 gap-y-2 px-4 pt-4 pb-3 desk:px-6 ${fills ? 'desk:pt-3 desk:pb-2' : 'desk:pt-5'}`}
+            >
               <h1 className="text-title font-title">{title}</h1>
               {actions ? <div className="flex flex-wrap items-center gap-2 print:hidden">{actions}</div> : null}
             </div>

@@ -17,7 +17,10 @@ const rooms = { always: 'flex', desk: 'hidden desk:flex', wide: 'hidden bench:fl
 export const TitleStrip = ({ fields }: { readonly fields: readonly StripField[] }) => (
   <dl className="flex h-[53px] min-w-0 divide-x divide-rule">
     {fields.map((field) => (
-      <div key={field.caption} className={`min-w-0 flex-col justify-center px-3 ${rooms[field.room ?? 'desk']} ${field.grows ? 'flex-1' : 'max-w-60'}`}>
+      <div
+        key={field.caption}
+        className={`min-w-0 flex-col justify-center px-3 ${rooms[field.room ?? 'desk']} ${field.grows ? 'flex-1' : 'max-w-60'}`}
+      >
         <dt>
           <Caption>{field.caption}</Caption>
         </dt>

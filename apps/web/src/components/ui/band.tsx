@@ -21,7 +21,10 @@ interface Props {
 
 /** A line of text that holds for the whole sheet: read only, superseded, stale, failed. */
 export const Band = ({ tone = 'note', title, children, actions, live }: Props) => (
-  <div role={live} className={`flex flex-wrap items-center gap-x-4 gap-y-2 border-l-[3px] px-3 py-2 text-ink ${tones[tone]}`}>
+  <div
+    role={live}
+    className={`flex flex-wrap items-center gap-x-4 gap-y-2 border-l-[3px] px-3 py-2 text-ink ${tones[tone]}`}
+  >
     <div className="min-w-0 flex-1 basis-64">
       {title ? <p className="font-semibold">{title}</p> : null}
       {children ? <div className={title ? 'mt-0.5' : ''}>{children}</div> : null}

@@ -24,7 +24,18 @@ interface Props extends Omit<ButtonHTMLAttributes<HTMLButtonElement>, 'disabled'
   readonly children: ReactNode
 }
 
-export const Button = ({ look = 'plain', small = false, why, showWhy = false, busy = false, onClick, children, className = '', type = 'button', ...rest }: Props) => {
+export const Button = ({
+  look = 'plain',
+  small = false,
+  why,
+  showWhy = false,
+  busy = false,
+  onClick,
+  children,
+  className = '',
+  type = 'button',
+  ...rest
+}: Props) => {
   const off = why !== null && why !== undefined && why !== ''
   const id = rest.id ?? undefined
   const size = small ? 'h-6 px-2 text-cell' : 'h-8 px-3 text-body'

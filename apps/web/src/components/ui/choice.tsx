@@ -17,7 +17,12 @@ export const Choice = <T extends string>({ label, value, choices, onChoose }: Pr
         tabIndex={choice.value === value ? 0 : -1}
         onClick={() => onChoose(choice.value)}
         onKeyDown={(event) => {
-          const step = event.key === 'ArrowRight' || event.key === 'ArrowDown' ? 1 : event.key === 'ArrowLeft' || event.key === 'ArrowUp' ? -1 : 0
+          const step =
+            event.key === 'ArrowRight' || event.key === 'ArrowDown'
+              ? 1
+              : event.key === 'ArrowLeft' || event.key === 'ArrowUp'
+                ? -1
+                : 0
           if (step === 0) return
           event.preventDefault()
           const at = choices.findIndex((other) => other.value === value)

@@ -1,4 +1,10 @@
-import { useId, type InputHTMLAttributes, type ReactNode, type SelectHTMLAttributes, type TextareaHTMLAttributes } from 'react'
+import {
+  useId,
+  type InputHTMLAttributes,
+  type ReactNode,
+  type SelectHTMLAttributes,
+  type TextareaHTMLAttributes,
+} from 'react'
 
 const control =
   'w-full border border-rule bg-sheet text-ink placeholder:text-pencil aria-invalid:border-fault aria-invalid:border-2 read-only:bg-paper disabled:text-pencil'
@@ -37,15 +43,33 @@ const FieldShell = ({ label, hint, error, children }: Shell & { readonly childre
   )
 }
 
-export const TextField = ({ label, hint, error, className = '', ...rest }: Shell & InputHTMLAttributes<HTMLInputElement>) => (
+export const TextField = ({
+  label,
+  hint,
+  error,
+  className = '',
+  ...rest
+}: Shell & InputHTMLAttributes<HTMLInputElement>) => (
   <FieldShell label={label} hint={hint} error={error}>
     {({ id, described }) => (
-      <input {...rest} id={id} aria-describedby={described} aria-invalid={error ? true : undefined} className={`${control} h-8 px-2 ${className}`} />
+      <input
+        {...rest}
+        id={id}
+        aria-describedby={described}
+        aria-invalid={error ? true : undefined}
+        className={`${control} h-8 px-2 ${className}`}
+      />
     )}
   </FieldShell>
 )
 
-export const TextArea = ({ label, hint, error, className = '', ...rest }: Shell & TextareaHTMLAttributes<HTMLTextAreaElement>) => (
+export const TextArea = ({
+  label,
+  hint,
+  error,
+  className = '',
+  ...rest
+}: Shell & TextareaHTMLAttributes<HTMLTextAreaElement>) => (
   <FieldShell label={label} hint={hint} error={error}>
     {({ id, described }) => (
       <textarea
@@ -59,17 +83,34 @@ export const TextArea = ({ label, hint, error, className = '', ...rest }: Shell 
   </FieldShell>
 )
 
-export const SelectField = ({ label, hint, error, className = '', children, ...rest }: Shell & SelectHTMLAttributes<HTMLSelectElement>) => (
+export const SelectField = ({
+  label,
+  hint,
+  error,
+  className = '',
+  children,
+  ...rest
+}: Shell & SelectHTMLAttributes<HTMLSelectElement>) => (
   <FieldShell label={label} hint={hint} error={error}>
     {({ id, described }) => (
-      <select {...rest} id={id} aria-describedby={described} aria-invalid={error ? true : undefined} className={`${control} h-8 px-1.5 ${className}`}>
+      <select
+        {...rest}
+        id={id}
+        aria-describedby={described}
+        aria-invalid={error ? true : undefined}
+        className={`${control} h-8 px-1.5 ${className}`}
+      >
         {children}
       </select>
     )}
   </FieldShell>
 )
 
-export const CheckField = ({ label, className = '', ...rest }: { readonly label: ReactNode } & InputHTMLAttributes<HTMLInputElement>) => (
+export const CheckField = ({
+  label,
+  className = '',
+  ...rest
+}: { readonly label: ReactNode } & InputHTMLAttributes<HTMLInputElement>) => (
   <label className={`flex min-h-6 items-start gap-2 ${className}`}>
     <input {...rest} type="checkbox" className="mt-0.5 size-4 shrink-0 accent-steel" />
     <span>{label}</span>

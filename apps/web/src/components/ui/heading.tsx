@@ -1,7 +1,15 @@
 import type { ReactNode } from 'react'
 
 /** Heading of a section of a sheet. */
-export const SectionHeading = ({ children, id, note }: { readonly children: ReactNode; readonly id?: string; readonly note?: ReactNode }) => (
+export const SectionHeading = ({
+  children,
+  id,
+  note,
+}: {
+  readonly children: ReactNode
+  readonly id?: string
+  readonly note?: ReactNode
+}) => (
   <div className="mb-2 flex flex-wrap items-baseline justify-between gap-x-4">
     <h2 id={id} className="text-lead font-semibold">
       {children}

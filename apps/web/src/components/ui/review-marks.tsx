@@ -1,20 +1,39 @@
 import { useLayoutEffect, useRef, useState } from 'react'
 
 /** Number of a redline thread, reversed out of a filled rectangle. */
-export const Flag = ({ number, state = 'open' }: { readonly number: number | string; readonly state?: 'open' | 'pending' | 'closed' }) => (
+export const Flag = ({
+  number,
+  state = 'open',
+}: {
+  readonly number: number | string
+  readonly state?: 'open' | 'pending' | 'closed'
+}) => (
   <span
     className={`keeps-colour inline-flex h-4 min-w-4.5 shrink-0 items-center justify-center px-1 align-middle font-mono text-[10px] leading-4 font-semibold ${
-      state === 'open' ? 'bg-redline text-sheet' : state === 'pending' ? 'border-[1.5px] border-dashed border-redline text-redline' : 'border border-rule text-pencil line-through'
+      state === 'open'
+        ? 'bg-redline text-sheet'
+        : state === 'pending'
+          ? 'border-[1.5px] border-dashed border-redline text-redline'
+          : 'border border-rule text-pencil line-through'
     }`}
   >
-    <span className="sr-only">{state === 'pending' ? 'pending redline ' : state === 'closed' ? 'closed redline ' : 'redline '}</span>
+    <span className="sr-only">
+      {state === 'pending' ? 'pending redline ' : state === 'closed' ? 'closed redline ' : 'redline '}
+    </span>
     {number}
   </span>
 )
 
 /** Revision triangle beside what changed with a revision. */
 export const RevisionTriangle = ({ letter }: { readonly letter: string }) => (
-  <svg width="18" height="16" viewBox="0 0 18 16" role="img" aria-label={letter === "" ? "changed since the last issue" : `changed in revision ${letter}`} className="keeps-colour inline-block shrink-0 align-middle">
+  <svg
+    width="18"
+    height="16"
+    viewBox="0 0 18 16"
+    role="img"
+    aria-label={letter === '' ? 'changed since the last issue' : `changed in revision ${letter}`}
+    className="keeps-colour inline-block shrink-0 align-middle"
+  >
     <path d="M9 1.2 17 14.8 1 14.8Z" className="fill-none stroke-redline" strokeWidth="1.6" />
     <text x="9" y="13" textAnchor="middle" fontSize="9" className="fill-redline font-mono font-semibold">
       {letter || '–'}
@@ -51,7 +70,12 @@ export const Scallop = () => {
   return (
     <svg ref={ref} aria-hidden="true" className="pointer-events-none absolute inset-0 size-full overflow-visible">
       {size && size.width > 0 && size.height > 0 ? (
-        <path d={scallopPath(size.width, size.height)} transform="translate(4 4)" className="fill-none stroke-redline" strokeWidth="1.5" />
+        <path
+          d={scallopPath(size.width, size.height)}
+          transform="translate(4 4)"
+          className="fill-none stroke-redline"
+          strokeWidth="1.5"
+        />
       ) : null}
     </svg>
   )

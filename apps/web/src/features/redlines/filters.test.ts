@@ -36,7 +36,12 @@ describe('filters of redlines', () => {
 
 describe('redlines by place', () => {
   it('gathers the threads of a cell and leaves out closed ones', () => {
-    const places = redlinesByPlace([redline(1), redline(2), redline(3, { state: 'closed' }), redline(4, { anchor: { type: 'row', mark: 'ET-1' } })])
+    const places = redlinesByPlace([
+      redline(1),
+      redline(2),
+      redline(3, { state: 'closed' }),
+      redline(4, { anchor: { type: 'row', mark: 'ET-1' } }),
+    ])
     expect(places.get('cell ET-1 precharge')?.map((one) => one.number)).toEqual([1, 2])
     expect(places.get('row ET-1')?.map((one) => one.number)).toEqual([4])
   })

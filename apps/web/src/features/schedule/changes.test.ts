@@ -1,7 +1,15 @@
 import { describe, expect, it } from 'vitest'
 import { changesByPlace, changeWords } from './changes.ts'
 
-const change = { system: 'HWS', mark: 'ET-1', key: 'precharge', name: 'Precharge', kind: 'gauge pressure', was: 100_000, now: 120_000 }
+const change = {
+  system: 'HWS',
+  mark: 'ET-1',
+  key: 'precharge',
+  name: 'Precharge',
+  kind: 'gauge pressure',
+  was: 100_000,
+  now: 120_000,
+}
 
 describe('what changed since the last issue', () => {
   it('is found by row and result', () => {

@@ -26,9 +26,20 @@ export type ColumnDefinition = Base &
     | { readonly shows: 'quantity'; readonly kind: Kind; readonly number: (context: VesselContext) => number | null }
   )
 
-const words = (key: string, heading: string, text: (context: VesselContext) => string): ColumnDefinition => ({ shows: 'words', key, heading, words: text })
+const words = (key: string, heading: string, text: (context: VesselContext) => string): ColumnDefinition => ({
+  shows: 'words',
+  key,
+  heading,
+  words: text,
+})
 const result = (key: string, heading: string, kind: Kind): ColumnDefinition => ({ shows: 'result', key, heading, kind })
-const input = (key: string, heading: string, kind: Kind, symbols: readonly string[]): ColumnDefinition => ({ shows: 'input', key, heading, kind, symbols })
+const input = (key: string, heading: string, kind: Kind, symbols: readonly string[]): ColumnDefinition => ({
+  shows: 'input',
+  key,
+  heading,
+  kind,
+  symbols,
+})
 
 const serves = words('serves', 'Serves', ({ vessel, system }) => vessel.serves || (system?.title ?? ''))
 const construction = words('construction', 'Type', ({ vessel }) => capital(vessel.construction ?? ''))
@@ -104,11 +115,14 @@ export const columnsOf = (kind: string, project: ProjectResult): readonly Column
   const defined = byKind[kind]
   if (defined) {
     // A result that only some methods give takes a column only where a vessel has it.
-    return defined.filter((column) => column.key !== 'final-pressure' || vessels.some((vessel) => vessel.results[column.key]))
+    return defined.filter(
+      (column) => column.key !== 'final-pressure' || vessels.some((vessel) => vessel.results[column.key]),
+    )
   }
   const found = new Map<string, ColumnDefinition>()
   for (const vessel of vessels) {
-    for (const [key, value] of Object.entries(vessel.results)) if (!found.has(key)) found.set(key, result(key, value.name, value.kind))
+    for (const [key, value] of Object.entries(vessel.results))
+      if (!found.has(key)) found.set(key, result(key, value.name, value.kind))
   }
   return [serves, count, ...found.values(), selectedVolume, method, assumptions]
 }

@@ -1,4 +1,14 @@
-import { equationBox, formulaTree, inUnits, layout, layoutSymbol, shownLine, toMathML, type Box, type Scope } from '@coldfill/formula'
+import {
+  equationBox,
+  formulaTree,
+  inUnits,
+  layout,
+  layoutSymbol,
+  shownLine,
+  toMathML,
+  type Box,
+  type Scope,
+} from '@coldfill/formula'
 import { displayUnit, formatQuantity, fromSi, unitLabel, type Kind, type UnitSystem } from '@coldfill/units'
 import type { TraceEntry, TraceStep } from '#lib/sized-project.ts'
 import { fluidFunctions } from './fluid-functions.ts'
@@ -25,7 +35,8 @@ const resultBox = (text: string, kind: Kind, units: UnitSystem): Box => {
  * Null where the formula cannot be drawn in these units; its text is then shown as it stands.
  */
 export const drawStep = (step: TraceStep, entries: readonly TraceEntry[], units: UnitSystem): DrawnStep | null => {
-  const inDisplay = (entry: { readonly kind: Kind; readonly value: number }) => fromSi(entry.value, displayUnit(entry.kind, units))
+  const inDisplay = (entry: { readonly kind: Kind; readonly value: number }) =>
+    fromSi(entry.value, displayUnit(entry.kind, units))
   const scope: Scope = {
     symbols: Object.fromEntries(entries.map((entry) => [entry.symbol, entry.kind])),
     functions: fluidFunctions,
@@ -37,7 +48,13 @@ export const drawStep = (step: TraceStep, entries: readonly TraceEntry[], units:
     const left = layoutSymbol(step.symbol)
     return {
       symbols: toMathML(equationBox(left, layout(tree, { functions: fluidFunctions })), { display: true }),
-      numbers: toMathML(equationBox(layout(tree, { numbers: line.numbers, functions: fluidFunctions }), resultBox(line.result, step.kind, units)), { display: true }),
+      numbers: toMathML(
+        equationBox(
+          layout(tree, { numbers: line.numbers, functions: fluidFunctions }),
+          resultBox(line.result, step.kind, units),
+        ),
+        { display: true },
+      ),
       result: `${line.result} ${unitLabel(step.kind, units)}`.trimEnd(),
     }
   } catch {
@@ -45,4 +62,5 @@ export const drawStep = (step: TraceStep, entries: readonly TraceEntry[], units:
   }
 }
 
-export const shownValue = (entry: { readonly kind: Kind; readonly value: number }, units: UnitSystem): string => formatQuantity(entry, units)
+export const shownValue = (entry: { readonly kind: Kind; readonly value: number }, units: UnitSystem): string =>
+  formatQuantity(entry, units)

@@ -12,7 +12,10 @@ export const moveInGrid = (
   size: { readonly rows: number; readonly columns: number },
 ): GridPlace | null => {
   const last = { row: size.rows - 1, column: size.columns - 1 }
-  const to = (row: number, column: number): GridPlace => ({ row: clamp(row, last.row), column: clamp(column, last.column) })
+  const to = (row: number, column: number): GridPlace => ({
+    row: clamp(row, last.row),
+    column: clamp(column, last.column),
+  })
   switch (key.key) {
     case 'ArrowUp':
       return to(from.row - 1, from.column)

@@ -32,14 +32,39 @@ const project = (vessels: readonly Vessel[]): ProjectResult => ({
   engine: '0',
   readable: true,
   spec: 1,
-  project: { number: 'N', title: 'T', client: '', location: '', units: 'US', elevation: 0, atmosphere: 101325, codes: {}, specSections: {} },
-  systems: [{ id: 'HWS', title: 'Heating', path: 'systems.HWS', service: 'heating water', fluid: 'water', pressures: [], relief: null }],
+  project: {
+    number: 'N',
+    title: 'T',
+    client: '',
+    location: '',
+    units: 'US',
+    elevation: 0,
+    atmosphere: 101325,
+    codes: {},
+    specSections: {},
+  },
+  systems: [
+    {
+      id: 'HWS',
+      title: 'Heating',
+      path: 'systems.HWS',
+      service: 'heating water',
+      fluid: 'water',
+      pressures: [],
+      relief: null,
+    },
+  ],
   vessels,
   assumptions: [],
   findings: [],
   sources: {},
 })
-const volume = (gallons: number) => ({ kind: 'volume' as const, value: gallons * GALLON, name: 'Required volume', entry: 'ET-1/required-volume' })
+const volume = (gallons: number) => ({
+  kind: 'volume' as const,
+  value: gallons * GALLON,
+  name: 'Required volume',
+  entry: 'ET-1/required-volume',
+})
 const cell = (result: ProjectResult, row: number, key: string) => schedules(result, 'US')[0]?.rows[row]?.cells[key]
 
 describe('the schedule on screen', () => {

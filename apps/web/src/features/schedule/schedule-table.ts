@@ -86,7 +86,11 @@ const inUnit = (value: number, kind: Kind, units: UnitSystem) => fromSi(value, d
 const scheduleOf = (result: ProjectResult, kind: string, units: UnitSystem): Schedule => {
   const definitions = columnsOf(kind, result)
   const vessels = result.vessels.filter((vessel) => vessel.kind === kind)
-  const contexts = vessels.map((vessel) => ({ vessel, result, system: result.systems.find((system) => system.id === vessel.system) }))
+  const contexts = vessels.map((vessel) => ({
+    vessel,
+    result,
+    system: result.systems.find((system) => system.id === vessel.system),
+  }))
   const cells = contexts.map((): Record<string, CellValue> => ({}))
 
   for (const column of definitions) {

@@ -2,7 +2,15 @@ import { describe, expect, it } from 'vitest'
 import type { TraceEntry } from '#lib/sized-project.ts'
 import { upstream } from './upstream.ts'
 
-const input = (symbol: string): TraceEntry => ({ entry: 'input', id: `ET-1/${symbol}`, symbol, name: symbol, kind: 'volume', value: 1, origin: { from: 'catalogue' } })
+const input = (symbol: string): TraceEntry => ({
+  entry: 'input',
+  id: `ET-1/${symbol}`,
+  symbol,
+  name: symbol,
+  kind: 'volume',
+  value: 1,
+  origin: { from: 'catalogue' },
+})
 const step = (symbol: string, formula: string): TraceEntry => ({
   entry: 'step',
   id: `ET-1/${symbol}`,

@@ -18,7 +18,8 @@ export interface DraftOwner {
 
 type Shelf = Pick<Storage, 'getItem' | 'setItem' | 'removeItem' | 'key' | 'length'>
 
-const prefix = (owner: DraftOwner) => `coldfill.draft.${encodeURIComponent(owner.user)}.${encodeURIComponent(owner.project)}.`
+const prefix = (owner: DraftOwner) =>
+  `coldfill.draft.${encodeURIComponent(owner.user)}.${encodeURIComponent(owner.project)}.`
 
 const isDraft = (value: unknown): value is Draft =>
   typeof value === 'object' &&

@@ -45,9 +45,14 @@ export const marginEntries = (
 ): readonly MarginEntry[] => {
   if (!model) return []
   const declared = model.systems
-    .flatMap((system) => system.vessels.map((vessel) => ({ path: vessel.path, mark: vessel.mark, line: vessel.range.start.line })))
+    .flatMap((system) =>
+      system.vessels.map((vessel) => ({ path: vessel.path, mark: vessel.mark, line: vessel.range.start.line })),
+    )
     .toSorted((a, b) => a.line - b.line)
-  const starts = [...declared.map((vessel) => vessel.line), ...model.systems.map((system) => system.range.start.line)].toSorted((a, b) => a - b)
+  const starts = [
+    ...declared.map((vessel) => vessel.line),
+    ...model.systems.map((system) => system.range.start.line),
+  ].toSorted((a, b) => a - b)
   return declared.map(({ path, mark, line }) => {
     const vessel = result?.vessels.find((one) => one.path === path)
     if (!vessel) return { line, mark, size: 'sizing…', sized: false, was: null, details: [], room: 0 }

@@ -14,7 +14,10 @@ const finding = (code: string, path: string, line: number): Finding => ({
   related: [],
   fixes: [{ title: 'x', edits: [] }],
 })
-const sized = (text: string, findings: readonly Finding[]) => ({ text, result: { vessels: [], findings } as unknown as ProjectResult })
+const sized = (text: string, findings: readonly Finding[]) => ({
+  text,
+  result: { vessels: [], findings } as unknown as ProjectResult,
+})
 
 describe('findings while typing', () => {
   it('are those of the sizing when it is of the same text', () => {
@@ -22,7 +25,12 @@ describe('findings while typing', () => {
     expect(mergeFindings([finding('CF-S010', 'a', 1)], sized('t', all), 't', () => null)).toBe(all)
   })
   it('follow their keys while the text is newer than the sizing', () => {
-    const merged = mergeFindings([finding('CF-S010', 'z', 5)], sized('old', [finding('CF-S099', 'gone', 0), finding('CF-E021', 'b', 2)]), 'new', () => at(3))
+    const merged = mergeFindings(
+      [finding('CF-S010', 'z', 5)],
+      sized('old', [finding('CF-S099', 'gone', 0), finding('CF-E021', 'b', 2)]),
+      'new',
+      () => at(3),
+    )
     expect(merged.map((one) => [one.code, one.range.start.line])).toEqual([
       ['CF-E021', 3],
       ['CF-S010', 5],

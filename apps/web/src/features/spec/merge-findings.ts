@@ -5,7 +5,9 @@ import type { Finding } from '#lib/sized-project.ts'
 const isEngineering = (finding: Finding) => finding.code.startsWith('CF-E')
 
 const inOrder = (findings: readonly Finding[]): readonly Finding[] =>
-  findings.toSorted((a, b) => a.range.start.line - b.range.start.line || a.range.start.character - b.range.start.character)
+  findings.toSorted(
+    (a, b) => a.range.start.line - b.range.start.line || a.range.start.character - b.range.start.character,
+  )
 
 /**
  * Findings of the text as it stands. Syntax and spec are checked here at once; engineering comes with the sizing. While a newer text

@@ -13,7 +13,9 @@ const newSlot = (): string => `${Date.now().toString(36)}${Math.random().toStrin
 export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
   const [base, setBase] = useState<SpecConflict>(document)
   const [text, setText] = useState(document.text)
-  const [offered, setOffered] = useState<readonly Draft[]>(() => draftsOf(localStorage, owner).filter((draft) => draft.text !== document.text))
+  const [offered, setOffered] = useState<readonly Draft[]>(() =>
+    draftsOf(localStorage, owner).filter((draft) => draft.text !== document.text),
+  )
   const [conflict, setConflict] = useState<SpecConflict | null>(null)
   const [saving, setSaving] = useState(false)
   const [error, setError] = useState<unknown>(null)
@@ -28,7 +30,15 @@ export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
       if (next === onto.text) {
         dropDraft(localStorage, owner, inSlot)
         setKept(true)
-      } else setKept(keepDraft(localStorage, owner, { slot: inSlot, text: next, baseVersion: onto.version, at: new Date().toISOString() }))
+      } else
+        setKept(
+          keepDraft(localStorage, owner, {
+            slot: inSlot,
+            text: next,
+            baseVersion: onto.version,
+            at: new Date().toISOString(),
+          }),
+        )
     },
     [owner],
   )
@@ -100,5 +110,20 @@ export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
     keep(draft.text, base, draft.slot)
   }
 
-  return { text, change, base, dirty, kept, saving, error, offered, conflict, save: () => saveOnto(base), saveOver: () => saveOnto(conflict ?? base), takeTheirs, takeUp, throwAway }
+  return {
+    text,
+    change,
+    base,
+    dirty,
+    kept,
+    saving,
+    error,
+    offered,
+    conflict,
+    save: () => saveOnto(base),
+    saveOver: () => saveOnto(conflict ?? base),
+    takeTheirs,
+    takeUp,
+    throwAway,
+  }
 }

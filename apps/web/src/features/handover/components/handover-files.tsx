@@ -46,7 +46,10 @@ const Cautions = () => (
     <SectionHeading>Cautions</SectionHeading>
     <ul className="flex list-disc flex-col gap-1 border-t-2 border-ink pt-2 pl-5 text-read">
       <li>Isolate, depressurise and drain the vessel before its precharge is read or changed.</li>
-      <li>Pressure vessels and hot water can injure and kill. The adopted codes, the authority having jurisdiction and the listing of the vessel govern.</li>
+      <li>
+        Pressure vessels and hot water can injure and kill. The adopted codes, the authority having jurisdiction and the
+        listing of the vessel govern.
+      </li>
       <li>A relief valve is never an expansion control.</li>
       <li>Water stored at or above 60 °C (140 °F) against legionella needs tempering against scalding.</li>
     </ul>
@@ -70,10 +73,13 @@ export const HandoverFiles = ({ handover, units }: { readonly handover: Handover
         </p>
         {current ? (
           <p className="mt-1 text-read">
-            {revisionTitle(current.revision)}, <span className="figures">{day(current.issuedAt)}</span>, by {current.issuedBy.name}, {handover.project.office}. This is the current revision.
+            {revisionTitle(current.revision)}, <span className="figures">{day(current.issuedAt)}</span>, by{' '}
+            {current.issuedBy.name}, {handover.project.office}. This is the current revision.
           </p>
         ) : (
-          <p className="mt-1 max-w-[70ch] text-read">Nothing may be built from this page until a revision is issued for construction. You get a mail when it is.</p>
+          <p className="mt-1 max-w-[70ch] text-read">
+            Nothing may be built from this page until a revision is issued for construction. You get a mail when it is.
+          </p>
         )}
       </div>
       {current ? (
@@ -87,7 +93,9 @@ export const HandoverFiles = ({ handover, units }: { readonly handover: Handover
             </ul>
           </section>
           <section>
-            <SectionHeading note="Gauge pressures, at the vessel connection, cold">Settings in the field</SectionHeading>
+            <SectionHeading note="Gauge pressures, at the vessel connection, cold">
+              Settings in the field
+            </SectionHeading>
             <Settings settings={current.settings} units={units} />
           </section>
           <Cautions />

@@ -6,7 +6,8 @@ import { refreshProject } from '#lib/refresh.ts'
 export const gatesQuery = (project: string, purpose: 'review' | 'construction') =>
   queryOptions({
     queryKey: ['projects', project, 'gates', purpose],
-    queryFn: async ({ signal }) => (await api.get(projectApi(project, `/gates?for=${purpose}`), GateList, { signal })).gates,
+    queryFn: async ({ signal }) =>
+      (await api.get(projectApi(project, `/gates?for=${purpose}`), GateList, { signal })).gates,
   })
 
 const after = async (project: string, work: Promise<Revision>): Promise<Revision> => {
@@ -16,16 +17,21 @@ const after = async (project: string, work: Promise<Revision>): Promise<Revision
     await refreshProject(project)
   }
 }
-const revision = (project: string, label: string, rest: string) => projectApi(project, `/revisions/${revisionSegment(label)}${rest}`)
+const revision = (project: string, label: string, rest: string) =>
+  projectApi(project, `/revisions/${revisionSegment(label)}${rest}`)
 
 export const issueForReview = (project: string, note: string) =>
   after(project, api.post(projectApi(project, '/revisions'), { purpose: 'review', note }, Revision))
 
 export const issueForConstruction = (project: string, label: string, override: string | null) =>
-  after(project, api.post(revision(project, label, '/construction'), override ? { override: { reason: override } } : {}, Revision))
+  after(
+    project,
+    api.post(revision(project, label, '/construction'), override ? { override: { reason: override } } : {}, Revision),
+  )
 
 export const withdraw = (project: string, label: string, reason: string) =>
   after(project, api.post(revision(project, label, '/withdraw'), { reason }, Revision))
 
 /** Starts the making of files again where it stopped. */
-export const makeFiles = (project: string, label: string) => after(project, api.post(revision(project, label, '/files'), {}, Revision))
+export const makeFiles = (project: string, label: string) =>
+  after(project, api.post(revision(project, label, '/files'), {}, Revision))

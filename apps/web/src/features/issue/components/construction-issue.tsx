@@ -11,7 +11,13 @@ import { gatesQuery, issueForConstruction } from '../api/issue.ts'
 import { GateTable } from './gate-table.tsx'
 
 /** Hands the newest revision to the contractor, once every gate is clear or overridden with a reason. */
-export const ConstructionIssue = ({ project, revision }: { readonly project: Project; readonly revision: Revision }) => {
+export const ConstructionIssue = ({
+  project,
+  revision,
+}: {
+  readonly project: Project
+  readonly revision: Revision
+}) => {
   const gates = useQuery(gatesQuery(project.number, 'construction'))
   const { busy, error, run } = useAction()
   const [reason, setReason] = useState('')
@@ -28,11 +34,18 @@ export const ConstructionIssue = ({ project, revision }: { readonly project: Pro
 
   const onSubmit = async (event: FormEvent) => {
     event.preventDefault()
-    if (await run(() => issueForConstruction(project.number, revision.label, overridable.length > 0 ? reason.trim() : null))) setReason('')
+    if (
+      await run(() =>
+        issueForConstruction(project.number, revision.label, overridable.length > 0 ? reason.trim() : null),
+      )
+    )
+      setReason('')
   }
   return (
     <section className="flex flex-col gap-3">
-      <SectionHeading note={`Of ${revisionTitle(revision.label)}, as it was reviewed`}>Issue for construction</SectionHeading>
+      <SectionHeading note={`Of ${revisionTitle(revision.label)}, as it was reviewed`}>
+        Issue for construction
+      </SectionHeading>
       <Loaded query={gates} what="Checking the gates" rows={4}>
         {(list) => <GateTable gates={list} />}
       </Loaded>

@@ -9,7 +9,9 @@ export const GateTable = ({ gates }: { readonly gates: readonly Gate[] }) => (
   <ul aria-label="Gate list" className="border-t-2 border-ink">
     {gates.map((gate) => (
       <li key={gate.id} className="grid gap-x-4 border-b border-hair py-2 desk:grid-cols-[11rem_minmax(0,1fr)_auto]">
-        <span className={`inline-flex items-center gap-1.5 self-start font-medium ${gate.state === 'pass' ? 'text-verdigris' : 'text-ochre'}`}>
+        <span
+          className={`inline-flex items-center gap-1.5 self-start font-medium ${gate.state === 'pass' ? 'text-verdigris' : 'text-ochre'}`}
+        >
           {gate.state === 'pass' ? (
             <ToneSign tone="good" />
           ) : (

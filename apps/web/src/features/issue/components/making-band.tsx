@@ -31,9 +31,17 @@ export const MakingBand = ({ project, revision }: { readonly project: string; re
     )
   }
   return (
-    <Band live="status" title={`Making the files of ${revisionTitle(revision.label)}: stage ${making.stage} of ${making.of}`}>
+    <Band
+      live="status"
+      title={`Making the files of ${revisionTitle(revision.label)}: stage ${making.stage} of ${making.of}`}
+    >
       <p>{making.name}. You may leave this sheet; the files are made all the same.</p>
-      <progress className="mt-1 h-2 w-60 max-w-full accent-steel" max={making.of} value={making.stage} aria-label="Stages done" />
+      <progress
+        className="mt-1 h-2 w-60 max-w-full accent-steel"
+        max={making.of}
+        value={making.stage}
+        aria-label="Stages done"
+      />
     </Band>
   )
 }

@@ -17,7 +17,11 @@ export const ReviewIssue = ({ project }: { readonly project: Project }) => {
   const [note, setNote] = useState('')
   const { issueForReview: permission } = project.permissions
   const held = gates.data?.filter((gate) => gate.state !== 'pass') ?? []
-  const why = permission.allowed ? (held.length > 0 ? `On hold: ${held.map((gate) => gate.title).join(', ')}` : null) : (permission.why ?? 'Consultants issue revisions.')
+  const why = permission.allowed
+    ? held.length > 0
+      ? `On hold: ${held.map((gate) => gate.title).join(', ')}`
+      : null
+    : (permission.why ?? 'Consultants issue revisions.')
 
   const onSubmit = async (event: FormEvent) => {
     event.preventDefault()
@@ -25,13 +29,22 @@ export const ReviewIssue = ({ project }: { readonly project: Project }) => {
   }
   return (
     <section className="flex flex-col gap-3">
-      <SectionHeading note={`The next issue is ${revisionTitle(project.nextRevision)}`}>Issue for review</SectionHeading>
+      <SectionHeading note={`The next issue is ${revisionTitle(project.nextRevision)}`}>
+        Issue for review
+      </SectionHeading>
       <Loaded query={gates} what="Checking the gates" rows={3}>
         {(list) => <GateTable gates={list} />}
       </Loaded>
       <form onSubmit={(event) => void onSubmit(event)} className="flex max-w-2xl flex-col gap-3">
         <Failure error={error} />
-        <TextArea label="Note" hint="What changed and why; it stands in the revision block and in the mail." value={note} onChange={(event) => setNote(event.target.value)} rows={2} maxLength={2000} />
+        <TextArea
+          label="Note"
+          hint="What changed and why; it stands in the revision block and in the mail."
+          value={note}
+          onChange={(event) => setNote(event.target.value)}
+          rows={2}
+          maxLength={2000}
+        />
         <div>
           <Button type="submit" look="main" busy={busy} why={why} showWhy>
             Issue for review

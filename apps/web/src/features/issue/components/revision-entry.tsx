@@ -19,7 +19,12 @@ const Withdraw = ({ project, revision }: { readonly project: Project; readonly r
   if (revision.state === 'withdrawn' || revision.state === 'superseded') return null
   if (!open) {
     return (
-      <Button small why={permission.allowed ? null : (permission.why ?? 'A consultant or the administrator withdraws a revision.')} aria-expanded={false} onClick={() => setOpen(true)}>
+      <Button
+        small
+        why={permission.allowed ? null : (permission.why ?? 'A consultant or the administrator withdraws a revision.')}
+        aria-expanded={false}
+        onClick={() => setOpen(true)}
+      >
         Withdraw…
       </Button>
     )
@@ -33,7 +38,13 @@ const Withdraw = ({ project, revision }: { readonly project: Project; readonly r
       }}
     >
       <Failure error={error} />
-      <TextArea label={`Reason to withdraw ${revisionTitle(revision.label)}`} value={reason} onChange={(event) => setReason(event.target.value)} rows={2} maxLength={2000} />
+      <TextArea
+        label={`Reason to withdraw ${revisionTitle(revision.label)}`}
+        value={reason}
+        onChange={(event) => setReason(event.target.value)}
+        rows={2}
+        maxLength={2000}
+      />
       <div className="flex gap-2">
         <Button type="submit" look="main" busy={busy} why={reason.trim() === '' ? 'Give a reason.' : null}>
           Withdraw {revisionTitle(revision.label)}
@@ -66,13 +77,16 @@ export const RevisionEntry = ({ project, revision }: { readonly project: Project
         Issued for review <span className="figures">{clock(revision.issuedAt)}</span> by {revision.issuedBy.name}
         {revision.constructionIssue ? (
           <>
-            {' · '}for construction <span className="figures">{day(revision.constructionIssue.at)}</span> by {revision.constructionIssue.by.name}
+            {' · '}for construction <span className="figures">{day(revision.constructionIssue.at)}</span> by{' '}
+            {revision.constructionIssue.by.name}
           </>
         ) : null}
         {' · '}engine {revision.engine}
       </p>
       {revision.note ? <p className="mt-1 max-w-[80ch] whitespace-pre-wrap">{revision.note}</p> : null}
-      {revision.constructionIssue?.override ? <p className="mt-1">Overridden because: {revision.constructionIssue.override.reason}</p> : null}
+      {revision.constructionIssue?.override ? (
+        <p className="mt-1">Overridden because: {revision.constructionIssue.override.reason}</p>
+      ) : null}
       {revision.withdrawal ? (
         <p className="mt-1">
           Withdrawn {day(revision.withdrawal.at)} by {revision.withdrawal.by.name}: {revision.withdrawal.reason}
@@ -86,7 +100,9 @@ export const RevisionEntry = ({ project, revision }: { readonly project: Project
       ) : null}
       {sets.map(({ set, files }) => (
         <div key={set} className="mt-3">
-          <h4 className="border-b border-ink pb-1 font-semibold">{set === 'construction' ? 'Files for construction' : 'Files for review'}</h4>
+          <h4 className="border-b border-ink pb-1 font-semibold">
+            {set === 'construction' ? 'Files for construction' : 'Files for review'}
+          </h4>
           <ul>
             {files.map((file) => (
               <FileRow key={`${set} ${file.name}`} file={file} />

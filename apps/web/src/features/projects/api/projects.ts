@@ -16,7 +16,8 @@ export const projectQuery = (number: string) =>
     queryKey: projectKey(number),
     queryFn: ({ signal }) => api.get(projectApi(number), Project, { signal }),
     // While files are being made their stage is shown.
-    refetchInterval: (query) => (query.state.data?.revisions.some((revision) => revision.making && !revision.making.problem) ? 700 : false),
+    refetchInterval: (query) =>
+      query.state.data?.revisions.some((revision) => revision.making && !revision.making.problem) ? 700 : false,
   })
 
 export const useProject = (number: string): Project => useSuspenseQuery(projectQuery(number)).data

@@ -53,9 +53,21 @@ export const NewProject = ({ projects, onMade, onCancel }: Props) => {
         </div>
       ) : null}
       <div className="grid gap-4 desk:grid-cols-[10rem_minmax(0,1fr)_16rem]">
-        <TextField label="Number" name="number" required maxLength={32} error={number} hint="As on drawings: FC-241" className="font-mono" />
+        <TextField
+          label="Number"
+          name="number"
+          required
+          maxLength={32}
+          error={number}
+          hint="As on drawings: FC-241"
+          className="font-mono"
+        />
         <TextField label="Title" name="title" required maxLength={120} error={title} />
-        <SelectField label="Start from" name="from" defaultValue={search.get('new') === 'example' ? 'example' : 'blank'}>
+        <SelectField
+          label="Start from"
+          name="from"
+          defaultValue={search.get('new') === 'example' ? 'example' : 'blank'}
+        >
           <option value="blank">A blank spec with remarks</option>
           <option value="example">An example building</option>
           {copyable.map((project) => (

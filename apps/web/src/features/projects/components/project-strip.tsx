@@ -13,14 +13,31 @@ export const ProjectStrip = ({ project, sheet }: { readonly project: Project; re
     <TitleStrip
       fields={[
         { caption: 'Prepared for', value: project.client || '—', to: paths.cover(project.number), room: 'wide' },
-        { caption: 'Title', value: `${project.number} ${project.title}`, to: paths.cover(project.number), room: 'always', grows: true },
+        {
+          caption: 'Title',
+          value: `${project.number} ${project.title}`,
+          to: paths.cover(project.number),
+          room: 'always',
+          grows: true,
+        },
         { caption: 'Status', value: <StateWord state={project.state} />, to: issue, room: 'always' },
-        { caption: 'Revision', value: project.revision === null ? '—' : project.revision || 'First issue', to: issue, room: 'always' },
-        { caption: 'Prepared', value: latest ? `${latest.issuedBy.initials} ${day(latest.issuedAt)}` : '—', room: 'wide' },
+        {
+          caption: 'Revision',
+          value: project.revision === null ? '—' : project.revision || 'First issue',
+          to: issue,
+          room: 'always',
+        },
+        {
+          caption: 'Prepared',
+          value: latest ? `${latest.issuedBy.initials} ${day(latest.issuedAt)}` : '—',
+          room: 'wide',
+        },
         {
           caption: 'Checked',
           value: checked ? (
-            <span title={`${OUTCOME_LABELS[checked.outcome]}, ${revisionTitle(checked.revision)}`}>{`${checked.reviewer.initials} ${day(checked.at)}`}</span>
+            <span
+              title={`${OUTCOME_LABELS[checked.outcome]}, ${revisionTitle(checked.revision)}`}
+            >{`${checked.reviewer.initials} ${day(checked.at)}`}</span>
           ) : (
             '—'
           ),

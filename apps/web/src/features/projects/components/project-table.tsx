@@ -9,7 +9,8 @@ import { paths } from '#config/paths.ts'
 import { day } from '#lib/format.ts'
 
 /** Where the project opens for this person: the contractor's page is the handover. */
-const opening = (project: ProjectSummary): string => (project.sheets.includes('cover') ? paths.cover(project.number) : paths.handover(project.number))
+const opening = (project: ProjectSummary): string =>
+  project.sheets.includes('cover') ? paths.cover(project.number) : paths.handover(project.number)
 
 const Row = ({ project }: { readonly project: ProjectSummary }) => (
   <tr className="hover:bg-steel-wash">
@@ -41,7 +42,13 @@ const Row = ({ project }: { readonly project: ProjectSummary }) => (
   </tr>
 )
 
-export const ProjectTable = ({ projects, mayCreate }: { readonly projects: readonly ProjectSummary[]; readonly mayCreate: boolean }) => {
+export const ProjectTable = ({
+  projects,
+  mayCreate,
+}: {
+  readonly projects: readonly ProjectSummary[]
+  readonly mayCreate: boolean
+}) => {
   const [sought, setSought] = useState('')
   if (projects.length === 0) {
     return (
@@ -63,7 +70,9 @@ export const ProjectTable = ({ projects, mayCreate }: { readonly projects: reado
     )
   }
   const words = sought.toLowerCase().trim()
-  const shown = projects.filter((project) => `${project.number} ${project.title} ${project.client}`.toLowerCase().includes(words))
+  const shown = projects.filter((project) =>
+    `${project.number} ${project.title} ${project.client}`.toLowerCase().includes(words),
+  )
   return (
     <>
       {projects.length > 5 ? (

@@ -25,7 +25,10 @@ export const RevisionBlock = ({ project }: { readonly project: Project }) => (
     {project.revisions.map((revision) => (
       <tr key={revision.id}>
         <RowHead className="font-mono">
-          <Link to={withQuery(paths.schedule(project.number), { rev: revisionSegment(revision.label) })} className="inline-flex items-center gap-1.5">
+          <Link
+            to={withQuery(paths.schedule(project.number), { rev: revisionSegment(revision.label) })}
+            className="inline-flex items-center gap-1.5"
+          >
             {revision.label === '' ? 'First' : <RevisionTriangle letter={revision.label} />}
           </Link>
         </RowHead>

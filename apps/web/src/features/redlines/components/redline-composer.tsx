@@ -25,7 +25,13 @@ export const RedlineComposer = ({ project, anchor, quoted, onDone }: Props) => {
   const submit = async (data: FormData) => {
     const proposed = String(data.get('proposed') ?? '').trim()
     const done = await run(() =>
-      createRedline(project, { anchor, quoted, text, mustAnswer: data.get('must') === 'on', proposedValue: proposed === '' ? null : proposed }),
+      createRedline(project, {
+        anchor,
+        quoted,
+        text,
+        mustAnswer: data.get('must') === 'on',
+        proposedValue: proposed === '' ? null : proposed,
+      }),
     )
     if (done) onDone()
   }
@@ -50,8 +56,17 @@ export const RedlineComposer = ({ project, anchor, quoted, onDone }: Props) => {
         {quoted ? <span className="figures ml-2 font-mono">{quoted}</span> : null}
       </p>
       <Failure error={error} />
-      <TextArea label="Redline" name="text" required value={text} onChange={(event) => setText(event.target.value)} rows={4} />
-      {anchor.type === 'row' ? null : <TextField label="Proposed value" name="proposed" hint="With its unit, where you propose one" />}
+      <TextArea
+        label="Redline"
+        name="text"
+        required
+        value={text}
+        onChange={(event) => setText(event.target.value)}
+        rows={4}
+      />
+      {anchor.type === 'row' ? null : (
+        <TextField label="Proposed value" name="proposed" hint="With its unit, where you propose one" />
+      )}
       <CheckField label="Must be answered before issue for construction" name="must" />
       <div className="flex flex-wrap gap-2">
         <Button type="submit" look="main" busy={busy} why={text.trim() === '' ? 'Write what is to be answered.' : null}>

@@ -22,12 +22,16 @@ export const RedlineList = ({ redlines, chosen, onChoose }: Props) => (
           <span className="min-w-0 flex-1">
             <span className="flex flex-wrap justify-between gap-x-2 text-cell">
               <span className="font-semibold">{anchorWords(redline.anchor)}</span>
-              <span className="text-pencil">{redline.anchorState === 'pinned' ? '' : anchorStateWords[redline.anchorState].word}</span>
+              <span className="text-pencil">
+                {redline.anchorState === 'pinned' ? '' : anchorStateWords[redline.anchorState].word}
+              </span>
             </span>
             <span className="block truncate">{redline.messages[0]?.text ?? ''}</span>
             <span className="block text-cell text-pencil">
               {redline.author.name}
-              {redline.state === 'open' && redline.waitingOn ? ` · waiting on ${redline.waitingOnYou ? 'you' : `the ${redline.waitingOn}`}` : ''}
+              {redline.state === 'open' && redline.waitingOn
+                ? ` · waiting on ${redline.waitingOnYou ? 'you' : `the ${redline.waitingOn}`}`
+                : ''}
               {redline.mustAnswer ? ' · must answer' : ''}
             </span>
           </span>

@@ -29,7 +29,11 @@ const PendingForm = ({ project, redline }: { readonly project: string; readonly 
     >
       <Failure error={error} />
       <TextArea label="Redline, pending" value={text} onChange={(event) => setText(event.target.value)} rows={4} />
-      <CheckField label="Must be answered before issue for construction" checked={must} onChange={(event) => setMust(event.target.checked)} />
+      <CheckField
+        label="Must be answered before issue for construction"
+        checked={must}
+        onChange={(event) => setMust(event.target.checked)}
+      />
       <div className="flex flex-wrap gap-2">
         <Button type="submit" busy={busy} why={changed ? null : 'Nothing has changed.'}>
           Keep the change
@@ -52,7 +56,11 @@ const Answer = ({ project, redline }: { readonly project: string; readonly redli
     return (
       <>
         <Failure error={error} />
-        <Button busy={busy} why={redline.may.reopen ? null : 'Only its author, a reviewer or a consultant of the project reopens it.'} onClick={() => void send(() => reopenRedline(project, redline.number, text))}>
+        <Button
+          busy={busy}
+          why={redline.may.reopen ? null : 'Only its author, a reviewer or a consultant of the project reopens it.'}
+          onClick={() => void send(() => reopenRedline(project, redline.number, text))}
+        >
           Reopen
         </Button>
       </>
@@ -71,9 +79,19 @@ const Answer = ({ project, redline }: { readonly project: string; readonly redli
       }}
     >
       <Failure error={error} />
-      <TextArea label={`Reply to redline ${redline.number}`} value={text} onChange={(event) => setText(event.target.value)} rows={3} />
+      <TextArea
+        label={`Reply to redline ${redline.number}`}
+        value={text}
+        onChange={(event) => setText(event.target.value)}
+        rows={3}
+      />
       <div className="flex flex-wrap gap-2">
-        <Button type="submit" look="main" busy={busy} why={!redline.may.reply ? 'You may not reply here.' : text.trim() === '' ? 'Write a reply first.' : null}>
+        <Button
+          type="submit"
+          look="main"
+          busy={busy}
+          why={!redline.may.reply ? 'You may not reply here.' : text.trim() === '' ? 'Write a reply first.' : null}
+        >
           Reply
         </Button>
         <Button
@@ -109,14 +127,20 @@ export const RedlineThread = ({ project, redline, rev, showPlace = true }: Props
               {anchorWords(redline.anchor)}
             </Link>
           ) : null}
-          {redline.mustAnswer ? <span className="border border-redline px-1 text-cell font-medium text-redline">must answer</span> : null}
+          {redline.mustAnswer ? (
+            <span className="border border-redline px-1 text-cell font-medium text-redline">must answer</span>
+          ) : null}
         </p>
         <p className="figures text-cell text-pencil">
           <span title={anchorState.says}>{anchorState.word}</span>
           {redline.quoted ? (
             <>
               {' · '}
-              {redline.anchorState === 'moved' && redline.nowValue !== null ? <WasNow was={redline.quoted} now={redline.nowValue} /> : redline.quoted}
+              {redline.anchorState === 'moved' && redline.nowValue !== null ? (
+                <WasNow was={redline.quoted} now={redline.nowValue} />
+              ) : (
+                redline.quoted
+              )}
             </>
           ) : null}
           {redline.carriedFrom === null ? null : ` · carried from ${revisionTitle(redline.carriedFrom)}`}
@@ -133,11 +157,17 @@ export const RedlineThread = ({ project, redline, rev, showPlace = true }: Props
       ) : (
         <ol className="flex flex-col gap-3">
           {redline.messages.map((message, at) => (
-            <li key={`${message.at} ${at}`} className={`border-l-2 pl-3 ${at === 0 ? 'border-redline' : 'border-rule'}`}>
+            <li
+              key={`${message.at} ${at}`}
+              className={`border-l-2 pl-3 ${at === 0 ? 'border-redline' : 'border-rule'}`}
+            >
               <p className="text-cell text-pencil">
-                <strong className="font-semibold text-ink">{message.author.name}</strong> {did[message.did]} {clock(message.at)}
+                <strong className="font-semibold text-ink">{message.author.name}</strong> {did[message.did]}{' '}
+                {clock(message.at)}
               </p>
-              {message.text ? <p className={`whitespace-pre-wrap ${at === 0 ? 'text-redline' : ''}`}>{message.text}</p> : null}
+              {message.text ? (
+                <p className={`whitespace-pre-wrap ${at === 0 ? 'text-redline' : ''}`}>{message.text}</p>
+              ) : null}
             </li>
           ))}
         </ol>

@@ -41,7 +41,11 @@ export const SendReview = ({ project, newest, pending, why, onSent }: Props) => 
   const held =
     why ??
     (overtaken ? `${revisionTitle(newest.label)} was issued meanwhile.` : null) ??
-    (outcome === null ? 'Choose a disposition.' : needsReason && reason.trim() === '' ? 'Give the reason: it goes into the mail and on the sheet.' : null)
+    (outcome === null
+      ? 'Choose a disposition.'
+      : needsReason && reason.trim() === ''
+        ? 'Give the reason: it goes into the mail and on the sheet.'
+        : null)
 
   const onSubmit = async (event: FormEvent) => {
     event.preventDefault()
@@ -57,7 +61,12 @@ export const SendReview = ({ project, newest, pending, why, onSent }: Props) => 
     <form aria-label="Send review" onSubmit={(event) => void onSubmit(event)} className="flex flex-col gap-4">
       <p className="font-semibold">{revisionTitle(revision.label)}</p>
       {overtaken ? (
-        <Band tone="warning" live="alert" title={`${revisionTitle(newest.label)} was issued meanwhile.`} actions={<Button onClick={() => setRevision(newest)}>Review {revisionTitle(newest.label)}</Button>}>
+        <Band
+          tone="warning"
+          live="alert"
+          title={`${revisionTitle(newest.label)} was issued meanwhile.`}
+          actions={<Button onClick={() => setRevision(newest)}>Review {revisionTitle(newest.label)}</Button>}
+        >
           Look at it first. What you wrote is kept.
         </Band>
       ) : null}
@@ -69,7 +78,11 @@ export const SendReview = ({ project, newest, pending, why, onSent }: Props) => 
         <Failure error={error} />
       )}
       <div>
-        <p className="mb-1 font-semibold">{pending.length === 0 ? 'No redline is pending' : `${plural(pending.length, 'pending redline')} will be published`}</p>
+        <p className="mb-1 font-semibold">
+          {pending.length === 0
+            ? 'No redline is pending'
+            : `${plural(pending.length, 'pending redline')} will be published`}
+        </p>
         <ul className="text-cell">
           {pending.map((redline) => (
             <li key={redline.number} className="flex gap-2 py-0.5">
@@ -85,7 +98,14 @@ export const SendReview = ({ project, newest, pending, why, onSent }: Props) => 
         <legend className="mb-1 font-semibold">Disposition</legend>
         {outcomes.map((choice) => (
           <label key={choice} className="flex min-h-6 items-baseline gap-2">
-            <input type="radio" name="outcome" value={choice} checked={outcome === choice} onChange={() => setOutcome(choice)} className="translate-y-0.5 accent-steel" />
+            <input
+              type="radio"
+              name="outcome"
+              value={choice}
+              checked={outcome === choice}
+              onChange={() => setOutcome(choice)}
+              className="translate-y-0.5 accent-steel"
+            />
             <span>
               <span className="font-medium">{OUTCOME_LABELS[choice]}</span>
               <span className="block text-cell text-pencil">{says[choice]}</span>

@@ -9,7 +9,10 @@ export const ContentBand = ({ project, shown }: { readonly project: Project; rea
   const revision = project.revisions.find((one) => one.label === shown.revision)
   if (newest && revision && newest.id !== revision.id) {
     return (
-      <Band tone="warning" title={`${revisionTitle(revision.label)} is ${stateWord(revision.state).toLowerCase()}; ${revisionTitle(newest.label)} is newer.`} />
+      <Band
+        tone="warning"
+        title={`${revisionTitle(revision.label)} is ${stateWord(revision.state).toLowerCase()}; ${revisionTitle(newest.label)} is newer.`}
+      />
     )
   }
   if (!project.permissions.seeWorkingCopy.allowed) return null

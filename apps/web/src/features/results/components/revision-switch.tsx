@@ -12,7 +12,11 @@ export const RevisionSwitch = ({ project }: { readonly project: Project }) => {
   return (
     <label className="inline-flex items-center gap-2 text-cell print:hidden">
       <span className="font-semibold">Content</span>
-      <select value={value} onChange={(event) => change({ rev: event.target.value || null, row: null, col: null })} className="h-8 border border-rule bg-sheet px-1.5 text-ink">
+      <select
+        value={value}
+        onChange={(event) => change({ rev: event.target.value || null, row: null, col: null })}
+        className="h-8 border border-rule bg-sheet px-1.5 text-ink"
+      >
         {working ? <option value="">Working copy</option> : null}
         {project.revisions.map((revision) => (
           <option key={revision.id} value={revisionSegment(revision.label)}>

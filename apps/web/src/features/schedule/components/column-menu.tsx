@@ -8,7 +8,9 @@ interface Props {
 
 /** Which columns are shown. Hidden ones are listed when the sheet is printed. */
 export const ColumnMenu = ({ tables, hidden, onChange }: Props) => {
-  const columns = new Map(tables.flatMap((table) => table.columns.map((column) => [column.key, column.heading] as const)))
+  const columns = new Map(
+    tables.flatMap((table) => table.columns.map((column) => [column.key, column.heading] as const)),
+  )
   if (columns.size === 0) return null
   return (
     <details className="relative">

@@ -1,10 +1,19 @@
 import type { Schedule } from '../schedule-table.ts'
 
 /** Notes of a schedule by number, and what the signs in its cells mean. */
-export const KeyedNotes = ({ schedule, hidden }: { readonly schedule: Schedule; readonly hidden: ReadonlySet<string> }) => {
+export const KeyedNotes = ({
+  schedule,
+  hidden,
+}: {
+  readonly schedule: Schedule
+  readonly hidden: ReadonlySet<string>
+}) => {
   const left = schedule.columns.filter((column) => hidden.has(column.key)).map((column) => column.heading)
   const texts = schedule.rows.flatMap((row) => Object.values(row.cells).map((cell) => cell.text))
-  const signs = [texts.includes('—') ? '— does not apply' : '', texts.includes('?') ? '? an input is missing' : ''].filter(Boolean)
+  const signs = [
+    texts.includes('—') ? '— does not apply' : '',
+    texts.includes('?') ? '? an input is missing' : '',
+  ].filter(Boolean)
   return (
     <div className="mt-2 flex flex-col gap-1 text-cell">
       {schedule.notes.length > 0 ? (

@@ -32,7 +32,9 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
     () =>
       helper.columns([
         helper.accessor((row) => row.vessel.mark, { id: 'mark', header: 'Mark', enableHiding: false }),
-        ...schedule.columns.map((column) => helper.accessor((row) => row.cells[column.key]?.text ?? '—', { id: column.key, header: column.heading })),
+        ...schedule.columns.map((column) =>
+          helper.accessor((row) => row.cells[column.key]?.text ?? '—', { id: column.key, header: column.heading }),
+        ),
       ]),
     [schedule],
   )
@@ -49,8 +51,14 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
   const rows = table.getRowModel().rows
   const shown = table.getVisibleLeafColumns()
 
-  const rowAt = Math.max(0, rows.findIndex((row) => row.id === chosen?.row))
-  const columnAt = Math.max(0, shown.findIndex((column) => column.id === chosen?.column))
+  const rowAt = Math.max(
+    0,
+    rows.findIndex((row) => row.id === chosen?.row),
+  )
+  const columnAt = Math.max(
+    0,
+    shown.findIndex((column) => column.id === chosen?.column),
+  )
   const hasChosen = rows.some((row) => row.id === chosen?.row)
 
   const onKeyDown = (event: KeyboardEvent) => {
@@ -68,7 +76,11 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
       onRedline(row, column)
       return
     }
-    const to = moveInGrid({ row: rowAt, column: columnAt }, { key: event.key, ctrl: event.ctrlKey || event.metaKey }, { rows: rows.length, columns: shown.length })
+    const to = moveInGrid(
+      { row: rowAt, column: columnAt },
+      { key: event.key, ctrl: event.ctrlKey || event.metaKey },
+      { rows: rows.length, columns: shown.length },
+    )
     if (!to) return
     event.preventDefault()
     const next = rows[to.row]?.original
@@ -80,7 +92,13 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
 
   return (
     <div className="max-w-full overflow-x-auto border-t-[3px] border-b-2 border-ink print:overflow-visible">
-      <table role="grid" aria-label={schedule.title} aria-rowcount={rows.length + 1} aria-colcount={shown.length} className="w-full text-cell">
+      <table
+        role="grid"
+        aria-label={schedule.title}
+        aria-rowcount={rows.length + 1}
+        aria-colcount={shown.length}
+        className="w-full text-cell"
+      >
         <thead>
           <tr>
             {table.getHeaderGroups().flatMap((group) =>
@@ -95,7 +113,9 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                     } ${column?.figures ? 'text-right' : ''} ${column && column.heading.length > 9 ? 'max-w-24' : ''}`}
                   >
                     {column?.heading ?? 'Mark'}
-                    <span className="block font-mono text-zone font-medium whitespace-nowrap text-pencil">{column?.unit ? `${column.unit}` : '\u00a0'}</span>
+                    <span className="block font-mono text-zone font-medium whitespace-nowrap text-pencil">
+                      {column?.unit ? `${column.unit}` : '\u00a0'}
+                    </span>
                   </th>
                 )
               }),
@@ -120,7 +140,12 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                 const own = marks(row.original, key)
                 if (key === 'mark') {
                   return (
-                    <th key={cell.id} scope="row" {...common} className={`sticky left-0 z-[5] border-r border-b border-r-hair border-b-hair px-2.5 py-1.5 align-top font-mono whitespace-nowrap outline-offset-[-3px] ${ground}`}>
+                    <th
+                      key={cell.id}
+                      scope="row"
+                      {...common}
+                      className={`sticky left-0 z-[5] border-r border-b border-r-hair border-b-hair px-2.5 py-1.5 align-top font-mono whitespace-nowrap outline-offset-[-3px] ${ground}`}
+                    >
                       <span className="inline-flex items-center gap-1.5">
                         {row.original.vessel.mark}
                         {row.original.vessel.status === 'sized' ? null : <SeverityMark severity="error" />}
@@ -133,7 +158,11 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                   <td
                     key={cell.id}
                     {...common}
-                    title={value?.number === null || value === undefined ? undefined : `${String(Number(value.number.toPrecision(12)))} ${column?.unit ?? ''}`}
+                    title={
+                      value?.number === null || value === undefined
+                        ? undefined
+                        : `${String(Number(value.number.toPrecision(12)))} ${column?.unit ?? ''}`
+                    }
                     className={`relative border-b border-b-hair px-2.5 py-1.5 align-top outline-offset-[-3px] ${ground} ${column?.figures ? 'figures text-right whitespace-nowrap' : 'min-w-20'} ${column?.mono ? 'font-mono' : ''}`}
                   >
                     {own.around}

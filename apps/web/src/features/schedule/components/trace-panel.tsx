@@ -24,11 +24,19 @@ const Source = ({ input, context }: { readonly input: TraceInput; readonly conte
   switch (origin.from) {
     case 'spec': {
       const words = input.authored ? `spec: ${input.authored}` : 'spec'
-      return context.hasSpec ? <Link to={withQuery(paths.spec(context.project), { path: origin.path })}>{words}</Link> : words
+      return context.hasSpec ? (
+        <Link to={withQuery(paths.spec(context.project), { path: origin.path })}>{words}</Link>
+      ) : (
+        words
+      )
     }
     case 'assumption': {
       const used = context.result.assumptions.find((assumption) => assumption.id === origin.id)
-      return <Link to={withQuery(paths.basis(context.project), { assumption: origin.id })}>{`assumption ${used?.number ?? origin.id}`}</Link>
+      return (
+        <Link
+          to={withQuery(paths.basis(context.project), { assumption: origin.id })}
+        >{`assumption ${used?.number ?? origin.id}`}</Link>
+      )
     }
     case 'table':
       return citationWords(origin.citation, context.result.sources)
@@ -51,7 +59,15 @@ const Input = ({ input, context }: { readonly input: TraceInput; readonly contex
   </li>
 )
 
-const Step = ({ step, context, chosen = false }: { readonly step: TraceStep; readonly context: Context; readonly chosen?: boolean }) => {
+const Step = ({
+  step,
+  context,
+  chosen = false,
+}: {
+  readonly step: TraceStep
+  readonly context: Context
+  readonly chosen?: boolean
+}) => {
   const drawn = useMemo(() => drawStep(step, context.all, context.units), [step, context])
   const source = citationWords(step.source, context.result.sources)
   return (
@@ -88,7 +104,10 @@ interface Props {
 /** The worked calculation of one number: the line itself, then what it was computed from. */
 export const TracePanel = ({ project, result, vessel, entry, heading, units, hasSpec, without }: Props) => {
   const all = useMemo(() => vessel.trace.flatMap((section) => section.entries), [vessel])
-  const context = useMemo<Context>(() => ({ project, result, units, all, hasSpec }), [project, result, units, all, hasSpec])
+  const context = useMemo<Context>(
+    () => ({ project, result, units, all, hasSpec }),
+    [project, result, units, all, hasSpec],
+  )
   const line = useMemo(() => (entry === null ? [] : upstream(vessel.trace, entry)), [vessel, entry])
   const chosen = line.at(-1)
   if (!chosen) return <div className="text-cell text-pencil">{without}</div>

@@ -35,7 +35,14 @@ export const SignInForm = ({ onDone }: { readonly onDone: () => void }) => {
         </Band>
       ) : null}
       <TextField label="E-mail" name="email" type="email" autoComplete="username" required error={email} />
-      <TextField label="Password" name="password" type="password" autoComplete="current-password" required error={password} />
+      <TextField
+        label="Password"
+        name="password"
+        type="password"
+        autoComplete="current-password"
+        required
+        error={password}
+      />
       <div className="pt-2">
         <Button type="submit" look="main" busy={busy} className="w-full">
           Sign in

@@ -8,10 +8,20 @@ interface Props {
   readonly onClose: () => void
 }
 
-const Side = ({ side, changed, sign }: { readonly side: { readonly line: number; readonly text: string } | null; readonly changed: boolean; readonly sign: string }) => (
+const Side = ({
+  side,
+  changed,
+  sign,
+}: {
+  readonly side: { readonly line: number; readonly text: string } | null
+  readonly changed: boolean
+  readonly sign: string
+}) => (
   <>
     <td className="w-10 border-b border-hair px-1 text-right align-top text-pencil select-none">{side?.line ?? ''}</td>
-    <td className={`w-1/2 border-b border-hair px-2 align-top break-words whitespace-pre-wrap ${changed && side ? 'bg-steel-wash' : side ? '' : 'bg-well'}`}>
+    <td
+      className={`w-1/2 border-b border-hair px-2 align-top break-words whitespace-pre-wrap ${changed && side ? 'bg-steel-wash' : side ? '' : 'bg-well'}`}
+    >
       {changed && side ? <span className="mr-1 font-semibold text-steel">{sign}</span> : null}
       {side?.text ?? ''}
     </td>
@@ -32,7 +42,12 @@ export const CompareTexts = ({ left, right, onClose }: Props) => {
           Close the comparison
         </Button>
       </div>
-      <div className="min-h-0 flex-1 overflow-auto border-t border-hair" tabIndex={0} role="region" aria-label="Compared texts">
+      <div
+        className="min-h-0 flex-1 overflow-auto border-t border-hair"
+        tabIndex={0}
+        role="region"
+        aria-label="Compared texts"
+      >
         {same ? (
           <p className="px-3 py-2">The texts are the same.</p>
         ) : (

@@ -17,7 +17,13 @@ interface Props {
   readonly onAccept: (reason: string) => void
 }
 
-const Accept = ({ onAccept, onCancel }: { readonly onAccept: (reason: string) => void; readonly onCancel: () => void }) => {
+const Accept = ({
+  onAccept,
+  onCancel,
+}: {
+  readonly onAccept: (reason: string) => void
+  readonly onCancel: () => void
+}) => {
   const [reason, setReason] = useState('')
   return (
     <form
@@ -28,7 +34,12 @@ const Accept = ({ onAccept, onCancel }: { readonly onAccept: (reason: string) =>
       }}
     >
       <div className="flex-1">
-        <TextField label="Accepted because" value={reason} onChange={(event) => setReason(event.target.value)} autoFocus />
+        <TextField
+          label="Accepted because"
+          value={reason}
+          onChange={(event) => setReason(event.target.value)}
+          autoFocus
+        />
       </div>
       <Button type="submit" why={reason.trim() === '' ? 'The reason is printed with the warning.' : null}>
         Accept
@@ -85,7 +96,11 @@ export const FindingRow = ({ finding, why, readOnly, chosen, onJump, onFix, onAc
           </div>
         )}
       </div>
-      <Link to={paths.help(finding.code)} className="self-start font-mono text-cell" aria-label={`${finding.code}: help`}>
+      <Link
+        to={paths.help(finding.code)}
+        className="self-start font-mono text-cell"
+        aria-label={`${finding.code}: help`}
+      >
         {finding.code}
       </Link>
     </li>

@@ -13,7 +13,11 @@ export const Outline = ({ model, entries, stale, onJump }: Props) => (
   <nav aria-label="Outline" className="h-full overflow-y-auto border-r border-hair py-2">
     {model?.systems.map((system) => (
       <div key={system.path} className="pb-2">
-        <button type="button" onClick={() => onJump(system.range)} className="block w-full px-3 py-0.5 text-left hover:bg-steel-wash">
+        <button
+          type="button"
+          onClick={() => onJump(system.range)}
+          className="block w-full px-3 py-0.5 text-left hover:bg-steel-wash"
+        >
           <span className="font-mono text-cell font-semibold">{system.id}</span>
           {system.title ? <span className="block truncate text-cell text-pencil">{system.title.value}</span> : null}
         </button>
@@ -22,9 +26,17 @@ export const Outline = ({ model, entries, stale, onJump }: Props) => (
             const entry = entries.find((one) => one.mark === vessel.mark)
             return (
               <li key={vessel.path}>
-                <button type="button" onClick={() => onJump(vessel.range)} className="flex w-full items-baseline justify-between gap-2 py-0.5 pr-3 pl-6 text-left hover:bg-steel-wash">
+                <button
+                  type="button"
+                  onClick={() => onJump(vessel.range)}
+                  className="flex w-full items-baseline justify-between gap-2 py-0.5 pr-3 pl-6 text-left hover:bg-steel-wash"
+                >
                   <span className="font-mono text-cell">{vessel.mark}</span>
-                  <span className={`figures truncate text-cell ${entry?.sized === false ? 'text-fault' : 'text-pencil'} ${stale ? 'opacity-60' : ''}`}>{entry?.size}</span>
+                  <span
+                    className={`figures truncate text-cell ${entry?.sized === false ? 'text-fault' : 'text-pencil'} ${stale ? 'opacity-60' : ''}`}
+                  >
+                    {entry?.size}
+                  </span>
                 </button>
               </li>
             )

@@ -20,7 +20,9 @@ export const SpecBands = ({ draft, onCompare }: Props) => {
           title={`${conflict.savedBy.name} saved version ${conflict.version} at ${clock(conflict.savedAt)}, while you were at version ${base.version}.`}
           actions={
             <>
-              <Button onClick={() => onCompare({ title: `Saved version ${conflict.version}`, text: conflict.text })}>Compare both</Button>
+              <Button onClick={() => onCompare({ title: `Saved version ${conflict.version}`, text: conflict.text })}>
+                Compare both
+              </Button>
               <Button onClick={draft.takeTheirs}>Take version {conflict.version}</Button>
               <Button busy={draft.saving} onClick={() => void draft.saveOver()}>
                 Save mine over it
@@ -45,7 +47,9 @@ export const SpecBands = ({ draft, onCompare }: Props) => {
             </>
           }
         >
-          {one.baseVersion === base.version ? '' : `It was begun on version ${one.baseVersion}; version ${base.version} is saved.`}
+          {one.baseVersion === base.version
+            ? ''
+            : `It was begun on version ${one.baseVersion}; version ${base.version} is saved.`}
         </Band>
       ))}
     </>

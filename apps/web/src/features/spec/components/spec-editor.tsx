@@ -38,7 +38,12 @@ const always: Extension = [
   editorTheme(),
   resultMargin(),
   EditorView.lineWrapping,
-  EditorView.contentAttributes.of({ 'aria-label': 'Spec text. Press Escape, then Tab, to leave the editor.', spellcheck: 'false', autocorrect: 'off', autocapitalize: 'off' }),
+  EditorView.contentAttributes.of({
+    'aria-label': 'Spec text. Press Escape, then Tab, to leave the editor.',
+    spellcheck: 'false',
+    autocorrect: 'off',
+    autocapitalize: 'off',
+  }),
 ]
 
 /** The YAML editor of the spec: findings underlined and marked, results beside the lines. */
@@ -62,7 +67,11 @@ export const SpecEditor = ({ ref, text, onChange, onSave, readOnly, findings, en
     () => ({
       jumpTo,
       fix: (fix) => view && applyFix(view, fix),
-      insertLine: (line, insert) => view?.dispatch({ changes: { from: offsetOf(view.state.doc, { line, character: 0 }), insert }, userEvent: 'input' }),
+      insertLine: (line, insert) =>
+        view?.dispatch({
+          changes: { from: offsetOf(view.state.doc, { line, character: 0 }), insert },
+          userEvent: 'input',
+        }),
     }),
     [jumpTo, view],
   )

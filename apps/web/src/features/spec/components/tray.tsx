@@ -20,7 +20,10 @@ interface Props {
 }
 
 const counted = (findings: readonly Finding[]) =>
-  (['error', 'warning', 'note'] as const).map((severity) => ({ severity, count: findings.filter((finding) => finding.severity === severity && finding.accepted === undefined).length }))
+  (['error', 'warning', 'note'] as const).map((severity) => ({
+    severity,
+    count: findings.filter((finding) => finding.severity === severity && finding.accepted === undefined).length,
+  }))
 
 /** Under the editor: findings with why and fix, and the sized results in words. */
 export const Tray = ({ findings, reasons, entries, stale, readOnly, line, status, onJump, onFix, onAccept }: Props) => {
@@ -30,7 +33,10 @@ export const Tray = ({ findings, reasons, entries, stale, readOnly, line, status
     { id: 'results' as const, label: `Results ${entries.length}` },
   ]
   return (
-    <section aria-label="Findings and results" className={`flex min-h-0 shrink-0 flex-col border-t-2 border-ink bg-sheet ${tab === null ? '' : 'h-[32%] max-h-72 min-h-40'}`}>
+    <section
+      aria-label="Findings and results"
+      className={`flex min-h-0 shrink-0 flex-col border-t-2 border-ink bg-sheet ${tab === null ? '' : 'h-[32%] max-h-72 min-h-40'}`}
+    >
       <div className="flex min-h-9 shrink-0 flex-wrap items-center gap-x-1 border-b border-hair pr-3 pl-1">
         <div role="tablist" aria-label="Under the editor" className="flex">
           {tabs.map(({ id, label }) => (
@@ -61,7 +67,13 @@ export const Tray = ({ findings, reasons, entries, stale, readOnly, line, status
         <p className="ml-auto py-1 text-cell text-pencil">{status}</p>
       </div>
       {tab === null ? null : (
-        <div id="tray-panel" role="tabpanel" aria-labelledby={`tab-${tab}`} tabIndex={0} className="min-h-0 flex-1 overflow-y-auto outline-offset-[-3px]">
+        <div
+          id="tray-panel"
+          role="tabpanel"
+          aria-labelledby={`tab-${tab}`}
+          tabIndex={0}
+          className="min-h-0 flex-1 overflow-y-auto outline-offset-[-3px]"
+        >
           {tab === 'findings' ? (
             findings.length === 0 ? (
               <p className="px-3 py-2 text-pencil">No finding.</p>
@@ -85,10 +97,18 @@ export const Tray = ({ findings, reasons, entries, stale, readOnly, line, status
             <ul aria-busy={stale} className={stale ? 'opacity-60' : ''}>
               {entries.map((entry) => (
                 <li key={entry.mark} className="flex flex-wrap items-baseline gap-x-4 border-b border-hair px-3 py-1.5">
-                  <button type="button" className="w-24 text-left font-mono hover:underline" onClick={() => onJump({ start: { line: entry.line, character: 0 }, end: { line: entry.line, character: 0 } })}>
+                  <button
+                    type="button"
+                    className="w-24 text-left font-mono hover:underline"
+                    onClick={() =>
+                      onJump({ start: { line: entry.line, character: 0 }, end: { line: entry.line, character: 0 } })
+                    }
+                  >
                     {entry.mark}
                   </button>
-                  <strong className={`figures font-mono font-semibold ${entry.sized ? '' : 'text-fault'}`}>{entry.size}</strong>
+                  <strong className={`figures font-mono font-semibold ${entry.sized ? '' : 'text-fault'}`}>
+                    {entry.size}
+                  </strong>
                   {entry.was === null ? null : (
                     <span className="text-cell text-pencil">
                       <del>{entry.was}</del> in the last issue

@@ -1,5 +1,13 @@
 import { setDiagnostics, type Diagnostic } from '@codemirror/lint'
-import { RangeSet, StateEffect, StateField, type EditorState, type Extension, type Text, type TransactionSpec } from '@codemirror/state'
+import {
+  RangeSet,
+  StateEffect,
+  StateField,
+  type EditorState,
+  type Extension,
+  type Text,
+  type TransactionSpec,
+} from '@codemirror/state'
 import { gutter, GutterMarker, type EditorView } from '@codemirror/view'
 import type { Position } from '@coldfill/spec'
 import type { Finding } from '#lib/sized-project.ts'
@@ -26,12 +34,20 @@ const mark = (severity: Severity): SVGElement => {
   const svg = part('svg', { width: '14', height: '14', viewBox: '0 0 16 16' })
   if (severity === 'error') svg.append(part('rect', { x: '1', y: '1', width: '14', height: '14', class: 'fill-fault' }))
   else if (severity === 'warning') svg.append(part('path', { d: 'M8 0 16 8 8 16 0 8Z', class: 'fill-ochre' }))
-  else svg.append(part('circle', { cx: '8', cy: '8', r: '6.5', class: 'fill-none stroke-steel', 'stroke-width': '1.5' }))
+  else
+    svg.append(part('circle', { cx: '8', cy: '8', r: '6.5', class: 'fill-none stroke-steel', 'stroke-width': '1.5' }))
   const letter = severity === 'error' ? 'E' : severity === 'warning' ? 'W' : 'i'
   svg.append(
     part(
       'text',
-      { x: '8', y: severity === 'warning' ? '11' : '11.5', 'text-anchor': 'middle', 'font-size': severity === 'warning' ? '8' : '10', 'font-weight': '700', class: severity === 'note' ? 'fill-steel' : 'fill-sheet' },
+      {
+        x: '8',
+        y: severity === 'warning' ? '11' : '11.5',
+        'text-anchor': 'middle',
+        'font-size': severity === 'warning' ? '8' : '10',
+        'font-weight': '700',
+        class: severity === 'note' ? 'fill-steel' : 'fill-sheet',
+      },
       letter,
     ),
   )
@@ -85,7 +101,11 @@ export const findingGutter = (onMark: (line: number) => void): Extension => [
 
 const applyFix = (view: EditorView, fix: Finding['fixes'][number]) => {
   view.dispatch({
-    changes: fix.edits.map((edit) => ({ from: offsetOf(view.state.doc, edit.range.start), to: offsetOf(view.state.doc, edit.range.end), insert: edit.text })),
+    changes: fix.edits.map((edit) => ({
+      from: offsetOf(view.state.doc, edit.range.start),
+      to: offsetOf(view.state.doc, edit.range.end),
+      insert: edit.text,
+    })),
     userEvent: 'input.fix',
   })
   view.focus()
@@ -116,7 +136,9 @@ export const showFindings = (state: EditorState, findings: readonly Finding[]): 
       .toSorted(([a], [b]) => a - b)
       .map(([from, own]) => {
         const worst = order.find((severity) => own.some((finding) => finding.severity === severity)) ?? 'note'
-        return new FindingMarker(worst, own.map((finding) => `${finding.code} ${finding.message}`).join('\n')).range(from)
+        return new FindingMarker(worst, own.map((finding) => `${finding.code} ${finding.message}`).join('\n')).range(
+          from,
+        )
       }),
   )
   const base = setDiagnostics(

@@ -1,4 +1,11 @@
-import { RangeSet, StateEffect, StateField, type EditorState, type Extension, type TransactionSpec } from '@codemirror/state'
+import {
+  RangeSet,
+  StateEffect,
+  StateField,
+  type EditorState,
+  type Extension,
+  type TransactionSpec,
+} from '@codemirror/state'
 import { gutter, GutterMarker } from '@codemirror/view'
 import type { MarginEntry } from '../margin-lines.ts'
 
@@ -42,7 +49,12 @@ class ResultMarker extends GutterMarker {
       left.append(line(entry.mark, 'font-mono text-zone text-pencil'), triangle)
       head.append(left, right)
     }
-    holder.append(head, ...entry.details.slice(0, entry.room).map((text) => line(text, 'text-right font-mono text-zone leading-5 text-pencil')))
+    holder.append(
+      head,
+      ...entry.details
+        .slice(0, entry.room)
+        .map((text) => line(text, 'text-right font-mono text-zone leading-5 text-pencil')),
+    )
     return holder
   }
 }
@@ -68,7 +80,12 @@ const results = StateField.define<RangeSet<GutterMarker>>({
 /** Sized results beside the lines on which vessels are declared. The Results list of the tray says the same to those who do not see it. */
 export const resultMargin = (): Extension => [
   results,
-  gutter({ class: 'cm-result-margin max-desk:hidden', side: 'after', markers: (view) => view.state.field(results), initialSpacer: () => new Spacer() }),
+  gutter({
+    class: 'cm-result-margin max-desk:hidden',
+    side: 'after',
+    markers: (view) => view.state.field(results),
+    initialSpacer: () => new Spacer(),
+  }),
 ]
 
 export const showResults = (state: EditorState, entries: readonly MarginEntry[], stale: boolean): TransactionSpec => {
