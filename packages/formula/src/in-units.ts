@@ -17,10 +17,11 @@ interface Part {
 }
 
 const fixed = (offset: number): Part => ({ scale: 1, offset, tree: null })
-/** A part without offset; what is negative goes into the tree. */
-const part = (scale: number, tree: Tree): Part => {
-  const size = Math.abs(scale)
-  return { scale: near(size, 1) ? 1 : size, offset: 0, tree: scale < 0 ? negated(tree) : tree }
+const part = (scale: number, tree: Tree): Part => ({ scale: near(scale, 1) ? 1 : scale, offset: 0, tree })
+/** The part times a number; a sign goes into the tree. */
+const times = ({ scale, offset, tree }: Part, by: number): Part => {
+  if (!tree || by === 0) return fixed(tree ? 0 : offset * by)
+  return { ...part(scale * Math.abs(by), by < 0 ? negated(tree) : tree), offset: offset * by }
 }
 /** Zero where the two are equal but for rounding. */
 const difference = (a: number, b: number): number => (near(a, b) ? 0 : a - b)
@@ -38,14 +39,18 @@ const measured = ({ scale: own, offset: from, tree }: Part, scale: number, offse
 const free = (whole: Part, at: Tree): Part =>
   whole.offset === 0 || !whole.tree ? whole : part(whole.scale, measured(whole, whole.scale, 0, at))
 
-/** The unit for several parts side by side: the wanted one where a part has it, else that of the first part that has one. */
-const shared = (parts: readonly Part[], want: number | undefined): Part => {
+const isNumber = ({ tree }: Part): boolean => tree?.type === 'number'
+/** A written number beside a part with an offset is merged into it, and else stays as written. */
+const merged = (own: Part, beside: Part): Part =>
+  beside.offset !== 0 && own.tree?.type === 'number' ? fixed(own.scale * own.tree.value) : own
+
+/** The unit for several parts side by side: the wanted one where a part has it or they differ, else that of the first. */
+const shared = (parts: readonly Part[], want: number | undefined): Pick<Part, 'scale' | 'offset'> => {
   const trees = parts.filter(({ tree }) => tree)
-  return (
-    trees.find(({ scale, tree }) => tree!.type === 'number' || (want !== undefined && near(scale, want))) ??
-    trees[0] ??
-    fixed(0)
-  )
+  const [first = fixed(0)] = trees
+  const wanted = trees.find((each) => isNumber(each) || (want !== undefined && near(each.scale, want)))
+  if (wanted || want === undefined || trees.every(({ scale }) => near(scale, first.scale))) return wanted ?? first
+  return { scale: want, offset: first.offset }
 }
 
 /**
@@ -56,27 +61,30 @@ const shared = (parts: readonly Part[], want: number | undefined): Part => {
  * `text`. The formula must have passed `checkDimensions`; a condition needs no `result`.
  */
 export const inUnits = (tree: Tree, scope: Scope, system: UnitSystem, result: Kind = 'ratio'): Tree => {
-  const sum = (node: Tree, adds: boolean, a: Part, b: Part, want: number | undefined): Part => {
-    const offset = adds ? a.offset + b.offset : difference(a.offset, b.offset)
+  const sum = (node: Extract<Tree, { type: 'binary' }>, wish: number | undefined): Part => {
+    const adds = node.operator === '+'
+    const isPlain = (term: Tree): boolean => term.type === 'number' && term.unit === undefined
+    const want = isPlain(node.left) || isPlain(node.right) ? 1 : wish
+    const [left, right] = [rewrite(node.left, want), rewrite(node.right, want)]
+    const [a, b] = [merged(left, right), merged(right, left)]
+    const offset = difference(a.offset, adds ? -b.offset : b.offset)
     if (!b.tree) return { ...a, offset }
     if (!a.tree) return { scale: b.scale, offset, tree: adds ? b.tree : negated(b.tree) }
     const { scale } = shared([a, b], want)
-    const [left, right] = [scaled(a.scale / scale, a.tree), scaled(b.scale / scale, b.tree)]
-    return { scale, offset, tree: binaryTree(adds ? '+' : '-', left, right, node.at) }
+    const terms = [scaled(a.scale / scale, a.tree), scaled(b.scale / scale, b.tree)] as const
+    return { scale, offset, tree: binaryTree(adds ? '+' : '-', ...terms, node.at) }
   }
 
-  const product = (node: Tree, divides: boolean, a: Part, b: Part): Part => {
-    if (!a.tree && !b.tree) return fixed(divides ? a.offset / b.offset : a.offset * b.offset)
-    if (a.tree && b.tree) {
-      const tree = binaryTree(divides ? '/' : '*', a.tree, b.tree, node.at)
-      return part(divides ? a.scale / b.scale : a.scale * b.scale, tree)
-    }
-    const [own, other] = a.tree ? [a, b.offset] : [b, a.offset]
-    if (other === 0)
-      return divides && a.tree ? part(1, binaryTree('/', a.tree, numberTree(0, node.at), node.at)) : fixed(0)
-    if (!divides) return part(own.scale * other, own.tree!)
-    if (a.tree) return part(a.scale / other, a.tree)
-    return part(other / own.scale, binaryTree('/', numberTree(1, node.at), own.tree!, node.at))
+  const product = (node: Extract<Tree, { type: 'binary' }>): Part => {
+    const divides = node.operator === '/'
+    const [left, right] = [rewrite(node.left), rewrite(node.right)]
+    const [a, b] = [merged(left, right), merged(right, left)]
+    if (!b.tree) return times(a, divides ? 1 / b.offset : b.offset)
+    if (!a.tree && !divides) return times(b, a.offset)
+    const [over, under] = [free(a, node.left), free(b, node.right)]
+    const scale = divides ? over.scale / under.scale : over.scale * under.scale
+    const first = over.tree ?? numberTree(1, node.at)
+    return times(part(scale, binaryTree(divides ? '/' : '*', first, under.tree!, node.at)), over.tree ? 1 : over.offset)
   }
 
   const power = (node: Extract<Tree, { type: 'binary' }>): Part => {
@@ -165,11 +173,8 @@ export const inUnits = (tree: Tree, scope: Scope, system: UnitSystem, result: Ki
         return call(node, want)
       case 'binary':
       default: {
-        const { operator, left, right } = node
-        if (operator === '^') return power(node)
-        if (operator === '+' || operator === '-')
-          return sum(node, operator === '+', rewrite(left, want), rewrite(right, want), want)
-        return product(node, operator === '/', free(rewrite(left), left), free(rewrite(right), right))
+        if (node.operator === '^') return power(node)
+        return node.operator === '+' || node.operator === '-' ? sum(node, want) : product(node)
       }
     }
   }
