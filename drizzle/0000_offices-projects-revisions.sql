@@ -71,6 +71,7 @@ CREATE TABLE "projects" (
 	"office_id" uuid NOT NULL,
 	"number" text NOT NULL,
 	"title" text NOT NULL,
+	"client" text DEFAULT '' NOT NULL,
 	"last_redline" integer DEFAULT 0 NOT NULL,
 	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
 	CONSTRAINT "projects_pk" PRIMARY KEY("id")

@@ -16,6 +16,8 @@ export const FindingCode = z.object({
   what: z.string(),
   why: z.string(),
   fix: z.string(),
+  /** Where the rule comes from, for engineering findings. */
+  source: z.string().optional(),
 })
 export type FindingCode = z.infer<typeof FindingCode>
 

@@ -3,6 +3,7 @@ import { finishMaking } from '../commands/finish-making.ts'
 import type { Clock } from '../clock.ts'
 import type { Database } from '../db/client.ts'
 import { makings, offices, projects, revisions } from '../db/schema/index.ts'
+import { describeError } from '../describe-error.ts'
 import type { Log } from '../log.ts'
 import type { Postman } from '../mail/postman.ts'
 import { frozenContent } from '../review/frozen.ts'
@@ -41,6 +42,7 @@ export const createFileMaker = ({
   let running: Promise<void> | null = null
   let again = false
   let closed = false
+  const closing = new AbortController()
 
   const keyOf = (making: MakingRow) => and(eq(makings.revisionId, making.revisionId), eq(makings.set, making.set))
   const note = async (making: MakingRow, values: Partial<MakingRow>): Promise<void> => {
@@ -66,6 +68,7 @@ export const createFileMaker = ({
       (stage) => {
         noted = noted.then(() => note(making, { stage }))
       },
+      closing.signal,
     )
     await noted
     await note(making, { stage: 3 })
@@ -82,8 +85,12 @@ export const createFileMaker = ({
     try {
       await make(making)
     } catch (error) {
-      if (closed) return
-      const reason = error instanceof Error ? error.message : 'unknown'
+      if (closed) {
+        // Not the fault of the work: it has all its attempts at the next start.
+        await note(making, { attempts: making.attempts })
+        return
+      }
+      const reason = describeError(error)
       log.error(`files of revision ${making.revisionId}: ${reason}`)
       await note(making, { problem: 'The files could not be made. Try again; the revision itself is kept.' })
     }
@@ -105,7 +112,7 @@ export const createFileMaker = ({
       if (closed) return
       again = true
       running ??= round()
-        .catch((error: unknown) => log.error(`files: ${error instanceof Error ? error.message : 'unknown'}`))
+        .catch((error: unknown) => log.error(`files: ${describeError(error)}`))
         .finally(() => {
           running = null
         })
@@ -115,6 +122,7 @@ export const createFileMaker = ({
     },
     close: async () => {
       closed = true
+      closing.abort()
       while (running) await running
     },
   }

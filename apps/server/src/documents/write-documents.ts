@@ -26,6 +26,7 @@ const MEBIBYTES = 1_536
 export const writeDocuments = (
   order: DocumentOrder,
   onStage: (stage: number) => void,
+  signal: AbortSignal,
 ): Promise<readonly WrittenFile[]> =>
   new Promise((resolve, reject) => {
     const worker = startWorker(new URL('../workers/documents.worker.ts', import.meta.url), {
@@ -34,6 +35,7 @@ export const writeDocuments = (
     })
     const stop = (act: () => void): void => {
       clearTimeout(timer)
+      signal.removeEventListener('abort', abort)
       act()
       void worker.terminate()
     }
@@ -41,6 +43,8 @@ export const writeDocuments = (
       () => stop(() => reject(new Error(`writing the files took longer than ${LIMIT_MS / 1000} s`))),
       LIMIT_MS,
     )
+    const abort = (): void => stop(() => reject(new Error('the server is closing')))
+    signal.addEventListener('abort', abort)
     worker.on('message', (progress: DocumentProgress) => {
       if ('files' in progress) stop(() => resolve(progress.files))
       else onStage(progress.stage)

@@ -3,6 +3,7 @@ import { createTransport } from 'nodemailer'
 import type { Clock } from '../clock.ts'
 import type { Database } from '../db/client.ts'
 import { mails } from '../db/schema/index.ts'
+import { describeError } from '../describe-error.ts'
 import type { Log } from '../log.ts'
 
 type MailRow = typeof mails.$inferSelect
@@ -99,7 +100,7 @@ export const createPostman = ({
     if (closed) return
     again = true
     running ??= round()
-      .catch((error: unknown) => log.error(`outbox: ${error instanceof Error ? error.message : 'unknown'}`))
+      .catch((error: unknown) => log.error(`outbox: ${describeError(error)}`))
       .finally(() => {
         running = null
       })

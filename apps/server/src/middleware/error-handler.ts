@@ -1,5 +1,6 @@
 import type { ProblemIssue } from '@coldfill/contract'
 import type { ErrorRequestHandler, RequestHandler, Response } from 'express'
+import { describeError } from '../describe-error.ts'
 import { AppError, notFound } from '../errors.ts'
 import type { Log } from '../log.ts'
 
@@ -40,19 +41,6 @@ const frameworkStatus = (error: unknown): number | null => {
   return typeof status === 'number' && status >= 400 && status < 500 ? status : null
 }
 
-/**
- * The text of a database error holds the statement and its values, so that neither it nor its cause is ever written down; the
- * code and the constraint are.
- */
-const describe = (error: unknown): string => {
-  if (!(error instanceof Error)) return 'a value that is no error was thrown'
-  if (error.name === 'DrizzleQueryError' || error.message.startsWith('Failed query')) {
-    const { code, constraint } = (error.cause ?? {}) as { code?: unknown; constraint?: unknown }
-    return `database error ${String(code ?? 'unknown')}${constraint === undefined ? '' : ` (${String(constraint)})`}`
-  }
-  return error.stack ?? error.message
-}
-
 export const unknownAddress: RequestHandler = () => {
   throw notFound()
 }
@@ -75,7 +63,7 @@ export const errorHandler =
       send(res, { status, ...words })
       return
     }
-    log.error(`${String(res.locals['requestId'])} ${req.method} ${req.path}: ${describe(error)}`)
+    log.error(`${String(res.locals['requestId'])} ${req.method} ${req.path}: ${describeError(error)}`)
     send(res, {
       status: 500,
       code: 'internal',

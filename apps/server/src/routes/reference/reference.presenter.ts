@@ -26,11 +26,14 @@ const presentMethods = (): Reference['methods'] =>
     ]),
   )
 
+const presentEngineeringCodes = (): Reference['findingCodes'] =>
+  Object.fromEntries(Object.entries(engineeringCodes).map(([code, help]) => [code, { ...help, layer: 'engineering' }]))
+
 /** What the program knows, the same for everybody while it runs. */
 export const presentReference = (): Reference => ({
   engine: engineVersion,
   vocabulary,
-  findingCodes: { ...findingCodes, ...engineeringCodes },
+  findingCodes: { ...findingCodes, ...presentEngineeringCodes() },
   sources: { ...sources },
   assumptions: { ...assumptions },
   methods: presentMethods(),

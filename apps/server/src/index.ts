@@ -1,0 +1,5 @@
+export { createApp } from './app.ts'
+export { DEMO_OFFICES, DEMO_PASSWORD } from './demo/demo-people.ts'
+export { readEnv, type Env } from './env.ts'
+export { consoleLog, type Log } from './log.ts'
+export { startServer, type RunningServer } from './start-server.ts'
