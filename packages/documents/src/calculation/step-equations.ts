@@ -31,14 +31,22 @@ export const stepEquations = (step: StepLine, calculation: VesselCalculation, un
     result: step.value,
     functions: functionsInUnits(functions, units),
   })
+  const result = Number.isFinite(step.value) ? written(shown.result, step.unit) : written('no finite value', '')
+  const property = step.inUnits.type === 'call' && Object.hasOwn(functions, step.inUnits.name)
+  // A property is looked up at a reading, so the reading keeps its unit; elsewhere units would only crowd the line.
+  const numbers = property
+    ? Object.fromEntries(
+        Object.entries(shown.numbers).map(([symbol, number]) => [
+          symbol,
+          `${number} ${lines.find((line) => line.symbol === symbol)?.unit ?? ''}`.trimEnd(),
+        ]),
+      )
+    : shown.numbers
   return {
     symbols: equationBox(left, layout(step.formula, { functions })),
-    numbers: equationBox(
-      equationBox(left, layout(shown.tree, { numbers: shown.numbers, functions })),
-      written(
-        Number.isFinite(step.value) ? shown.result : 'no finite value',
-        Number.isFinite(step.value) ? step.unit : '',
-      ),
-    ),
+    numbers:
+      step.inUnits.type === 'symbol'
+        ? equationBox(left, result)
+        : equationBox(equationBox(left, layout(shown.tree, { numbers, functions })), result),
   }
 }

@@ -13,6 +13,10 @@ const arg = (name: 'e' | 'num' | 'den' | 'sub' | 'sup', box: Box): XmlComponent 
 /** Upright text in the document's font. LibreOffice reads words such as `in` or `over` inside an equation as commands unless they are normal text. */
 const upright = (text: string): XmlComponent => new MathRun({ text, normalText: true })
 
+/** `m/s2` behind a number becomes `m/s²`. */
+const raisedUnit = (text: string): string =>
+  text.startsWith('\u00A0') ? text.replace(/(?<=[a-z])[23](?!\w)/g, (power) => (power === '2' ? '²' : '³')) : text
+
 const fenced = (open: string, close: string, inside: readonly XmlComponent[]): XmlComponent =>
   element('d', [element('dPr', [property('begChr', open), property('endChr', close)]), element('e', inside)])
 
@@ -26,7 +30,7 @@ export const ommlOf = (box: Box): XmlComponent[] => {
     case 'number':
       return [new MathRun({ text: box.text, style: 'plain' })]
     case 'word':
-      return [upright(box.text)]
+      return [upright(raisedUnit(box.text))]
     case 'operator':
       return [new MathRun({ text: box.text, style: 'plain' })]
     case 'fraction':
@@ -62,6 +66,3 @@ const inParagraph = (component: XmlComponent): ParagraphChild => component as un
 /** An equation on its own line, set from the left. */
 export const displayEquation = (box: Box): ParagraphChild =>
   inParagraph(element('oMathPara', [element('oMathParaPr', [property('jc', 'left')]), element('oMath', ommlOf(box))]))
-
-/** An equation among words. */
-export const inlineEquation = (box: Box): ParagraphChild => inParagraph(element('oMath', ommlOf(box)))

@@ -11,7 +11,7 @@ import {
   type XmlComponent,
 } from 'docx'
 import type { Box } from '@coldfill/formula'
-import { inlineEquation } from './omml.ts'
+import { symbolRuns } from './symbol-runs.ts'
 import { plainText } from './plain-text.ts'
 import { STYLE, TABLE_STYLE } from './styles.ts'
 
@@ -22,7 +22,7 @@ export interface TableColumn {
   readonly align?: 'left' | 'right' | 'center'
 }
 
-/** Words, or a symbol drawn as in an equation. */
+/** Words, or a symbol with its subscript. */
 export type TableCellContent = string | Box
 
 export interface TableContent {
@@ -41,8 +41,13 @@ export interface TableContent {
 }
 
 const STYLES = {
-  table: { head: STYLE.tableHead, text: STYLE.tableText, number: STYLE.tableNumber },
-  schedule: { head: STYLE.scheduleHead, text: STYLE.scheduleText, number: STYLE.scheduleNumber },
+  table: { head: STYLE.tableHead, headNumber: STYLE.tableHeadNumber, text: STYLE.tableText, number: STYLE.tableNumber },
+  schedule: {
+    head: STYLE.scheduleHead,
+    headNumber: STYLE.scheduleHeadNumber,
+    text: STYLE.scheduleText,
+    number: STYLE.scheduleNumber,
+  },
 }
 
 /** Widths in whole twips that add up to `total`. */
@@ -84,9 +89,9 @@ export const table = (content: TableContent): Table => {
         new Paragraph({
           style: paragraphStyle,
           children: [
-            typeof content === 'string'
-              ? new TextRun({ text: plainText(content), ...(strong ? { style: 'Strong' } : {}) })
-              : inlineEquation(content),
+            ...(typeof content === 'string'
+              ? [new TextRun({ text: plainText(content), ...(strong ? { style: 'Strong' } : {}) })]
+              : symbolRuns(content)),
           ],
         }),
       ],
@@ -101,7 +106,9 @@ export const table = (content: TableContent): Table => {
       new TableRow({
         tableHeader: true,
         cantSplit: true,
-        children: columns.map((column, index) => cell(column.heading, index, style.head)),
+        children: columns.map((column, index) =>
+          cell(column.heading, index, column.align === 'right' ? style.headNumber : style.head),
+        ),
       }),
       ...rows.map(
         (row) =>

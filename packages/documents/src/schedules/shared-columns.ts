@@ -2,12 +2,12 @@ import { methodWords, numbersOf, sentenceCase } from '../words/vessel-words.ts'
 import { quantity, words } from './schedule.ts'
 
 /** Columns that every schedule has in the same words and place. */
-export const serves = words('serves', 'Serves', 18, ({ vessel, system }) => vessel.serves || (system?.title ?? ''))
+export const serves = words('serves', 'Serves', 17, ({ vessel, system }) => vessel.serves || (system?.title ?? ''))
 export const fluid = words('fluid', 'Fluid', 11, ({ vessel }) => sentenceCase(vessel.fluid))
 export const construction = words('construction', 'Type', 10, ({ vessel }) => sentenceCase(vessel.construction ?? ''))
-export const count = quantity('quantity', 'Qty', 4, 'count', ({ vessel }) => vessel.quantity)
+export const count = quantity('quantity', 'Qty', 5.5, 'count', ({ vessel }) => vessel.quantity)
 export const method = words('method', 'Method', 10, ({ vessel }) => methodWords(vessel.method))
-export const assumptions = words('assumptions', 'Assumptions', 10, ({ vessel, result }) =>
+export const assumptions = words('assumptions', 'Assumptions', 13, ({ vessel, result }) =>
   numbersOf(vessel.assumptions, result),
 )
 export const selectedVolume = quantity('selected-volume', 'Selected volume', 9, 'volume', ({ vessel }) =>

@@ -14,8 +14,9 @@ import {
 import { equationParagraph, paragraph, stepParagraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
+import { scheduleWords } from '../schedules/schedule-words.ts'
 import { basisWords } from '../words/basis-words.ts'
-import { valueText } from '../calculation/value-text.ts'
+import { numberText, valueText } from '../calculation/value-text.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import type { Section, SubmittalContext } from './section.ts'
@@ -24,6 +25,10 @@ type Vessel = ProjectResult['vessels'][number]
 
 const isInput = (line: { is: string }): line is InputLine => line.is === 'input'
 const isStep = (line: { is: string }): line is StepLine => line.is === 'step'
+
+/** True where a person typed another number than the one shown: another unit, or more digits. */
+const typedOtherwise = (line: InputLine): boolean =>
+  line.authored !== undefined && !line.authored.trim().startsWith(numberText(line.value))
 
 const inputTable = (inputs: readonly InputLine[], mark: string, title: string, width: number): FileChild =>
   table({
@@ -40,7 +45,7 @@ const inputTable = (inputs: readonly InputLine[], mark: string, title: string, w
       layoutSymbol(line.symbol),
       sentenceCase(line.name),
       valueText(line),
-      line.authored && line.authored !== valueText(line) ? `${line.source}, written ${line.authored}` : line.source,
+      typedOtherwise(line) ? `${line.source}, written ${line.authored}` : line.source,
     ]),
   })
 
@@ -68,26 +73,25 @@ const sectionLines = (
   ]
 }
 
-const answer = (vessel: Vessel, calculation: VesselCalculation): string => {
+const ANSWERS: readonly (readonly [key: string, words: string])[] = [
+  ['required-volume', 'required volume'],
+  ['required-volume-each', 'each vessel'],
+  ['fill-pressure', 'fill pressure'],
+  ['precharge', 'precharge'],
+  ['maximum-pressure', 'maximum pressure'],
+]
+
+/** The result in one sentence, in the digits of the schedule. */
+const answer = (vessel: Vessel, { result, options }: SubmittalContext): string => {
   if (vessel.status !== 'sized') return `${statusWords[vessel.status]}. ${sentenceCase(vessel.reason ?? '')}`
-  const lines = calculation.sections.flatMap((section) => section.lines)
-  const said = (key: string, words: string): string[] => {
-    const line = lines.find((candidate) => candidate.id === vessel.results[key]?.entry)
-    return line ? [`${words} ${valueText(line)}`] : []
-  }
-  const parts = [
-    ...said('required-volume', 'required volume'),
-    ...said('required-volume-each', 'of which each vessel'),
-    ...said('precharge', 'precharge'),
-    ...said('fill-pressure', 'fill pressure'),
-    ...said('maximum-pressure', 'maximum pressure'),
-  ]
+  const shown = scheduleWords(result, options.units)
+  const parts = ANSWERS.filter(([key]) => vessel.results[key]).map(([key, words]) => `${words} ${shown(vessel, key)}`)
   return `${vessel.mark}: ${parts.join(', ')}.`
 }
 
 const chosen = (vessel: Vessel): string =>
   vessel.selected === null
-    ? 'No vessel is chosen yet; any that meets the volume, the pressures and the temperatures above will do.'
+    ? 'No vessel is chosen in the spec.'
     : `Chosen: ${vessel.selected.quantity > 1 ? `${vessel.selected.quantity} × ` : ''}${vessel.selected.maker} ${vessel.selected.model}.`
 
 const vesselLines = (vessel: Vessel, context: SubmittalContext): FileChild[] => {
@@ -98,8 +102,8 @@ const vesselLines = (vessel: Vessel, context: SubmittalContext): FileChild[] => 
   )
   return [
     headings.heading(`${vessel.mark}  ${sentenceCase(vessel.kind)}`, 2),
-    ...basisWords(vessel, result).map((sentence) => paragraph(sentence)),
-    paragraph(answer(vessel, calculation), STYLE.answer),
+    paragraph(basisWords(vessel, result).join(' ')),
+    paragraph(answer(vessel, context), STYLE.answer),
     ...(vessel.status === 'sized' ? [paragraph(chosen(vessel))] : []),
     ...findings.map((finding) =>
       paragraph(`${sentenceCase(finding.severity)} ${finding.code}: ${finding.message} ${finding.hint}`, STYLE.remark),

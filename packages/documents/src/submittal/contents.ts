@@ -6,8 +6,10 @@ import type { Headings } from '../docx/paragraph.ts'
  * no program asks to. It is written last, when every heading is known, and stands before them.
  */
 export const contents = (headings: Headings): FileChild[] => [
-  new Paragraph({ style: 'ContentsHeading', children: [new TextRun('Contents')] }),
+  new Paragraph({ style: 'TOCHeading', children: [new TextRun('Contents')] }),
+  // Entries have no page numbers, so nothing leads the eye to where they would stand.
   new TableOfContents('Contents', {
+    tabLeader: 'none',
     hyperlink: true,
     headingStyleRange: '1-2',
     pageNumbersEntryLevelsRange: '1-2',

@@ -1,5 +1,6 @@
 import { paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
+import { pathWords } from '../words/path-words.ts'
 import { sentenceCase } from '../words/vessel-words.ts'
 import type { Section } from './section.ts'
 
@@ -9,8 +10,8 @@ export const findings: Section = ({ result, headings, captions, width }) => {
   const open = result.findings.filter((finding) => finding.accepted === undefined)
   const columns = [
     { heading: 'Code', width: 11 },
-    { heading: 'Severity', width: 11 },
-    { heading: 'Where', width: 22 },
+    { heading: 'Severity', width: 10 },
+    { heading: 'Where', width: 23 },
     { heading: 'Finding', width: 32 },
   ]
   return [
@@ -25,7 +26,7 @@ export const findings: Section = ({ result, headings, captions, width }) => {
             width,
             strongFirst: true,
             columns: [...columns, { heading: 'What to do', width: 24 }],
-            rows: open.map((f) => [f.code, sentenceCase(f.severity), f.path, f.message, f.hint]),
+            rows: open.map((f) => [f.code, sentenceCase(f.severity), pathWords(f.path), f.message, f.hint]),
           }),
         ]),
     ...(accepted.length === 0
@@ -39,7 +40,13 @@ export const findings: Section = ({ result, headings, captions, width }) => {
             width,
             strongFirst: true,
             columns: [...columns, { heading: 'Accepted because', width: 24 }],
-            rows: accepted.map((f) => [f.code, sentenceCase(f.severity), f.path, f.message, f.accepted ?? '']),
+            rows: accepted.map((f) => [
+              f.code,
+              sentenceCase(f.severity),
+              pathWords(f.path),
+              f.message,
+              f.accepted ?? '',
+            ]),
           }),
         ]),
   ]

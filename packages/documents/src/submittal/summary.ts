@@ -1,6 +1,6 @@
 import { paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
-import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
+import { scheduleWords } from '../schedules/schedule-words.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import type { Section } from './section.ts'
 
@@ -9,15 +9,7 @@ const counted = (count: number, one: string): string => `${count} ${one}${count 
 /** Every vessel on one table, and in words how many could not be sized. */
 export const summary: Section = ({ result, options, headings, captions, width }) => {
   const { vessels } = result
-  const tables = new Map(scheduleKinds(result).map((kind) => [kind, scheduleTable(result, kind, options.units)]))
-  /** The same digits as the schedule, with the unit behind them. */
-  const shown = (vessel: (typeof vessels)[number], key: string): string => {
-    const schedule = tables.get(vessel.kind)
-    const cell = schedule?.rows.find((row) => row.mark === vessel.mark && row.system === vessel.system)?.cells[key]
-    const unit = schedule?.columns.find((column) => column.key === key)?.unit ?? ''
-    if (!cell) return '—'
-    return cell.value === null ? cell.text : `${cell.text} ${unit}`.trimEnd()
-  }
+  const shown = scheduleWords(result, options.units)
   const unsized = vessels.filter((vessel) => vessel.status !== 'sized')
   const sentences = [
     `This submittal covers ${counted(vessels.length, 'vessel')} in ${counted(result.systems.length, 'system')}.`,

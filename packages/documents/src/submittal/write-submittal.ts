@@ -6,7 +6,7 @@ import { coverHeader, footer, header, pageProperties, textWidth, type Orientatio
 import { Headings } from '../docx/paragraph.ts'
 import { plainText } from '../docx/plain-text.ts'
 import { settled } from '../docx/settled-part.ts'
-import { styles } from '../docx/styles.ts'
+import { stylesXml } from '../docx/styles.ts'
 import { Captions } from '../docx/table.ts'
 import { assumptions } from './assumptions.ts'
 import { calculations } from './calculations.ts'
@@ -38,8 +38,8 @@ export const writeSubmittal = async (result: ProjectResult, options: DocumentOpt
 
   const first = children('portrait', [cover])
   // The contents list stands before the headings it lists, so the body is written first.
+  const overview = children('portrait', [summary])
   const body = [
-    page('portrait', children('portrait', [summary])),
     ...(result.vessels.length > 0 ? [page('landscape', children('landscape', [schedules]))] : []),
     page('portrait', children('portrait', [calculations])),
     page('portrait', children('portrait', [assumptions, findings, sources, cautions])),
@@ -62,7 +62,7 @@ export const writeSubmittal = async (result: ProjectResult, options: DocumentOpt
       { name: 'Engine', value: result.engine },
       ...(options.contentHash === undefined ? [] : [{ name: 'Content hash', value: options.contentHash }]),
     ],
-    styles,
+    externalStyles: stylesXml,
     sections: [
       {
         properties: frontProperties,
@@ -70,7 +70,7 @@ export const writeSubmittal = async (result: ProjectResult, options: DocumentOpt
         footers: { default: footer(options, 'portrait') },
         children: first,
       },
-      page('portrait', contents(headings)),
+      page('portrait', [...contents(headings), ...overview]),
       ...body,
     ],
   })

@@ -1,4 +1,5 @@
 import type { ProjectResult } from '@coldfill/sizing'
+import { pathWords } from './path-words.ts'
 
 type Vessel = ProjectResult['vessels'][number]
 export type TraceEntry = Vessel['trace'][number]['entries'][number]
@@ -47,7 +48,7 @@ export const citationWords = (citation: Citation, result: ProjectResult, memory 
 export const originWords = (origin: Origin, result: ProjectResult): string => {
   switch (origin.from) {
     case 'spec':
-      return `spec: ${origin.path}`
+      return `spec: ${pathWords(origin.path)}`
     case 'assumption': {
       const assumption = result.assumptions.find((candidate) => candidate.id === origin.id)
       return assumption ? `assumption ${assumption.number}: ${assumption.name}` : `assumption ${origin.id}`

@@ -22,7 +22,7 @@ import {
   wrapped,
   writeTitle,
 } from './sheet.ts'
-import { stepFormat } from './number-format.ts'
+import { significantFormat, stepFormat } from './number-format.ts'
 
 type Vessel = ProjectResult['vessels'][number]
 
@@ -152,9 +152,9 @@ export const writeCalculation = (
       row(at + 1 + index, [
         { text: fluidRow.symbol },
         { text: sentenceCase(fluidRow.name) },
-        { formula: fluidRow.formula, result: fluidRow.value, format: 'General' },
+        { formula: fluidRow.formula, result: fluidRow.value, format: significantFormat(fluidRow.value, 8) },
         { text: fluidRow.unit },
-        { text: fluidRow.of },
+        { text: `for ${fluidRow.of}` },
         { text: fluidRow.source },
       ])
     })

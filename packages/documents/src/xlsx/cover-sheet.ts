@@ -13,7 +13,7 @@ export interface ContentsEntry {
   readonly about: string
 }
 
-const WIDTHS = [22, 16, 46, 22]
+const WIDTHS = [24, 16, 60, 22]
 
 /** Title block, revision block, contents, legend and cautions: the first sheet of the workbook. */
 export const writeCover = (
@@ -26,7 +26,6 @@ export const writeCover = (
   const { project } = result
   const { titleBlock, revisions, contentHash } = options
   const sheet = addSheet(workbook, name, project, options, { orientation: 'portrait', widths: WIDTHS })
-  const total = WIDTHS.reduce((sum, width) => sum + width, 0)
   let at = 1
 
   const heading = (text: string) => {
@@ -130,9 +129,7 @@ export const writeCover = (
 
   heading('CAUTIONS')
   for (const sentence of cautions) {
-    const row = sheet.getRow(at)
     running(sentence)
-    if (sentence.length > total) row.height = 15
   }
   sheet.pageSetup.printArea = `A1:D${at}`
 }

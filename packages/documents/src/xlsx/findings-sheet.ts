@@ -1,6 +1,7 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import type { Workbook } from 'exceljs'
 import type { DocumentOptions } from '../document-options.ts'
+import { pathWords } from '../words/path-words.ts'
 import { sentenceCase } from '../words/vessel-words.ts'
 import { addSheet, writeTitle } from './sheet.ts'
 import { setPrintArea, writeTable } from './text-table.ts'
@@ -40,7 +41,7 @@ export const writeFindings = (
       [
         finding.code,
         sentenceCase(finding.severity),
-        finding.path,
+        pathWords(finding.path),
         finding.message,
         finding.hint,
         finding.accepted ?? '',

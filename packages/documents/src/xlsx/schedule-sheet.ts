@@ -23,10 +23,9 @@ export const writeScheduleSheet = (
   project: ProjectResult['project'],
   options: DocumentOptions,
 ): void => {
-  // A little air beside the text, and room for the filter button in the head.
   const columns = schedule.columns.map((column) => ({
     heading: headerText(column),
-    width: column.width + 2.5,
+    width: column.align === 'right' ? column.width - 0.5 : column.width + 1,
     align: column.align,
   }))
   const sheet = addSheet(workbook, name, project, options, {

@@ -21,10 +21,11 @@ export const line = (rgb: string, style: 'thin' | 'medium' | 'hair' = 'thin') =>
 export const HEAD_BORDERS: Partial<Borders> = { top: line(INK, 'medium'), bottom: line(INK, 'thin') }
 export const ROW_BORDERS: Partial<Borders> = { bottom: line(HAIR, 'thin') }
 
+/** Wrapped text with a little air beside it; numbers stand flush right under their head. */
 export const wrapped = (
   horizontal: 'left' | 'right' | 'center' = 'left',
-  vertical: 'top' | 'middle' | 'bottom' = 'top',
-) => ({ horizontal, vertical, wrapText: true }) satisfies Partial<Alignment>
+  vertical: 'top' | 'middle' | 'bottom' = 'middle',
+): Partial<Alignment> => ({ horizontal, vertical, wrapText: true, ...(horizontal === 'left' ? { indent: 1 } : {}) })
 
 /** A paper size code of the file format. */
 const PAPER = { Letter: 1, A4: 9 } as const
@@ -93,7 +94,8 @@ export const writeTitle = (sheet: Worksheet, title: string, purpose: string, opt
 
 /** Lines that a wrapped text takes in a column, so that a row can be given its height: no program fits it by itself on opening. */
 const lines = (text: string, width: number, size: number): number => {
-  const perLine = Math.max(1, Math.floor((width * 10.6) / size))
+  // The indent of a wrapped cell takes about a character.
+  const perLine = Math.max(1, Math.floor(((width - 1) * 10.6) / size))
   return text.split('\n').reduce((all, part) => {
     let [count, used] = [1, 0]
     for (const word of part.split(' ')) {

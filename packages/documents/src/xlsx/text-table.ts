@@ -44,15 +44,12 @@ export const writeTable = (sheet: Worksheet, { name, columns, rows, at, size = 9
     cell.font = font(size, { bold: true })
     cell.fill = WELL_FILL
     cell.border = HEAD_BORDERS
-    cell.alignment = wrapped(column.align === 'right' ? 'right' : 'left', 'bottom')
+    cell.alignment = wrapped(column.align ?? 'left', 'top')
   })
-  // The filter button covers the end of the last line; a little more room keeps the words clear of it.
-  fitHeight(
-    head,
-    columns.map((column) => column.heading),
-    widths.map((width) => width - 2.5),
-    size,
-  )
+  const headings = columns.map((column) => column.heading)
+  fitHeight(head, headings, widths, size)
+  // The filter button takes the lower right corner of a head cell: the words stand above it.
+  head.height += 14
   rows.forEach((contents, offset) => {
     const row = sheet.getRow(at + 1 + offset)
     contents.forEach((content, index) => {

@@ -56,7 +56,10 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   const sources = names.take('Sources')
   const fluidData = names.take('Fluid data')
   const contents: ContentsEntry[] = [
-    ...schedules.map(({ name, table }) => ({ sheet: name, about: table.purpose })),
+    ...schedules.map(({ name, table }) => ({
+      sheet: name,
+      about: `Schedule of ${table.rows.length} ${table.rows.length === 1 ? 'vessel' : 'vessels'}`,
+    })),
     ...calculations.map(({ name, vessel }) => ({
       sheet: name,
       about: `Calculation of ${vessel.mark}, ${sentenceCase(vessel.kind).toLowerCase()}, ${vessel.serves}`,
