@@ -67,6 +67,24 @@ export const saturationSlope = (T: number): number => {
   return MEGA * 4 * beta ** 3 * (-byTheta / byBeta) * (1 - n9 / (T - n10) ** 2)
 }
 
+/** Second derivative of the saturation pressure in Pa/K2. */
+export const saturationCurvature = (T: number): number => {
+  const beta = (saturationPressure(T) / MEGA) ** 0.25
+  const theta = T + n9 / (T - n10)
+  const thetaSlope = 1 - n9 / (T - n10) ** 2
+  const thetaCurvature = (2 * n9) / (T - n10) ** 3
+  const byTheta = beta ** 2 * (2 * theta + n1) + beta * (2 * n3 * theta + n4) + 2 * n6 * theta + n7
+  const byBeta = 2 * beta * (theta ** 2 + n1 * theta + n2) + n3 * theta ** 2 + n4 * theta + n5
+  const byBetaTwice = 2 * (theta ** 2 + n1 * theta + n2)
+  const byThetaTwice = 2 * beta ** 2 + 2 * n3 * beta + 2 * n6
+  const byBoth = 2 * beta * (2 * theta + n1) + 2 * n3 * theta + n4
+  const slope = -byTheta / byBeta
+  const curvature = -(byThetaTwice + 2 * byBoth * slope + byBetaTwice * slope ** 2) / byBeta
+  const betaSlope = slope * thetaSlope
+  const betaCurvature = curvature * thetaSlope ** 2 + slope * thetaCurvature
+  return MEGA * (12 * beta ** 2 * betaSlope ** 2 + 4 * beta ** 3 * betaCurvature)
+}
+
 /** Saturation temperature of water in K at P in Pa absolute; NaN outside 611.213 Pa to 22.064 MPa. */
 export const saturationTemperature = (P: number): number => {
   if (!(P >= 611.2 && P <= 22.064e6)) return Number.NaN

@@ -10,6 +10,7 @@ import {
   volume,
   volumePartials,
 } from './if97.ts'
+import { steamFunctions } from './steam.ts'
 
 /** 0 to 200 °C: region 1 reaches further, no water vessel does. */
 const validity = { least: if97Least, most: 473.15 }
@@ -35,14 +36,17 @@ export const water: Fluid = {
   base: 'water',
   massFraction: 0,
   volumeFraction: 0,
-  functions: fluidFunctions(validity, 'saturated liquid', {
-    v_sat: { value: v, derivative: dv },
-    rho: { value: (T) => 1 / v(T), derivative: (T) => -dv(T) / v(T) ** 2 },
-    c_p: {
-      value: (T) => specificHeat(T, saturationPressure(T)),
-      derivative: (T) => alongSaturation(T, specificHeatPartials),
-    },
-  }),
+  functions: {
+    ...fluidFunctions(validity, 'saturated liquid', {
+      v_sat: { value: v, derivative: dv },
+      rho: { value: (T) => 1 / v(T), derivative: (T) => -dv(T) / v(T) ** 2 },
+      c_p: {
+        value: (T) => specificHeat(T, saturationPressure(T)),
+        derivative: (T) => alongSaturation(T, specificHeatPartials),
+      },
+    }),
+    ...steamFunctions,
+  },
   freezing: 273.15,
   validity,
   source: cite(iapwsR7, 'region 1 at the saturation pressure of region 4'),
