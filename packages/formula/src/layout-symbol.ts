@@ -29,8 +29,8 @@ export const layoutSymbol = (name: string): Box => {
   return { box: 'subscript', base: identifier(base!), sub: subscript(rest!) }
 }
 
-/** Between a number and its unit. */
-export const UNIT_SPACE = '\u00A0'
+/** Begins a word that is the unit of the number before it. */
+const UNIT_SPACE = '\u00A0'
 
 /** A written number: `-1.2e-6 psi` becomes −1.2 × 10⁻⁶ psi. Text that is no number is drawn upright as it is. */
 export const layoutNumber = (text: string): { box: Box; kind: 'plain' | 'compound' | 'negative' } => {

@@ -177,6 +177,13 @@ describe('MathML', () => {
     )
   })
 
+  it('draws a choice as lines of a table behind a brace', () => {
+    expect(toMathML(layout(formulaTree('when(a < b, c, d)')))).toContain(
+      '<mo fence="true" form="prefix" stretchy="true">{</mo><mtable><mtr><mtd><mi>c</mi></mtd><mtd><mrow><mtext>if\u00A0</mtext>' +
+        '<mrow><mi>a</mi><mo>&#60;</mo><mi>b</mi></mrow></mrow></mtd></mtr><mtr><mtd><mi>d</mi></mtd><mtd><mtext>otherwise</mtext></mtd></mtr></mtable>',
+    )
+  })
+
   it('escapes what is text', () => {
     const box: Box = {
       box: 'row',

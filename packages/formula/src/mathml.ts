@@ -37,7 +37,7 @@ const drawn = (box: Box): string => {
           : element('mtext', 'otherwise')
         return element('mtr', element('mtd', drawn(value)), element('mtd', when))
       })
-      return element('mrow', bracket('{', 'prefix'), `<mtable columnalign="left">${lines.join('')}</mtable>`)
+      return element('mrow', bracket('{', 'prefix'), element('mtable', ...lines))
     }
   }
 }

@@ -1,7 +1,7 @@
 import type { Box } from './box.ts'
 import type { Functions } from './evaluate.ts'
 import { spelledOut } from './greek.ts'
-import { UNIT_SPACE, layoutSymbol } from './layout-symbol.ts'
+import { layoutSymbol } from './layout-symbol.ts'
 
 const LEVELS: Readonly<Record<string, number>> = { '<': 1, '≤': 1, '>': 1, '≥': 1, '=': 1, '+': 2, '−': 2, '·': 3 }
 
@@ -31,7 +31,7 @@ const items = (list: readonly Box[]): string =>
   list
     .map((item, index) => {
       const before = list[index - 1]
-      if (item.box === 'word' && item.text.startsWith(UNIT_SPACE)) return `[${item.text.trim()}]`
+      if (item.box === 'word' && /^\s/.test(item.text)) return `[${item.text.trim()}]`
       if (item.box === 'operator') return item.text === ',' ? ', ' : index === 0 ? item.text : ` ${item.text} `
       if (item.box === 'fraction' && before?.box === 'operator' && before.text === '·') return `(${toPlainText(item)})`
       return toPlainText(item)
