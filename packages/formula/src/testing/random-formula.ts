@@ -1,4 +1,4 @@
-import { type Kind, KINDS, displayUnit, fromSi } from '@coldfill/units'
+import { type Kind, displayUnit, fromSi } from '@coldfill/units'
 import * as fc from 'fast-check'
 import type { FormulaFunction, Scope } from '../function.ts'
 
@@ -194,5 +194,3 @@ export const displayValues = (values: Readonly<Record<string, number>>, system: 
   Object.fromEntries(
     Object.entries(values).map(([name, value]) => [name, fromSi(value, displayUnit(scope.symbols[name]!, system))]),
   )
-
-export const siOf = (kind: Kind): string => KINDS[kind].si
