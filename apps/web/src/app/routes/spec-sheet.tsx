@@ -1,7 +1,7 @@
 import { revisionSegment, revisionTitle, type Project, type Reference, type SpecDocument } from '@coldfill/contract'
 import { pathRange, readSpec, type Range } from '@coldfill/spec'
 import { useQuery, type UseQueryResult } from '@tanstack/react-query'
-import { useDeferredValue, useEffect, useMemo, useRef, useState } from 'react'
+import { useDeferredValue, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
 import { Failure } from '#components/failure.tsx'
 import { Sheet } from '#components/layouts/sheet.tsx'
 import { Band } from '#components/ui/band.tsx'
@@ -66,12 +66,24 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
     () => mergeFindings(reading?.findings ?? [], latest, settled, (path) => pathRange(settled, path)),
     [reading, latest, settled],
   )
-  const lastModel = useRef(reading?.model ?? null)
-  if (reading?.model) lastModel.current = reading.model
+  // While the text cannot be read the outline and the margin stay as they were.
+  const [model, setModel] = useState(reading?.model ?? null)
+  if (reading?.model && reading.model !== model) setModel(reading.model)
   const entries = useMemo(
-    () => marginEntries(reading?.model ?? lastModel.current, good?.result ?? null, issued.data?.result ?? null, units),
-    [reading, good, issued.data, units],
+    () => marginEntries(model, good?.result ?? null, issued.data?.result ?? null, units),
+    [model, good, issued.data, units],
   )
+
+  const onKey = useEffectEvent((event: KeyboardEvent) => {
+    if (event.key.toLowerCase() !== 's' || !(event.ctrlKey || event.metaKey)) return
+    event.preventDefault()
+    if (!readOnly && dirty && !draft.saving) void draft.save()
+  })
+  useEffect(() => {
+    const listen = (event: KeyboardEvent) => onKey(event)
+    window.addEventListener('keydown', listen)
+    return () => window.removeEventListener('keydown', listen)
+  }, [])
 
   // An address may name a line or a path; it is gone to once.
   const gone = useRef(false)
@@ -141,12 +153,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
     >
       <div className="flex min-h-0 flex-1 border-t-2 border-ink">
         <div className="hidden w-52 shrink-0 zones:block">
-          <Outline
-            model={reading?.model ?? lastModel.current}
-            entries={entries}
-            stale={stale}
-            onJump={(range) => editor.current?.jumpTo(range)}
-          />
+          <Outline model={model} entries={entries} stale={stale} onJump={(range) => editor.current?.jumpTo(range)} />
         </div>
         <div className="relative min-h-0 min-w-0 flex-1">
           <div className="absolute inset-0">
@@ -154,7 +161,6 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
               ref={editor}
               text={text}
               onChange={change}
-              onSave={() => void (readOnly || draft.save())}
               readOnly={readOnly}
               findings={findings}
               entries={entries}

@@ -5,30 +5,20 @@ const spaced = (key: string) => key.replaceAll('-', ' ')
 
 /** Where a redline stands, in words: `ET-1 · precharge`. */
 export const anchorWords = (anchor: Anchor): string => {
-  switch (anchor.type) {
-    case 'row':
-      return `${anchor.mark} · whole row`
-    case 'cell':
-      return `${anchor.mark} · ${spaced(anchor.column)}`
-    case 'assumption':
-      return `Assumption · ${spaced(anchor.assumption.replaceAll('.', ' · '))}`
-    case 'spec':
-      return `Spec · ${anchor.path}`
-  }
+  if (anchor.type === 'row') return `${anchor.mark} · whole row`
+  if (anchor.type === 'cell') return `${anchor.mark} · ${spaced(anchor.column)}`
+  return anchor.type === 'assumption'
+    ? `Assumption · ${spaced(anchor.assumption.replaceAll('.', ' · '))}`
+    : `Spec · ${anchor.path}`
 }
 
 /** Address of the place a redline stands on. */
 export const anchorLink = (project: string, anchor: Anchor, rev: string | null): string => {
-  switch (anchor.type) {
-    case 'row':
-      return withQuery(paths.schedule(project), { rev, row: anchor.mark })
-    case 'cell':
-      return withQuery(paths.schedule(project), { rev, row: anchor.mark, col: anchor.column })
-    case 'assumption':
-      return withQuery(paths.basis(project), { rev, assumption: anchor.assumption })
-    case 'spec':
-      return withQuery(paths.spec(project), { path: anchor.path })
-  }
+  if (anchor.type === 'row') return withQuery(paths.schedule(project), { rev, row: anchor.mark })
+  if (anchor.type === 'cell') return withQuery(paths.schedule(project), { rev, row: anchor.mark, col: anchor.column })
+  return anchor.type === 'assumption'
+    ? withQuery(paths.basis(project), { rev, assumption: anchor.assumption })
+    : withQuery(paths.spec(project), { path: anchor.path })
 }
 
 export const anchorStateWords: Readonly<Record<AnchorState, { readonly word: string; readonly says: string }>> = {

@@ -13,20 +13,15 @@ export const filterLabels: Readonly<Record<Filter, string>> = {
 
 export const isFilter = (text: string | null): text is Filter => FILTERS.some((filter) => filter === text)
 
-export const passes = (redline: Redline, filter: Filter): boolean => {
-  switch (filter) {
-    case 'open':
-      return redline.state !== 'closed'
-    case 'waiting':
-      return redline.state === 'open' && redline.waitingOnYou
-    case 'adrift':
-      return redline.anchorState === 'adrift'
-    case 'closed':
-      return redline.state === 'closed'
-    case 'all':
-      return true
-  }
+const tests: Readonly<Record<Filter, (redline: Redline) => boolean>> = {
+  open: (redline) => redline.state !== 'closed',
+  waiting: (redline) => redline.state === 'open' && redline.waitingOnYou,
+  adrift: (redline) => redline.anchorState === 'adrift',
+  closed: (redline) => redline.state === 'closed',
+  all: () => true,
 }
+
+export const passes = (redline: Redline, filter: Filter): boolean => tests[filter](redline)
 
 /** Redlines by the cell or assumption they stand on; closed ones are left out. */
 export const redlinesByPlace = (redlines: readonly Redline[]): ReadonlyMap<string, readonly Redline[]> => {
@@ -39,15 +34,9 @@ export const redlinesByPlace = (redlines: readonly Redline[]): ReadonlyMap<strin
   return places
 }
 
+/** One word for a place, to find redlines by. */
 export const placeOf = (anchor: Redline['anchor']): string => {
-  switch (anchor.type) {
-    case 'row':
-      return `row ${anchor.mark}`
-    case 'cell':
-      return `cell ${anchor.mark} ${anchor.column}`
-    case 'assumption':
-      return `assumption ${anchor.assumption}`
-    case 'spec':
-      return `spec ${anchor.path}`
-  }
+  if (anchor.type === 'row') return `row ${anchor.mark}`
+  if (anchor.type === 'cell') return `cell ${anchor.mark} ${anchor.column}`
+  return anchor.type === 'assumption' ? `assumption ${anchor.assumption}` : `spec ${anchor.path}`
 }

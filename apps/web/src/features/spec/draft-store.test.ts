@@ -48,11 +48,9 @@ describe('drafts of a spec', () => {
   })
 
   it('says so where the browser keeps nothing', () => {
-    const store = {
-      ...shelf(),
-      setItem: () => {
-        throw new Error('quota')
-      },
+    const store = shelf()
+    store.setItem = () => {
+      throw new Error('quota')
     }
     expect(keepDraft(store, owner, { slot: 'a', text: 'x', baseVersion: 1, at: '' })).toBe(false)
   })

@@ -26,7 +26,6 @@ export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
 
   const keep = useCallback(
     (next: string, onto: SpecConflict, inSlot: string) => {
-      latest.current = next
       if (next === onto.text) {
         dropDraft(localStorage, owner, inSlot)
         setKept(true)
@@ -51,18 +50,26 @@ export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
     [base, keep, slot],
   )
 
-  // Someone else saved while this editor was open: follow where nothing was typed, say so where something was.
+  // What was typed while a save is under way is compared with what was sent when the answer comes.
   useEffect(() => {
-    if (document.version <= base.version) return
-    if (latest.current === base.text) {
-      setBase(document)
-      setText(document.text)
-      latest.current = document.text
-    } else if (!saving) setConflict(document)
-  }, [document, base, saving])
+    latest.current = text
+  }, [text])
+
+  // Someone else saved while this editor was open: follow where nothing was typed, say so where something was.
+  const [seen, setSeen] = useState(document)
+  if (document !== seen) {
+    setSeen(document)
+    if (document.version > base.version) {
+      if (dirty && document.text !== text) setConflict(document)
+      else {
+        setBase(document)
+        setText(document.text)
+      }
+    }
+  }
 
   const saveOnto = async (onto: SpecConflict) => {
-    const sent = latest.current
+    const sent = text
     setSaving(true)
     setError(null)
     try {
@@ -89,7 +96,6 @@ export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
     setSlot(newSlot())
     setBase(conflict)
     setText(conflict.text)
-    latest.current = conflict.text
     setConflict(null)
   }
 

@@ -5,6 +5,7 @@ import { Band } from '#components/ui/band.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { SelectField, TextField } from '#components/ui/field.tsx'
 import { fieldError, messageOf } from '#lib/api-error.ts'
+import { formText } from '#lib/form-text.ts'
 import { createProject } from '../api/projects.ts'
 
 interface Props {
@@ -23,11 +24,11 @@ export const NewProject = ({ projects, onMade, onCancel }: Props) => {
   const submit = async (form: FormData) => {
     setBusy(true)
     setError(null)
-    const start = String(form.get('from'))
+    const start = formText(form, 'from')
     try {
       const project = await createProject({
-        number: String(form.get('number')),
-        title: String(form.get('title')),
+        number: formText(form, 'number'),
+        title: formText(form, 'title'),
         from: start === 'blank' || start === 'example' ? start : { copy: start.slice('copy:'.length) },
       })
       onMade(project.number)

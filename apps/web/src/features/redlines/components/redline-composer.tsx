@@ -3,6 +3,7 @@ import { useEffect, useRef, useState, type FormEvent } from 'react'
 import { Failure } from '#components/failure.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { CheckField, TextArea, TextField } from '#components/ui/field.tsx'
+import { formText } from '#lib/form-text.ts'
 import { useAction } from '#lib/use-action.ts'
 import { anchorWords } from '../anchor-words.ts'
 import { createRedline } from '../api/redlines.ts'
@@ -23,7 +24,7 @@ export const RedlineComposer = ({ project, anchor, quoted, onDone }: Props) => {
   useEffect(() => form.current?.querySelector('textarea')?.focus(), [])
 
   const submit = async (data: FormData) => {
-    const proposed = String(data.get('proposed') ?? '').trim()
+    const proposed = formText(data, 'proposed').trim()
     const done = await run(() =>
       createRedline(project, {
         anchor,

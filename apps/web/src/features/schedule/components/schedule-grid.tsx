@@ -42,7 +42,7 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
   const table = useTable({
     features,
     columns,
-    data: schedule.rows as Row[],
+    data: schedule.rows,
     getRowId: (row) => row.id,
     state: { columnVisibility },
   })
@@ -114,7 +114,7 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                   >
                     {column?.heading ?? 'Mark'}
                     <span className="block font-mono text-zone font-medium whitespace-nowrap text-pencil">
-                      {column?.unit ? `${column.unit}` : '\u00a0'}
+                      {column?.unit || '\u00a0'}
                     </span>
                   </th>
                 )

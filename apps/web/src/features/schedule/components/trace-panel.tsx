@@ -21,28 +21,22 @@ interface Context {
 /** Where an input comes from, as a link where there is a place to go. */
 const Source = ({ input, context }: { readonly input: TraceInput; readonly context: Context }) => {
   const { origin } = input
-  switch (origin.from) {
-    case 'spec': {
-      const words = input.authored ? `spec: ${input.authored}` : 'spec'
-      return context.hasSpec ? (
-        <Link to={withQuery(paths.spec(context.project), { path: origin.path })}>{words}</Link>
-      ) : (
-        words
-      )
-    }
-    case 'assumption': {
-      const used = context.result.assumptions.find((assumption) => assumption.id === origin.id)
-      return (
-        <Link
-          to={withQuery(paths.basis(context.project), { assumption: origin.id })}
-        >{`assumption ${used?.number ?? origin.id}`}</Link>
-      )
-    }
-    case 'table':
-      return citationWords(origin.citation, context.result.sources)
-    case 'catalogue':
-      return 'chosen vessel'
+  if (origin.from === 'catalogue') return 'chosen vessel'
+  if (origin.from === 'table') return citationWords(origin.citation, context.result.sources)
+  if (origin.from === 'assumption') {
+    const used = context.result.assumptions.find((assumption) => assumption.id === origin.id)
+    return (
+      <Link to={withQuery(paths.basis(context.project), { assumption: origin.id })}>
+        {`assumption ${used?.number ?? origin.id}`}
+      </Link>
+    )
   }
+  const words = input.authored ? `spec: ${input.authored}` : 'spec'
+  return context.hasSpec ? (
+    <Link to={withQuery(paths.spec(context.project), { path: origin.path })}>{words}</Link>
+  ) : (
+    words
+  )
 }
 
 const Input = ({ input, context }: { readonly input: TraceInput; readonly context: Context }) => (

@@ -3,6 +3,7 @@ import { Band } from '#components/ui/band.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { TextField } from '#components/ui/field.tsx'
 import { fieldError, messageOf } from '#lib/api-error.ts'
+import { formText } from '#lib/form-text.ts'
 import { signIn } from '../api/session.ts'
 
 export const SignInForm = ({ onDone }: { readonly onDone: () => void }) => {
@@ -13,7 +14,7 @@ export const SignInForm = ({ onDone }: { readonly onDone: () => void }) => {
     setBusy(true)
     setError(null)
     try {
-      await signIn({ email: String(form.get('email') ?? ''), password: String(form.get('password') ?? '') })
+      await signIn({ email: formText(form, 'email'), password: formText(form, 'password') })
       onDone()
     } catch (failure) {
       setError(failure)

@@ -3,9 +3,9 @@ import { yaml } from '@codemirror/lang-yaml'
 import { nextDiagnostic, previousDiagnostic } from '@codemirror/lint'
 import { openSearchPanel } from '@codemirror/search'
 import { EditorState, Prec, type Extension } from '@codemirror/state'
-import { EditorView, keymap } from '@codemirror/view'
+import { EditorView, keymap, type ViewUpdate } from '@codemirror/view'
 import CodeMirror from '@uiw/react-codemirror'
-import { useCallback, useEffect, useImperativeHandle, useMemo, useRef, useState, type Ref } from 'react'
+import { useCallback, useEffect, useImperativeHandle, useMemo, useState, type Ref } from 'react'
 import type { Range } from '@coldfill/spec'
 import type { Finding } from '#lib/sized-project.ts'
 import { applyFix, findingGutter, offsetOf, showFindings } from '../editor/finding-marks.ts'
@@ -23,12 +23,11 @@ interface Props {
   readonly ref: Ref<SpecEditorHandle>
   readonly text: string
   readonly onChange: (text: string) => void
-  readonly onSave: () => void
   readonly readOnly: boolean
   readonly findings: readonly Finding[]
   readonly entries: readonly MarginEntry[]
   readonly stale: boolean
-  /** Zero-based line that has the cursor, and called for a click on a mark in the gutter. */
+  /** Zero-based line of the cursor. Must stay the same function. */
   readonly onLine: (line: number) => void
 }
 
@@ -37,6 +36,14 @@ const always: Extension = [
   yaml(),
   editorTheme(),
   resultMargin(),
+  findingGutter,
+  Prec.highest(
+    keymap.of([
+      { key: 'F8', run: nextDiagnostic, shift: previousDiagnostic, preventDefault: true },
+      { key: 'Mod-f', run: openSearchPanel },
+    ]),
+  ),
+  keymap.of([indentWithTab]),
   EditorView.lineWrapping,
   EditorView.contentAttributes.of({
     'aria-label': 'Spec text. Press Escape, then Tab, to leave the editor.',
@@ -47,11 +54,8 @@ const always: Extension = [
 ]
 
 /** The YAML editor of the spec: findings underlined and marked, results beside the lines. */
-export const SpecEditor = ({ ref, text, onChange, onSave, readOnly, findings, entries, stale, onLine }: Props) => {
+export const SpecEditor = ({ ref, text, onChange, readOnly, findings, entries, stale, onLine }: Props) => {
   const [view, setView] = useState<EditorView | null>(null)
-  const handlers = useRef({ onSave, onLine })
-  handlers.current = { onSave, onLine }
-
   const jumpTo = useCallback(
     (range: Range) => {
       if (!view) return
@@ -76,28 +80,12 @@ export const SpecEditor = ({ ref, text, onChange, onSave, readOnly, findings, en
     [jumpTo, view],
   )
 
-  const extensions = useMemo(
-    () => [
-      always,
-      findingGutter((line) => handlers.current.onLine(line)),
-      Prec.highest(
-        keymap.of([
-          {
-            key: 'Mod-s',
-            preventDefault: true,
-            run: () => {
-              handlers.current.onSave()
-              return true
-            },
-          },
-          { key: 'F8', run: nextDiagnostic, shift: previousDiagnostic, preventDefault: true },
-          { key: 'Mod-f', run: openSearchPanel },
-        ]),
-      ),
-      keymap.of([indentWithTab]),
-      EditorState.readOnly.of(readOnly),
-    ],
-    [readOnly],
+  const extensions = useMemo(() => [always, EditorState.readOnly.of(readOnly)], [readOnly])
+  const onUpdate = useCallback(
+    ({ state, selectionSet }: ViewUpdate) => {
+      if (selectionSet) onLine(state.doc.lineAt(state.selection.main.head).number - 1)
+    },
+    [onLine],
   )
 
   useEffect(() => {
@@ -111,6 +99,7 @@ export const SpecEditor = ({ ref, text, onChange, onSave, readOnly, findings, en
     <CodeMirror
       value={text}
       onChange={onChange}
+      onUpdate={onUpdate}
       onCreateEditor={setView}
       extensions={extensions}
       basicSetup={setup}

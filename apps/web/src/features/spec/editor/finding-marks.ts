@@ -83,8 +83,8 @@ const marks = StateField.define<RangeSet<GutterMarker>>({
   },
 })
 
-/** Marks beside the lines that have findings; a click on one leads to the first finding of the line. */
-export const findingGutter = (onMark: (line: number) => void): Extension => [
+/** Marks beside the lines that have findings; a click on one puts the cursor there, and the tray then points out the findings. */
+export const findingGutter: Extension = [
   marks,
   gutter({
     class: 'cm-finding-gutter',
@@ -92,7 +92,8 @@ export const findingGutter = (onMark: (line: number) => void): Extension => [
     initialSpacer: () => new FindingMarker('note', ''),
     domEventHandlers: {
       mousedown: (view, block) => {
-        onMark(view.state.doc.lineAt(block.from).number - 1)
+        view.dispatch({ selection: { anchor: block.from } })
+        view.focus()
         return true
       },
     },
