@@ -5,8 +5,9 @@
 export const describeError = (error: unknown): string => {
   if (!(error instanceof Error)) return 'a value that is no error was thrown'
   if (error.name === 'DrizzleQueryError' || error.message.startsWith('Failed query')) {
-    const { code, constraint } = (error.cause ?? {}) as { code?: unknown; constraint?: unknown }
-    return `database error ${String(code ?? 'unknown')}${constraint === undefined ? '' : ` (${String(constraint)})`}`
+    const cause: object = error.cause instanceof Error ? error.cause : {}
+    const code = 'code' in cause && typeof cause.code === 'string' ? cause.code : 'unknown'
+    return `database error ${code}${'constraint' in cause && typeof cause.constraint === 'string' ? ` (${cause.constraint})` : ''}`
   }
   return error.stack ?? error.message
 }

@@ -1,8 +1,10 @@
-import { CONSTRUCTION_STATUS, type DocumentOptions, type RevisionEntry } from '@coldfill/documents'
+import type { DocumentOptions, RevisionEntry } from '@coldfill/documents'
 import type { ProjectResult } from '@coldfill/sizing'
 import type { MakingRow, ProjectFacts, RevisionRow } from '../review/project-facts.ts'
 import { isAccepting, standingDispositions } from '../review/standing.ts'
 
+/** The words by which @coldfill/documents leaves out the draft warning. Its code runs in a thread and is not loaded here. */
+export const CONSTRUCTION_STATUS = 'Issued for construction'
 const REVIEW_STATUS = 'Issued for review'
 
 const day = (date: Date): string => date.toISOString().slice(0, 10)

@@ -6,6 +6,7 @@ import { makings, offices, projects, revisions } from '../db/schema/index.ts'
 import { describeError } from '../describe-error.ts'
 import type { Log } from '../log.ts'
 import type { Postman } from '../mail/postman.ts'
+import { createRounds, type Rounds } from '../rounds.ts'
 import { frozenContent } from '../review/frozen.ts'
 import { type MakingRow, projectFacts } from '../review/project-facts.ts'
 import { documentOptions } from './document-options.ts'
@@ -14,13 +15,8 @@ import { writeDocuments } from './write-documents.ts'
 /** A making that has begun this often and never came to an end is not begun again by itself. */
 const MOST_ATTEMPTS = 3
 
-export interface FileMaker {
-  /** Goes through the makings that wait. Returns at once; their stages are in the database. */
-  wake(): void
-  /** Resolves when nothing is under way. */
-  idle(): Promise<void>
-  close(): Promise<void>
-}
+/** Goes through the makings that wait when it is woken; their stages are in the database. */
+export type FileMaker = Rounds
 
 /**
  * Makes the files of issued revisions, one revision after the other, from rows of the table `makings`. The row goes away in the
@@ -39,9 +35,6 @@ export const createFileMaker = ({
   postman: Postman
   address: () => string
 }): FileMaker => {
-  let running: Promise<void> | null = null
-  let again = false
-  let closed = false
   const closing = new AbortController()
 
   const keyOf = (making: MakingRow) => and(eq(makings.revisionId, making.revisionId), eq(makings.set, making.set))
@@ -85,7 +78,7 @@ export const createFileMaker = ({
     try {
       await make(making)
     } catch (error) {
-      if (closed) {
+      if (closing.signal.aborted) {
         // Not the fault of the work: it has all its attempts at the next start.
         await note(making, { attempts: making.attempts })
         return
@@ -96,34 +89,19 @@ export const createFileMaker = ({
     }
   }
 
-  const round = async (): Promise<void> => {
-    do {
-      again = false
-      const waiting = await db.select().from(makings).where(isNull(makings.problem)).orderBy(asc(makings.askedAt))
-      for (const making of waiting) {
-        if (closed) return
-        await attempt(making)
-      }
-    } while (again && !closed)
-  }
+  const rounds = createRounds('files', log, async (closed) => {
+    const waiting = await db.select().from(makings).where(isNull(makings.problem)).orderBy(asc(makings.askedAt))
+    for (const making of waiting) {
+      if (closed()) return
+      await attempt(making)
+    }
+  })
 
   return {
-    wake: () => {
-      if (closed) return
-      again = true
-      running ??= round()
-        .catch((error: unknown) => log.error(`files: ${describeError(error)}`))
-        .finally(() => {
-          running = null
-        })
-    },
-    idle: async () => {
-      while (running) await running
-    },
+    ...rounds,
     close: async () => {
-      closed = true
       closing.abort()
-      while (running) await running
+      await rounds.close()
     },
   }
 }

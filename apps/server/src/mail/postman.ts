@@ -3,8 +3,8 @@ import { createTransport } from 'nodemailer'
 import type { Clock } from '../clock.ts'
 import type { Database } from '../db/client.ts'
 import { mails } from '../db/schema/index.ts'
-import { describeError } from '../describe-error.ts'
 import type { Log } from '../log.ts'
+import { createRounds, type Rounds } from '../rounds.ts'
 
 type MailRow = typeof mails.$inferSelect
 
@@ -36,13 +36,8 @@ export const smtpCarrier = (url: string, from: string): Carrier => {
 const MOST_ATTEMPTS = 5
 const AGAIN_AFTER_MS = 60_000
 
-export interface Postman {
-  /** Goes through the queued mails soon. Returns at once. */
-  wake(): void
-  /** Resolves when nothing is under way. */
-  idle(): Promise<void>
-  close(): Promise<void>
-}
+/** Goes through the queued mails when it is woken. */
+export type Postman = Rounds
 
 /** Takes queued mails from the outbox, one after the other. Without a carrier they are kept there, to be read on the Office sheet. */
 export const createPostman = ({
@@ -56,9 +51,6 @@ export const createPostman = ({
   log: Log
   carrier: Carrier | null
 }): Postman => {
-  let running: Promise<void> | null = null
-  let again = false
-  let closed = false
   let timer: NodeJS.Timeout | null = null
 
   const deliver = async (mail: MailRow): Promise<'settled' | 'later'> => {
@@ -80,41 +72,24 @@ export const createPostman = ({
     }
   }
 
-  const round = async (): Promise<void> => {
-    do {
-      again = false
-      const queued = await db.select().from(mails).where(eq(mails.state, 'queued')).orderBy(asc(mails.createdAt))
-      for (const mail of queued) {
-        if (closed) return
-        if ((await deliver(mail)) === 'later') timer ??= setTimeout(wakeAgain, AGAIN_AFTER_MS).unref()
-      }
-    } while (again && !closed)
-  }
+  const rounds = createRounds('outbox', log, async (closed) => {
+    const queued = await db.select().from(mails).where(eq(mails.state, 'queued')).orderBy(asc(mails.createdAt))
+    for (const mail of queued) {
+      if (closed()) return
+      if ((await deliver(mail)) === 'later') timer ??= setTimeout(wakeAgain, AGAIN_AFTER_MS).unref()
+    }
+  })
 
   const wakeAgain = (): void => {
     timer = null
-    wake()
-  }
-
-  const wake = (): void => {
-    if (closed) return
-    again = true
-    running ??= round()
-      .catch((error: unknown) => log.error(`outbox: ${describeError(error)}`))
-      .finally(() => {
-        running = null
-      })
+    rounds.wake()
   }
 
   return {
-    wake,
-    idle: async () => {
-      while (running) await running
-    },
+    ...rounds,
     close: async () => {
-      closed = true
       if (timer) clearTimeout(timer)
-      while (running) await running
+      await rounds.close()
     },
   }
 }

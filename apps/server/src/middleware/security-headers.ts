@@ -1,5 +1,5 @@
 import { randomBytes } from 'node:crypto'
-import type { RequestHandler } from 'express'
+import type { RequestHandler, Response } from 'express'
 import helmet from 'helmet'
 
 /**
@@ -17,10 +17,7 @@ export const securityHeaders = (): RequestHandler[] => [
       directives: {
         'default-src': ["'self'"],
         'script-src': ["'self'"],
-        'style-src': [
-          "'self'",
-          (_req, res) => `'nonce-${String('locals' in res ? (res.locals as { nonce: string }).nonce : '')}'`,
-        ],
+        'style-src': ["'self'", (_req, res) => `'nonce-${(res as Response).locals['nonce'] as string}'`],
         'img-src': ["'self'", 'data:'],
         'font-src': ["'self'"],
         'connect-src': ["'self'"],

@@ -1,6 +1,6 @@
 import type { Anchor, AnchorState } from '@coldfill/contract'
 import type { ProjectResult, VesselResult } from '@coldfill/sizing'
-import { pathRange, type Range } from '@coldfill/spec'
+import { textIn, valueRange } from '@coldfill/spec'
 import { formatQuantity } from '@coldfill/units'
 
 /** Frozen content that an anchor is read in. */
@@ -61,33 +61,19 @@ const readCell = (vessel: VesselResult, column: string, { result }: Content): Re
   return word ? words(word(vessel)) : null
 }
 
-const textAt = (text: string, { start, end }: Range): string => {
-  const lines = text.split('\n').slice(start.line, end.line + 1)
-  const last = lines.length - 1
-  return lines
-    .map((line, index) => line.slice(index === 0 ? start.character : 0, index === last ? end.character : undefined))
-    .join('\n')
-    .trim()
-}
-
 /** What stands at the anchor; null where the place is gone. */
 export const readAnchor = (anchor: Anchor, content: Content): Reading | null => {
-  switch (anchor.type) {
-    case 'row':
-    case 'cell': {
-      const vessel = content.result.vessels.find(({ mark }) => mark === anchor.mark)
-      if (!vessel) return null
-      return anchor.type === 'row' ? readRow(vessel, content) : readCell(vessel, anchor.column, content)
-    }
-    case 'assumption': {
-      const used = content.result.assumptions.find(({ id }) => id === anchor.assumption)
-      return used ? words(used.value) : null
-    }
-    case 'spec': {
-      const range = pathRange(content.specText, anchor.path)
-      return range ? words(textAt(content.specText, range)) : null
-    }
+  if (anchor.type === 'assumption') {
+    const used = content.result.assumptions.find(({ id }) => id === anchor.assumption)
+    return used ? words(used.value) : null
   }
+  if (anchor.type === 'spec') {
+    const range = valueRange(content.specText, anchor.path)
+    return range ? words(textIn(content.specText, range).trim()) : null
+  }
+  const vessel = content.result.vessels.find(({ mark }) => mark === anchor.mark)
+  if (!vessel) return null
+  return anchor.type === 'row' ? readRow(vessel, content) : readCell(vessel, anchor.column, content)
 }
 
 /** How an anchor stands in `now`, written when `then` was in front of the reviewer. */
@@ -98,17 +84,9 @@ export const anchorState = (then: Reading | null, now: Reading | null): AnchorSt
 
 /** Keys that could have been meant, for the answer to an anchor that does not exist: the nearest first. */
 export const nearestKeys = (anchor: Anchor, { result }: Content): string[] => {
-  const marks = result.vessels.map(({ mark }) => mark)
-  switch (anchor.type) {
-    case 'row':
-      return marks
-    case 'cell': {
-      const vessel = result.vessels.find(({ mark }) => mark === anchor.mark)
-      return vessel ? [...Object.keys(vessel.results), ...Object.keys(WORDS)] : marks
-    }
-    case 'assumption':
-      return result.assumptions.map(({ id }) => id)
-    case 'spec':
-      return result.vessels.map(({ path }) => path)
-  }
+  if (anchor.type === 'assumption') return result.assumptions.map(({ id }) => id)
+  if (anchor.type === 'spec') return result.vessels.map(({ path }) => path)
+  const vessel = result.vessels.find(({ mark }) => mark === anchor.mark)
+  if (anchor.type === 'row' || !vessel) return result.vessels.map(({ mark }) => mark)
+  return [...Object.keys(vessel.results), ...Object.keys(WORDS)]
 }

@@ -4,8 +4,9 @@ const NAME = 'coldfill_session'
 
 const options = (req: Request): CookieOptions => ({ httpOnly: true, sameSite: 'lax', secure: req.secure, path: '/' })
 
-export const setSessionCookie = (req: Request, res: Response, token: string, expires: Date): void => {
-  res.cookie(NAME, token, { ...options(req), expires })
+/** `maxAge` in milliseconds. */
+export const setSessionCookie = (req: Request, res: Response, token: string, maxAge: number): void => {
+  res.cookie(NAME, token, { ...options(req), maxAge })
 }
 
 export const clearSessionCookie = (req: Request, res: Response): void => {

@@ -1,4 +1,4 @@
-import { revisionTitle } from '@coldfill/contract'
+import { type RevisionState, revisionTitle } from '@coldfill/contract'
 import { type ProjectFacts, requiredReviewers } from '../../review/project-facts.ts'
 import { newestRevision, revisionState, standingDispositions } from '../../review/standing.ts'
 
@@ -11,22 +11,17 @@ export const nextStep = (facts: ProjectFacts, differs: boolean | null): string =
       ? 'Describe the systems, then issue for review.'
       : 'Mend the spec and issue again.'
   const title = revisionTitle(newest.label)
-  switch (revisionState(facts, newest)) {
-    case 'in review':
-      return `Reviewers look at ${title} and set a disposition.`
-    case 'revise':
-    case 'rejected':
-      return differs === true
-        ? 'Answer the redlines, then issue again.'
-        : 'Answer the redlines, mend the spec, then issue again.'
-    case 'accepted':
-      return `Issue ${title} for construction.`
-    case 'issued for construction':
-      return `${title} is in force. A change of the spec becomes the next revision.`
-    case 'superseded':
-    case 'withdrawn':
-      return 'Issue again.'
+  const mend = differs === true ? 'then issue again' : 'mend the spec, then issue again'
+  const steps: Record<RevisionState, string> = {
+    'in review': `Reviewers look at ${title} and set a disposition.`,
+    revise: `Answer the redlines, ${mend}.`,
+    rejected: `Answer the redlines, ${mend}.`,
+    accepted: `Issue ${title} for construction.`,
+    'issued for construction': `${title} is in force. A change of the spec becomes the next revision.`,
+    superseded: 'Issue again.',
+    withdrawn: 'Issue again.',
   }
+  return steps[revisionState(facts, newest)]
 }
 
 /** Who is to do what now. */

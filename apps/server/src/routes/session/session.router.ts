@@ -28,7 +28,7 @@ export const sessionRouter = (deps: Deps): Router => {
       const { token, expiresAt } = await openSession(db, tokens, found.user.id, now)
       await noteSignIn(db, found.user.id, now)
       await recordEvent(db, { name: found.user.name, office: found.office }, now, { action: 'signed in' })
-      setSessionCookie(req, res, token, expiresAt)
+      setSessionCookie(req, res, token, expiresAt.getTime() - now.getTime())
       const principal = await principalOf(db, tokens, token, clock)
       if (!principal) throw notSignedIn()
       res.json(presentSession(principal))
