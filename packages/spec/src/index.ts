@@ -15,6 +15,9 @@ export {
   type SourceText,
   isWithin,
 } from './parse/source-tree.ts'
-export { type Acceptance, applyAcceptances } from './read/acceptance.ts'
+export type { Acceptance } from './read/acceptance.ts'
 export * from './read-spec.ts'
 export * from './spec-path.ts'
+export * from './model/shape.ts'
+export * from './model/spec-shape.ts'
+export * from './schema.ts'

@@ -1,4 +1,4 @@
-import { choice, type Fields, integer, number, quantity, text } from './field.ts'
+import { choice, type Fields, integer, number, quantity, text, yesNo } from './field.ts'
 import { hydronicServices, pressureReading, type Service } from './system.ts'
 
 /**
@@ -37,6 +37,17 @@ const common = {
   }),
   location: text('Where the vessel stands.', 'Mechanical room 012'),
   note: text('A remark printed under the schedule.', 'Mount on the suction header'),
+  mounting: choice(
+    { hung: 'hung from the piping or on a wall', floor: 'stands on the floor', 'in line': 'carried by the pipe' },
+    'How the vessel is carried. Only catalogue rows with this mounting are chosen.',
+    'floor',
+    { fallback: 'any' },
+  ),
+  stamp: yesNo(
+    'Whether the vessel has to carry the stamp of the pressure vessel code. Only such catalogue rows are then chosen.',
+    'yes',
+    { fallback: 'only where its volume, pressure or temperature asks for it' },
+  ),
 }
 
 const material = choice(

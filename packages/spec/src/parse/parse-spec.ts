@@ -35,7 +35,9 @@ const MOST_PROBLEMS = 10
 const distinct = (errors: readonly YAMLError[], lineIndex: LineIndex): YAMLError[] => {
   const kept: YAMLError[] = []
   let after = -1
-  for (const error of errors) {
+  // A tab breaks up every block around it.
+  const tabs = errors.filter(({ code }) => code === 'TAB_AS_INDENT')
+  for (const error of tabs.length > 0 ? tabs : errors) {
     if (error.code === 'TAG_RESOLVE_FAILED') continue
     const line = lineIndex.position(error.pos[0]).line
     if (line > after) kept.push(error)

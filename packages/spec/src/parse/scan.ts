@@ -149,6 +149,7 @@ export const createScan = (report: Report, text: string): Scan => {
         case '"':
         case "'":
           return scalar(lexeme, span)
+        case '?':
         case '-':
           if (lexeme === '---') {
             // One such line at the head of the text opens the document that follows.

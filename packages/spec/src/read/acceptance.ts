@@ -1,8 +1,8 @@
-import type { Finding, Range } from '../finding.ts'
+import type { Range } from '../finding.ts'
 import type { Span } from '../parse/line-index.ts'
 import { type Step, places } from '../parse/path.ts'
 import type { Comment } from '../parse/scan.ts'
-import { isWithin, type SourceMap } from '../parse/source-tree.ts'
+import type { SourceMap } from '../parse/source-tree.ts'
 import type { Context } from './context.ts'
 
 /** A warning that a person accepts in the text: `# coldfill: accept CF-E021 because …` */
@@ -91,19 +91,4 @@ export const readAcceptances = (
     }
     return [{ code, reason, path, range: lineIndex.range(span) }]
   })
-}
-
-/** Marks each warning that an acceptance holds for, and returns the acceptances that held for none. */
-export const applyAcceptances = (
-  findings: readonly Finding[],
-  acceptances: readonly Acceptance[],
-): { readonly findings: readonly Finding[]; readonly unused: readonly Acceptance[] } => {
-  const used = new Set<Acceptance>()
-  const accepted = findings.map((finding) => {
-    const acceptance = acceptances.find(({ code, path }) => code === finding.code && isWithin(finding.path, path))
-    if (!acceptance) return finding
-    used.add(acceptance)
-    return finding.severity === 'warning' ? { ...finding, accepted: acceptance.reason } : finding
-  })
-  return { findings: accepted, unused: acceptances.filter((acceptance) => !used.has(acceptance)) }
 }

@@ -20,9 +20,10 @@ const valueOf = (vessel: WrittenVessel, key: string): string => {
   return entry?.value?.node === 'text' ? entry.value.text.trim() : ''
 }
 
-const applies = (vessel: WrittenVessel, { only, unless }: Need): boolean =>
+const applies = (vessel: WrittenVessel, { only, unless, liftedBy = [] }: Need): boolean =>
   (!only || only.is.includes(valueOf(vessel, only.key))) &&
-  (!unless || !unless.is.includes(valueOf(vessel, unless.key)))
+  (!unless || !unless.is.includes(valueOf(vessel, unless.key))) &&
+  liftedBy.every((key) => entryOf(vessel.block, key) === undefined)
 
 /**
  * Where a key is due. Null where it is written, or where a part of its path was not understood and has its own finding.

@@ -1,10 +1,11 @@
+import type { Quantity } from '@coldfill/units'
 import type { Located } from '../model/field.ts'
 import type { SystemModel } from '../model/spec-model.ts'
 import type { FindingCode } from '../diagnostics.ts'
 import { type Block, type Context, entryOf, valueAt } from '../read/context.ts'
 import type { At } from '../report.ts'
 
-type Read = Readonly<Record<string, Located<{ readonly value: number; readonly authored?: string }> | undefined>>
+type Read = Readonly<Record<string, Located<Quantity> | undefined>>
 
 interface Order {
   readonly code: FindingCode
@@ -47,7 +48,7 @@ export const checkOrder = (
   for (const { code, block, lower, upper, message } of orders) {
     const values = read[block] as Read
     const [least, most] = [values[lower], values[upper]]
-    if (!least || !most || least.value.value < most.value.value) continue
+    if (!least || !most || least.value.kind !== most.value.kind || least.value.value < most.value.value) continue
     const at = placeIn(system, block, lower)
     const other = placeIn(system, block, upper)
     if (!at || !other) continue
