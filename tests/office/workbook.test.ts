@@ -1,6 +1,8 @@
-import { water } from '@coldfill/engine'
-import { writeSchedule } from '@coldfill/documents'
-import { clinicProject, documentOptions } from '@coldfill/documents/testing'
+import { readFileSync } from 'node:fs'
+import { scheduleKinds, scheduleTable, writeSchedule } from '@coldfill/documents'
+import { documentOptions } from '@coldfill/documents/testing'
+import { sizeSpec } from '@coldfill/sizing'
+import ExcelJS from 'exceljs'
 import { describe, expect, it } from 'vitest'
 import { hasOffice, leftOut } from './office.ts'
 import { formulaResults, readWorkbook, recalculated } from './recalculate.ts'
@@ -11,16 +13,121 @@ const TOLERANCE = 1e-9
 const off = (found: unknown, expected: unknown): boolean =>
   typeof found !== 'number' ||
   typeof expected !== 'number' ||
-  Math.abs(found - expected) > TOLERANCE * Math.max(Math.abs(expected), 1e-30)
+  !(Math.abs(found - expected) <= TOLERANCE * Math.max(Math.abs(expected), 1e-30))
+
+const spec = (building: string): string =>
+  readFileSync(new URL(`../../examples/${building}/spec.yaml`, import.meta.url), 'utf8')
+
+/** Types a number into the cell of a key of the spec: the outlined one, which holds a number and no formula. */
+const type = (workbook: ExcelJS.Workbook, key: string, value: number): void => {
+  const cells = workbook.worksheets.flatMap((sheet) => {
+    const found: ExcelJS.Cell[] = []
+    sheet.eachRow((row) => {
+      const source = String(row.getCell(6).value ?? '')
+      if (source.replace(/ \(.*\)$/, '') === `spec: ${key}` && typeof row.getCell(3).value === 'number') {
+        found.push(row.getCell(3))
+      }
+    })
+    return found
+  })
+  expect(cells, `cells of ${key}`).toHaveLength(1)
+  const [cell] = cells
+  if (cell) cell.value = value
+}
+
+/** Numbers of every schedule as the sheets hold them, by kind, mark and column. */
+const scheduled = (
+  workbook: ExcelJS.Workbook,
+  kinds: readonly { kind: string; title: string; keys: readonly string[] }[],
+) => {
+  const numbers = new Map<string, unknown>()
+  for (const { title, keys } of kinds) {
+    workbook.getWorksheet(title)?.eachRow((row) => {
+      const mark = row.getCell(1).value
+      if (typeof mark !== 'string') return
+      keys.forEach((key, index) => {
+        const cell = row.getCell(index + 1)
+        numbers.set(`${mark} ${key}`, cell.type === ExcelJS.ValueType.Formula ? cell.result : cell.value)
+      })
+    })
+  }
+  return numbers
+}
 
 describe.skipIf(!hasOffice)(`the workbook recalculated by LibreOffice${leftOut}`, () => {
-  it.each(['US', 'SI'] as const)('gives the value of the engine in every formula cell, in %s units', async (units) => {
-    const bytes = await writeSchedule(clinicProject(water.functions), documentOptions(units))
-    const expected = formulaResults(await readWorkbook(bytes))
-    const found = formulaResults(await recalculated(bytes))
-    expect(expected.size).toBeGreaterThan(90)
-    expect(found.size).toBe(expected.size)
-    const wrong = [...expected].filter(([cell, value]) => off(found.get(cell), value))
-    expect(wrong.map(([cell, value]) => `${cell}: ${String(found.get(cell))}, not ${String(value)}`)).toEqual([])
+  describe.each(['fernhollow', 'alder-court'])('%s', (building) => {
+    it.each(['US', 'SI'] as const)(
+      'gives the value of the engine in every formula cell, in %s units',
+      async (units) => {
+        const bytes = await writeSchedule(sizeSpec(spec(building)), documentOptions(units))
+        const expected = formulaResults(await readWorkbook(bytes))
+        const found = formulaResults(await recalculated(bytes))
+        expect(expected.size).toBeGreaterThan(60)
+        expect(found.size).toBe(expected.size)
+        const wrong = [...expected].filter(([cell, value]) => off(found.get(cell), value))
+        expect(wrong.map(([cell, value]) => `${cell}: ${String(found.get(cell))}, not ${String(value)}`)).toEqual([])
+      },
+    )
   })
+
+  it.each([
+    {
+      building: 'fernhollow',
+      units: 'US',
+      edits: [
+        ['high: 180 °F', 'high: 205 °F', 'HWS / temperatures / high', 205],
+        ['static-height: 42 ft', 'static-height: 50 ft', 'HWS / pressure / static-height', 50],
+        ['elevation: 5200 ft', 'elevation: 900 ft', 'project / elevation', 900],
+        ['high: 165 °F', 'high: 175 °F', 'PHG / temperatures / high', 175],
+        ['low: 20 °F', 'low: 31 °F', 'PHG / temperatures / low', 31],
+        ['storage: 140 °F', 'storage: 160 °F', 'DHW / temperatures / storage', 160],
+        ['regulator: 60 psi', 'regulator: 55 psi', 'DHW / pressure / regulator', 55],
+      ],
+    },
+    {
+      building: 'alder-court',
+      units: 'SI',
+      edits: [
+        ['high: 75 °C', 'high: 88 °C', 'HTG / temperatures / high', 88],
+        ['static-height: 11.5 m', 'static-height: 14 m', 'HTG / pressure / static-height', 14],
+        ['relief-valve: 3 bar', 'relief-valve: 6 bar', 'HTG / pressure / relief-valve', 600],
+      ],
+    },
+  ] as const)(
+    'follows what is typed into its input cells as the engine follows the spec: $building',
+    async (example) => {
+      const { building, units, edits } = example
+      const text = spec(building)
+      let changedText = text
+      for (const [from, to] of edits) {
+        expect(changedText.split(from), from).toHaveLength(2)
+        changedText = changedText.replace(from, to)
+      }
+      const before = sizeSpec(text)
+      const after = sizeSpec(changedText)
+
+      const workbook = await readWorkbook(await writeSchedule(before, documentOptions(units)))
+      for (const [, , key, value] of edits) type(workbook, key, value)
+      const found = await recalculated(new Uint8Array(await workbook.xlsx.writeBuffer()))
+
+      const tables = scheduleKinds(after).map((kind) => scheduleTable(after, kind, units))
+      const kinds = tables.map((table) => ({ ...table, keys: table.columns.map((column) => column.key) }))
+      const numbers = scheduled(found, kinds)
+      const expected = tables.flatMap((table) =>
+        table.rows.flatMap((row) =>
+          Object.entries(row.cells).flatMap(([key, cell]) =>
+            // The relief setting stands in the schedule as a number of the system, outside any calculation.
+            cell.entry === null ? [] : [[`${row.mark} ${key}`, cell.value] as const],
+          ),
+        ),
+      )
+      expect(expected.length).toBeGreaterThan(15)
+      const wrong = expected.filter(([cell, value]) => off(numbers.get(cell), value))
+      expect(wrong.map(([cell, value]) => `${cell}: ${String(numbers.get(cell))}, not ${String(value)}`)).toEqual([])
+      // The edits must have moved every size, or the comparison above says little.
+      const size = (result: typeof before) => result.vessels.map((vessel) => vessel.results['required-volume']?.value)
+      const moved = size(after).filter((value, index) => value !== size(before)[index])
+      expect(moved.length).toBeGreaterThanOrEqual(building === 'fernhollow' ? 3 : 1)
+    },
+  )
 })

@@ -25,6 +25,8 @@ interface LineBase {
 
 export interface InputLine extends LineBase {
   readonly is: 'input'
+  /** Lines with the same key show one and the same thing: a key of the spec, or an assumption, in one kind. Null for a table value. */
+  readonly key: string | null
   /** As a person wrote it, where a person did. */
   readonly authored?: string
 }
@@ -56,10 +58,15 @@ const lineOf = (entry: TraceEntry, scope: Scope, result: ProjectResult, units: U
   const si = (entry.value as number | null) ?? Number.NaN
   const base = { id, symbol, name, kind, si, value: displayNumber(si, kind, units), unit: unitLabel(kind, units) }
   if (entry.entry === 'input') {
-    const source = originWords(entry.origin, result)
-    return entry.authored === undefined
-      ? { ...base, is: 'input', source }
-      : { ...base, is: 'input', source, authored: entry.authored }
+    const { origin, authored } = entry
+    const place = origin.from === 'spec' ? origin.path : origin.from === 'assumption' ? `assumption ${origin.id}` : null
+    const line = {
+      ...base,
+      is: 'input',
+      source: originWords(origin, result),
+      key: place && `${place}, ${kind}`,
+    } as const
+    return authored === undefined ? line : { ...line, authored }
   }
   const formula = formulaTree(entry.formula)
   return {

@@ -18,6 +18,7 @@ export const STYLE = {
   zone: 'Zone',
   draft: 'DraftWarning',
   note: 'KeyedNote',
+  caution: 'Caution',
 } as const
 
 /** Character style of where a value comes from. */

@@ -12,6 +12,7 @@ import {
 } from 'docx'
 import type { Box } from '@coldfill/formula'
 import { symbolRuns } from './symbol-runs.ts'
+import { columnWidths } from './column-widths.ts'
 import { plainText } from './plain-text.ts'
 import { STYLE, TABLE_STYLE } from './styles.ts'
 
@@ -50,15 +51,6 @@ const STYLES = {
   },
 }
 
-/** Widths in whole twips that add up to `total`. */
-const shares = (columns: readonly TableColumn[], total: number): number[] => {
-  const sum = columns.reduce((all, column) => all + column.width, 0)
-  const widths = columns.map((column) => Math.floor((column.width / sum) * total))
-  const last = widths.length - 1
-  widths[last] = (widths[last] ?? 0) + total - widths.reduce((all, width) => all + width, 0)
-  return widths
-}
-
 class DescribedTable extends Table {
   describe(title: string, description: string): this {
     const properties = this.root[0] as XmlComponent
@@ -80,7 +72,7 @@ class DescribedTable extends Table {
 /** A table with a repeating head row, rows that stay whole, and nothing merged. */
 export const table = (content: TableContent): Table => {
   const { columns, rows, width } = content
-  const widths = shares(columns, width)
+  const widths = columnWidths(columns, rows, width, content.size ?? 'table')
   const style = STYLES[content.size ?? 'table']
   const cell = (content: TableCellContent, index: number, paragraphStyle: string, strong = false) =>
     new TableCell({

@@ -81,7 +81,8 @@ const numberIn = (
       const found = entries.find((entry) => entry.symbol === symbol && entry.kind === column.kind)
       if (found) return { value: found.value, entry: found.id }
     }
-    return null
+    const value = column.otherwise?.(context) ?? null
+    return value === null ? null : { value, entry: null }
   }
   const value = column.number(context)
   return value === null ? null : { value, entry: null }

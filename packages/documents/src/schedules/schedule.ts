@@ -31,7 +31,13 @@ export type ScheduleColumnDefinition = ColumnBase &
       }
     | { readonly shows: 'result'; readonly kind: Kind }
     /** An input of the calculation, by the symbols it may have in the methods of this schedule. */
-    | { readonly shows: 'input'; readonly kind: Kind; readonly symbols: readonly string[] }
+    | {
+        readonly shows: 'input'
+        readonly kind: Kind
+        readonly symbols: readonly string[]
+        /** SI number where the calculation does not have the input. */
+        readonly otherwise?: (context: VesselContext) => number | null
+      }
     /** SI number that is not part of the calculation; null where it does not apply. */
     | { readonly shows: 'quantity'; readonly kind: Kind; readonly number: (context: VesselContext) => number | null }
   )
@@ -68,7 +74,16 @@ export const inputNumber = (
   width: number,
   kind: Kind,
   symbols: readonly string[],
-): ScheduleColumnDefinition => ({ shows: 'input', key, heading, width, kind, symbols })
+  otherwise?: (context: VesselContext) => number | null,
+): ScheduleColumnDefinition => ({
+  shows: 'input',
+  key,
+  heading,
+  width,
+  kind,
+  symbols,
+  ...(otherwise === undefined ? {} : { otherwise }),
+})
 
 export const quantity = (
   key: string,

@@ -1,5 +1,5 @@
 import { methodWords, numbersOf, sentenceCase } from '../words/vessel-words.ts'
-import { quantity, words } from './schedule.ts'
+import { inputNumber, quantity, words } from './schedule.ts'
 
 /** Columns that every schedule has in the same words and place. */
 export const serves = words('serves', 'Serves', 17, ({ vessel, system }) => vessel.serves || (system?.title ?? ''))
@@ -13,6 +13,6 @@ export const assumptions = words('assumptions', 'Assumptions', 13, ({ vessel, re
 export const selectedVolume = quantity('selected-volume', 'Selected volume', 9, 'volume', ({ vessel }) =>
   vessel.selected === null ? null : vessel.selected.volume,
 )
-export const reliefSet = quantity('relief-set', 'Relief set', 8, 'gauge pressure', ({ system }) =>
+export const reliefSet = inputNumber('relief-set', 'Relief set', 8, 'gauge pressure', ['p_rv'], ({ system }) =>
   system?.relief ? system.relief.set : null,
 )

@@ -1,6 +1,7 @@
 import { paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import { citationWords } from '../words/source-words.ts'
+import { sentenceCase } from '../words/vessel-words.ts'
 import type { Section } from './section.ts'
 
 /** The numbered register of every default that the results lean on, and of what replaced one. */
@@ -22,18 +23,20 @@ export const assumptions: Section = ({ result, headings, captions, width }) => {
       strongFirst: true,
       columns: [
         { heading: 'No.', width: 6 },
-        { heading: 'Assumption', width: 22 },
-        { heading: 'Value', width: 12 },
+        { heading: 'Assumption', width: 20 },
+        { heading: 'Value', width: 11 },
         { heading: 'Source', width: 24 },
-        { heading: 'Why', width: 24 },
-        { heading: 'Used by', width: 12 },
+        { heading: 'Why', width: 32 },
+        { heading: 'Used by', width: 11 },
       ],
       rows: used.map((assumption) => [
         assumption.number,
-        assumption.name,
-        assumption.overridden ? `${assumption.value} (default ${assumption.defaultValue})` : assumption.value,
+        sentenceCase(assumption.name),
+        assumption.value === assumption.defaultValue
+          ? assumption.value
+          : `${assumption.value} (default ${assumption.defaultValue})`,
         citationWords(assumption.source, result),
-        assumption.overridden && assumption.reason ? `Changed: ${assumption.reason}` : assumption.because,
+        assumption.overridden && assumption.reason ? `Set in the spec: ${assumption.reason}` : assumption.because,
         assumption.usedBy.join(', '),
       ]),
     }),

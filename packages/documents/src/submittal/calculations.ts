@@ -16,7 +16,7 @@ import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
 import { scheduleWords } from '../schedules/schedule-words.ts'
 import { basisWords } from '../words/basis-words.ts'
-import { numberText, valueText } from '../calculation/value-text.ts'
+import { valueText } from '../calculation/value-text.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import type { Section, SubmittalContext } from './section.ts'
@@ -27,8 +27,8 @@ const isInput = (line: { is: string }): line is InputLine => line.is === 'input'
 const isStep = (line: { is: string }): line is StepLine => line.is === 'step'
 
 /** True where a person typed another number than the one shown: another unit, or more digits. */
-const typedOtherwise = (line: InputLine): boolean =>
-  line.authored !== undefined && !line.authored.trim().startsWith(numberText(line.value))
+const typedOtherwise = ({ authored, value }: InputLine): boolean =>
+  authored !== undefined && Math.abs(Number.parseFloat(authored) - value) > 1e-9 * Math.abs(value)
 
 const inputTable = (inputs: readonly InputLine[], mark: string, title: string, width: number): FileChild =>
   table({

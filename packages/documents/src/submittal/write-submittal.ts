@@ -41,8 +41,7 @@ export const writeSubmittal = async (result: ProjectResult, options: DocumentOpt
   const overview = children('portrait', [summary])
   const body = [
     ...(result.vessels.length > 0 ? [page('landscape', children('landscape', [schedules]))] : []),
-    page('portrait', children('portrait', [calculations])),
-    page('portrait', children('portrait', [assumptions, findings, sources, cautions])),
+    page('portrait', children('portrait', [calculations, assumptions, findings, sources, cautions])),
   ].filter((section) => section.children.length > 0)
   const frontProperties = pageProperties(options, 'portrait')
 

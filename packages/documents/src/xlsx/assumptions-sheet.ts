@@ -2,6 +2,7 @@ import type { ProjectResult } from '@coldfill/sizing'
 import type { Workbook } from 'exceljs'
 import type { DocumentOptions } from '../document-options.ts'
 import { citationWords } from '../words/source-words.ts'
+import { sentenceCase } from '../words/vessel-words.ts'
 import { addSheet, writeTitle } from './sheet.ts'
 import { setPrintArea, writeTable } from './text-table.ts'
 
@@ -40,7 +41,7 @@ export const writeAssumptions = (
     rows: result.assumptions.map((assumption) =>
       [
         assumption.number,
-        assumption.name,
+        sentenceCase(assumption.name),
         assumption.value,
         assumption.defaultValue,
         citationWords(assumption.source, result),

@@ -9,6 +9,7 @@ import { sentenceCase } from '../words/vessel-words.ts'
 import { emitFormula } from './emit-formula.ts'
 import type { FluidCells } from './fluid-data-sheet.ts'
 import { FluidCalls } from './fluid-calls.ts'
+import type { SharedInputs } from './shared-inputs.ts'
 import { putCell, type CellContent } from './put-cell.ts'
 import {
   addSheet,
@@ -56,6 +57,7 @@ export const writeCalculation = (
   project: ProjectResult['project'],
   options: DocumentOptions,
   fluidCells: FluidCells,
+  inputs: SharedInputs,
 ): EntryCells => {
   const sheet = addSheet(workbook, name, project, options, { orientation: 'landscape', widths: WIDTHS })
   const purpose =
@@ -123,10 +125,13 @@ export const writeCalculation = (
     heading(at, section.title)
     at += 1
     for (const current of section.lines) {
+      const shared = current.is === 'input' ? inputs.find(current) : undefined
       const value: CellContent =
-        current.is === 'input'
-          ? { number: current.value, format: 'General' }
-          : { formula: formulaOf(current), result: current.value, format: stepFormat(current.value) }
+        current.is === 'step'
+          ? { formula: formulaOf(current), result: current.value, format: stepFormat(current.value) }
+          : shared
+            ? { formula: shared.from(name), result: current.value, format: 'General' }
+            : { number: current.value, format: 'General' }
       row(at, [
         { text: symbolText(current.symbol) },
         { text: sentenceCase(current.name) },
@@ -137,7 +142,10 @@ export const writeCalculation = (
           text: current.is === 'input' && current.authored ? `${current.source} (${current.authored})` : current.source,
         },
       ])
-      if (current.is === 'input') outline(sheet.getCell(at, 3))
+      if (current.is === 'input' && !shared) {
+        outline(sheet.getCell(at, 3))
+        inputs.add(current, name, `$C$${at}`)
+      }
       if (answers.has(current.id)) {
         for (const column of [1, 2, 3, 4]) sheet.getCell(at, column).font = font(9, { bold: true })
       }

@@ -121,7 +121,7 @@ export const writeCover = (
 
   heading('HOW TO READ THIS WORKBOOK')
   running(
-    'Input cells are outlined. Change one and every step after it and the schedule follow, fluid properties included.',
+    'Input cells are outlined; each key of the spec has one. Change it, and every step and schedule row follows, fluid properties included.',
   )
   running('A changed workbook is no longer the issued document: issue a revision instead.')
   running(gaugeRemark(options.units))

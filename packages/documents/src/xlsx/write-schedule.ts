@@ -13,6 +13,7 @@ import { writeFindings } from './findings-sheet.ts'
 import { writeFluidData, type GlycolBase } from './fluid-data-sheet.ts'
 import { cellText } from './plain-text.ts'
 import { writeScheduleSheet, type VesselCells } from './schedule-sheet.ts'
+import { SharedInputs } from './shared-inputs.ts'
 import { SheetNames } from './sheet-names.ts'
 import { writeSources } from './sources-sheet.ts'
 
@@ -76,9 +77,10 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
     ...new Set(calculations.flatMap(({ fluid }) => (fluid.massFraction > 0 ? [fluid.base as GlycolBase] : []))),
   ]
   const fluidCells = writeFluidData(workbook, fluidData, project, options, bases)
+  const inputs = new SharedInputs()
   const vessels = new Map<string, VesselCells>()
   for (const sheet of calculations) {
-    const cells = writeCalculation(workbook, sheet, project, options, fluidCells)
+    const cells = writeCalculation(workbook, sheet, project, options, fluidCells, inputs)
     vessels.set(`${sheet.vessel.system}/${sheet.vessel.mark}`, { sheet: sheet.name, cells })
   }
   for (const { table, name } of schedules) writeScheduleSheet(workbook, name, table, vessels, project, options)
