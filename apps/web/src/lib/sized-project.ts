@@ -15,7 +15,9 @@ export const citationWords = (
   sources: Readonly<Record<string, { readonly title: string; readonly edition: string }>>,
 ): string => {
   const source = sources[citation.source]
-  const title = source ? [source.title, source.edition].filter(Boolean).join(', ') : citation.source
+  const title = source
+    ? [source.title, source.edition].filter((part) => part !== '' && part !== 'none').join(', ')
+    : citation.source
   const memory = citation.fromMemory ? ' (from memory; verify against the adopted edition)' : ''
   return `${[title, citation.locator].filter(Boolean).join(', ')}${memory}`
 }

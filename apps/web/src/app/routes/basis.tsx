@@ -19,6 +19,7 @@ import { redlinesByPlace } from '#features/redlines/filters.ts'
 import { resultsQuery } from '#features/results/api/results.ts'
 import { ContentBand } from '#features/results/components/content-band.tsx'
 import { RevisionSwitch } from '#features/results/components/revision-switch.tsx'
+import { capital } from '#lib/format.ts'
 import { useProjectNumber } from '#lib/route-params.ts'
 import { useAddress } from '#lib/search-params.ts'
 
@@ -66,7 +67,7 @@ export function Component() {
             ) : (
               <>
                 <div>
-                  <p className="font-semibold">{chosen.name}</p>
+                  <p className="font-semibold">{capital(chosen.name)}</p>
                   <p className="mt-1 font-mono text-cell break-words text-pencil">{chosen.id}</p>
                 </div>
                 {project.sheets.includes('spec') ? (

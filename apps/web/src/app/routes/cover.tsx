@@ -25,7 +25,9 @@ export function Component() {
       says: project.permissions.editSpec.allowed
         ? working === false
           ? 'Says what the newest revision says'
-          : 'Has changes that are not issued'
+          : project.revisions.length === 0
+            ? 'The working copy; nothing is issued yet'
+            : 'Has changes that are not issued'
         : (project.permissions.editSpec.why ?? 'Read only'),
     },
     {
@@ -75,12 +77,14 @@ export function Component() {
           <dl className="grid content-start gap-x-6 gap-y-1 self-start border border-rule p-4 desk:grid-cols-[9rem_minmax(0,1fr)]">
             <dt className="text-pencil">Project number</dt>
             <dd className="font-mono font-semibold">{project.number}</dd>
-            {project.parties.map(({ part, name }) => (
-              <div key={`${part} ${name}`} className="contents">
-                <dt className="text-pencil">{capital(part)}</dt>
-                <dd>{name}</dd>
-              </div>
-            ))}
+            {project.parties
+              .filter(({ name }) => !project.members.some((member) => member.name === name))
+              .map(({ part, name }) => (
+                <div key={`${part} ${name}`} className="contents">
+                  <dt className="text-pencil">{capital(part)}</dt>
+                  <dd>{name}</dd>
+                </div>
+              ))}
             {project.members.map((member) => (
               <div key={member.id} className="contents">
                 <dt className="text-pencil">{capital(memberWords(member))}</dt>

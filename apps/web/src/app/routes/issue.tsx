@@ -21,7 +21,7 @@ export function Component() {
       <div className="flex max-w-5xl flex-col gap-10">
         {consultant && open ? <ConstructionIssue key={newest.id} project={project} revision={newest} /> : null}
         {consultant ? <ReviewIssue project={project} /> : null}
-        <section className="flex flex-col gap-4">
+        <section>
           <SectionHeading>Revisions</SectionHeading>
           {project.revisions.length === 0 ? (
             <p className="border-t-2 border-ink pt-2 text-pencil">Nothing is issued yet.</p>

@@ -61,7 +61,7 @@ export function Component() {
     { name: 'Projects', to: paths.projects(), end: true },
     ...(session.user.administrator ? [{ name: 'Office', to: paths.office() }] : []),
     { name: 'Help', to: paths.help() },
-    { name: session.user.initials, to: paths.you() },
+    { name: session.user.name, to: paths.you() },
   ]
   const here = sheets.findLastIndex(
     ({ sheet }) => pathname === paths[sheet](number) || pathname.startsWith(`${paths[sheet](number)}/`),

@@ -72,6 +72,7 @@ export const ScheduleMargin = (props: Props) => {
       ) : (
         <>
           <TracePanel
+            key={`${row.id} ${column}`}
             project={project.number}
             result={result}
             vessel={row.vessel}

@@ -116,7 +116,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
       fills
       actions={
         <>
-          <span className="text-cell text-pencil" role="status">
+          <span className="w-full text-cell text-pencil desk:w-auto" role="status">
             {draft.saving
               ? 'Saving…'
               : dirty

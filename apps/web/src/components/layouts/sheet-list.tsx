@@ -29,7 +29,7 @@ const Item = ({ link }: { readonly link: SheetLink }) => (
           {link.number}
         </span>
       )}
-      <span>{link.name}</span>
+      <span className="truncate">{link.name}</span>
       {link.badge === undefined || link.badge === null ? null : <span className="ml-auto">{link.badge}</span>}
     </NavLink>
   </li>
@@ -55,7 +55,7 @@ export const SheetList = ({ label, heading, sheets, others }: Props) => (
           <Item key={link.to} link={link} />
         ))}
       </ul>
-      <ul className="flex border-hair bench:mt-auto bench:flex-col bench:border-t bench:py-2">
+      <ul className="flex border-hair empty:hidden bench:mt-auto bench:flex-col bench:border-t bench:py-2">
         {others.map((link) => (
           <Item key={link.to} link={link} />
         ))}

@@ -18,7 +18,7 @@ export const SeverityMark = ({ severity, label = true }: { readonly severity: Se
       x="8"
       y={severity === 'warning' ? 11 : 11.5}
       textAnchor="middle"
-      className={`font-mono font-bold ${severity === 'note' ? 'fill-steel' : 'fill-sheet'}`}
+      className={`font-bold ${severity === 'note' ? 'font-mono' : 'font-sans'} ${severity === 'note' ? 'fill-steel' : 'fill-sheet'}`}
       fontSize={severity === 'warning' ? 8 : 10}
     >
       {severity === 'error' ? 'E' : severity === 'warning' ? 'W' : 'i'}

@@ -45,7 +45,10 @@ const serves = words('serves', 'Serves', ({ vessel, system }) => vessel.serves |
 const construction = words('construction', 'Type', ({ vessel }) => capital(vessel.construction ?? ''))
 const fluid = words('fluid', 'Fluid', ({ vessel }) => capital(vessel.fluid))
 const count = words('quantity', 'Qty', ({ vessel }) => String(vessel.quantity))
-const method = words('method', 'Method', ({ vessel }) => vessel.methodTitle || vessel.method)
+/** Methods as drawings write them: initials of standards bodies in capitals. */
+const methodWords = (method: string): string =>
+  capital(method.replaceAll(/\b(?:ashrae|en|une|bs|din|aspe)\b/g, (initials) => initials.toUpperCase()))
+const method = words('method', 'Method', ({ vessel }) => methodWords(vessel.method))
 const assumptions: ColumnDefinition = {
   shows: 'words',
   key: 'assumptions',

@@ -6,7 +6,6 @@ import {
   layoutSymbol,
   shownLine,
   toMathML,
-  type Box,
   type Scope,
 } from '@coldfill/formula'
 import { displayUnit, formatQuantity, fromSi, unitLabel, type Kind, type UnitSystem } from '@coldfill/units'
@@ -16,19 +15,13 @@ import { fluidFunctions } from './fluid-functions.ts'
 export interface DrawnStep {
   /** MathML of the line in symbols: `V_e = V_s · e_n`. */
   readonly symbols: string
-  /** MathML of the same line with its numbers put in, in the units shown. */
+  /** MathML of the right side with its numbers put in, in the units shown. */
   readonly numbers: string
   /** The result as shown, with its unit. */
   readonly result: string
 }
 
 export const drawnSymbol = (symbol: string): string => toMathML(layoutSymbol(symbol))
-
-const resultBox = (text: string, kind: Kind, units: UnitSystem): Box => {
-  const unit = unitLabel(kind, units)
-  const number: Box = { box: 'number', text }
-  return unit === '' ? number : { box: 'row', items: [number, { box: 'word', text: `\u2009${unit}` }] }
-}
 
 /**
  * A step drawn in display units. The digits shown are enough that computing from them gives the shown result again.
@@ -48,13 +41,7 @@ export const drawStep = (step: TraceStep, entries: readonly TraceEntry[], units:
     const left = layoutSymbol(step.symbol)
     return {
       symbols: toMathML(equationBox(left, layout(tree, { functions: fluidFunctions })), { display: true }),
-      numbers: toMathML(
-        equationBox(
-          layout(tree, { numbers: line.numbers, functions: fluidFunctions }),
-          resultBox(line.result, step.kind, units),
-        ),
-        { display: true },
-      ),
+      numbers: toMathML(layout(tree, { numbers: line.numbers, functions: fluidFunctions }), { display: true }),
       result: `${line.result} ${unitLabel(step.kind, units)}`.trimEnd(),
     }
   } catch {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { TraceEntry } from '#lib/sized-project.ts'
-import { upstream } from './upstream.ts'
+import { operands, upstream } from './upstream.ts'
 
 const input = (symbol: string): TraceEntry => ({
   entry: 'input',
@@ -38,5 +38,11 @@ describe('what a number comes from', () => {
   })
   it('is nothing for an entry that is not there', () => {
     expect(names('ET-1/z')).toEqual([])
+  })
+  it('names the operands of one step alone', () => {
+    const line = upstream(trace, 'ET-1/e')
+    const last = line.at(-1)
+    if (last?.entry !== 'step') throw new Error('e is a step')
+    expect(operands(last, line).map((entry) => entry.symbol)).toEqual(['d', 'a'])
   })
 })

@@ -1,5 +1,5 @@
 import { formulaTree, symbolsIn } from '@coldfill/formula'
-import type { TraceEntry, TraceSection } from '#lib/sized-project.ts'
+import type { TraceEntry, TraceSection, TraceStep } from '#lib/sized-project.ts'
 
 /** The entry with this id and everything it is computed from, in the order of the calculation, itself last. */
 export const upstream = (trace: readonly TraceSection[], id: string): readonly TraceEntry[] => {
@@ -14,3 +14,7 @@ export const upstream = (trace: readonly TraceSection[], id: string): readonly T
   visit(entries.find((entry) => entry.id === id))
   return entries.filter((entry) => needed.has(entry.id))
 }
+
+/** The entries that a step names itself, in the order of its formula. */
+export const operands = (step: TraceStep, before: readonly TraceEntry[]): readonly TraceEntry[] =>
+  symbolsIn(formulaTree(step.formula)).flatMap((symbol) => before.find((entry) => entry.symbol === symbol) ?? [])

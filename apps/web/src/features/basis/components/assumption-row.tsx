@@ -1,6 +1,7 @@
 import type { ProjectResult } from '@coldfill/contract'
 import type { ReactNode } from 'react'
 import { WasNow } from '#components/ui/review-marks.tsx'
+import { capital } from '#lib/format.ts'
 import { citationWords, type UsedAssumption } from '#lib/sized-project.ts'
 
 interface Props {
@@ -25,7 +26,7 @@ export const AssumptionRow = ({ assumption, sources, chosen, onChoose, flags }: 
         aria-pressed={chosen}
         className="text-left font-semibold hover:text-steel hover:underline"
       >
-        {assumption.name}
+        {capital(assumption.name)}
       </button>
       {flags ? <span className="ml-2 inline-flex gap-1">{flags}</span> : null}
       <p className="max-w-[80ch] text-read">

@@ -51,7 +51,7 @@ const Assumptions = ({ reference }: { readonly reference: Reference }) => (
         className="grid scroll-mt-4 gap-x-4 border-b border-hair py-2 desk:grid-cols-[minmax(0,1fr)_9rem]"
       >
         <dt>
-          <span className="font-semibold">{assumption.name}</span>
+          <span className="font-semibold">{capital(assumption.name)}</span>
           <span className="block font-mono text-cell break-words text-pencil">{assumption.id}</span>
         </dt>
         <dd className="figures font-mono desk:text-right">{assumption.value}</dd>

@@ -42,14 +42,14 @@ export const ConstructionIssue = ({
       setReason('')
   }
   return (
-    <section className="flex flex-col gap-3">
+    <section className="flex flex-col">
       <SectionHeading note={`Of ${revisionTitle(revision.label)}, as it was reviewed`}>
         Issue for construction
       </SectionHeading>
       <Loaded query={gates} what="Checking the gates" rows={4}>
         {(list) => <GateTable gates={list} />}
       </Loaded>
-      <form onSubmit={(event) => void onSubmit(event)} className="flex max-w-2xl flex-col gap-3">
+      <form onSubmit={(event) => void onSubmit(event)} className="mt-4 flex max-w-2xl flex-col gap-3">
         <Failure error={error} />
         {overridable.length > 0 ? (
           <TextArea

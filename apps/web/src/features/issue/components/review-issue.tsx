@@ -28,14 +28,20 @@ export const ReviewIssue = ({ project }: { readonly project: Project }) => {
     if (await run(() => issueForReview(project.number, note))) setNote('')
   }
   return (
-    <section className="flex flex-col gap-3">
-      <SectionHeading note={`The next issue is ${revisionTitle(project.nextRevision)}`}>
+    <section className="flex flex-col">
+      <SectionHeading
+        note={
+          project.nextRevision === ''
+            ? 'It will be the first issue'
+            : `It will be ${revisionTitle(project.nextRevision)}`
+        }
+      >
         Issue for review
       </SectionHeading>
       <Loaded query={gates} what="Checking the gates" rows={3}>
         {(list) => <GateTable gates={list} />}
       </Loaded>
-      <form onSubmit={(event) => void onSubmit(event)} className="flex max-w-2xl flex-col gap-3">
+      <form onSubmit={(event) => void onSubmit(event)} className="mt-4 flex max-w-2xl flex-col gap-3">
         <Failure error={error} />
         <TextArea
           label="Note"

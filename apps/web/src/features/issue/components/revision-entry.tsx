@@ -62,7 +62,7 @@ export const RevisionEntry = ({ project, revision }: { readonly project: Project
     return files.length > 0 ? [{ set, files }] : []
   })
   return (
-    <article aria-label={revisionTitle(revision.label)} className="border-t-[3px] border-ink pt-3">
+    <article aria-label={revisionTitle(revision.label)} className="mb-8 border-t-[3px] border-ink pt-3">
       <header className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2">
         <h3 className="flex items-center gap-2 text-lead font-semibold">
           {revision.label ? <RevisionTriangle letter={revision.label} /> : null}

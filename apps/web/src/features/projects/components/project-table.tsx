@@ -27,7 +27,7 @@ const Row = ({ project }: { readonly project: ProjectSummary }) => (
       <StateWord state={project.state} />
     </Cell>
     <Cell>{project.revision === null ? '—' : revisionTitle(project.revision)}</Cell>
-    <Cell>{project.waitingOnYou ? <strong className="font-semibold text-redline">You</strong> : '—'}</Cell>
+    <Cell>{project.waitingOnYou ? <strong className="font-semibold">You</strong> : '—'}</Cell>
     <Cell figures>{project.openRedlines === 0 ? '—' : project.openRedlines}</Cell>
     <Cell figures>
       {project.lastIssue ? (

@@ -26,6 +26,16 @@ interface Props {
 const features = tableFeatures({ columnVisibilityFeature })
 const helper = createColumnHelper<typeof features, Row>()
 
+/** Least widths of columns of words, so that a row stays low. */
+const wordWidths: Readonly<Record<string, string>> = {
+  serves: 'min-w-32',
+  fluid: 'min-w-28',
+  construction: 'min-w-20',
+  method: 'min-w-24',
+  assumptions: 'min-w-28',
+  notes: 'min-w-12',
+}
+
 /** One schedule as a grid: arrows move, Enter goes to the trace, Shift+F2 starts a redline. A real table underneath. */
 export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRedline, marks }: Props) => {
   const columns = useMemo(
@@ -163,7 +173,7 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                         ? undefined
                         : `${String(Number(value.number.toPrecision(12)))} ${column?.unit ?? ''}`
                     }
-                    className={`relative border-b border-b-hair px-2.5 py-1.5 align-top outline-offset-[-3px] ${ground} ${column?.figures ? 'figures text-right whitespace-nowrap' : 'min-w-20'} ${column?.mono ? 'font-mono' : ''}`}
+                    className={`relative border-b border-b-hair px-2.5 py-1.5 align-top outline-offset-[-3px] ${ground} ${column?.figures ? 'figures text-right whitespace-nowrap' : (wordWidths[key] ?? 'min-w-16')} ${column?.mono ? 'font-mono' : ''}`}
                   >
                     {own.around}
                     {own.value ?? (cell.getValue() as string)}

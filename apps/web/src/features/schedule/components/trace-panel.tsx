@@ -1,13 +1,13 @@
 import type { ProjectResult } from '@coldfill/contract'
 import type { UnitSystem } from '@coldfill/units'
-import { useMemo, type ReactNode } from 'react'
+import { useMemo, useState, type ReactNode } from 'react'
 import { Link } from 'react-router-dom'
 import { Formula } from '#components/ui/math.tsx'
 import { paths, withQuery } from '#config/paths.ts'
-import { capital } from '#lib/format.ts'
+import { capital, plural } from '#lib/format.ts'
 import { citationWords, type TraceEntry, type TraceInput, type TraceStep, type Vessel } from '#lib/sized-project.ts'
 import { drawnSymbol, drawStep, shownValue } from '../drawn-step.ts'
-import { upstream } from '../upstream.ts'
+import { operands, upstream } from '../upstream.ts'
 
 interface Context {
   readonly project: string
@@ -70,7 +70,12 @@ const Step = ({
       {drawn ? (
         <>
           <Formula block markup={drawn.symbols} />
-          <Formula block markup={drawn.numbers} />
+          <div className="flex flex-wrap items-center gap-x-1.5">
+            <Formula block markup={drawn.numbers} />
+            <span className="figures py-1 whitespace-nowrap">
+              = <strong className="font-semibold">{drawn.result}</strong>
+            </span>
+          </div>
         </>
       ) : (
         <p className="py-1 font-mono text-cell break-words">
@@ -95,25 +100,60 @@ interface Props {
   readonly without: ReactNode
 }
 
-/** The worked calculation of one number: the line itself, then what it was computed from. */
+/** A step that the chosen one uses, as a way to it. */
+const UsedStep = ({
+  step,
+  context,
+  onWalk,
+}: {
+  readonly step: TraceStep
+  readonly context: Context
+  readonly onWalk: () => void
+}) => (
+  <li className="border-b border-hair">
+    <button
+      type="button"
+      onClick={onWalk}
+      className="flex w-full items-baseline justify-between gap-3 py-1.5 text-left hover:bg-steel-wash"
+    >
+      <span className="min-w-0">
+        <Formula markup={drawnSymbol(step.symbol)} />{' '}
+        <span className="text-cell text-steel underline underline-offset-3">{step.name}</span>
+      </span>
+      <span className="figures font-mono text-cell whitespace-nowrap">{shownValue(step, context.units)}</span>
+    </button>
+  </li>
+)
+
+/** The worked calculation of one number: the line itself, what it was computed from, and the way back through all of it. */
 export const TracePanel = ({ project, result, vessel, entry, heading, units, hasSpec, without }: Props) => {
+  const [walked, setWalked] = useState<string | null>(null)
   const all = useMemo(() => vessel.trace.flatMap((section) => section.entries), [vessel])
   const context = useMemo<Context>(
     () => ({ project, result, units, all, hasSpec }),
     [project, result, units, all, hasSpec],
   )
-  const line = useMemo(() => (entry === null ? [] : upstream(vessel.trace, entry)), [vessel, entry])
+  const at = walked ?? entry
+  const line = useMemo(() => (at === null ? [] : upstream(vessel.trace, at)), [vessel, at])
   const chosen = line.at(-1)
-  if (!chosen) return <div className="text-cell text-pencil">{without}</div>
+  if (!chosen) return <div className="text-cell">{without}</div>
   const before = line.slice(0, -1)
-  const inputs = before.filter((one) => one.entry === 'input')
+  const direct = chosen.entry === 'step' ? operands(chosen, before) : []
   const steps = before.filter((one) => one.entry === 'step')
+  const inputs = before.filter((one) => one.entry === 'input')
   return (
     <div className="flex flex-col gap-4">
       <div>
-        <p className="font-mono text-cell text-pencil">{vessel.mark}</p>
+        <p className="flex justify-between gap-3 text-cell">
+          <span className="font-mono text-pencil">{vessel.mark}</span>
+          {walked === null ? null : (
+            <button type="button" className="text-steel underline underline-offset-3" onClick={() => setWalked(null)}>
+              Back to {heading.toLowerCase()}
+            </button>
+          )}
+        </p>
         <p className="mb-2 flex items-baseline justify-between gap-3">
-          <strong className="font-semibold">{heading}</strong>
+          <strong className="font-semibold">{walked === null ? heading : capital(chosen.name)}</strong>
           <span className="figures font-mono font-semibold whitespace-nowrap">{shownValue(chosen, units)}</span>
         </p>
         {chosen.entry === 'step' ? (
@@ -124,23 +164,35 @@ export const TracePanel = ({ project, result, vessel, entry, heading, units, has
           </ul>
         )}
       </div>
+      {direct.length > 0 ? (
+        <section aria-label="Computed from">
+          <h3 className="border-b-2 border-ink pb-1 font-semibold">Computed from</h3>
+          <ul>
+            {direct.map((one) =>
+              one.entry === 'input' ? (
+                <Input key={one.id} input={one} context={context} />
+              ) : (
+                <UsedStep key={one.id} step={one} context={context} onWalk={() => setWalked(one.id)} />
+              ),
+            )}
+          </ul>
+        </section>
+      ) : null}
       {steps.length > 0 ? (
-        <section aria-label="Steps before it">
-          <h3 className="border-b-2 border-ink pb-1 font-semibold">Steps before it</h3>
+        <details>
+          <summary className="cursor-pointer font-semibold text-steel">
+            All {plural(steps.length, 'step')} before it
+          </summary>
           {steps.map((step) => (
             <Step key={step.id} step={step} context={context} />
           ))}
-        </section>
-      ) : null}
-      {inputs.length > 0 ? (
-        <section aria-label="Inputs">
-          <h3 className="border-b-2 border-ink pb-1 font-semibold">Inputs</h3>
+          <h3 className="mt-3 border-b-2 border-ink pb-1 font-semibold">Inputs</h3>
           <ul>
             {inputs.map((input) => (
               <Input key={input.id} input={input} context={context} />
             ))}
           </ul>
-        </section>
+        </details>
       ) : null}
     </div>
   )

@@ -46,6 +46,7 @@ const mark = (severity: Severity): SVGElement => {
         'text-anchor': 'middle',
         'font-size': severity === 'warning' ? '8' : '10',
         'font-weight': '700',
+        'font-family': 'var(--font-sans)',
         class: severity === 'note' ? 'fill-steel' : 'fill-sheet',
       },
       letter,
