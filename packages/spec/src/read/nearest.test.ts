@@ -17,7 +17,11 @@ describe('distance', () => {
 
   it('is the same both ways', () => {
     const word = fc.string({ maxLength: 8 })
-    fc.assert(fc.property(word, word, (a, b) => expect(distance(a, b)).toBe(distance(b, a))))
+    fc.assert(
+      fc.property(word, word, (a, b) => {
+        expect(distance(a, b)).toBe(distance(b, a))
+      }),
+    )
   })
 })
 
