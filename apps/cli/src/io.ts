@@ -7,7 +7,9 @@ import { exitStatus, Stop } from './exit-status.ts'
 export const fromHere = (path: string): string => resolve(process.env['INIT_CWD'] ?? process.cwd(), path)
 
 const isMissing = (error: unknown): boolean =>
-  error instanceof Error && 'code' in error && (error.code === 'ENOENT' || error.code === 'EISDIR' || error.code === 'EACCES')
+  error instanceof Error &&
+  'code' in error &&
+  (error.code === 'ENOENT' || error.code === 'EISDIR' || error.code === 'EACCES')
 
 /** Text of a file; a byte-order mark is taken off. */
 export const readText = (path: string): string => {
@@ -32,7 +34,10 @@ export const writeBytes = (path: string, bytes: Uint8Array): void => {
     renameSync(beside, target)
   } catch (error) {
     rmSync(beside, { force: true })
-    throw new Stop(exitStatus.cannotWrite, `${path} cannot be written: ${error instanceof Error ? error.message : String(error)}`)
+    throw new Stop(
+      exitStatus.cannotWrite,
+      `${path} cannot be written: ${error instanceof Error ? error.message : String(error)}`,
+    )
   }
 }
 

@@ -16,7 +16,7 @@ const verbs: Readonly<Record<string, () => Promise<Verb>>> = {
 const usage = `coldfill VERB …
 
   check FILE                     findings only
-  size FILE                      sizes every vessel
+  size FILE [--catalogue FILE]   sizes every vessel
   schedule FILE --out FILE.xlsx  writes the equipment schedule
   submittal FILE --out FILE.docx writes the Word submittal
   fluid --fluid "propylene glycol 40 % mass" --temperature "20 °C" [--pressure "3 bar abs"]
@@ -39,7 +39,9 @@ export const main = async (argv: readonly string[]): Promise<number> => {
   try {
     const load = verb !== undefined && Object.hasOwn(verbs, verb) ? verbs[verb] : undefined
     if (!load) throw new Stop(exitStatus.usage, verb === undefined ? usage : `There is no verb "${verb}".\n\n${usage}`)
-    return await (await load())(args)
+    return await (
+      await load()
+    )(args)
   } catch (error) {
     if (error instanceof Stop) {
       process.stderr.write(`${error.message}\n`)

@@ -37,7 +37,12 @@ const oneOf = <T extends string>(name: string, value: string, choices: readonly 
 }
 
 /** Reads the arguments after the verb. `allowed` are the options the verb has; anything else is a usage error. */
-export const readOptions = (verb: string, args: readonly string[], allowed: readonly OptionName[], files: number): Options => {
+export const readOptions = (
+  verb: string,
+  args: readonly string[],
+  allowed: readonly OptionName[],
+  files: number,
+): Options => {
   let parsed
   try {
     parsed = parseArgs({ args: [...args], options: known, allowPositionals: true, strict: true })
@@ -46,11 +51,15 @@ export const readOptions = (verb: string, args: readonly string[], allowed: read
   }
   const { values, positionals } = parsed
   for (const name of Object.keys(values) as OptionName[]) {
-    const isDefault = (name === 'format' && values.format === 'text') || (name === 'fail-on' && values['fail-on'] === 'error')
+    const isDefault =
+      (name === 'format' && values.format === 'text') || (name === 'fail-on' && values['fail-on'] === 'error')
     if (!isDefault && !allowed.includes(name)) throw new Stop(exitStatus.usage, `${verb} has no option --${name}.`)
   }
   if (positionals.length !== files)
-    throw new Stop(exitStatus.usage, `${verb} takes ${files === 0 ? 'no file' : files === 1 ? 'one FILE' : `${files} files`}; ${positionals.length} given.`)
+    throw new Stop(
+      exitStatus.usage,
+      `${verb} takes ${files === 0 ? 'no file' : files === 1 ? 'one FILE' : `${files} files`}; ${positionals.length} given.`,
+    )
   return {
     files: positionals,
     format: oneOf('format', values.format, ['text', 'json', 'github', 'sarif']),

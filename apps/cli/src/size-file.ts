@@ -1,4 +1,5 @@
 import { type ProjectResult, sizeSpec } from '@coldfill/sizing'
+import { readCatalogueOption } from './catalogue-file.ts'
 import { readText } from './io.ts'
 
 export interface SizedFile {
@@ -10,8 +11,9 @@ export interface SizedFile {
 }
 
 /** Reads a spec file and sizes it. */
-export const sizeFile = (file: string): SizedFile => {
+export const sizeFile = async (file: string, cataloguePath?: string): Promise<SizedFile> => {
   const text = readText(file)
-  const result = sizeSpec(text)
+  const catalogue = await readCatalogueOption(cataloguePath)
+  const result = sizeSpec(text, catalogue ? { catalogue } : {})
   return { file, text, result, read: result.readable }
 }

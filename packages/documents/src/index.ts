@@ -11,3 +11,4 @@ export {
   type ScheduleRow,
   type ScheduleTable,
 } from './schedules/schedule-table.ts'
+export { maxCatalogueBytes, readCatalogueFile } from './catalogue/read-catalogue-file.ts'

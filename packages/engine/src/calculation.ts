@@ -1,5 +1,6 @@
-import { compile, formulaTree, type FormulaFunction } from '@coldfill/formula'
+import type { FormulaFunction } from '@coldfill/formula'
 import type { Kind } from '@coldfill/units'
+import { compiled } from './compiled.ts'
 import type { Method, MethodCheck, ValidityRange } from './method.ts'
 import type { Origin, TraceEntry, TraceSection } from './trace.ts'
 
@@ -113,12 +114,12 @@ export class Calculation {
         this.input(symbol, step.kind, step.name, known)
         continue
       }
-      const value = compile(formulaTree(step.formula), this.functions)(this.numbers)
+      const value = compiled(step.formula, this.functions).evaluate(this.numbers)
       if (!Number.isFinite(value)) notFinite ??= symbol
       const { kind, name, formula, source } = step
       this.put({ entry: 'step', id: this.idFor(name), symbol, name, kind, value, formula, source, method: method.id })
     }
-    const holds = (condition: string) => compile(formulaTree(condition), this.functions)(this.numbers) === 1
+    const holds = (condition: string) => compiled(condition, this.functions).evaluate(this.numbers) === 1
     const failed = method.checks.filter((check) => !holds(check.condition))
     const warnings = (method.validity ?? []).filter((range) => !holds(range.condition))
     return { failed, warnings, notFinite: failed.length > 0 ? null : notFinite }

@@ -15,11 +15,24 @@ export interface ResultValue {
 /** `sized`; `infeasible`: no vessel can do it, the finding says why; `blocked`: an input is missing or wrong. */
 export type VesselStatus = 'sized' | 'infeasible' | 'blocked'
 
+/** The row of the office catalogue that was chosen; volumes of one vessel in m3. */
 export interface SelectedVessel {
   readonly maker: string
   readonly model: string
   readonly volume: number
   readonly acceptance?: number
+  /** gauge Pa */
+  readonly maxPressure: number
+  /** K */
+  readonly maxTemperature: number
+  /** m */
+  readonly diameter?: number
+  readonly height?: number
+  /** kg */
+  readonly weightEmpty?: number
+  readonly connection?: string
+  readonly mounting?: string
+  readonly stamped: boolean
   readonly quantity: number
 }
 

@@ -1,4 +1,4 @@
-import { Calculation, type Fluid, fluid as fluidOf, site, sources } from '@coldfill/engine'
+import { Calculation, type CatalogueRow, type Fluid, fluid as fluidOf, site, sources } from '@coldfill/engine'
 import type { Acceptance, Finding, FluidModel, SpecModel } from '@coldfill/spec'
 import { AssumptionRegister } from './assumption-register.ts'
 import { checkSystem } from './checks/check-system.ts'
@@ -79,6 +79,7 @@ export const sizeProject = (
   spec: SpecModel,
   read: readonly Finding[] = [],
   acceptances: readonly Acceptance[] = [],
+  catalogue?: readonly CatalogueRow[],
 ): ProjectResult => {
   const register = new AssumptionRegister(spec.assumptions)
   const elevation = spec.project.elevation?.value.value ?? register.peek('elevation')
@@ -96,7 +97,7 @@ export const sizeProject = (
     const sound = system.sound && usable
     const start = vessels.length
     for (const vessel of system.vessels) {
-      const sized = sizeVessel({ spec, system: { ...system, sound }, vessel, fluid, register, atmosphere })
+      const sized = sizeVessel({ spec, system: { ...system, sound }, vessel, fluid, register, atmosphere, catalogue })
       vessels.push(sized.result)
       findings.push(...sized.findings)
     }

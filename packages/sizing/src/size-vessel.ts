@@ -1,11 +1,13 @@
-import { Calculation, type Fluid, type Method, methodNames, type RunOutcome } from '@coldfill/engine'
+import { Calculation, type CatalogueRow, type Fluid, type Method, methodNames, type RunOutcome } from '@coldfill/engine'
 import type { Finding, SpecModel, SystemModel, VesselModel } from '@coldfill/spec'
 import { chooseMethod } from './choose-method.ts'
 import type { AssumptionRegister } from './assumption-register.ts'
 import { bindInputs } from './bind-inputs.ts'
 import { runSection } from './calculate-sections.ts'
 import { checkVessel } from './checks/check-vessel.ts'
-import type { ResultValue, VesselResult, VesselStatus } from './result.ts'
+import { headroomRows } from './headroom-rows.ts'
+import type { HeadroomRow, ResultValue, SelectedVessel, VesselResult, VesselStatus } from './result.ts'
+import { checkBack, selectVessel } from './select-vessel.ts'
 import { report, type VesselContext } from './vessel-context.ts'
 
 interface Outcome {
@@ -41,6 +43,8 @@ const obstacle = (context: VesselContext, outcome: RunOutcome): Outcome | null =
 }
 
 const blockedByMissing = (context: VesselContext): Outcome | null => {
+  const [reason] = context.blocked
+  if (reason !== undefined) return { status: 'blocked', reason }
   const [first] = context.missing
   if (first === undefined) return null
   const message = `${context.vessel.mark} needs ${first}.`
@@ -136,6 +140,8 @@ export interface SizingInput {
   readonly register: AssumptionRegister
   /** Pa abs */
   readonly atmosphere: number
+  /** Rows of the office catalogue; undefined where there is none. */
+  readonly catalogue?: readonly CatalogueRow[] | undefined
 }
 
 /** Sizes one vessel. An infeasible or blocked vessel is a result with its reason; findings come beside it. */
@@ -151,6 +157,7 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     reference,
     calculation: new Calculation(vessel.mark, fluid.functions),
     missing: [],
+    blocked: [],
     findings: [],
   }
   const choice = chooseMethod(context)
@@ -169,12 +176,12 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     serves: vessel.fields.serves?.value ?? system.title?.value ?? system.id,
     service: system.service?.value ?? '',
     fluid: fluid.label,
-    selected: null,
-    headroom: [],
     notes: vessel.fields.note ? [vessel.fields.note.value] : [],
   }
   let outcome: Outcome
   let results: Record<string, ResultValue> = {}
+  let selected: SelectedVessel | null = null
+  let headroom: readonly HeadroomRow[] = []
   if (!vessel.sound || !system.sound) {
     const whose = vessel.sound ? 'its system' : 'its inputs'
     outcome = { status: 'blocked', reason: `An error in ${whose} has to be mended first; see the findings.` }
@@ -186,7 +193,10 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     outcome = run(context, choice.method, atmosphere)
     if (outcome.status === 'sized') {
       results = { ...resultsOf(context, choice.method), ...shareEqually(context, choice.method, quantity) }
+      selected = selectVessel(context, input.catalogue, results, choice.construction, atmosphere)
       results = { ...results, ...checkVessel(context, choice.method, results, atmosphere) }
+      headroom = headroomRows(context, choice.method, selected)
+      if (selected) results = { ...results, ...checkBack(context, choice.method, selected) }
     }
   }
   const result: VesselResult = {
@@ -194,6 +204,8 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     status: outcome.status,
     ...(outcome.reason === undefined ? {} : { reason: outcome.reason }),
     results,
+    selected,
+    headroom,
     trace: context.calculation.trace.filter((section) => section.entries.length > 0),
     assumptions: register.usedBy(reference),
   }

@@ -6,9 +6,10 @@ import { sizeFile } from '../size-file.ts'
 
 /** `check FILE`: the findings only. */
 export const check = async (args: readonly string[]): Promise<number> => {
-  const options = readOptions('check', args, ['format', 'fail-on'], 1)
-  const { file, result, read } = sizeFile(options.files[0] ?? '')
-  if (options.format === 'json') await print(JSON.stringify({ engine: result.engine, spec: result.spec, findings: result.findings }, null, 2))
+  const options = readOptions('check', args, ['format', 'fail-on', 'catalogue'], 1)
+  const { file, result, read } = await sizeFile(options.files[0] ?? '', options.catalogue)
+  if (options.format === 'json')
+    await print(JSON.stringify({ engine: result.engine, spec: result.spec, findings: result.findings }, null, 2))
   else {
     const text = findingsAs(options.format, file, result.findings)
     if (text) await print(text)

@@ -20,7 +20,8 @@ export const explain = async (args: readonly string[]): Promise<number> => {
   const options = readOptions('explain', args, ['format'], 1)
   const code = (options.files[0] ?? '').toUpperCase()
   const help = all[code]
-  if (!help) throw new Stop(exitStatus.usage, `There is no finding ${code}. Codes: ${Object.keys(all).sort().join(', ')}`)
+  if (!help)
+    throw new Stop(exitStatus.usage, `There is no finding ${code}. Codes: ${Object.keys(all).sort().join(', ')}`)
   if (options.format === 'json') await print(JSON.stringify({ code, ...help }, null, 2))
   else
     await print(

@@ -9,12 +9,20 @@ const bases: readonly FluidBase[] = ['water', 'propylene glycol', 'ethylene glyc
 
 const parseFluid = (text: string): { base: FluidBase; strength?: { value: number; by: 'volume' | 'mass' } } => {
   const base = bases.find((name) => text.trim().toLowerCase().startsWith(name))
-  if (!base) throw new Stop(exitStatus.usage, `--fluid takes ${bases.join(', ')}, glycols with a strength as "40 % mass"; not "${text}".`)
+  if (!base)
+    throw new Stop(
+      exitStatus.usage,
+      `--fluid takes ${bases.join(', ')}, glycols with a strength as "40 % mass"; not "${text}".`,
+    )
   const rest = text.trim().slice(base.length).trim()
   if (rest === '') return { base }
   const match = /^(\d+(?:\.\d+)?)\s*%\s*(vol|volume|mass)$/i.exec(rest)
-  if (!match) throw new Stop(exitStatus.usage, `The strength "${rest}" is not understood: write "40 % vol" or "40 % mass".`)
-  return { base, strength: { value: Number(match[1]) / 100, by: match[2]?.toLowerCase() === 'mass' ? 'mass' : 'volume' } }
+  if (!match)
+    throw new Stop(exitStatus.usage, `The strength "${rest}" is not understood: write "40 % vol" or "40 % mass".`)
+  return {
+    base,
+    strength: { value: Number(match[1]) / 100, by: match[2]?.toLowerCase() === 'mass' ? 'mass' : 'volume' },
+  }
 }
 
 const refuse = async (json: boolean, message: string, hint: string): Promise<number> => {
@@ -35,20 +43,33 @@ export const fluid = async (args: readonly string[]): Promise<number> => {
   const { base, strength } = parseFluid(options.fluid)
   const temperature = parseQuantity(options.temperature, ['temperature'])
   if (!temperature.ok) throw new Stop(exitStatus.usage, `--temperature: ${temperature.problem.message}`)
-  const pressure = options.pressure === undefined ? undefined : parseQuantity(options.pressure, ['absolute pressure', 'gauge pressure'])
+  const pressure =
+    options.pressure === undefined
+      ? undefined
+      : parseQuantity(options.pressure, ['absolute pressure', 'gauge pressure'])
   if (pressure && !pressure.ok) throw new Stop(exitStatus.usage, `--pressure: ${pressure.problem.message}`)
   const choice = fluidOf(base, strength)
   if (!choice.ok) return refuse(json, choice.message, 'Check the strength of the solution.')
   const T = temperature.quantity.value
-  const P = pressure?.ok ? pressure.quantity.value + (pressure.quantity.kind === 'gauge pressure' ? 101325 : 0) : undefined
+  const P = pressure?.ok
+    ? pressure.quantity.value + (pressure.quantity.kind === 'gauge pressure' ? 101325 : 0)
+    : undefined
   const celsius = (kelvin: number) => kelvin - 273.15
   const { label, validity, freezing } = choice.fluid
   const range = `${celsius(validity.least).toFixed(1)} to ${celsius(validity.most).toFixed(1)} °C`
   if (!inValidity(validity, T))
-    return refuse(json, `${options.temperature} is outside the range of the data for ${label}, ${range}.`, 'Properties are never extrapolated.')
+    return refuse(
+      json,
+      `${options.temperature} is outside the range of the data for ${label}, ${range}.`,
+      'Properties are never extrapolated.',
+    )
   const density = choice.fluid.density(T, P)
   if (!Number.isFinite(density))
-    return refuse(json, `${label} is not a liquid at ${options.temperature} and ${options.pressure ?? 'saturation'}.`, 'Raise the pressure or lower the temperature.')
+    return refuse(
+      json,
+      `${label} is not a liquid at ${options.temperature} and ${options.pressure ?? 'saturation'}.`,
+      'Raise the pressure or lower the temperature.',
+    )
   const result = {
     density: { value: density, unit: 'kg/m3' },
     'specific-volume': { value: 1 / density, unit: 'm3/kg' },

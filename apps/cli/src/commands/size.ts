@@ -8,8 +8,8 @@ import { sizeFile } from '../size-file.ts'
 
 /** `size FILE`: sizes every vessel. */
 export const size = async (args: readonly string[]): Promise<number> => {
-  const options = readOptions('size', args, ['format', 'fail-on', 'units'], 1)
-  const { file, result, read } = sizeFile(options.files[0] ?? '')
+  const options = readOptions('size', args, ['format', 'fail-on', 'units', 'catalogue'], 1)
+  const { file, result, read } = await sizeFile(options.files[0] ?? '', options.catalogue)
   if (options.format === 'json') await print(JSON.stringify(resultJson(result), null, 2))
   else if (options.format === 'text') {
     if (read) await print(resultText(result, options.units ?? result.project.units))

@@ -12,7 +12,9 @@ const documentOptions = (result: ProjectResult, options: Options): DocumentOptio
   units: options.units ?? result.project.units,
   titleBlock: {
     office: '',
-    date: (process.env['SOURCE_DATE_EPOCH'] ? new Date(Number(process.env['SOURCE_DATE_EPOCH']) * 1000) : new Date()).toISOString().slice(0, 10),
+    date: (process.env['SOURCE_DATE_EPOCH'] ? new Date(Number(process.env['SOURCE_DATE_EPOCH']) * 1000) : new Date())
+      .toISOString()
+      .slice(0, 10),
     revision: '',
     status: 'Working copy',
   },
@@ -26,7 +28,7 @@ const document =
     if (options.out === undefined) throw new Stop(exitStatus.usage, `${verb} needs --out FILE${extension}.`)
     if (!options.out.toLowerCase().endsWith(extension))
       throw new Stop(exitStatus.usage, `${verb} writes ${extension} files; "${options.out}" does not end so.`)
-    const { file, result, read } = sizeFile(options.files[0] ?? '')
+    const { file, result, read } = await sizeFile(options.files[0] ?? '', options.catalogue)
     if (result.findings.length > 0) process.stderr.write(`${findingsText(file, result.findings)}\n`)
     // Where the text could not be read at all there is nothing to write.
     if (read) writeBytes(options.out, await write(result, documentOptions(result, options)))

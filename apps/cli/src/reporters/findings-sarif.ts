@@ -1,7 +1,10 @@
 import { findingCodes, type Finding } from '@coldfill/spec'
 import { engineeringCodes, engineVersion } from '@coldfill/sizing'
 
-const titles: Readonly<Record<string, { readonly title: string; readonly why: string }>> = { ...findingCodes, ...engineeringCodes }
+const titles: Readonly<Record<string, { readonly title: string; readonly why: string }>> = {
+  ...findingCodes,
+  ...engineeringCodes,
+}
 
 /** Findings as a SARIF 2.1.0 log (OASIS), columns in UTF-16 units. */
 export const findingsSarif = (file: string, findings: readonly Finding[]): string => {

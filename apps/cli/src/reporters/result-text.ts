@@ -18,22 +18,51 @@ const row = (vessel: VesselResult, units: UnitSystem): readonly string[] => {
     const result = vessel.results[name]
     return result ? formatQuantity(result, units) : '—'
   }
-  const required = vessel.status === 'sized' ? (vessel.results['required-volume'] ? show('required-volume') : show('storage-volume')) : vessel.status
-  const chosen = vessel.selected ? `${vessel.selected.quantity > 1 ? `${vessel.selected.quantity} × ` : ''}${vessel.selected.maker} ${vessel.selected.model}` : '—'
-  return [vessel.mark, vessel.system, vessel.kind, vessel.method, required, show('precharge'), show('maximum-pressure'), chosen]
+  const required =
+    vessel.status === 'sized'
+      ? vessel.results['required-volume']
+        ? show('required-volume')
+        : show('storage-volume')
+      : vessel.status
+  const chosen = vessel.selected
+    ? `${vessel.selected.quantity > 1 ? `${vessel.selected.quantity} × ` : ''}${vessel.selected.maker} ${vessel.selected.model}`
+    : '—'
+  return [
+    vessel.mark,
+    vessel.system,
+    vessel.kind,
+    vessel.method,
+    required,
+    show('precharge'),
+    show('maximum-pressure'),
+    chosen,
+  ]
 }
 
 /** The sized vessels and the assumptions behind them, for a terminal. */
 export const resultText = (result: ProjectResult, units: UnitSystem): string => {
   const { project, vessels, assumptions } = result
   const parts: string[] = [`${project.number} ${project.title}`.trim()]
-  if (vessels.length > 0) parts.push(textTable(columns, vessels.map((vessel) => row(vessel, units))))
+  if (vessels.length > 0)
+    parts.push(
+      textTable(
+        columns,
+        vessels.map((vessel) => row(vessel, units)),
+      ),
+    )
   else parts.push('No vessel to size.')
   const reasons = vessels.filter((vessel) => vessel.reason !== undefined)
-  if (reasons.length > 0) parts.push(reasons.map((vessel) => `${vessel.mark} is ${vessel.status}: ${vessel.reason}`).join('\n'))
+  if (reasons.length > 0)
+    parts.push(reasons.map((vessel) => `${vessel.mark} is ${vessel.status}: ${vessel.reason}`).join('\n'))
   if (assumptions.length > 0)
     parts.push(
-      ['Assumptions', ...assumptions.map((a) => `${a.number.padEnd(4)}${a.name}: ${a.value}${a.reason === undefined ? '' : ` (${a.reason})`}; used by ${a.usedBy.join(', ')}`)].join('\n'),
+      [
+        'Assumptions',
+        ...assumptions.map(
+          (a) =>
+            `${a.number.padEnd(4)}${a.name}: ${a.value}${a.reason === undefined ? '' : ` (${a.reason})`}; used by ${a.usedBy.join(', ')}`,
+        ),
+      ].join('\n'),
     )
   parts.push(caution)
   return parts.join('\n\n')

@@ -17,5 +17,9 @@ export const textTable = (columns: readonly TextColumn[], rows: readonly (readon
       })
       .join('  ')
       .trimEnd()
-  return [line(columns.map((column) => column.heading)), line(widths.map((width) => '-'.repeat(width))), ...rows.map(line)].join('\n')
+  return [
+    line(columns.map((column) => column.heading)),
+    line(widths.map((width) => '-'.repeat(width))),
+    ...rows.map(line),
+  ].join('\n')
 }
