@@ -71,6 +71,9 @@ export type SectionId =
   | 'british pressures'
   | 'domestic pressures'
   | 'fixtures'
+  | 'people'
+  | 'apartments'
+  | 'units served'
 
 /** An engineering method as data. Steps are evaluated in order; a key is the symbol. */
 export interface Method {
@@ -90,6 +93,8 @@ export interface Method {
       readonly construction?: readonly string[]
       /** Keys of the vessel that must be written. */
       readonly written?: readonly string[]
+      /** Keys of the vessel that must be written with one of these words. */
+      readonly chosen?: Readonly<Record<string, readonly string[]>>
       /** Materials of the contents must be given. */
       readonly materials?: true
       /** The fluid must be a glycol solution. */

@@ -14,6 +14,7 @@ import {
 import type { ContentLine, Located } from '@coldfill/spec'
 import type { Quantity } from '@coldfill/units'
 import { adoptsPlumbingCap } from './adopted-codes.ts'
+import { runApartments, runFixtures, runPeople, runUnitsServed } from './demand-sections.ts'
 import { fromSpec, numberFromSpec, type VesselContext } from './vessel-context.ts'
 
 /** The gauge reading of a pressure that may have been written as an absolute one. `atmosphere` in Pa abs. */
@@ -200,6 +201,9 @@ const titles: Readonly<Record<SectionId, string>> = {
   'british pressures': 'Pressures',
   'domestic pressures': 'Pressures',
   fixtures: 'Demand',
+  people: 'Demand',
+  apartments: 'Demand',
+  'units served': 'Demand',
 }
 
 /** Computes one section into the calculation; null where an input is missing, which is then said in `context.missing`. */
@@ -221,7 +225,13 @@ export const runSection = (context: VesselContext, section: SectionId, atmospher
     case 'domestic pressures':
       return runDomesticPressures(context, atmosphere)
     case 'fixtures':
-      throw new Error('fixtures are a section of storage tanks')
+      return runFixtures(context)
+    case 'people':
+      return runPeople(context)
+    case 'apartments':
+      return runApartments(context)
+    case 'units served':
+      return runUnitsServed(context)
   }
 }
 

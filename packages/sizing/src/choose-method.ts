@@ -24,6 +24,8 @@ const fits = (context: VesselContext, method: Method, construction: string | und
   const fields: Readonly<Record<string, unknown>> = context.vessel.fields
   if (when.construction && !when.construction.includes(construction ?? '')) return false
   if (when.written && !when.written.every((key) => fields[key] !== undefined)) return false
+  if (when.chosen && !Object.entries(when.chosen).every(([key, words]) => words.includes(written(fields, key) ?? '')))
+    return false
   if (when.materials && !namesMaterials(context)) return false
   if (when.glycol && context.fluid.base === 'water') return false
   return true

@@ -16,6 +16,8 @@ export interface VesselContext {
   readonly reference: string
   /** Words for inputs that are missing; the vessel is blocked when there is one. */
   readonly missing: string[]
+  /** Reasons, each with a finding of its own already, why the vessel cannot be sized. */
+  readonly blocked: string[]
   readonly findings: Finding[]
 }
 

@@ -1,4 +1,13 @@
-import { assumptions, emitterClasses, methodNames, pipeFamilies } from '@coldfill/engine'
+import {
+  assumptions,
+  demandBuildings,
+  emitterClasses,
+  fixtureAliases,
+  fixtureDemandRows,
+  methodNames,
+  pipeFamilies,
+  pipeFamilyAliases,
+} from '@coldfill/engine'
 import { type VesselKind, vesselKindNames, vesselKinds, type Vocabulary } from '@coldfill/spec'
 
 const methodLines = (kind: VesselKind): Record<string, string> => {
@@ -10,14 +19,18 @@ const methodLines = (kind: VesselKind): Record<string, string> => {
 
 const sizedKinds = vesselKindNames.filter((kind) => methodNames(kind).length > 0)
 
+const sizesOf = (family: string) => {
+  const found = pipeFamilies[family]
+  if (!found) throw new Error(`no pipe family ${family}`)
+  return found.rows.map(({ size, spellings }) => ({ size, spellings }))
+}
+
 /** The names that the spec language takes from the engine. */
 export const vocabulary: Vocabulary = {
-  pipes: Object.fromEntries(
-    Object.entries(pipeFamilies).map(([family, { rows }]) => [
-      family,
-      rows.map(({ size, spellings }) => ({ size, spellings })),
-    ]),
-  ),
+  pipes: Object.fromEntries([
+    ...Object.keys(pipeFamilies).map((family) => [family, sizesOf(family)]),
+    ...Object.entries(pipeFamilyAliases).map(([alias, family]) => [alias, sizesOf(family)]),
+  ]),
   emitters: Object.fromEntries(
     Object.entries(emitterClasses).map(([name, emitter]) => [name, `${emitter.value}. ${emitter.because}`]),
   ),
@@ -29,6 +42,6 @@ export const vocabulary: Vocabulary = {
   ),
   methods: Object.fromEntries(sizedKinds.map((kind) => [kind, methodLines(kind)])),
   kinds: sizedKinds,
-  buildings: [],
-  fixtures: [],
+  buildings: demandBuildings,
+  fixtures: [...Object.keys(fixtureAliases), ...Object.keys(fixtureDemandRows)],
 }

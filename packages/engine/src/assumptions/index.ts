@@ -14,6 +14,18 @@ import {
   vesselConnection,
 } from './pressure.ts'
 import { construction, expansionTankMethod, thermalExpansionTankMethod } from './method.ts'
+import {
+  apartmentStorageFactor,
+  demandLevel,
+  dwellingDraw,
+  dwellingPeople,
+  fixtureDemandAge,
+  fixtureDemandRange,
+  peakTime,
+  storageColdWater,
+  storageTemperature,
+  usableFraction,
+} from './storage.ts'
 import { elevation } from './site.ts'
 
 const all: readonly Assumption[] = [
@@ -37,6 +49,16 @@ const all: readonly Assumption[] = [
   bufferLoadMinimum,
   bufferCredit,
   bufferVolumePerTon,
+  storageColdWater,
+  storageTemperature,
+  usableFraction,
+  demandLevel,
+  peakTime,
+  fixtureDemandRange,
+  fixtureDemandAge,
+  apartmentStorageFactor,
+  dwellingPeople,
+  dwellingDraw,
   ...Object.values(emitterClasses),
 ]
 

@@ -14,6 +14,7 @@ import { din4807 } from './expansion-tank/din-4807.ts'
 import { checkBackEuropean, en12828Glycol, en12828Water } from './expansion-tank/en-12828.ts'
 import { checkBackUne, une100155Glycol, une100155Water } from './expansion-tank/une-100155.ts'
 import { pressureTankMethods } from './pressure-tank/pressure-tank.ts'
+import { storageTankMethods } from './storage-tank/index.ts'
 import { din4807Part5Vessel } from './thermal-expansion-tank/din-4807-5.ts'
 import { ashrae, ashraeMaterials, aspe, aspeMaterials } from './thermal-expansion-tank/gas-law.ts'
 
@@ -43,6 +44,7 @@ const all: readonly Method[] = [
   bufferEn3035,
   bufferDefrost,
   ...pressureTankMethods,
+  ...storageTankMethods,
   checkBackDiaphragm,
   checkBackOtherCharge,
   checkBackPlainSteel,

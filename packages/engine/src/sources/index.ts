@@ -40,6 +40,9 @@ import { iapwsSr186 } from './iapws-sr1-86.ts'
 import { ashraeFlashArticle } from './ashrae-flash-article.ts'
 import { steamColumnist } from './steam-columnist.ts'
 import { en806 } from './en-806.ts'
+import { aspeHotWater } from './aspe-hot-water.ts'
+import { en128313 } from './en-12831-3.ts'
+import { din4708Article } from './din-4708-article.ts'
 import { verificationEvaluation } from './verification-evaluation.ts'
 
 const all: readonly Source[] = [
@@ -83,6 +86,9 @@ const all: readonly Source[] = [
   ashraeFlashArticle,
   steamColumnist,
   en806,
+  aspeHotWater,
+  en128313,
+  din4708Article,
   verificationEvaluation,
   ...propertySources,
 ]
