@@ -11,6 +11,8 @@ export type Binding =
   /** A key of the spec; where it is not written, an assumption stands in, or the vessel is blocked. */
   | { readonly at: BindingPlace; readonly key: string; readonly assumption?: string }
   | { readonly at: 'assumption'; readonly id: string }
+  /** A property of the fluid of the system. */
+  | { readonly at: 'fluid'; readonly property: 'volume fraction' }
 
 /** A symbol that a method is given: `V_s`, a volume, "system volume". Values are in the SI unit of the kind. */
 export interface MethodInput {

@@ -37,6 +37,10 @@ const place = {
 const bindOne = (context: VesselContext, input: MethodInput, atmosphere: number): GivenValue | null => {
   const { from, name } = input
   if (from.at === 'section') throw new Error(`no section gave ${name}`)
+  if (from.at === 'fluid') {
+    const path = context.system.fluid?.path ?? context.system.path
+    return { value: context.fluid.volumeFraction, origin: { from: 'spec', path } }
+  }
   if (from.at === 'assumption') return context.register.number(from.id, context.reference)
   const value = written(context, from.at, from.key)
   if (value) {

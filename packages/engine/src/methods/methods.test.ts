@@ -45,8 +45,8 @@ describe.each(all.map((method) => [method.id, method] as const))('%s', (_id, met
     const cited = [...Object.values(method.steps), ...method.examples].map(({ source }) => source.source)
     for (const id of cited) expect(Object.keys(sources)).toContain(id)
     for (const input of Object.values(method.inputs)) {
-      const id =
-        input.from.at === 'assumption' ? input.from.id : input.from.at === 'section' ? undefined : input.from.assumption
+      const { from } = input
+      const id = from.at === 'assumption' ? from.id : 'assumption' in from ? from.assumption : undefined
       if (id !== undefined) expect(Object.keys(assumptions)).toContain(id)
     }
     if (method.checkBack !== undefined) expect(Object.keys(methods)).toContain(method.checkBack)
