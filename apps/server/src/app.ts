@@ -1,5 +1,6 @@
 import express, { type Express, json, Router } from 'express'
 import type { Deps } from './deps.ts'
+import { notFound } from './errors.ts'
 import { errorHandler, unknownAddress } from './middleware/error-handler.ts'
 import { requestId } from './middleware/request-id.ts'
 import { requireInsider, requireProject } from './middleware/require-project.ts'
@@ -60,6 +61,11 @@ export const createApp = (deps: Deps): Express => {
   app.disable('x-powered-by')
   app.set('trust proxy', deps.trustProxy)
   app.use(requestId, ...securityHeaders())
+  app.use((req, _res, next) => {
+    // No address has a NUL in it, and the database cannot look for one.
+    if (/%00/.test(req.url)) throw notFound()
+    next()
+  })
   app.use('/api', api(deps))
   app.use('/schema', schemaRouter())
   app.use(webApp(deps.webFolder))

@@ -5,11 +5,24 @@ import { AppError, badBody } from './errors.ts'
 const pointer = (path: readonly PropertyKey[]): string =>
   path.map((part) => `/${String(part).replaceAll('~', '~0').replaceAll('/', '~1')}`).join('')
 
+/** Places of the body whose text holds a NUL, which the database cannot keep. */
+const nulsIn = (value: unknown, path: readonly PropertyKey[] = []): PropertyKey[][] => {
+  if (typeof value === 'string') return value.includes('\0') ? [[...path]] : []
+  if (typeof value !== 'object' || value === null) return []
+  return Object.entries(value).flatMap(([key, part]) => nulsIn(part, [...path, key]))
+}
+
 /** The body as the schema has it. @throws {AppError} 400 with every issue. */
 export const parseBody = <T extends z.ZodType>(schema: T, req: Request): z.output<T> => {
   const body: unknown = req.body ?? {}
   const read = schema.safeParse(body)
-  if (read.success) return read.data
+  if (read.success) {
+    const nuls = nulsIn(read.data)
+    if (nuls.length === 0) return read.data
+    throw badBody(
+      nuls.map((path) => ({ pointer: pointer(path), message: 'Take out the NUL character: it cannot be stored.' })),
+    )
+  }
   throw badBody(
     read.error.issues.map((issue) => ({ pointer: pointer(issue.path), code: issue.code, message: issue.message })),
   )

@@ -33,15 +33,14 @@ const copiedSpec = async (deps: Deps, principal: Principal, number: string): Pro
 }
 
 /**
- * Opens a project in the person's office, with them as its consultant.
- * @throws {AppError} 403, 404 for a project to copy that is not theirs, 409 number_taken
+ * Opens a project in the person's office, with them as its consultant. The caller has asked whether they may.
+ * @throws {AppError} 400 for an unknown example, 403 and 404 for a project to copy that is not theirs, 409 number_taken
  */
 export const createProject = async (
   deps: Deps,
   principal: Principal,
   request: Pick<CreateProjectRequest, 'number' | 'title' | 'from'> & { readonly example?: string | undefined },
 ): Promise<string> => {
-  if (!principal.mayCreateProjects) throw notAllowed('The administrator of the office says who opens projects.')
   const text =
     request.from === 'blank'
       ? blankSpec(request.number, request.title)

@@ -3,18 +3,20 @@ import type { Role } from '@coldfill/contract'
 import type { Deps } from '../deps.ts'
 import { members, users } from '../db/schema/index.ts'
 import { withTx } from '../db/with-tx.ts'
-import { notAllowed, notFound } from '../errors.ts'
+import { notFound } from '../errors.ts'
 import type { ProjectAccess } from '../policies/project-access.ts'
 import { recordEvent } from './record-event.ts'
 
-/** Gives a person of the office roles in a project; none ends the membership. @throws {AppError} 403, 404 */
+/**
+ * Gives a person of the office roles in a project; none ends the membership. The caller has asked whether
+ * that is theirs to give. @throws {AppError} 404 for a person of another office
+ */
 export const setMember = async (
   deps: Deps,
   access: ProjectAccess,
   userId: string,
   member: { readonly roles: readonly Role[]; readonly requiredReviewer: boolean },
 ): Promise<void> => {
-  if (!access.administrator) throw notAllowed('Only the administrator of the office gives roles.')
   const now = deps.clock()
   const { principal, project } = access
   await withTx(deps.db, async (tx) => {

@@ -6,10 +6,11 @@ import {
   SetMemberRequest,
 } from '@coldfill/contract'
 import { Router } from 'express'
+import { z } from 'zod'
 import { createProject } from '../../commands/create-project.ts'
 import { setMember } from '../../commands/set-member.ts'
 import type { Deps } from '../../deps.ts'
-import { AppError } from '../../errors.ts'
+import { AppError, notAllowed, notFound } from '../../errors.ts'
 import { accessIn, requireInsider, requireProject } from '../../middleware/require-project.ts'
 import { principalIn } from '../../middleware/require-user.ts'
 import { parseBody } from '../../parse-request.ts'
@@ -46,6 +47,7 @@ export const projectsRouter = (deps: Deps): Router => {
     })
     .post('/', async (req, res) => {
       const principal = principalIn(res)
+      if (!principal.mayCreateProjects) throw notAllowed('The administrator of the office says who opens projects.')
       const number = await createProject(deps, principal, parseBody(CreateProjectRequest, req))
       res.status(201).json(await present(deps, await projectAccess(deps.db, principal, number)))
     })
@@ -58,6 +60,8 @@ export const projectsRouter = (deps: Deps): Router => {
     requireInsider,
     async (req, res) => {
       const access = accessIn(res)
+      if (!access.administrator) throw notAllowed('Only the administrator of the office gives roles.')
+      if (!z.uuid().safeParse(req.params.user).success) throw notFound()
       await setMember(deps, access, req.params.user, parseBody(SetMemberRequest, req))
       res.json({ members: presentMembers(await projectFacts(deps.db, access.project)) } satisfies MemberList)
     },

@@ -14,6 +14,7 @@ import { notFound } from '../../errors.ts'
 import { accessIn } from '../../middleware/require-project.ts'
 import { parseBody, queryText } from '../../parse-request.ts'
 import type { ProjectAccess } from '../../policies/project-access.ts'
+import { projectPermissions, requirePermission } from '../../policies/project-permissions.ts'
 import { findRevision } from '../../review/find-revision.ts'
 import { type Frozen, frozenContent } from '../../review/frozen.ts'
 import { projectFacts } from '../../review/project-facts.ts'
@@ -69,6 +70,7 @@ export const redlinesRouter = (deps: Deps): Router => {
     .post('/', async (req, res) => {
       const access = accessIn(res)
       const facts = await projectFacts(deps.db, access.project)
+      requirePermission(projectPermissions(access, facts).redline)
       const number = await writeRedline(deps, access, facts, parseBody(CreateRedlineRequest, req))
       res.status(201).json(await presentOne(deps, access, number))
     })
@@ -88,14 +90,15 @@ export const redlinesRouter = (deps: Deps): Router => {
     await continueThread(deps, accessIn(res), numberIn(req), { did: 'wrote', text })
     res.status(201).json(await presentOne(deps, accessIn(res), numberIn(req)))
   })
-  for (const [act, did] of [
-    ['close', 'closed'],
-    ['reopen', 'reopened'],
-  ] as const)
-    router.post<string, Numbered>(`/:number/${act}`, async (req, res) => {
-      const { comment } = parseBody(CloseRedlineRequest, req)
-      await continueThread(deps, accessIn(res), numberIn(req), { did, text: comment })
-      res.json(await presentOne(deps, accessIn(res), numberIn(req)))
-    })
+  router.post<'/:number/close', Numbered>('/:number/close', async (req, res) => {
+    const { comment } = parseBody(CloseRedlineRequest, req)
+    await continueThread(deps, accessIn(res), numberIn(req), { did: 'closed', text: comment })
+    res.json(await presentOne(deps, accessIn(res), numberIn(req)))
+  })
+  router.post<'/:number/reopen', Numbered>('/:number/reopen', async (req, res) => {
+    const { comment } = parseBody(CloseRedlineRequest, req)
+    await continueThread(deps, accessIn(res), numberIn(req), { did: 'reopened', text: comment })
+    res.json(await presentOne(deps, accessIn(res), numberIn(req)))
+  })
   return router
 }
