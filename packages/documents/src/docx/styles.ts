@@ -82,6 +82,7 @@ const DEFINITIONS: readonly StyleDefinition[] = [
   { id: 'Footer', name: 'footer', size: 16, color: PENCIL, ...tight, top: fine },
   { id: 'Strong', name: 'Strong', type: 'character', bold: true },
   { id: 'Hyperlink', name: 'Hyperlink', type: 'character' },
+  { id: 'IndexLink', name: 'Index Link', type: 'character', custom: true },
   { id: SOURCE_STYLE, name: 'Source', type: 'character', custom: true, size: 15, color: PENCIL },
   { id: SYMBOL_STYLE, name: 'Symbol', type: 'character', custom: true, italic: true },
   { id: SUBSCRIPT_STYLE, name: 'Symbol Subscript', type: 'character', custom: true, subscript: true },
@@ -146,6 +147,8 @@ const DEFINITIONS: readonly StyleDefinition[] = [
     before: 0,
     after: 60,
   },
+  // The sentences belong together: none is left alone on the next page.
+  { id: STYLE.caution, name: 'Caution', custom: true, keepNext: true, keepLines: true },
   { id: STYLE.note, name: 'Keyed Note', custom: true, size: 16, left: 360, hanging: 360, before: 0, after: 30 },
 ]
 

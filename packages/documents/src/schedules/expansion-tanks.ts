@@ -20,6 +20,7 @@ export const expansionTanks = defineSchedule({
     optional(resultNumber('code-minimum-volume', 'Code minimum', 9, 'volume')),
     optional(resultNumber('water-reserve', 'Water reserve', 9, 'volume')),
     optional(shared.selectedVolume),
+    optional(shared.ratedPressure),
     resultNumber('fill-pressure', 'Fill pressure', 9, 'gauge pressure'),
     resultNumber('precharge', 'Precharge', 10, 'gauge pressure'),
     resultNumber('maximum-pressure', 'Maximum pressure', 10, 'gauge pressure'),

@@ -16,3 +16,6 @@ export const selectedVolume = quantity('selected-volume', 'Selected volume', 9, 
 export const reliefSet = inputNumber('relief-set', 'Relief set', 8, 'gauge pressure', ['p_rv'], ({ system }) =>
   system?.relief ? system.relief.set : null,
 )
+export const ratedPressure = quantity('rated-pressure', 'Rated pressure', 9, 'gauge pressure', ({ vessel }) =>
+  vessel.selected === null ? null : vessel.selected.maxPressure,
+)

@@ -17,6 +17,7 @@ export const thermalExpansionTanks = defineSchedule({
     resultNumber('required-volume', 'Required volume', 9, 'volume'),
     optional(resultNumber('required-volume-each', 'Required, each', 9, 'volume')),
     optional(shared.selectedVolume),
+    optional(shared.ratedPressure),
     resultNumber('fill-pressure', 'Fill pressure', 9, 'gauge pressure'),
     resultNumber('precharge', 'Precharge', 10, 'gauge pressure'),
     resultNumber('maximum-pressure', 'Maximum pressure', 10, 'gauge pressure'),

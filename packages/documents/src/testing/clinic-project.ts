@@ -224,7 +224,15 @@ const thermalTank = (functions: Readonly<Record<string, FormulaFunction>>): Vess
       precharge: b.result('p_0', 'Precharge'),
     },
     trace: b.trace,
-    selected: { maker: 'Invented Vessel Works', model: 'T 50', volume: si('50 gal', 'volume'), quantity: 1 },
+    selected: {
+      maker: 'Invented Vessel Works',
+      model: 'T 50',
+      volume: si('50 gal', 'volume'),
+      maxPressure: si('150 psi', 'gauge pressure'),
+      maxTemperature: si('200 °F', 'temperature'),
+      stamped: true,
+      quantity: 1,
+    },
     headroom: [],
     assumptions: ['relief-margin.hydronic', 'thermal-expansion-cap'],
     notes: [

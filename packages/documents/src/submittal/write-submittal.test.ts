@@ -1,0 +1,167 @@
+import { water } from '@coldfill/engine'
+import { strFromU8, unzipSync } from 'fflate'
+import { beforeAll, describe, expect, it } from 'vitest'
+import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
+import { clinicProject, documentOptions } from '../testing/index.ts'
+import { cautions } from '../words/cautions.ts'
+import { writeSubmittal } from './write-submittal.ts'
+
+const project = clinicProject(water.functions)
+
+const partsOf = (bytes: Uint8Array): Map<string, string> =>
+  new Map(Object.entries(unzipSync(bytes)).map(([name, part]) => [name, strFromU8(part)]))
+const all = (xml: string, element: string): string[] =>
+  xml.match(new RegExp(`<w:${element}[ >].*?</w:${element}>`, 'gs')) ?? []
+const textOf = (xml: string): string =>
+  [...xml.matchAll(/<w:t[^>]*>([^<]*)<\/w:t>/g)]
+    .map(([, text]) => text)
+    .join('')
+    .replaceAll('&apos;', "'")
+    .replaceAll('&quot;', '"')
+    .replaceAll('&amp;', '&')
+const paragraphs = (xml: string, style: string): string[] =>
+  all(xml, 'p')
+    .filter((paragraph) => paragraph.includes(`<w:pStyle w:val="${style}"/>`))
+    .map(textOf)
+
+describe('the submittal', () => {
+  let bytes: Uint8Array
+  let parts: Map<string, string>
+  let document: string
+  beforeAll(async () => {
+    bytes = await writeSubmittal(project, documentOptions('US'))
+    parts = partsOf(bytes)
+    document = parts.get('word/document.xml') ?? ''
+  })
+
+  it('has its sections in order, as built-in headings', () => {
+    expect(paragraphs(document, 'Heading1')).toEqual([
+      'Summary',
+      'Schedules',
+      'Calculations',
+      'Assumptions',
+      'Findings',
+      'Sources',
+      'Cautions',
+    ])
+    expect(paragraphs(document, 'Heading2')).toContain('ET-1  Expansion tank')
+    expect(paragraphs(document, 'Title')).toEqual(['Fernhollow Community Clinic'])
+  })
+
+  it('lists its headings in a contents field that is complete, clean and asks for no update', () => {
+    const listed = [...paragraphs(document, 'TOC1'), ...paragraphs(document, 'TOC2')].sort()
+    expect(listed).toEqual([...paragraphs(document, 'Heading1'), ...paragraphs(document, 'Heading2')].sort())
+    for (const xml of parts.values()) {
+      expect(xml).not.toContain('updateFields')
+      expect(xml).not.toMatch(/w:dirty="(true|1)"/)
+    }
+    const anchors = [...document.matchAll(/w:anchor="([^"]+)"/g)].map(([, anchor]) => anchor)
+    expect(anchors.length).toBe(listed.length)
+    for (const anchor of anchors) expect(document).toContain(`w:name="${anchor}"`)
+  })
+
+  it('repeats the head row of every table, keeps rows whole and merges nothing', () => {
+    const tables = all(document, 'tbl')
+    expect(tables.length).toBeGreaterThan(10)
+    for (const table of tables) {
+      const [head, ...rows] = all(table, 'tr')
+      expect(head).toContain('<w:tblHeader/>')
+      for (const row of rows) expect(row).not.toContain('<w:tblHeader/>')
+      for (const row of [head, ...rows]) expect(row).toContain('<w:cantSplit/>')
+      expect(table).not.toMatch(/w:gridSpan|w:vMerge|w:hMerge/)
+      expect(table).toMatch(/<w:tblCaption w:val="[^"]+"\/><w:tblDescription w:val="[^"]+"\/>/)
+    }
+  })
+
+  it('prints each schedule as the table of the schedule says, in a landscape section', () => {
+    const tables = all(document, 'tbl')
+    for (const kind of scheduleKinds(project)) {
+      const schedule = scheduleTable(project, kind, 'US')
+      const printed = tables.find((table) => table.includes(`<w:tblCaption w:val="${schedule.title} schedule"/>`))
+      const rows = all(printed ?? '', 'tr').map((row) => all(row, 'tc').map(textOf))
+      expect(rows.slice(1)).toEqual(
+        schedule.rows.map((row) => schedule.columns.map((column) => row.cells[column.key]?.text)),
+      )
+    }
+    expect(document.match(/<w:pgSz [^>]*w:orient="landscape"/g)).toHaveLength(1)
+  })
+
+  it('writes every step of a calculation twice as a native equation: in symbols and with its numbers', () => {
+    const steps = project.vessels.flatMap((vessel) =>
+      vessel.trace.flatMap((section) => section.entries.filter((entry) => entry.entry === 'step')),
+    )
+    expect(document.match(/<m:oMathPara>/g)).toHaveLength(2 * steps.length)
+    expect(document.match(/<m:oMath>/g)).toHaveLength(document.match(/<\/m:oMath>/g)?.length ?? -1)
+    // Words in an equation are normal text, or LibreOffice reads some of them as commands.
+    for (const [, run] of document.matchAll(/<m:r>(.*?)<\/m:r>/gs)) {
+      if (/<m:t[^>]*>[^<]*[a-z]{2,}/.test(run ?? '')) expect(run).toContain('<m:nor m:val="1"/>')
+    }
+  })
+
+  it('carries its looks in styles: no run and no paragraph is formatted by hand', () => {
+    expect(document).not.toMatch(/<w:rFonts|<w:sz |<w:color |<w:b\/>|<w:i\/>|<w:jc /)
+    const styles = parts.get('word/styles.xml') ?? ''
+    for (const [, style] of document.matchAll(/<w:(?:pStyle|rStyle|tblStyle) w:val="([^"]+)"/g)) {
+      expect(styles).toContain(`w:styleId="${style}"`)
+    }
+    expect(styles).toContain('<w:lang w:val="en-US"')
+  })
+
+  it('says project, revision, status, hash and page on each page, and that it is no construction issue', () => {
+    const headers = [...parts].filter(([name]) => /word\/header\d+\.xml/.test(name)).map(([, xml]) => xml)
+    const footers = [...parts].filter(([name]) => /word\/footer\d+\.xml/.test(name)).map(([, xml]) => xml)
+    expect(headers.length).toBeGreaterThan(1)
+    for (const xml of headers) expect(textOf(xml)).toContain('ISSUED FOR REVIEW – NOT FOR CONSTRUCTION')
+    expect(headers.filter((xml) => textOf(xml).includes('Rev A'))).toHaveLength(headers.length - 1)
+    for (const xml of footers) {
+      expect(xml).toMatch(/PAGE.*NUMPAGES/s)
+      expect(textOf(xml)).toContain('a3f5c0de9b7d41e2')
+    }
+  })
+
+  it('drops the warning, and only then, where it is issued for construction', async () => {
+    const issued = partsOf(await writeSubmittal(project, documentOptions('US', 'Issued for construction')))
+    for (const xml of issued.values()) expect(xml).not.toContain('NOT FOR CONSTRUCTION')
+    const working = partsOf(await writeSubmittal(project, documentOptions('US', 'Working copy')))
+    expect(working.get('word/header1.xml')).toContain('WORKING COPY – NOT FOR CONSTRUCTION')
+  })
+
+  it('prints the assumptions with who changed them and why, accepted warnings with their reasons, and every caution', () => {
+    const text = textOf(document)
+    expect(text).toContain("Set in the spec: Owner's standard, section 5.2")
+    expect(text).toContain('The regulator stands upstream of every fixture.')
+    for (const sentence of cautions) expect(text).toContain(sentence)
+  })
+
+  it('says why a vessel has no size', () => {
+    expect(paragraphs(document, 'CalculationAnswer').join('\n')).toMatch(/No vessel can do it\. .*\n.*\nNot sized\. /)
+  })
+
+  it('uses A4 for SI and Letter for US unless told otherwise', async () => {
+    expect(document).toContain('w:w="12240" w:h="15840"')
+    const metric = partsOf(await writeSubmittal(project, documentOptions('SI'))).get('word/document.xml')
+    expect(metric).toContain('w:w="11906" w:h="16838"')
+    const letter = await writeSubmittal(project, { ...documentOptions('SI'), paper: 'Letter' })
+    expect(partsOf(letter).get('word/document.xml')).toContain('w:w="12240" w:h="15840"')
+  })
+
+  it('gives the same bytes for the same result, whenever it is written', async () => {
+    expect(Buffer.from(await writeSubmittal(project, documentOptions('US'))).equals(Buffer.from(bytes))).toBe(true)
+  })
+
+  it('takes any text of a user as text', async () => {
+    const odd = '<w:p/> & "x" \u0007\ud800 ]]>\r\nnext'
+    const vessels = project.vessels.map((vessel) => ({ ...vessel, serves: odd, notes: [odd] }))
+    const written = partsOf(
+      await writeSubmittal({ ...project, vessels, project: { ...project.project, title: odd } }, documentOptions('US')),
+    )
+    expect(written.get('word/document.xml')).toContain('&lt;w:p/&gt; &amp; ')
+    expect(written.get('word/document.xml')).not.toContain('\u0007')
+  })
+
+  it('writes a project without vessels', async () => {
+    const empty = { ...project, vessels: [], systems: [], assumptions: [], findings: [], sources: {} }
+    const written = partsOf(await writeSubmittal(empty, documentOptions('US'))).get('word/document.xml') ?? ''
+    expect(paragraphs(written, 'Heading1')).toContain('Summary')
+  })
+})
