@@ -185,8 +185,16 @@ const assumptionsShape = (vocabulary: Vocabulary): MapShape => ({
   ),
 })
 
-/** The whole language: from it come completion, hover, schema and reference. */
-export const specShape = (vocabulary: Vocabulary): BlockShape =>
+const shapes = new WeakMap<Vocabulary, BlockShape>()
+
+/** The whole language: from it come completion, hover, schema and reference. The same object for the same vocabulary. */
+export const specShape = (vocabulary: Vocabulary): BlockShape => {
+  const shape = shapes.get(vocabulary) ?? languageShape(vocabulary)
+  shapes.set(vocabulary, shape)
+  return shape
+}
+
+const languageShape = (vocabulary: Vocabulary): BlockShape =>
   block(
     'A spec says what the building has. It never says how big a vessel is.',
     'coldfill: 1',

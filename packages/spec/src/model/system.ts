@@ -170,3 +170,5 @@ export const serviceKeys: Readonly<Record<Service, ServiceKeys>> = {
   },
   steam: { temperatures: [], pressure: ['relief-valve', 'maximum'] },
 }
+
+export const isService = (name: string): name is Service => Object.hasOwn(serviceField.choices, name)

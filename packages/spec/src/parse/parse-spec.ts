@@ -1,10 +1,10 @@
-import { Composer, type Document, Lexer, Parser, type YAMLError } from 'yaml'
+import { Composer, type CST, type Document, Lexer, Parser, type YAMLError } from 'yaml'
 import { isKeyOfLanguage } from '../model/keys.ts'
 import { createReport, type Report } from '../report.ts'
 import { buildTree } from './build-tree.ts'
 import { maxSpecBytes } from './limits.ts'
 import { indexLines, type LineIndex } from './line-index.ts'
-import { type Comment, createScan } from './scan.ts'
+import { type Comment, createScan, type Scan } from './scan.ts'
 import type { SourceMap } from './source-tree.ts'
 import { reportYamlProblem } from './yaml-problem.ts'
 
@@ -46,19 +46,20 @@ const distinct = (errors: readonly YAMLError[], lineIndex: LineIndex): YAMLError
   return kept.slice(0, MOST_PROBLEMS)
 }
 
-const compose = (text: string, report: Report): { document: Document.Parsed | null; comments: readonly Comment[] } => {
-  const scan = createScan(report, text)
+/** Null where the scan refuses to go on. */
+const tokensOf = (text: string, scan: Scan): CST.Token[] | null => {
   const parser = new Parser()
-  const tokens = []
+  const tokens: CST.Token[] = []
   for (const lexeme of new Lexer().lex(text)) {
-    if (!scan.next(lexeme)) return { document: null, comments: scan.comments }
+    if (!scan.next(lexeme)) return null
     for (const token of parser.next(lexeme)) tokens.push(token)
   }
   for (const token of parser.end()) tokens.push(token)
-  if (!scan.finish()) return { document: null, comments: scan.comments }
-  const [document] = [...new Composer(OPTIONS).compose(tokens, true, text.length)]
-  return { document: document ?? null, comments: scan.comments }
+  return tokens
 }
+
+const compose = (tokens: readonly CST.Token[], text: string): Document.Parsed | undefined =>
+  [...new Composer(OPTIONS).compose(tokens, true, text.length)][0]
 
 const refusal = (text: string, report: Report): boolean => {
   if (text.length > maxSpecBytes) {
@@ -94,7 +95,10 @@ export const parseSpec = (text: string): ParsedSpec => {
   const report = createReport(lineIndex)
   const unread = (comments: readonly Comment[] = []): ParsedSpec => ({ report, lineIndex, tree: null, comments })
   if (refusal(text, report)) return unread()
-  const { document, comments } = compose(text, report)
+  const scan = createScan(report, text)
+  const { comments } = scan
+  const tokens = tokensOf(text, scan)
+  const document = tokens && scan.finish() ? compose(tokens, text) : null
   if (!document) return unread(comments)
   const errors = distinct(document.errors, lineIndex)
   for (const error of errors) reportYamlProblem(report, text, error)
@@ -111,4 +115,14 @@ export const parseSpec = (text: string): ParsedSpec => {
       },
     )
   return unread(comments)
+}
+
+/** The tree of a text that is being typed: what can be made out of it, mistakes and all. For help at the cursor only. */
+export const parseUnfinished = (text: string): SourceMap | null => {
+  if (text.length > maxSpecBytes || CONTROL.test(text)) return null
+  const report = createReport(indexLines(text))
+  const tokens = tokensOf(text, createScan(report, text))
+  const document = tokens && compose(tokens, text)
+  const tree = document?.contents ? buildTree(report, text, document.contents, isKeyOfLanguage) : null
+  return tree?.node === 'map' ? tree : null
 }
