@@ -23,14 +23,14 @@ const type = (workbook: ExcelJS.Workbook, key: string, value: number): void => {
   const cells = workbook.worksheets.flatMap((sheet) => {
     const found: ExcelJS.Cell[] = []
     sheet.eachRow((row) => {
-      const source = String(row.getCell(6).value ?? '')
+      const source = row.getCell(6).text
       if (source.replace(/ \(.*\)$/, '') === `spec: ${key}` && typeof row.getCell(3).value === 'number') {
         found.push(row.getCell(3))
       }
     })
     return found
   })
-  expect(cells, `cells of ${key}`).toHaveLength(1)
+  expect({ key, cells: cells.length }).toEqual({ key, cells: 1 })
   const [cell] = cells
   if (cell) cell.value = value
 }
@@ -100,7 +100,7 @@ describe.skipIf(!hasOffice)(`the workbook recalculated by LibreOffice${leftOut}`
       const text = spec(building)
       let changedText = text
       for (const [from, to] of edits) {
-        expect(changedText.split(from), from).toHaveLength(2)
+        expect(changedText.split(from)).toHaveLength(2)
         changedText = changedText.replace(from, to)
       }
       const before = sizeSpec(text)

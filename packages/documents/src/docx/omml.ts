@@ -44,6 +44,7 @@ export const ommlOf = (box: Box): XmlComponent[] => {
     case 'fence':
       return [fenced(box.open, box.close, ommlOf(box.inside))]
     case 'cases':
+    default:
       return [
         fenced('{', '', [
           element(

@@ -56,6 +56,7 @@ export const originWords = (origin: Origin, result: ProjectResult): string => {
     case 'table':
       return citationWords(origin.citation, result, 'from memory')
     case 'catalogue':
+    default:
       return 'catalogue row of the chosen vessel'
   }
 }

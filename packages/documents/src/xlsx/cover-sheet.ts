@@ -58,7 +58,7 @@ export const writeCover = (
   }
 
   const title = sheet.getCell(at, 1)
-  putCell(title, { text: `${project.title}` })
+  putCell(title, { text: project.title })
   title.font = font(20, { bold: true })
   sheet.getRow(at).height = 30
   at += 1

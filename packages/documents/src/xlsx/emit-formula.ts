@@ -70,7 +70,8 @@ export const emitFormula = (tree: Tree, find: CellFinder): string => {
       }
       case 'compare':
         return `${operand(node.left, 1)}${COMPARE[node.operator]}${operand(node.right, 1)}`
-      case 'call': {
+      case 'call':
+      default: {
         const args = node.args.map(emit)
         return builtinCall(node.name, args) ?? find.call(node, args)
       }

@@ -22,11 +22,11 @@ describe('the gate in front of every cell', () => {
   })
 
   it.each([Number.NaN, Infinity, -Infinity])('refuses the number %d', (number) => {
-    expect(() => put({ number, format: '0' })).toThrow()
+    expect(() => put({ number, format: '0' })).toThrow(String(number))
   })
 
   it('refuses a formula with an equals sign in front, which would be written twice', () => {
-    expect(() => put({ formula: '=A1', result: 1 })).toThrow()
+    expect(() => put({ formula: '=A1', result: 1 })).toThrow('=A1')
   })
 
   it('shows an error until it is recalculated where the engine has no finite value', () => {
