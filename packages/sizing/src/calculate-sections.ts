@@ -96,8 +96,11 @@ const runClosedPressures = (context: VesselContext, rule: PressureRule, atmosphe
   if (!relief && !maximum)
     missing.push('`pressure.relief-valve` or `pressure.maximum`, to know the highest pressure allowed')
   const fillTemperature = temperatures.fill ?? temperatures.low
-  if (!fillTemperature) missing.push('`temperatures.low` or `temperatures.fill`, to know how cold the water gets')
-  if (missing.length > 0 || !fillTemperature) return null
+  // Given outright, the pressures need no density.
+  const needsDensity = !fill || (!maximum && (pressure['relief-height']?.value.value ?? 0) !== 0)
+  if (!fillTemperature && needsDensity)
+    missing.push('`temperatures.low` or `temperatures.fill`, to know how cold the water gets')
+  if (missing.length > 0) return null
 
   let pumpHead: { as: 'length' | 'pressure difference'; given: GivenValue } | undefined
   if (!fill) {
@@ -121,7 +124,7 @@ const runClosedPressures = (context: VesselContext, rule: PressureRule, atmosphe
     ...(fill
       ? {}
       : { topMargin: margin ? gaugeFromSpec(margin, atmosphere) : register.number(topMarginId, reference) }),
-    fillTemperature: fromSpec(fillTemperature),
+    ...(fillTemperature ? { fillTemperature: fromSpec(fillTemperature) } : {}),
     ...(relief && !maximum
       ? {
           reliefSet: relief,

@@ -54,6 +54,15 @@ const blockedByMissing = (context: VesselContext): Outcome | null => {
 
 const outsideFluid = (context: VesselContext): Outcome | null => {
   const { fluid, system, vessel } = context
+  if (system.service?.value === 'steam' && fluid.base !== 'water') {
+    const message = `a steam system holds water, not ${fluid.label}.`
+    report(context, 'CF-E003', {
+      message: `${vessel.mark}: ${message}`,
+      hint: 'Take `fluid` out.',
+      at: system.fluid ?? undefined,
+    })
+    return { status: 'blocked', reason: `${vessel.mark}: ${message}` }
+  }
   for (const located of Object.values(system.temperatures)) {
     if (!located) continue
     const kelvin = located.value.value

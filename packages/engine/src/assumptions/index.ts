@@ -26,6 +26,24 @@ import {
   storageTemperature,
   usableFraction,
 } from './storage.ts'
+import { breakTankRefill, breakTankUsable } from './break-tank.ts'
+import { glycolDrum, glycolMakeUp } from './glycol-feeder.ts'
+import { bodyVelocity, enteringVelocity } from './separators.ts'
+import { drainBackReserve, solarExpansionFraction, solarReserve } from './solar.ts'
+import {
+  blowdownCoolingWater,
+  blowdownDrainTemperature,
+  blowdownLevelDrop,
+  boilerFeedHolding,
+  boilerFeedPumpFactor,
+  boilerFeedUsable,
+  condensateDuty,
+  condensateHolding,
+  condensatePumpFactor,
+  condensateTemperature,
+  condensateUsable,
+  flashVelocity,
+} from './steam.ts'
 import { elevation } from './site.ts'
 
 const all: readonly Assumption[] = [
@@ -59,6 +77,27 @@ const all: readonly Assumption[] = [
   apartmentStorageFactor,
   dwellingPeople,
   dwellingDraw,
+  solarExpansionFraction,
+  solarReserve,
+  drainBackReserve,
+  glycolMakeUp,
+  glycolDrum,
+  enteringVelocity,
+  bodyVelocity,
+  flashVelocity,
+  blowdownLevelDrop,
+  blowdownDrainTemperature,
+  blowdownCoolingWater,
+  condensateTemperature,
+  condensateDuty,
+  condensatePumpFactor,
+  condensateHolding,
+  condensateUsable,
+  boilerFeedHolding,
+  boilerFeedUsable,
+  boilerFeedPumpFactor,
+  breakTankRefill,
+  breakTankUsable,
   ...Object.values(emitterClasses),
 ]
 

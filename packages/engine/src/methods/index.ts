@@ -15,6 +15,19 @@ import { checkBackEuropean, en12828Glycol, en12828Water } from './expansion-tank
 import { checkBackUne, une100155Glycol, une100155Water } from './expansion-tank/une-100155.ts'
 import { pressureTankMethods } from './pressure-tank/pressure-tank.ts'
 import { storageTankMethods } from './storage-tank/index.ts'
+import { breakTank } from './break-tank/break-tank.ts'
+import { drainBack } from './drain-back-tank/drain-back.ts'
+import { glycolFeeder, glycolFeederWithPump } from './glycol-feeder/glycol-feeder.ts'
+import { airAndDirtSeparator } from './separators/air-and-dirt-separator.ts'
+import { hydraulicSeparator } from './separators/hydraulic-separator.ts'
+import { solar, solarOtherCharge } from './solar-expansion-tank/idae.ts'
+import { blowdownByLevel, blowdownByVolume } from './steam-vessels/blowdown-separator.ts'
+import {
+  boilerFeedReceiver,
+  condensateReceiver,
+  condensateReceiverStated,
+} from './steam-vessels/condensate-receiver.ts'
+import { flashTank } from './steam-vessels/flash-tank.ts'
 import { din4807Part5Vessel } from './thermal-expansion-tank/din-4807-5.ts'
 import { ashrae, ashraeMaterials, aspe, aspeMaterials } from './thermal-expansion-tank/gas-law.ts'
 
@@ -42,6 +55,20 @@ const all: readonly Method[] = [
   bufferRunTime,
   bufferVolumePerTon,
   bufferEn3035,
+  solarOtherCharge,
+  solar,
+  glycolFeederWithPump,
+  glycolFeeder,
+  airAndDirtSeparator,
+  hydraulicSeparator,
+  drainBack,
+  flashTank,
+  blowdownByVolume,
+  blowdownByLevel,
+  boilerFeedReceiver,
+  condensateReceiverStated,
+  condensateReceiver,
+  breakTank,
   bufferDefrost,
   ...pressureTankMethods,
   ...storageTankMethods,

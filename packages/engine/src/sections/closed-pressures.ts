@@ -13,7 +13,8 @@ export interface ClosedPressureFacts {
   readonly maximum?: GivenValue
   readonly staticHeight?: GivenValue
   readonly topMargin?: GivenValue
-  readonly fillTemperature: GivenValue
+  /** Needed where a height of liquid counts. */
+  readonly fillTemperature?: GivenValue
   readonly reliefSet?: GivenValue
   /** Absent where valve and vessel stand at one height. */
   readonly reliefHeight?: GivenValue
@@ -45,6 +46,7 @@ export const closedPressures = (
   }
   const density = () => {
     if (steps['rho_f']) return
+    if (!facts.fillTemperature) throw new Error('a height of liquid without a fill temperature')
     need('t_f', 'temperature', 'fill temperature', facts.fillTemperature)
     steps['rho_f'] = step('density', 'density at the fill temperature', 'rho(t_f)', static_)
   }
