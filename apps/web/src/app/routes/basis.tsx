@@ -7,6 +7,7 @@ import { Loaded } from '#components/loaded.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { SectionHeading } from '#components/ui/heading.tsx'
 import { Flag } from '#components/ui/review-marks.tsx'
+import { Prose } from '#components/ui/prose.tsx'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
 import { paths, withQuery } from '#config/paths.ts'
 import { AssumptionRow } from '#features/basis/components/assumption-row.tsx'
@@ -144,7 +145,7 @@ export function Component() {
                           <Link to={paths.help(finding.code)} className="font-mono">
                             {finding.code}
                           </Link>{' '}
-                          {finding.message}
+                          <Prose text={finding.message} />
                         </p>
                         <p className="text-read">
                           <span className="text-pencil">Accepted because</span> {finding.accepted}

@@ -40,8 +40,8 @@ export const drawStep = (step: TraceStep, entries: readonly TraceEntry[], units:
     const line = shownLine({ tree, values, result: inDisplay(step) })
     const left = layoutSymbol(step.symbol)
     return {
-      symbols: toMathML(equationBox(left, layout(tree, { functions: fluidFunctions })), { display: true }),
-      numbers: toMathML(layout(tree, { numbers: line.numbers, functions: fluidFunctions }), { display: true }),
+      symbols: toMathML(equationBox(left, layout(line.tree, { functions: fluidFunctions })), { display: true }),
+      numbers: toMathML(layout(line.tree, { numbers: line.numbers, functions: fluidFunctions }), { display: true }),
       result: `${line.result} ${unitLabel(step.kind, units)}`.trimEnd(),
     }
   } catch {

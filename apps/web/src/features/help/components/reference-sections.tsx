@@ -1,5 +1,6 @@
 import type { Reference } from '@coldfill/contract'
 import { SectionHeading } from '#components/ui/heading.tsx'
+import { Prose } from '#components/ui/prose.tsx'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
 import { capital } from '#lib/format.ts'
 import { citationWords } from '#lib/sized-project.ts'
@@ -28,9 +29,15 @@ const Codes = ({ reference, here }: { readonly reference: Reference; readonly he
                 </dt>
                 <dd>
                   <p className="font-semibold">{code.title}</p>
-                  <p className="text-read">{code.what}</p>
-                  <p className="text-read text-pencil">{code.why}</p>
-                  <p className="text-read">{code.fix}</p>
+                  <p className="text-read">
+                    <Prose text={code.what} />
+                  </p>
+                  <p className="text-read text-pencil">
+                    <Prose text={code.why} />
+                  </p>
+                  <p className="text-read">
+                    <Prose text={code.fix} />
+                  </p>
                 </dd>
               </div>
             ))}

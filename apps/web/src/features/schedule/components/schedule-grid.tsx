@@ -1,5 +1,5 @@
 import { columnVisibilityFeature, createColumnHelper, tableFeatures, useTable } from '@tanstack/react-table'
-import { useMemo, useRef, type KeyboardEvent, type ReactNode } from 'react'
+import { useEffect, useMemo, useRef, type KeyboardEvent, type ReactNode } from 'react'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
 import { moveInGrid } from '../grid-move.ts'
 import type { Row, Schedule } from '../schedule-table.ts'
@@ -70,6 +70,14 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
     shown.findIndex((column) => column.id === chosen?.column),
   )
   const hasChosen = rows.some((row) => row.id === chosen?.row)
+
+  // An address may name a cell that stands outside the window.
+  const first = useRef(true)
+  useEffect(() => {
+    if (!hasChosen || !first.current) return
+    first.current = false
+    body.current?.rows[rowAt]?.cells[columnAt]?.scrollIntoView({ block: 'nearest', inline: 'center' })
+  }, [hasChosen, rowAt, columnAt])
 
   const onKeyDown = (event: KeyboardEvent) => {
     const row = rows[rowAt]?.original

@@ -2,6 +2,7 @@ import { useState, type FormEvent } from 'react'
 import { Link } from 'react-router-dom'
 import { Button } from '#components/ui/button.tsx'
 import { TextField } from '#components/ui/field.tsx'
+import { Prose } from '#components/ui/prose.tsx'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
 import { paths } from '#config/paths.ts'
 import type { Finding } from '#lib/sized-project.ts'
@@ -62,12 +63,17 @@ export const FindingRow = ({ finding, why, readOnly, chosen, onJump, onFix, onAc
       <div className="min-w-0 flex-1">
         <button type="button" onClick={onJump} className="text-left hover:underline">
           <span className="figures mr-2 text-pencil">Line {finding.range.start.line + 1}</span>
-          {finding.message}
+          <Prose text={finding.message} />
         </button>
         {finding.accepted === undefined ? (
           <p className="text-cell">
-            {finding.hint}
-            {why ? <span className="text-pencil"> {why}</span> : null}
+            <Prose text={finding.hint} />
+            {why ? (
+              <span className="text-pencil">
+                {' '}
+                <Prose text={why} />
+              </span>
+            ) : null}
           </p>
         ) : (
           <p className="text-cell text-pencil">Accepted because {finding.accepted}</p>
