@@ -72,6 +72,7 @@ export type SectionId =
   | 'european pressures'
   | 'british pressures'
   | 'domestic pressures'
+  | 'incoming pressure'
   | 'fixtures'
   | 'people'
   | 'apartments'

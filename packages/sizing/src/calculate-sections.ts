@@ -88,7 +88,9 @@ const marginOf = (context: VesselContext, assumption: string) => {
 const runClosedPressures = (context: VesselContext, rule: PressureRule, atmosphere: number): RunOutcome | null => {
   const { system, register, reference, missing } = context
   const { pressure, temperatures } = system
-  const fill = pressure.fill && gaugeFromSpec(pressure.fill, atmosphere)
+  const own = rule !== 'handbook' && 'precharge' in context.vessel.fields ? context.vessel.fields.precharge : undefined
+  const stated = own ?? pressure.fill
+  const fill = stated && gaugeFromSpec(stated, atmosphere)
   const height = pressure['static-height']
   if (!fill && !height) missing.push('`pressure.static-height` or `pressure.fill`, to know the fill pressure')
   const relief = pressure['relief-valve'] && gaugeFromSpec(pressure['relief-valve'], atmosphere)
@@ -140,7 +142,11 @@ const runClosedPressures = (context: VesselContext, rule: PressureRule, atmosphe
   return context.calculation.run(section.method, section.given)
 }
 
-const runDomesticPressures = (context: VesselContext, atmosphere: number): RunOutcome | null => {
+const runDomesticPressures = (
+  context: VesselContext,
+  atmosphere: number,
+  limits: 'with limits' | 'incoming only',
+): RunOutcome | null => {
   const { pressure } = context.system
   const gauge = (key: 'supply' | 'regulator' | 'maximum' | 'relief-valve') => {
     const written = pressure[key]
@@ -148,14 +154,16 @@ const runDomesticPressures = (context: VesselContext, atmosphere: number): RunOu
   }
   const supply = gauge('supply')
   const regulator = gauge('regulator')
-  const maximum = gauge('maximum')
-  const reliefSet = gauge('relief-valve')
-  const cap = adoptsPlumbingCap(context.spec)
-    ? context.register.number('thermal-expansion-cap', context.reference)
-    : undefined
+  const limited = limits === 'with limits'
+  const maximum = limited ? gauge('maximum') : undefined
+  const reliefSet = limited ? gauge('relief-valve') : undefined
+  const cap =
+    limited && adoptsPlumbingCap(context.spec)
+      ? context.register.number('thermal-expansion-cap', context.reference)
+      : undefined
   if (!supply && !regulator)
     context.missing.push('`pressure.supply` or `pressure.regulator`, to know the pressure at the vessel')
-  if (!maximum && !reliefSet && !cap)
+  if (limited && !maximum && !reliefSet && !cap)
     context.missing.push('`pressure.relief-valve` or `pressure.maximum`, to know the highest pressure allowed')
   if (context.missing.length > 0) return null
   const section = domesticPressures({
@@ -203,6 +211,7 @@ const titles: Readonly<Record<SectionId, string>> = {
   'european pressures': 'Pressures',
   'british pressures': 'Pressures',
   'domestic pressures': 'Pressures',
+  'incoming pressure': 'Pressures',
   fixtures: 'Demand',
   people: 'Demand',
   apartments: 'Demand',
@@ -226,7 +235,9 @@ export const runSection = (context: VesselContext, section: SectionId, atmospher
     case 'british pressures':
       return runClosedPressures(context, 'british', atmosphere)
     case 'domestic pressures':
-      return runDomesticPressures(context, atmosphere)
+      return runDomesticPressures(context, atmosphere, 'with limits')
+    case 'incoming pressure':
+      return runDomesticPressures(context, atmosphere, 'incoming only')
     case 'fixtures':
       return runFixtures(context)
     case 'people':

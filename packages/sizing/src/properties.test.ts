@@ -52,7 +52,11 @@ const job: fc.Arbitrary<Job> = fc.record({
   elevation: fc.double({ min: 0, max: 3000, noNaN: true }),
   method: fc.constantFrom(...methods),
   construction: fc.constantFrom('bladder', 'diaphragm'),
-  fluid: fc.constantFrom('water', '{ base: propylene glycol, strength: 30 % vol }', '{ base: ethylene glycol, strength: 25 % mass }'),
+  fluid: fc.constantFrom(
+    'water',
+    '{ base: propylene glycol, strength: 30 % vol }',
+    '{ base: ethylene glycol, strength: 25 % mass }',
+  ),
 })
 
 const required = (text: string): number => {
@@ -113,7 +117,8 @@ describe('any job', () => {
         const text = spec({ ...made, fill: made.fill * 2 })
         const result = sizeSpec(text)
         for (const vessel of result.vessels)
-          if (vessel.status === 'sized') for (const number of numbersOf({ ...result, vessels: [vessel] })) expect(Number.isFinite(number)).toBe(true)
+          if (vessel.status === 'sized')
+            for (const number of numbersOf({ ...result, vessels: [vessel] })) expect(Number.isFinite(number)).toBe(true)
         expect(JSON.stringify(sizeSpec(text))).toBe(JSON.stringify(result))
       }),
       runs,
@@ -125,7 +130,10 @@ describe('any job', () => {
       fc.property(job, (made) => {
         const [vessel] = sizeSpec(spec(made)).vessels
         const glycol = made.fluid.startsWith('{')
-          ? fluidOf(made.fluid.includes('ethylene') ? 'ethylene glycol' : 'propylene glycol', made.fluid.includes('30') ? { value: 0.3, by: 'volume' } : { value: 0.25, by: 'mass' })
+          ? fluidOf(
+              made.fluid.includes('ethylene') ? 'ethylene glycol' : 'propylene glycol',
+              made.fluid.includes('30') ? { value: 0.3, by: 'volume' } : { value: 0.25, by: 'mass' },
+            )
           : fluidOf('water')
         if (!vessel || !glycol.ok) throw new Error('not sized')
         const entries = vessel.trace.flatMap((section) => section.entries)
@@ -147,11 +155,23 @@ describe('any job', () => {
   })
 
   it('never throws for a spec with random words put in', () => {
-    const base = spec({ volume: 1000, low: 10, high: 80, fill: 1, relief: 3, elevation: 0, method: 'ashrae', construction: 'bladder', fluid: 'water' })
+    const base = spec({
+      volume: 1000,
+      low: 10,
+      high: 80,
+      fill: 1,
+      relief: 3,
+      elevation: 0,
+      method: 'ashrae',
+      construction: 'bladder',
+      fluid: 'water',
+    })
     const lines = base.split('\n')
     fc.assert(
       fc.property(fc.nat(lines.length - 1), fc.string({ maxLength: 12 }), fc.nat(60), (line, word, at) => {
-        const changed = lines.map((text, n) => (n === line ? `${text.slice(0, at)}${word}${text.slice(at)}` : text)).join('\n')
+        const changed = lines
+          .map((text, n) => (n === line ? `${text.slice(0, at)}${word}${text.slice(at)}` : text))
+          .join('\n')
         expect(() => sizeSpec(changed)).not.toThrow()
       }),
       { numRuns: 600 },

@@ -84,14 +84,23 @@ describe('pressures of a closed system', () => {
   })
   it('adds the pump head at the pump discharge', () => {
     const vessel = only(
-      sizeSpec(heating(system('{ static-height: 42 ft, relief-valve: 60 psi, pump-head: 20 psi, vessel-connection: pump discharge }'))),
+      sizeSpec(
+        heating(
+          system(
+            '{ static-height: 42 ft, relief-valve: 60 psi, pump-head: 20 psi, vessel-connection: pump discharge }',
+          ),
+        ),
+      ),
     )
     within(psig(vessel, 'fill-pressure'), 18.19 + 24, 0.0005)
   })
   it('allows more at a vessel that stands below its relief valve, and less at one above it', () => {
     // By hand: 10 ft are 4.331 psi.
     const at = (height: string) =>
-      psig(only(sizeSpec(heating(system(`{ static-height: 42 ft, relief-valve: 50 psi, relief-height: ${height} }`)))), 'maximum-pressure')
+      psig(
+        only(sizeSpec(heating(system(`{ static-height: 42 ft, relief-valve: 50 psi, relief-height: ${height} }`)))),
+        'maximum-pressure',
+      )
     within(at('10 ft'), 45 + 4.331, 0.0005)
     within(at('-10 ft'), 45 - 4.331, 0.0005)
   })
@@ -161,7 +170,8 @@ describe('European methods, evaluated apart from this program for 1,000 L', () =
   it('differs by method by up to 40 %, so the method is part of the record', () => {
     // EN 12828 96.4 L and UNE 100155 69.2 L for 80 °C, 1.3 bar and a 3 bar valve.
     const job = system.replace('high: 70', 'high: 80').replace('static-height: 10.2 m', 'fill: 1.3 bar')
-    const litres = (method: string) => valueIn(only(sizeSpec(heating(job, `method: ${method}`))), 'required-volume', 'volume', 'L')
+    const litres = (method: string) =>
+      valueIn(only(sizeSpec(heating(job, `method: ${method}`))), 'required-volume', 'volume', 'L')
     within(litres('en 12828'), 96.425, 0.001)
     within(litres('une 100155'), 69.243, 0.001)
   })
@@ -186,10 +196,16 @@ describe('what is not sound', () => {
     expect(codes(result)).toContain('CF-E003')
   })
   it('accepts a warning in place with its reason, and reports an acceptance that matches nothing', () => {
-    const accepted = heating(handbook, 'construction: bladder\n        # coldfill: accept CF-E040 because the installer sets it\n        precharge: 8 psi')
+    const accepted = heating(
+      handbook,
+      'construction: bladder\n        # coldfill: accept CF-E040 because the installer sets it\n        precharge: 8 psi',
+    )
     const finding = sizeSpec(accepted).findings.find(({ code }) => code === 'CF-E040')
     expect(finding?.accepted).toBe('the installer sets it')
-    const stale = heating(handbook, 'construction: bladder\n        # coldfill: accept CF-E040 because the installer sets it')
+    const stale = heating(
+      handbook,
+      'construction: bladder\n        # coldfill: accept CF-E040 because the installer sets it',
+    )
     expect(codes(sizeSpec(stale))).toContain('CF-E090')
   })
 })
@@ -204,9 +220,17 @@ describe('assumptions', () => {
     ).replace('systems:', 'assumptions:\n  top-margin: { value: 5 psi, reason: Owner standard }\nsystems:')
     const result = sizeSpec(text)
     const margin = result.assumptions.find(({ id }) => id === 'top-margin')
-    expect(margin).toMatchObject({ value: '5 psi', defaultValue: '4 psi', overridden: true, reason: 'Owner standard', usedBy: ['HWS/ET-1'] })
+    expect(margin).toMatchObject({
+      value: '5 psi',
+      defaultValue: '4 psi',
+      overridden: true,
+      reason: 'Owner standard',
+      usedBy: ['HWS/ET-1'],
+    })
     within(psig(only(result), 'fill-pressure'), 18.19 + 5, 0.0005)
-    expect(result.assumptions.map(({ number }) => number)).toEqual(result.assumptions.map((_, index) => `A${index + 1}`))
+    expect(result.assumptions.map(({ number }) => number)).toEqual(
+      result.assumptions.map((_, index) => `A${index + 1}`),
+    )
   })
 })
 
@@ -214,7 +238,10 @@ describe('the JSON of the command', () => {
   it('gives litres and gauge kilopascals with full precision', () => {
     const json = resultJson(sizeSpec(heating(handbook)))
     const [vessel] = json.vessels
-    expect(vessel?.results['fill-pressure']).toEqual({ value: toSi(10, unitOf('gauge pressure', 'psig')) / 1000, unit: 'kPa' })
+    expect(vessel?.results['fill-pressure']).toEqual({
+      value: toSi(10, unitOf('gauge pressure', 'psig')) / 1000,
+      unit: 'kPa',
+    })
     expect(vessel?.results['system-volume']?.unit).toBe('L')
     expect(Object.keys(json)).toEqual(['engine', 'spec', 'vessels', 'findings', 'assumptions'])
   })

@@ -203,7 +203,7 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     if (outcome.status === 'sized') {
       results = { ...resultsOf(context, choice.method), ...shareEqually(context, choice.method, quantity) }
       selected = selectVessel(context, input.catalogue, results, choice.construction, atmosphere)
-      results = { ...results, ...checkVessel(context, choice.method, results, atmosphere) }
+      results = { ...results, ...checkVessel(context, choice.method, results, choice.construction, atmosphere) }
       headroom = headroomRows(context, choice.method, selected)
       if (selected) results = { ...results, ...checkBack(context, choice.method, selected) }
     }

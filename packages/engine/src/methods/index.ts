@@ -29,7 +29,7 @@ import {
 } from './steam-vessels/condensate-receiver.ts'
 import { flashTank } from './steam-vessels/flash-tank.ts'
 import { din4807Part5Vessel } from './thermal-expansion-tank/din-4807-5.ts'
-import { ashrae, ashraeMaterials, aspe, aspeMaterials } from './thermal-expansion-tank/gas-law.ts'
+import { gasLawMethods } from './thermal-expansion-tank/gas-law.ts'
 
 /** Every method, the more particular before the more general of one name: the first that fits is used. */
 const all: readonly Method[] = [
@@ -47,14 +47,14 @@ const all: readonly Method[] = [
   bs7074Bladder,
   codeMinimumDiaphragm,
   codeMinimumPlainSteel,
-  aspeMaterials,
-  aspe,
-  ashraeMaterials,
-  ashrae,
+  ...gasLawMethods,
   din4807Part5Vessel,
   bufferRunTime,
   bufferVolumePerTon,
   bufferEn3035,
+  bufferDefrost,
+  ...pressureTankMethods,
+  ...storageTankMethods,
   solarOtherCharge,
   solar,
   glycolFeederWithPump,
@@ -69,9 +69,6 @@ const all: readonly Method[] = [
   condensateReceiverStated,
   condensateReceiver,
   breakTank,
-  bufferDefrost,
-  ...pressureTankMethods,
-  ...storageTankMethods,
   checkBackDiaphragm,
   checkBackOtherCharge,
   checkBackPlainSteel,

@@ -1,5 +1,6 @@
 import type { Finding, SpecModel, SystemModel } from '@coldfill/spec'
 import { gaugeFromSpec } from '../calculate-sections.ts'
+import { glycolMakeUp } from './hydronic.ts'
 import { engineeringCodes, type EngineeringCode } from '../engineering-codes.ts'
 
 const PSI = 6894.757293168361
@@ -74,6 +75,20 @@ export const checkSystem = (_spec: SpecModel, system: SystemModel, atmosphere: n
         'Provide tempering as the adopted code requires.',
       )
     }
+  }
+  if (domestic) {
+    const relief = pressure['relief-valve']
+    if (relief && service === 'domestic hot water' && gaugeFromSpec(relief, atmosphere).value > 150.001 * PSI) {
+      report(
+        'CF-E056',
+        relief,
+        `The relief valve is set to ${relief.value.authored ?? 'more than 150 psi'}, above 150 psi.`,
+        'Set it to 150 psi or the rating of the tank, whichever is lower.',
+      )
+    }
+  }
+  if (system.fluid && system.fluid.base !== 'water') {
+    report('CF-E061', system.fluid, glycolMakeUp, 'Schedule a feeder, or say how the loop is made up.')
   }
   const tanks = vessels.filter((vessel) => vessel.kind === 'expansion tank')
   const second = tanks[1]

@@ -21,6 +21,7 @@ export const checkCodeMinimum = (
   context: VesselContext,
   method: Method,
   results: Readonly<Record<string, ResultValue>>,
+  construction: string | undefined,
 ): Record<string, ResultValue> => {
   const { calculation, vessel, system, spec } = context
   const required = results['required-volume']
@@ -40,7 +41,7 @@ export const checkCodeMinimum = (
   if (!t) return {}
   if (!average) context.register.words('average-temperature', context.reference)
   calculation.input('t_k', 'temperature', 'average operating temperature', fromSpec(t))
-  const plain = vessel.fields && 'construction' in vessel.fields && vessel.fields.construction?.value === 'plain steel'
+  const plain = construction === 'plain steel'
   const pressures = {
     ...(calculation.has('P_a')
       ? {}

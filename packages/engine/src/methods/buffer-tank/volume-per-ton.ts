@@ -13,7 +13,13 @@ export const bufferVolumePerTon = defineMethod({
   inputs: {
     V_s: given('volume', 'system volume'),
     Q_c: keyed('power', 'cooling capacity', 'vessel', 'cooling-capacity'),
-    c_t: keyed('volume per power', 'water of the loop for each ton', 'vessel', 'volume-per-ton', 'buffer.volume-per-ton'),
+    c_t: keyed(
+      'volume per power',
+      'water of the loop for each ton',
+      'vessel',
+      'volume-per-ton',
+      'buffer.volume-per-ton',
+    ),
   },
   steps: {
     V_q: step('volume', 'water that the loop should hold', 'c_t * Q_c', rule),

@@ -99,7 +99,10 @@ export const une100155Glycol = defineMethod({
   id: 'expansion-tank.une-100155.glycol',
   title: 'Closed expansion vessel, UNE 100155, glycol solution',
   vessel: { kind: 'expansion tank', method: 'une 100155', when: { ...when, glycol: true } },
-  inputs: { ...inputs, G: { kind: 'ratio', name: 'glycol by volume', from: { at: 'fluid', property: 'volume fraction' } } },
+  inputs: {
+    ...inputs,
+    G: { kind: 'ratio', name: 'glycol by volume', from: { at: 'fluid', property: 'volume fraction' } },
+  },
   steps: {
     a_g: step('ratio', 'glycol coefficient a', '-0.0134 * ((100 * G) ^ 2 - 143.8 * (100 * G) + 1918.2)', glycolFactor),
     b_g: step('ratio', 'glycol coefficient b', '0.00035 * ((100 * G) ^ 2 - 94.57 * (100 * G) + 500)', glycolFactor),

@@ -1,5 +1,14 @@
 import { cite } from '../../citation.ts'
-import { defineMethod, given, keyed, step, type Method, type MethodInput, type MethodStep, type WorkedExample } from '../../method.ts'
+import {
+  defineMethod,
+  given,
+  keyed,
+  step,
+  type Method,
+  type MethodInput,
+  type MethodStep,
+  type WorkedExample,
+} from '../../method.ts'
 import { boyle } from '../../sources/boyle.ts'
 import { commonPractice } from '../../sources/common-practice.ts'
 import { groundwaterColumn } from '../../sources/groundwater-column.ts'
@@ -138,7 +147,16 @@ const build = (way: Way, written: boolean): Method =>
     },
     steps: {
       ...way.steps,
-      ...(written ? {} : { p_0: step('gauge pressure', 'precharge', 'p_on - dp_0', cite(commonPractice, 'precharge 2 psi below cut-in')) }),
+      ...(written
+        ? {}
+        : {
+            p_0: step(
+              'gauge pressure',
+              'precharge',
+              'p_on - dp_0',
+              cite(commonPractice, 'precharge 2 psi below cut-in'),
+            ),
+          }),
       P_0: step('absolute pressure', 'absolute precharge', 'absolute(p_0, P_a)', gasLaw),
       P_on: step('absolute pressure', 'absolute cut-in pressure', 'absolute(p_on, P_a)', gasLaw),
       P_off: step('absolute pressure', 'absolute cut-out pressure', 'absolute(p_off, P_a)', gasLaw),

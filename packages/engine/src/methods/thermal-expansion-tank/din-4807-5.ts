@@ -10,7 +10,7 @@ export const din4807Part5Vessel = defineMethod({
   revision: 1,
   title: 'Vessel with membrane for drinking water, DIN 4807-5',
   vessel: { kind: 'thermal expansion tank', method: 'din 4807-5' },
-  sections: ['contents', 'domestic pressures'],
+  sections: ['contents', 'incoming pressure'],
   inputs: {
     V_s: given('volume', 'system volume'),
     t_h: keyed('temperature', 'storage temperature', 'temperatures', 'storage'),

@@ -23,9 +23,7 @@ const water = (source: Citation) => ({
   V_w: step('volume', 'expansion of the water', 'V_s * (v_h / v_c - 1)', source),
 })
 
-const tank = (source: Citation) => ({
-  P_1: step('absolute pressure', 'absolute pressure, cold', 'absolute(p_1, P_a)', cite(boyle, 'absolute pressure')),
-  P_2: step('absolute pressure', 'absolute pressure, hot', 'absolute(p_2, P_a)', cite(boyle, 'absolute pressure')),
+const usualCharge = (source: Citation) => ({
   V_t: step('volume', 'required volume', 'V_e / (1 - P_1 / P_2)', source),
   p_0: step(
     'gauge pressure',
@@ -34,6 +32,21 @@ const tank = (source: Citation) => ({
     cite(commonPractice, 'charged to the incoming pressure, with the system empty'),
   ),
 })
+
+const ownCharge = {
+  P_0: step('absolute pressure', 'absolute precharge', 'absolute(p_0, P_a)', cite(boyle, 'absolute pressure')),
+  V_t: step(
+    'volume',
+    'required volume',
+    'V_e / (min(1, P_0 / P_1) - P_0 / P_2)',
+    cite(boyle, 'gas volume at charge, incoming and highest pressure'),
+  ),
+}
+
+const absolute = {
+  P_1: step('absolute pressure', 'absolute pressure, cold', 'absolute(p_1, P_a)', cite(boyle, 'absolute pressure')),
+  P_2: step('absolute pressure', 'absolute pressure, hot', 'absolute(p_2, P_a)', cite(boyle, 'absolute pressure')),
+}
 
 const checks: Method['checks'] = [
   {
@@ -58,6 +71,13 @@ const checks: Method['checks'] = [
   },
 ]
 
+const chargeBelowHighest: Method['checks'][number] = {
+  condition: 'P_2 > P_0',
+  code: 'CF-E021',
+  message: 'The precharge is not below the highest pressure allowed: the vessel would never take up water.',
+  hint: 'Charge the vessel to the incoming pressure.',
+}
+
 const results = {
   'required-volume': 'V_t',
   'system-volume': 'V_s',
@@ -67,50 +87,81 @@ const results = {
   precharge: 'p_0',
 }
 
-const build = (method: 'aspe' | 'ashrae', source: Citation, materials: boolean): Method => {
+type Charge = 'usual' | 'own'
+
+const build = (method: 'aspe' | 'ashrae', source: Citation, materials: boolean, charge: Charge): Method => {
+  const tank = { ...absolute, ...(charge === 'own' ? ownCharge : usualCharge(source)) }
   const steps = materials
     ? {
         ...water(source),
         G_st: step('volume', 'growth of what steel holds', 'V_st * 3 * alpha_st * (t_h - t_c)', source),
         G_cu: step('volume', 'growth of what copper holds', 'V_cu * 3 * alpha_cu * (t_h - t_c)', source),
         V_e: step('volume', 'expansion volume', 'V_w - G_st - G_cu', source),
-        ...tank(source),
+        ...tank,
       }
     : {
         ...water(source),
         V_e: step('volume', 'expansion volume', 'V_w', source),
-        ...tank(source),
+        ...tank,
       }
   return defineMethod({
-    id: `thermal-expansion-tank.${method}${materials ? '.materials' : ''}`,
+    id: `thermal-expansion-tank.${method}${materials ? '.materials' : ''}${charge === 'own' ? '.own-charge' : ''}`,
     revision: 1,
-    title: `Thermal expansion tank, ${method.toUpperCase()}${materials ? ', with the growth of heater and piping' : ''}`,
-    vessel: materials
-      ? { kind: 'thermal expansion tank', method, when: { materials: true } }
-      : { kind: 'thermal expansion tank', method },
+    title: `Thermal expansion tank, ${method.toUpperCase()}${materials ? ', with the growth of heater and piping' : ''}${charge === 'own' ? ', its own precharge' : ''}`,
+    vessel: {
+      kind: 'thermal expansion tank',
+      method,
+      when: { ...(materials ? { materials: true } : {}), ...(charge === 'own' ? { written: ['precharge'] } : {}) },
+    },
     sections: ['site', 'contents', 'domestic pressures'],
-    inputs: materials
-      ? {
-          ...inputs,
-          V_st: given('volume', 'volume held by steel'),
-          V_cu: given('volume', 'volume held by copper'),
-          alpha_st: assumed('per temperature difference', 'linear expansion of steel', 'linear-expansion.steel'),
-          alpha_cu: assumed('per temperature difference', 'linear expansion of copper', 'linear-expansion.copper'),
-        }
-      : inputs,
+    inputs: {
+      ...inputs,
+      ...(charge === 'own' ? { p_0: keyed('gauge pressure', 'precharge', 'vessel', 'precharge') } : {}),
+      ...(materials
+        ? {
+            V_st: given('volume', 'volume held by steel'),
+            V_cu: given('volume', 'volume held by copper'),
+            alpha_st: assumed('per temperature difference', 'linear expansion of steel', 'linear-expansion.steel'),
+            alpha_cu: assumed('per temperature difference', 'linear expansion of copper', 'linear-expansion.copper'),
+          }
+        : {}),
+    },
     steps,
-    checks,
+    checks: charge === 'own' ? [...checks, chargeBelowHighest] : checks,
     results,
     ...(materials ? {} : { assumes: ['material.domestic'] }),
-    checkBack: 'check-back.diaphragm',
+    checkBack: charge === 'own' ? 'check-back.diaphragm-other-charge' : 'check-back.diaphragm',
     basis: materials
       ? 'The heated water expands from the incoming to the storage temperature; heater and piping grow by three times the linear expansion of what holds the water. Cold mains are not counted. The charge equals the incoming pressure.'
       : 'The heated water expands from the incoming to the storage temperature; no growth of heater or piping is credited. Cold mains are not counted. The charge equals the incoming pressure.',
-    examples: materials ? materialExamples : waterExamples,
+    examples: charge === 'own' ? ownChargeExamples(materials) : materials ? materialExamples : waterExamples,
   })
 }
 
 const heater = { P_a: '14.7 psia', V_s: '1000 gal', t_c: '40 °F', t_h: '140 °F', p_1: '50 psig', p_2: '110 psig' }
+
+const ownChargeExamples = (materials: boolean): Method['examples'] => [
+  {
+    id: 'charge-40-incoming-60-psig',
+    title: 'Factory charge of 40 psig left as it is, incoming 60 psig, limit 80 psig',
+    origin: 'by hand',
+    source: cite(boyle, 'gas volume at charge, incoming and highest pressure'),
+    given: {
+      P_a: '14.7 psia',
+      V_s: '119 gal',
+      t_c: '50 °F',
+      t_h: '140 °F',
+      p_1: '60 psig',
+      p_2: '80 psig',
+      p_0: '40 psig',
+      V_e: '2 gal',
+      ...(materials ? { V_st: '0 gal', V_cu: '0 gal', alpha_st: '6.5e-6 1/°F', alpha_cu: '9.5e-6 1/°F' } : {}),
+    },
+    expected: { V_t: '12.9325228519 gal' },
+    tolerance: 1e-9,
+    because: 'By hand: 2 / (54.7/74.7 - 54.7/94.7).',
+  },
+]
 
 const waterExamples: Method['examples'] = [
   {
@@ -166,9 +217,16 @@ const materialExamples: Method['examples'] = [
   },
 ]
 
-export const aspe = build('aspe', chapter, false)
-export const aspeMaterials = build('aspe', chapter, true)
-
 const handbook = cite(ashraeHvacSe, 'expansion tank equations, applied to domestic hot water')
-export const ashrae = build('ashrae', handbook, false)
-export const ashraeMaterials = build('ashrae', handbook, true)
+
+/** Both names of the method, the more particular forms first. */
+export const gasLawMethods: readonly Method[] = (
+  [
+    ['aspe', chapter],
+    ['ashrae', handbook],
+  ] as const
+).flatMap(([method, source]) =>
+  [true, false].flatMap((materials) =>
+    (['own', 'usual'] as const).map((charge) => build(method, source, materials, charge)),
+  ),
+)

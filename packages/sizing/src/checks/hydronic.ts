@@ -1,0 +1,182 @@
+import { ashraeExpansionCheck, saturationPressure } from '@coldfill/engine'
+import { formatQuantity, type Kind } from '@coldfill/units'
+import { gaugeFromSpec } from '../calculate-sections.ts'
+import type { ResultValue } from '../result.ts'
+import { report, type VesselContext } from '../vessel-context.ts'
+
+export const PSI = 6894.757293168361
+const GRAVITY = 9.80665
+const BOILING = 373.15
+/** 30 °C: warmer than any chilled supply, cooler than a plant room in a shutdown. */
+const WARM = 303.15
+const MEMBRANE = 343.15
+
+type Results = Readonly<Record<string, ResultValue>>
+
+export const show = (context: VesselContext, kind: Kind, value: number): string =>
+  formatQuantity({ kind, value }, context.spec.project.units?.value ?? 'US')
+
+/** A charge that is written and is not the fill pressure; or the word that the factory charge must be changed. */
+const checkCharge = (context: VesselContext, results: Results, atmosphere: number): void => {
+  const { vessel } = context
+  const fill = results['fill-pressure']?.value
+  const charge = results['precharge']?.value
+  const own = 'precharge' in vessel.fields ? vessel.fields.precharge : undefined
+  if (own && fill !== undefined) {
+    const written = gaugeFromSpec(own, atmosphere).value
+    // A European method keeps a reserve: its fill lies above the charge by design.
+    const byDesign = results['water-reserve'] !== undefined
+    if (!byDesign && Math.abs(written - fill) > 0.05 * PSI) {
+      report(context, 'CF-E040', {
+        message: `${vessel.mark} is charged to ${show(context, 'gauge pressure', written)}, but the fill pressure is ${show(context, 'gauge pressure', fill)}.`,
+        hint: 'Set the precharge to the fill pressure, or accept this with a reason.',
+        at: own,
+      })
+    }
+  }
+  if (charge !== undefined && Math.abs(charge - 12 * PSI) > 1 * PSI) {
+    report(context, 'CF-E048', {
+      message: `${vessel.mark} has to be charged to ${show(context, 'gauge pressure', charge)} on site; a vessel for heating usually comes with about 12 psi (83 kPa).`,
+      hint: 'Isolate, depressurise and drain the vessel before its charge is read or changed.',
+    })
+  }
+}
+
+/** Pressure at the highest point when cold, gauge Pa; undefined where the height is not known. */
+const topPressure = (context: VesselContext, results: Results): number | undefined => {
+  const { system, calculation } = context
+  const fill = results['fill-pressure']?.value
+  const height = system.pressure['static-height']?.value.value
+  if (fill === undefined || height === undefined) return undefined
+  const rho = calculation.has('rho_f') ? calculation.value('rho_f') : densityWhenFilled(context)
+  const head = calculation.has('dp_p') ? calculation.value('dp_p') : 0
+  return fill - head - rho * GRAVITY * height
+}
+
+const densityWhenFilled = (context: VesselContext): number => {
+  const { fill, low } = context.system.temperatures
+  const at = fill ?? low
+  return at ? context.fluid.density(at.value.value) : 1000
+}
+
+const checkTop = (context: VesselContext, results: Results, atmosphere: number): void => {
+  const { pressure, temperatures } = context.system
+  const top = topPressure(context, results)
+  if (top === undefined) return
+  const margin = pressure['top-margin']
+  if (top < -1) {
+    report(context, 'CF-E046', {
+      message: `When cold, the highest point stands at ${show(context, 'gauge pressure', top)}, below atmosphere.`,
+      hint: 'Raise the fill pressure, or correct the static height.',
+      at: pressure.fill ?? margin ?? pressure['static-height'],
+    })
+  } else if (top < 3.999 * PSI && (pressure.fill || margin)) {
+    report(context, 'CF-E041', {
+      message: `When cold, ${show(context, 'gauge pressure', top)} is left at the highest point; 4 psi (0.3 bar) or more is usual.`,
+      hint: 'Raise the fill pressure or `top-margin`.',
+      at: pressure.fill ?? margin,
+    })
+  }
+  const { high } = temperatures
+  if (!high || high.value.value <= BOILING) return
+  const vapour = saturationPressure(high.value.value)
+  if (top + atmosphere >= vapour) return
+  report(context, 'CF-E042', {
+    message: `At ${high.value.authored ?? 'the highest temperature'} water boils at ${show(context, 'gauge pressure', vapour - atmosphere)}; the highest point has ${show(context, 'gauge pressure', top)} when cold.`,
+    hint: 'Raise `top-margin` by the vapour pressure, or lower `temperatures.high`.',
+    at: high,
+  })
+}
+
+const checkRelief = (context: VesselContext, atmosphere: number): void => {
+  const { pressure } = context.system
+  const { maximum } = pressure
+  const relief = pressure['relief-valve']
+  if (!maximum) return
+  if (!relief) {
+    report(context, 'CF-E049', {
+      message: 'The maximum pressure is given and no relief valve.',
+      hint: 'Give `relief-valve`, so that the margin below it can be checked.',
+      at: maximum,
+    })
+    return
+  }
+  const set = gaugeFromSpec(relief, atmosphere).value
+  const given = gaugeFromSpec(maximum, atmosphere).value
+  const lift = densityWhenFilled(context) * GRAVITY * (pressure['relief-height']?.value.value ?? 0)
+  if (given <= 0.9 * set + lift + 1) return
+  report(context, 'CF-E044', {
+    message: `The maximum of ${show(context, 'gauge pressure', given)} is above 0.9 of the relief valve setting of ${show(context, 'gauge pressure', set)}.`,
+    hint: 'Lower `maximum`, or raise the relief valve setting within the rating of the equipment.',
+    at: maximum,
+    related: [{ message: 'The relief valve is set here.', path: relief.path, range: relief.range }],
+  })
+}
+
+const checkTemperatures = (context: VesselContext, construction: string | undefined, european: boolean): void => {
+  const { system, vessel } = context
+  const { high } = system.temperatures
+  const service = system.service?.value
+  if (high && (service === 'chilled water' || service === 'condenser water') && high.value.value < WARM) {
+    report(context, 'CF-E015', {
+      message: `${high.value.authored ?? 'The highest temperature'} is given as the hottest a ${service} loop gets; in a shutdown it warms to the plant room.`,
+      hint: 'Give 35 to 40 °C (95 to 104 °F), or accept this with a reason.',
+      at: high,
+    })
+  }
+  const membrane = construction === 'diaphragm' || construction === 'bladder'
+  if (european && membrane && high && high.value.value > MEMBRANE + 0.01) {
+    report(context, 'CF-E047', {
+      message: `${vessel.mark}: ${high.value.authored ?? 'the highest temperature'} is above the 70 °C that membranes stand for long.`,
+      hint: 'Connect it in the return or with an intermediate vessel, or check the rating.',
+    })
+  }
+}
+
+const checkGlycol = (context: VesselContext): void => {
+  const { fluid, system, vessel } = context
+  if (fluid.base === 'water') return
+  const { low, high } = system.temperatures
+  if (low && low.value.value <= fluid.freezing) {
+    report(context, 'CF-E060', {
+      message: `${low.value.authored ?? 'The lowest temperature'} is at or below the freezing point of ${fluid.label}, ${show(context, 'temperature', fluid.freezing)}.`,
+      hint: 'Raise the strength of the solution or the lowest temperature.',
+      at: low,
+    })
+  }
+  const second = low && high && ashraeExpansionCheck(fluid, low.value.value, high.value.value)
+  if (second && low && high) {
+    const used = fluid.density(low.value.value) / fluid.density(high.value.value) - 1
+    report(context, 'CF-E062', {
+      message: `${vessel.mark}: ${fluid.label} expands by ${(used * 100).toFixed(2)} % here; the second table has ${(second.ratio * 100).toFixed(2)} %. The size is uncertain in the same proportion, about ten per cent.`,
+      hint: '',
+    })
+  }
+}
+
+/** Pressures, temperatures and fluid that a reviewing engineer checks at an expansion tank. */
+export const checkHydronic = (
+  context: VesselContext,
+  results: Results,
+  construction: string | undefined,
+  atmosphere: number,
+): void => {
+  const { system, vessel } = context
+  checkCharge(context, results, atmosphere)
+  checkTop(context, results, atmosphere)
+  checkRelief(context, atmosphere)
+  checkTemperatures(context, construction, results['water-reserve'] !== undefined)
+  checkGlycol(context)
+  const connection = system.pressure['vessel-connection']
+  if (connection?.value === 'pump discharge') {
+    report(context, 'CF-E043', {
+      message: `${vessel.mark} is connected at the pump discharge: the connection keeps its pressure, and the suction side falls by the pump head when the pump runs.`,
+      hint: 'Connect the vessel at the pump suction where it can be done.',
+      at: connection,
+    })
+  }
+}
+
+/** Said once a system: a glycol loop is not made up from the domestic water. */
+export const glycolMakeUp =
+  'A glycol loop is made up from a feeder or by hand, never through a permanent connection to the domestic water.'
