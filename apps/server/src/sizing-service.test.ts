@@ -1,0 +1,59 @@
+import { afterEach, expect, it } from 'vitest'
+import { createSizingService, type SizingService } from './sizing-service.ts'
+import { loopSpec } from './testing/specs.ts'
+
+const open: SizingService[] = []
+const service = (options: Parameters<typeof createSizingService>[0] = {}): SizingService => {
+  const made = createSizingService(options)
+  open.push(made)
+  return made
+}
+afterEach(async () => {
+  for (const one of open.splice(0)) await one.close()
+})
+
+/** A thread that never answers the text "hang", dies of the text "die", and gives any other back. */
+const moody = new URL('./testing/moody.worker.ts', import.meta.url)
+
+it('hands back the result with the JSON that it was read from', async () => {
+  const { result, json } = await service().size(loopSpec())
+  expect(JSON.parse(json)).toEqual(result)
+  expect(result.vessels[0]?.status).toBe('sized')
+})
+
+it('sizes a text once and knows it the next time', async () => {
+  const sizing = service()
+  expect(await sizing.size(loopSpec())).toBe(await sizing.size(loopSpec()))
+})
+
+it('stops a text that takes too long, and sizes the next one', async () => {
+  const sizing = service({ limit: 300, module: moody })
+  const hanging = sizing.size('hang')
+  const behind = sizing.size('fine')
+  await expect(hanging).rejects.toMatchObject({ status: 422, code: 'sizing_too_long' })
+  expect((await behind).json).toBe('"fine"')
+})
+
+it('outlives a thread that dies of a text', async () => {
+  const sizing = service({ module: moody })
+  const dying = sizing.size('die')
+  const behind = sizing.size('fine')
+  await expect(dying).rejects.toMatchObject({ status: 422, code: 'sizing_failed' })
+  expect((await behind).json).toBe('"fine"')
+})
+
+it('refuses more than 256 kB, counted in bytes', async () => {
+  await expect(service().size('°'.repeat(131_073))).rejects.toMatchObject({ status: 413, code: 'spec_too_large' })
+})
+
+it('reads a hostile text of 250 kB within its limit or stops it, and goes on', async () => {
+  const sizing = service()
+  const keys = Array.from({ length: 19_000 }, (_, index) => `k${index}: 1`).join('\n')
+  const deep = '['.repeat(120_000)
+  for (const text of [keys, deep]) {
+    const begun = Date.now()
+    await sizing.size(text).catch((error: unknown) => expect(error).toMatchObject({ status: 422 }))
+    expect(Date.now() - begun).toBeLessThan(15_000)
+  }
+  expect((await sizing.size(loopSpec())).result.vessels[0]?.status).toBe('sized')
+})
