@@ -249,6 +249,18 @@ const keys: readonly SeededMistake[] = [
     '‹|contents|›: { equipment: Heater WH-1, volume: 119 gal }',
   ),
   mistake('CF-S005', 'list for a quantity', 'pump-head: 45 ft', '‹|pump-head|›: [45 ft]'),
+  mistake(
+    'CF-S005',
+    'text in a list of blocks',
+    'contents:\n      - { equipment: Heater WH-1, volume: 119 gal }',
+    'contents:\n      - ‹|119 gal|›',
+  ),
+  mistake(
+    'CF-S006',
+    'empty line of a list',
+    'contents:\n      - { equipment: Heater WH-1, volume: 119 gal }',
+    '‹|contents|›:\n      -\n      - { equipment: Heater WH-1, volume: 119 gal }',
+  ),
   mistake('CF-S006', 'nothing behind a key', 'pump-head: 45 ft', '‹|pump-head|›:', 'pump-head: 45 ft'),
   mistake('CF-S006', 'nothing behind a vessel', 'TET-1: { kind: thermal expansion tank }', '‹|TET-1|›:'),
   mistake('CF-S006', 'nothing behind a key in braces', 'cut-out: 60 psi }', '‹|cut-out|› }', 'cut-out: 60 psi }'),

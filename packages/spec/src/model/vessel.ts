@@ -86,8 +86,9 @@ const usableFraction = quantity(['ratio'], 'Part of the volume that can be used.
 })
 
 const solarContents = {
-  'collector-volume': quantity(['volume'], 'Content of all collectors.', '12 L', { positive: true }),
+  'collector-volume': quantity(['volume'], 'Content of all collectors.', '12 L', { required: true, positive: true }),
   'piping-above': quantity(['volume'], 'Content of the pipes that stand above the collector connection.', '6 L', {
+    required: true,
     least: 0,
   }),
 }
@@ -262,7 +263,11 @@ export const vesselKinds = {
         to: 'to know how many the readings of the curve hold for',
         only: { key: 'method', is: ['recovery and storage'] },
       },
-      { keys: ['vessel.demand-index'], to: 'to be sized by din 4708', only: { key: 'method', is: ['din 4708'] } },
+      {
+        keys: ['vessel.demand-index', 'demand.apartments'],
+        to: 'to be sized by din 4708',
+        only: { key: 'method', is: ['din 4708'] },
+      },
       { keys: ['demand.people'], to: 'to know how many draw hot water', only: { key: 'method', is: ['per person'] } },
       {
         keys: ['demand.apartments'],
@@ -291,7 +296,10 @@ export const vesselKinds = {
         { fallback: 'the method whose keys are given' },
       ),
       'source-minimum': quantity(['power'], 'Least output of the smallest source.', '96 MBH', { positive: true }),
-      'load-minimum': quantity(['power'], 'Least load that can call alone.', '10 MBH', { least: 0 }),
+      'load-minimum': quantity(['power'], 'Least load that can call alone.', '10 MBH', {
+        fallback: 'none, and then an assumption',
+        least: 0,
+      }),
       'run-time': quantity(['time'], 'Least time that the source runs once it has started.', '10 min', {
         positive: true,
       }),
@@ -318,9 +326,7 @@ export const vesselKinds = {
       'defrost-energy': quantity(['energy'], 'Heat that one defrost takes.', '3 kWh', { positive: true }),
     },
     needs: [
-      ...(
-        ['vessel.source-minimum', 'vessel.load-minimum', 'vessel.run-time', 'vessel.temperature-band'] as const
-      ).flatMap((key): Need[] => [
+      ...(['vessel.source-minimum', 'vessel.run-time', 'vessel.temperature-band'] as const).flatMap((key): Need[] => [
         { keys: [key], to: 'to be sized by run time', only: { key: 'method', is: ['run time'] } },
         {
           keys: [key],
@@ -329,11 +335,11 @@ export const vesselKinds = {
           liftedBy: ['cooling-capacity', 'boiler-output', 'defrost-energy'],
         },
       ]),
-      ...(['vessel.cooling-capacity', 'vessel.volume-per-ton'] as const).map((key): Need => ({
-        keys: [key],
+      {
+        keys: ['vessel.cooling-capacity'],
         to: 'to be sized by volume per ton',
         only: { key: 'method', is: ['volume per ton'] },
-      })),
+      },
       ...(['vessel.boiler-output', 'vessel.boiler-minimum', 'vessel.heat-load', 'vessel.burn-time'] as const).map(
         (key): Need => ({ keys: [key], to: 'to be sized by en 303-5', only: { key: 'method', is: ['en 303-5'] } }),
       ),
@@ -396,6 +402,14 @@ export const vesselKinds = {
     services: ['solar thermal'],
     fields: {
       ...common,
+      method: choice(
+        {
+          idae: 'growth of the fluid, content of collectors that boil, reserve; gas law with a floor of two',
+        },
+        'Method by which the vessel is sized.',
+        'idae',
+        { fallback: 'idae' },
+      ),
       ...solarContents,
       construction: closedConstruction,
       'expansion-fraction': quantity(['ratio'], 'Growth of the fluid as a part of the contents.', '8.5 %', {
@@ -422,6 +436,14 @@ export const vesselKinds = {
     services: hydronicServices,
     fields: {
       ...common,
+      method: choice(
+        {
+          'make-up': 'the larger of a part of the contents and one drum',
+        },
+        'Method by which the vessel is sized.',
+        'make-up',
+        { fallback: 'make-up' },
+      ),
       'make-up': quantity(['ratio'], 'Make-up held, as a part of the contents of the system.', '3 %', {
         positive: true,
       }),
@@ -437,6 +459,14 @@ export const vesselKinds = {
     services: hydronicServices,
     fields: {
       ...common,
+      method: choice(
+        {
+          'entering velocity': 'bore at which the inlet velocity is kept',
+        },
+        'Method by which the vessel is sized.',
+        'entering velocity',
+        { fallback: 'entering velocity' },
+      ),
       removes: choice(
         { air: 'air only', dirt: 'dirt only', 'air and dirt': 'both' },
         'What it takes out of the flow.',
@@ -455,6 +485,14 @@ export const vesselKinds = {
     services: hydronicServices,
     fields: {
       ...common,
+      method: choice(
+        {
+          'body velocity': 'diameter at which the velocity in the body is kept',
+        },
+        'Method by which the vessel is sized.',
+        'body velocity',
+        { fallback: 'body velocity' },
+      ),
       'source-flow': quantity(['flow'], 'Design flow on the side of the sources.', '80 gpm', {
         required: true,
         positive: true,
@@ -474,6 +512,14 @@ export const vesselKinds = {
     services: ['solar thermal'],
     fields: {
       ...common,
+      method: choice(
+        {
+          'contents above': 'collectors, piping above and reserve',
+        },
+        'Method by which the vessel is sized.',
+        'contents above',
+        { fallback: 'contents above' },
+      ),
       ...solarContents,
       'water-reserve': quantity(['volume'], 'Water that stays in the tank when the loop is full.', '5 gal', {
         least: 0,
@@ -488,6 +534,14 @@ export const vesselKinds = {
     services: ['steam'],
     fields: {
       ...common,
+      method: choice(
+        {
+          'steam velocity': 'diameter at which the velocity of the flash steam is kept',
+        },
+        'Method by which the vessel is sized.',
+        'steam velocity',
+        { fallback: 'steam velocity' },
+      ),
       'condensate-flow': quantity(['mass flow'], 'Condensate that enters.', '2000 lb/h', {
         required: true,
         positive: true,
@@ -518,6 +572,15 @@ export const vesselKinds = {
     services: ['steam'],
     fields: {
       ...common,
+      method: choice(
+        {
+          'blown volume': 'twice the volume blown',
+          'level drop': 'twice the volume of a drop of the boiler level',
+        },
+        'Method by which the vessel is sized.',
+        'blown volume',
+        { fallback: 'the method whose keys are given' },
+      ),
       'blown-volume': quantity(['volume'], 'Water blown out at once.', '60 gal', { positive: true }),
       'water-surface': quantity(['area'], 'Area of the water surface in the boiler at its normal level.', '48 ft2', {
         positive: true,
@@ -529,7 +592,7 @@ export const vesselKinds = {
       }),
       'drain-temperature': quantity(['temperature'], 'Hottest water that the drain may take.', '140 °F'),
     },
-    needs: [],
+    needs: [{ keys: ['vessel.blown-volume', 'vessel.water-surface'], to: 'to know how much water is blown out' }],
   },
   'condensate receiver': {
     title: 'Condensate receivers',
@@ -538,6 +601,14 @@ export const vesselKinds = {
     services: ['steam'],
     fields: {
       ...common,
+      method: choice(
+        {
+          'holding time': 'flow of the pump for a time',
+        },
+        'Method by which the vessel is sized.',
+        'holding time',
+        { fallback: 'holding time' },
+      ),
       duty: choice(
         { condensate: 'returns condensate', 'boiler feed': 'feeds the boiler' },
         'What the pump of the receiver does.',
@@ -561,6 +632,14 @@ export const vesselKinds = {
     services: drinkingWater,
     fields: {
       ...common,
+      method: choice(
+        {
+          peak: 'peak flow less refill for its length',
+        },
+        'Method by which the vessel is sized.',
+        'peak',
+        { fallback: 'peak' },
+      ),
       'peak-flow': quantity(['flow'], 'Flow out of the tank at the peak.', '60 gpm', {
         required: true,
         positive: true,

@@ -15,6 +15,8 @@ export interface Context {
 /** A key with its value and path. */
 export interface Entry {
   readonly key: string
+  /** What a person calls it, where it is an item of a list and has no key. */
+  readonly label?: string
   readonly path: string
   readonly keySpan: Span
   readonly value: SourceNode | null

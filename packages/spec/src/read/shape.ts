@@ -7,7 +7,7 @@ const wrongShape = (context: Context, entry: Entry, due: string, example: string
   const tight = entry.value?.node === 'text' ? tightColon(entry.value.text) : null
   if (tight && entry.value) return reportTightColon(context.report, entry.path, entry.value.span.start, tight)
   context.report.add('CF-S005', valueAt(entry), {
-    message: `\`${entry.key}\` takes ${due}, not ${shapeName(entry)}.`,
+    message: `${entry.label ?? `\`${entry.key}\``} takes ${due}, not ${shapeName(entry)}.`,
     hint: `Write it as in \`${example}\`.`,
   })
 }
@@ -21,10 +21,13 @@ const shapeName = (entry: Entry): string => {
 /** Says once that nothing is written behind a key. */
 const nothingWritten = (context: Context, entry: Entry, example: string): void =>
   context.report.add('CF-S006', keyAt(entry), {
-    message: `Nothing is written behind \`${entry.key}\`.`,
-    hint: `Write \`${entry.key}: ${example}\`, or take the key out.`,
+    message: entry.label === undefined ? `Nothing is written behind \`${entry.key}\`.` : `${entry.label} is empty.`,
+    hint:
+      entry.label === undefined
+        ? `Write \`${entry.key}: ${example}\`, or take the key out.`
+        : 'Write it or take it out.',
     fixes:
-      entry.value === null && !example.includes('…')
+      entry.value === null && entry.label === undefined && !example.includes('…')
         ? [
             {
               title: `Write ${example}`,
@@ -75,7 +78,8 @@ export const expectList = (context: Context, entry: Entry, example: string): rea
     return []
   }
   return entry.value.items.map((value, index) => ({
-    key: `${index + 1}`,
+    key: `${index}`,
+    label: `Line ${index + 1} of \`${entry.key}\``,
     path: `${entry.path}.${index}`,
     keySpan: value === null ? entry.keySpan : { start: value.span.start, end: value.span.start + 1 },
     value,
