@@ -20,26 +20,31 @@ const water = { at45: 1.000155305e-3, at50: 1.000346407e-3, at140: 1.017112792e-
 // Density by the polynomial of Melinder (IIR 2010) at 40.4 % mass, kg/m3.
 const glycol = { at20: 1045.55858, at50: 1037.96779, at165: 996.342981 }
 
+interface Setting {
+  /** Set pressure of the relief valve, psi. */
+  readonly relief: number
+  /** Highest pipe above the vessel, ft. */
+  readonly height: number
+}
+
 /** ET-1, ASHRAE closed tank with bladder. */
-export const et1 = (() => {
+export const et1With = ({ relief, height }: Setting) => {
   // 2 boilers of 22 gal; exchanger 3 gal; schedule 40 of 2 in (52.48 mm) and 1-1/4 in (35.08 mm); type L of 3/4 in
   // (19.939 mm); convectors 6 L/kW on 140 MBH = 41.03 kW, 246.2 L, 65.03 gal; reheat coils 26 gal.
   const convectors = (6 * 140 * 0.29307107) / 3.785411784
   const system = 2 * 22 + 3 + pipe(52.48, 380) + pipe(35.08, 460) + pipe(19.939, 1150) + convectors + 26
   // Water from 50 to 180 °F less three times the growth of steel, 6.5e-6 1/°F over 130 °F.
   const expansion = system * (water.at180 / water.at50 - 1 - 3 * 6.5e-6 * 130)
-  // 42 ft of water at 50 °F and 4 psi at the top.
-  const fill = column(1 / water.at50, 42) + 4
-  const maximum = 0.9 * 50
-  const required = expansion / (1 - (fill + atmosphere) / (maximum + atmosphere))
+  // The height in water at 50 °F and 4 psi at the top.
+  const fill = column(1 / water.at50, height) + 4
+  const maximum = 0.9 * relief
+  const room = 1 - (fill + atmosphere) / (maximum + atmosphere)
   // Code equation: 0.00041 · 180 − 0.0466 = 0.0272 of the system volume.
-  const codeMinimum = (0.0272 * system) / (1 - (fill + atmosphere) / (maximum + atmosphere))
-  return { system, expansion, fill, maximum, required, codeMinimum }
-})()
+  return { system, expansion, fill, maximum, required: expansion / room, codeMinimum: (0.0272 * system) / room }
+}
 
-/** ET-1 with the relief valve set to another pressure, psi: required volume, gal. */
-export const et1At = (relief: number): number =>
-  et1.expansion / (1 - (et1.fill + atmosphere) / (0.9 * relief + atmosphere))
+/** ET-1 as the spec has it. */
+export const et1 = et1With({ relief: 50, height: 42 })
 
 /** ET-2, the same method with glycol, connected behind the pump. */
 export const et2 = (() => {
