@@ -1,12 +1,25 @@
 import type { TableCellContent, TableColumn } from './table.ts'
 
-/** Twips that a character takes at most on average, bold in the head and plain in the body, by size of table. */
-const CHARACTER = { table: { head: 100, body: 92 }, schedule: { head: 88, body: 82 } } as const
+/** Size of the type in twips, and how much wider the bold head runs. */
+const TYPE = { table: { head: 160, body: 170 }, schedule: { head: 140, body: 150 } } as const
+const BOLD = 1.08
 
-/** Left and right margin of a cell. */
+/** Left and right margin of a cell, with a little for rounding. */
 const PADDING = 150
 
-const longestWord = (text: string): number => Math.max(0, ...text.split(/[\s/-]+/).map((word) => word.length))
+/** Width of a character in ems, roughly as the body family has it. */
+const em = (character: string): number => {
+  if (/[A-Z%°Δ]/.test(character)) return character === 'I' ? 0.3 : 0.7
+  if (/[ijlt.,()'/-]/.test(character)) return 0.33
+  return /[mw]/.test(character) ? 0.8 : 0.56
+}
+
+/** Words break at spaces; a long one also behind a hyphen or slash. */
+const words = (text: string): string[] =>
+  text.split(/\s+/).flatMap((word) => (word.length > 14 ? word.split(/(?<=[/-])/) : [word]))
+
+const widest = (text: string): number =>
+  Math.max(0, ...words(text).map((word) => Array.from(word).reduce((sum, character) => sum + em(character), 0)))
 
 /** Room that a column needs so that no word of it is broken. */
 const need = (
@@ -16,8 +29,8 @@ const need = (
 ): number =>
   PADDING +
   Math.max(
-    longestWord(column.heading) * head,
-    ...cells.map((cell) => (typeof cell === 'string' ? longestWord(cell) * body : 0)),
+    widest(column.heading) * head * BOLD,
+    ...cells.map((cell) => (typeof cell === 'string' ? widest(cell) * body * BOLD : 0)),
   )
 
 /**
@@ -28,7 +41,7 @@ export const columnWidths = (
   columns: readonly TableColumn[],
   rows: readonly (readonly TableCellContent[])[],
   total: number,
-  size: keyof typeof CHARACTER,
+  size: keyof typeof TYPE,
 ): number[] => {
   const shares = columns.reduce((sum, column) => sum + column.width, 0)
   const wishes = columns.map((column) => (column.width / shares) * total)
@@ -36,7 +49,7 @@ export const columnWidths = (
     need(
       column,
       rows.map((row) => row[index]),
-      CHARACTER[size],
+      TYPE[size],
     ),
   )
   const least = needs.reduce((sum, width) => sum + width, 0)

@@ -64,6 +64,9 @@ export const ommlOf = (box: Box): XmlComponent[] => {
 // A paragraph takes any element; the library's type only lists the equations that it can build itself.
 const inParagraph = (component: XmlComponent): ParagraphChild => component as unknown as ParagraphChild
 
+/** An equation among words. */
+export const inlineEquation = (box: Box): ParagraphChild => inParagraph(element('oMath', ommlOf(box)))
+
 /** An equation on its own line, set from the left. */
 export const displayEquation = (box: Box): ParagraphChild =>
   inParagraph(element('oMathPara', [element('oMathParaPr', [property('jc', 'left')]), element('oMath', ommlOf(box))]))

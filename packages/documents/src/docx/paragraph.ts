@@ -1,6 +1,6 @@
 import { Bookmark, Paragraph, Tab, TextRun } from 'docx'
 import type { Box } from '@coldfill/formula'
-import { displayEquation } from './omml.ts'
+import { displayEquation, inlineEquation } from './omml.ts'
 import { plainText } from './plain-text.ts'
 import { SOURCE_STYLE, STYLE } from './styles.ts'
 
@@ -32,6 +32,10 @@ export const stepParagraph = (name: string, source: string): Paragraph =>
       new TextRun({ text: plainText(`   ${source}`), style: SOURCE_STYLE }),
     ],
   })
+
+/** An equation and behind it, on the same line, what is said of it. */
+export const equationThenText = (box: Box, text: string): Paragraph =>
+  new Paragraph({ style: STYLE.equation, children: [inlineEquation(box), new TextRun(plainText(`   ${text}`))] })
 
 export const equationParagraph = (box: Box, keepNext: boolean): Paragraph =>
   new Paragraph({

@@ -44,7 +44,7 @@ const DEFINITIONS: readonly StyleDefinition[] = [
     next: 'Normal',
     size: 32,
     bold: true,
-    before: 320,
+    before: 240,
     after: 180,
     keepNext: true,
     outline: 0,

@@ -3,7 +3,7 @@ import { inputNumber, quantity, words } from './schedule.ts'
 
 /** Columns that every schedule has in the same words and place. */
 export const serves = words('serves', 'Serves', 17, ({ vessel, system }) => vessel.serves || (system?.title ?? ''))
-export const fluid = words('fluid', 'Fluid', 11, ({ vessel }) => sentenceCase(vessel.fluid))
+export const fluid = words('fluid', 'Fluid', 13, ({ vessel }) => sentenceCase(vessel.fluid))
 export const construction = words('construction', 'Type', 10, ({ vessel }) => sentenceCase(vessel.construction ?? ''))
 export const count = quantity('quantity', 'Qty', 5.5, 'count', ({ vessel }) => vessel.quantity)
 export const method = words('method', 'Method', 10, ({ vessel }) => methodWords(vessel.method))

@@ -1,8 +1,9 @@
-import { layoutSymbol, type Box } from '@coldfill/formula'
+import { layout, layoutSymbol, type Box } from '@coldfill/formula'
 import type { ProjectResult } from '@coldfill/sizing'
 import type { UnitSystem } from '@coldfill/units'
 import type { FileChild } from 'docx'
 import { fluidOf } from '../calculation/fluid-of.ts'
+import { methodChecks } from '../calculation/method-checks.ts'
 import { stepEquations } from '../calculation/step-equations.ts'
 import {
   vesselCalculation,
@@ -11,7 +12,7 @@ import {
   type StepLine,
   type VesselCalculation,
 } from '../calculation/vessel-calculation.ts'
-import { equationParagraph, paragraph, stepParagraph } from '../docx/paragraph.ts'
+import { equationParagraph, equationThenText, paragraph, stepParagraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
 import { scheduleWords } from '../schedules/schedule-words.ts'
@@ -19,6 +20,7 @@ import { basisWords } from '../words/basis-words.ts'
 import { valueText } from '../calculation/value-text.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
+import { chosenVessel } from './chosen-vessel.ts'
 import type { Section, SubmittalContext } from './section.ts'
 
 type Vessel = ProjectResult['vessels'][number]
@@ -89,10 +91,21 @@ const answer = (vessel: Vessel, { result, options }: SubmittalContext): string =
   return `${vessel.mark}: ${parts.join(', ')}.`
 }
 
-const chosen = (vessel: Vessel): string =>
-  vessel.selected === null
-    ? 'No vessel is chosen in the spec.'
-    : `Chosen: ${vessel.selected.quantity > 1 ? `${vessel.selected.quantity} × ` : ''}${vessel.selected.maker} ${vessel.selected.model}.`
+/** What has to hold for the method to have an answer, and that it does. */
+const checkLines = (vessel: Vessel, calculation: VesselCalculation, context: SubmittalContext): FileChild[] => {
+  const { functions } = calculation.scope
+  const checks = methodChecks(vessel, calculation, context.options.units)
+  if (checks.length === 0) return []
+  return [
+    context.headings.heading('Checks of the method', 3),
+    ...checks.map((check) =>
+      equationThenText(
+        layout(check.condition, { functions }),
+        check.holds ? 'holds' : `does not hold. ${check.message}`,
+      ),
+    ),
+  ]
+}
 
 const vesselLines = (vessel: Vessel, context: SubmittalContext): FileChild[] => {
   const { result, options, headings } = context
@@ -104,11 +117,12 @@ const vesselLines = (vessel: Vessel, context: SubmittalContext): FileChild[] => 
     headings.heading(`${vessel.mark}  ${sentenceCase(vessel.kind)}`, 2),
     paragraph(basisWords(vessel, result).join(' ')),
     paragraph(answer(vessel, context), STYLE.answer),
-    ...(vessel.status === 'sized' ? [paragraph(chosen(vessel))] : []),
+    ...(vessel.status === 'sized' ? chosenVessel(vessel, context) : []),
     ...findings.map((finding) =>
       paragraph(`${sentenceCase(finding.severity)} ${finding.code}: ${finding.message} ${finding.hint}`, STYLE.remark),
     ),
     ...calculation.sections.flatMap((section) => sectionLines(section, vessel, calculation, context)),
+    ...checkLines(vessel, calculation, context),
   ]
 }
 

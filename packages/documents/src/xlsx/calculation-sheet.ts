@@ -2,6 +2,7 @@ import type { Fluid } from '@coldfill/engine'
 import { layout, toPlainText } from '@coldfill/formula'
 import type { ProjectResult } from '@coldfill/sizing'
 import type { Cell, Workbook } from 'exceljs'
+import { methodChecks } from '../calculation/method-checks.ts'
 import type { StepLine, VesselCalculation } from '../calculation/vessel-calculation.ts'
 import type { DocumentOptions } from '../document-options.ts'
 import { INK, PENCIL, RULE } from '../look.ts'
@@ -23,7 +24,7 @@ import {
   wrapped,
   writeTitle,
 } from './sheet.ts'
-import { significantFormat, stepFormat } from './number-format.ts'
+import { inputFormat, significantFormat, stepFormat } from './number-format.ts'
 
 type Vessel = ProjectResult['vessels'][number]
 
@@ -110,7 +111,9 @@ export const writeCalculation = (
       at += 1
     }
   }
-  const calls = new FluidCalls(fluid, fluidCells, calculation, options.units, at + 1)
+  const checks = methodChecks(vessel, calculation, options.units)
+  const checkRows = checks.length > 0 ? checks.length + 1 : 0
+  const calls = new FluidCalls(fluid, fluidCells, calculation, options.units, at + checkRows + 1)
   const cellOf = (symbol: string): string => {
     const found = rowOf.get(symbol)
     if (found === undefined) throw new Error(`${vessel.mark}: ${symbol} is not in the trace`)
@@ -131,7 +134,7 @@ export const writeCalculation = (
           ? { formula: formulaOf(current), result: current.value, format: stepFormat(current.value) }
           : shared
             ? { formula: shared.from(name), result: current.value, format: 'General' }
-            : { number: current.value, format: 'General' }
+            : { number: current.value, format: inputFormat(current.value) }
       row(at, [
         { text: symbolText(current.symbol) },
         { text: sentenceCase(current.name) },
@@ -150,6 +153,23 @@ export const writeCalculation = (
         for (const column of [1, 2, 3, 4]) sheet.getCell(at, column).font = font(9, { bold: true })
       }
       cells.set(current.id, `$C$${at}`)
+      at += 1
+    }
+  }
+
+  if (checks.length > 0) {
+    heading(at, 'Checks of the method')
+    at += 1
+    for (const check of checks) {
+      const condition = emitFormula(check.inUnits, { symbol: cellOf, call: (tree, args) => calls.cell(tree, args) })
+      row(at, [
+        { text: '' },
+        { text: 'Condition' },
+        { formula: `IF(${condition},"holds","does not hold")`, result: check.holds ? 'holds' : 'does not hold' },
+        { text: '' },
+        { text: toPlainText(layout(check.inUnits, { functions: fluid.functions })) },
+        { text: `where it does not hold: ${check.message}` },
+      ])
       at += 1
     }
   }

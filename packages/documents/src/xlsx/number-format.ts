@@ -9,3 +9,7 @@ export const significantFormat = (value: number, digits: number, leastDecimals =
 
 /** Format of a computed cell: five digits, and never fewer than two decimals below a thousand, since the cell may change. */
 export const stepFormat = (value: number): string => significantFormat(value, 5, Math.abs(value) < 1000 ? 2 : 0)
+
+/** Format of an input: as it is typed, or seven digits where a conversion left more. */
+export const inputFormat = (value: number): string =>
+  String(value).length <= 10 ? 'General' : significantFormat(value, 7)

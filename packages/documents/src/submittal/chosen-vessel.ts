@@ -1,0 +1,64 @@
+import { layoutSymbol } from '@coldfill/formula'
+import type { ProjectResult } from '@coldfill/sizing'
+import { unitLabel, type Kind, type UnitSystem } from '@coldfill/units'
+import type { FileChild } from 'docx'
+import { displayNumber } from '../calculation/display-number.ts'
+import { numberText, valueText } from '../calculation/value-text.ts'
+import { paragraph } from '../docx/paragraph.ts'
+import { table } from '../docx/table.ts'
+import { sentenceCase } from '../words/vessel-words.ts'
+import type { SubmittalContext } from './section.ts'
+
+type Vessel = ProjectResult['vessels'][number]
+
+const chosenWords = ({ selected }: Vessel, units: UnitSystem): string => {
+  if (selected === null) return 'No vessel is chosen in the spec.'
+  const said = (value: number, kind: Kind) =>
+    valueText({ value: displayNumber(value, kind, units), unit: unitLabel(kind, units) })
+  const parts = [
+    `${said(selected.volume, 'volume')} each`,
+    ...(selected.acceptance === undefined ? [] : [`acceptance ${said(selected.acceptance, 'volume')}`]),
+    `rated ${said(selected.maxPressure, 'gauge pressure')} and ${said(selected.maxTemperature, 'temperature')}`,
+    selected.stamped ? 'stamped' : 'not stamped',
+  ]
+  const many = selected.quantity > 1 ? `${selected.quantity} × ` : ''
+  return `Chosen: ${many}${selected.maker} ${selected.model}, ${parts.join(', ')}.`
+}
+
+/** The chosen vessel, and how far each input may move before it stops being enough. */
+export const chosenVessel = (vessel: Vessel, { options, captions, width }: SubmittalContext): FileChild[] => {
+  const { units } = options
+  if (vessel.headroom.length === 0) return [paragraph(chosenWords(vessel, units))]
+  const volume = unitLabel('volume', units)
+  const rows = vessel.headroom.map((row) => {
+    const unit = unitLabel(row.kind, units)
+    const shown = (value: number) => valueText({ value: displayNumber(value, row.kind, units), unit })
+    // A step of one shown unit, so that the change reads off the table: 1 °F, 1 psi, 1 gal.
+    const step = displayNumber(1, row.kind, units) - displayNumber(0, row.kind, units)
+    const change = displayNumber(row.sensitivity / step, 'volume', units)
+    return [
+      layoutSymbol(row.symbol),
+      sentenceCase(row.name),
+      shown(row.value),
+      `${change > 0 ? '+' : ''}${numberText(Number(change.toPrecision(3)))} ${volume} a ${unit || 'unit'}`,
+      row.limit === null ? 'any' : shown(row.limit),
+    ]
+  })
+  return [
+    paragraph(chosenWords(vessel, units)),
+    captions.next(`${vessel.mark}, headroom with the chosen vessel`),
+    table({
+      title: `${vessel.mark}, headroom`,
+      description: 'How the required volume answers to each input, and how far the input may go with the chosen vessel',
+      width,
+      columns: [
+        { heading: 'Symbol', width: 9 },
+        { heading: 'Input', width: 35 },
+        { heading: 'Now', width: 16, align: 'right' },
+        { heading: 'Required volume changes by', width: 24, align: 'right' },
+        { heading: 'May go to', width: 16, align: 'right' },
+      ],
+      rows,
+    }),
+  ]
+}
