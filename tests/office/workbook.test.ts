@@ -11,6 +11,9 @@ import { formulaResults, readWorkbook, recalculated } from './recalculate.ts'
 const TOLERANCE = 1e-9
 
 const off = (found: unknown, expected: unknown): boolean =>
+  typeof expected === 'string' ? found !== expected : offNumber(found, expected)
+
+const offNumber = (found: unknown, expected: unknown): boolean =>
   typeof found !== 'number' ||
   typeof expected !== 'number' ||
   !(Math.abs(found - expected) <= TOLERANCE * Math.max(Math.abs(expected), 1e-30))
