@@ -1,13 +1,11 @@
+import '#lib/zod-without-eval.ts'
 import { StrictMode } from 'react'
 import { createRoot } from 'react-dom/client'
-import { z } from 'zod'
 import { Providers } from '#app/providers.tsx'
 import { startUnits } from '#lib/search-params.ts'
 import { startTheme } from '#lib/theme.ts'
 import './index.css'
 
-// The content policy allows no compiled code, so zod interprets its schemas.
-z.config({ jitless: true })
 startTheme()
 startUnits()
 

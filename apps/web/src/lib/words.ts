@@ -18,3 +18,6 @@ export const stateTone = (state: ProjectState | RevisionState): 'good' | 'held' 
 
 export const outcomeTone = (outcome: Outcome): 'good' | 'held' | 'plain' =>
   outcome === 'accepted' || outcome === 'accepted_noted' ? 'good' : outcome === 'information' ? 'plain' : 'held'
+
+/** A revision inside a sentence: "the first issue", "Rev B". */
+export const revisionPhrase = (label: string): string => (label === '' ? 'the first issue' : `Rev ${label}`)

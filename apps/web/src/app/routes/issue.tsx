@@ -1,9 +1,11 @@
+import { useEffect, useRef } from 'react'
 import { Sheet } from '#components/layouts/sheet.tsx'
 import { SectionHeading } from '#components/ui/heading.tsx'
 import { ConstructionIssue } from '#features/issue/components/construction-issue.tsx'
 import { ReviewIssue } from '#features/issue/components/review-issue.tsx'
 import { RevisionEntry } from '#features/issue/components/revision-entry.tsx'
 import { useProject } from '#features/projects/api/projects.ts'
+import { refreshProject } from '#lib/refresh.ts'
 import { useProjectNumber } from '#lib/route-params.ts'
 
 export function Component() {
@@ -16,6 +18,13 @@ export function Component() {
     newest.state !== 'withdrawn' &&
     newest.state !== 'superseded'
   const consultant = project.roles.includes('consultant')
+  // The gates look at the files: ask again once they are made.
+  const making = project.revisions.some((revision) => revision.making !== null)
+  const before = useRef(making)
+  useEffect(() => {
+    if (before.current && !making) void refreshProject(number)
+    before.current = making
+  }, [making, number])
   return (
     <Sheet title="Issue">
       <div className="flex max-w-5xl flex-col gap-10">

@@ -21,18 +21,26 @@ export function Component() {
   const navigate = useNavigate()
   const [search, setSearch] = useSearchParams()
   const making = search.has('new') && user.mayCreateProjects
+  // Who has handovers only has no use for the rest.
+  const handoversOnly =
+    !user.mayCreateProjects &&
+    projects.data !== undefined &&
+    projects.data.projects.length > 0 &&
+    projects.data.projects.every((project) => !project.sheets.includes('cover'))
   return (
     <Sheet
-      title="Projects"
+      title={handoversOnly ? 'Handovers' : 'Projects'}
       actions={
-        <Button
-          look={making ? 'plain' : 'main'}
-          aria-expanded={making}
-          why={user.mayCreateProjects ? null : 'New projects are made by the consultants of the office.'}
-          onClick={() => setSearch(making ? {} : { new: '1' })}
-        >
-          New project
-        </Button>
+        handoversOnly ? null : (
+          <Button
+            look={making ? 'plain' : 'main'}
+            aria-expanded={making}
+            why={user.mayCreateProjects ? null : 'New projects are made by the consultants of the office.'}
+            onClick={() => setSearch(making ? {} : { new: '1' })}
+          >
+            New project
+          </Button>
+        )
       }
     >
       <Loaded query={projects} what="Loading the projects">
@@ -45,7 +53,7 @@ export function Component() {
                 onCancel={() => setSearch({})}
               />
             ) : null}
-            <ProjectTable projects={list.projects} mayCreate={user.mayCreateProjects} />
+            <ProjectTable projects={list.projects} mayCreate={user.mayCreateProjects} handoversOnly={handoversOnly} />
           </>
         )}
       </Loaded>

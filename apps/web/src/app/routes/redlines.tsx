@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query'
-import { revisionSegment, revisionTitle, type Project, type Redline } from '@coldfill/contract'
+import { revisionSegment, type Project, type Redline } from '@coldfill/contract'
 import { useEffect } from 'react'
 import { Sheet } from '#components/layouts/sheet.tsx'
 import { Loaded } from '#components/loaded.tsx'
@@ -14,6 +14,7 @@ import { SendReview } from '#features/redlines/components/send-review.tsx'
 import { isFilter, passes } from '#features/redlines/filters.ts'
 import { RevisionSwitch } from '#features/results/components/revision-switch.tsx'
 import { useProjectNumber } from '#lib/route-params.ts'
+import { revisionPhrase } from '#lib/words.ts'
 import { useAddress } from '#lib/search-params.ts'
 
 const ReviewMargin = ({
@@ -29,8 +30,6 @@ const ReviewMargin = ({
   const newest = project.revisions[0]
   if (!newest)
     return <p className="text-pencil">Nothing is issued for review yet, so there is nothing to set a disposition on.</p>
-  if (!project.roles.includes('reviewer'))
-    return <p className="text-pencil">{dispose.why ?? 'Reviewers set the disposition.'}</p>
   return (
     <SendReview
       project={project.number}
@@ -65,23 +64,27 @@ export function Component() {
     <Sheet
       title="Redlines"
       actions={<RevisionSwitch project={project} />}
-      margin={{
-        title: 'Review',
-        content: (
-          <ReviewMargin
-            project={project}
-            redlines={query.data ?? []}
-            onSent={() => change({ filter: null, thread: null })}
-          />
-        ),
-      }}
+      {...(project.roles.includes('reviewer')
+        ? {
+            margin: {
+              title: 'Review',
+              content: (
+                <ReviewMargin
+                  project={project}
+                  redlines={query.data ?? []}
+                  onSent={() => change({ filter: null, thread: null })}
+                />
+              ),
+            },
+          }
+        : {})}
     >
       <Loaded query={query} what="Loading the redlines">
         {(redlines) => (
           <div className="flex flex-col gap-6">
             {looked && looked.dispositions.length > 0 ? (
               <section>
-                <SectionHeading>Disposition of {revisionTitle(looked.label)}</SectionHeading>
+                <SectionHeading>Disposition of {revisionPhrase(looked.label)}</SectionHeading>
                 <Dispositions dispositions={looked.dispositions} />
               </section>
             ) : null}

@@ -21,6 +21,7 @@ import { KeyedNotes } from '#features/schedule/components/keyed-notes.tsx'
 import { ScheduleGrid, type CellMarks } from '#features/schedule/components/schedule-grid.tsx'
 import { schedules, type Row } from '#features/schedule/schedule-table.ts'
 import { useProjectNumber } from '#lib/route-params.ts'
+import { revisionPhrase } from '#lib/words.ts'
 import { useAddress, useUnits } from '#lib/search-params.ts'
 import { ScheduleMargin } from './schedule-margin.tsx'
 
@@ -108,8 +109,7 @@ export function Component() {
                 checked={showChanges}
                 onChange={(event) => change({ changed: event.target.checked ? null : '0' }, { replace: true })}
               />
-              Changed since {changed.revision === '' ? 'the first issue' : `Rev ${changed.revision}`} (
-              {changed.vessels.length})
+              Changed since {revisionPhrase(changed.revision)} ({changed.vessels.length})
             </label>
           ) : null}
           <ColumnMenu

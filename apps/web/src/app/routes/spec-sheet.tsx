@@ -1,5 +1,5 @@
-import { revisionSegment, revisionTitle, type Project, type Reference, type SpecDocument } from '@coldfill/contract'
-import { pathRange, readSpec, type Range } from '@coldfill/spec'
+import { revisionSegment, type Project, type Reference, type SpecDocument } from '@coldfill/contract'
+import { acceptFix, pathRange, readSpec, type Range } from '@coldfill/spec'
 import { useQuery, type UseQueryResult } from '@tanstack/react-query'
 import { useDeferredValue, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
 import { Failure } from '#components/failure.tsx'
@@ -8,7 +8,6 @@ import { Band } from '#components/ui/band.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { resultsQuery } from '#features/results/api/results.ts'
 import { UnitsSwitch } from '#features/results/components/units-switch.tsx'
-import { acceptance } from '#features/spec/accept-warning.ts'
 import { CompareTexts } from '#features/spec/components/compare-texts.tsx'
 import { Outline } from '#features/spec/components/outline.tsx'
 import { SpecEditor, type SpecEditorHandle } from '#features/spec/components/spec-editor.tsx'
@@ -19,6 +18,7 @@ import { mergeFindings } from '#features/spec/merge-findings.ts'
 import { useSizing } from '#features/spec/use-sizing.ts'
 import { useSpecDraft } from '#features/spec/use-spec-draft.ts'
 import { clock } from '#lib/format.ts'
+import { revisionPhrase } from '#lib/words.ts'
 import { useAddress, useUnits } from '#lib/search-params.ts'
 
 interface Props {
@@ -162,6 +162,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
               text={text}
               onChange={change}
               readOnly={readOnly}
+              vocabulary={vocabulary}
               findings={findings}
               entries={entries}
               stale={stale}
@@ -183,15 +184,15 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
           status={
             <>
               {status}
-              {newest && issued.data ? ` · △ differs from ${revisionTitle(newest.label)}` : ''}
+              {newest && issued.data ? ` · △ differs from ${revisionPhrase(newest.label)}` : ''}
               <span className="hidden bench:inline"> · Esc, then Tab leaves the editor</span>
             </>
           }
           onJump={(range) => editor.current?.jumpTo(range)}
           onFix={(fix) => editor.current?.fix(fix)}
           onAccept={(finding, reason) => {
-            const { line: at, insert } = acceptance(text, finding, reason)
-            editor.current?.insertLine(at, insert)
+            const fix = acceptFix(text, finding, reason.replaceAll(/\s+/g, ' ').trim())
+            if (fix) editor.current?.fix(fix)
           }}
         />
       )}

@@ -49,13 +49,27 @@ const count = words('quantity', 'Qty', ({ vessel }) => String(vessel.quantity))
 const methodWords = (method: string): string =>
   capital(method.replaceAll(/\b(?:ashrae|en|une|bs|din|aspe)\b/g, (initials) => initials.toUpperCase()))
 const method = words('method', 'Method', ({ vessel }) => methodWords(vessel.method))
+/** `A1–A3, A5` of 1, 2, 3 and 5. */
+export const numberRanges = (numbers: readonly number[]): string => {
+  const sorted = numbers.toSorted((a, b) => a - b)
+  const runs: { first: number; last: number }[] = []
+  for (const number of sorted) {
+    const run = runs.at(-1)
+    if (run && number === run.last + 1) run.last = number
+    else runs.push({ first: number, last: number })
+  }
+  const words = runs.map(({ first, last }) =>
+    first === last ? `A${first}` : `A${first}${last === first + 1 ? ', ' : '–'}A${last}`,
+  )
+  return words.join(', ')
+}
 const assumptions: ColumnDefinition = {
   shows: 'words',
   key: 'assumptions',
   heading: 'Assumptions',
   mono: true,
   words: ({ vessel, result: { assumptions: used } }) =>
-    vessel.assumptions.map((id) => used.find((assumption) => assumption.id === id)?.number ?? id).join(' '),
+    numberRanges(used.filter((one) => vessel.assumptions.includes(one.id)).map((one) => Number(one.number.slice(1)))),
 }
 const selectedVolume: ColumnDefinition = {
   shows: 'quantity',

@@ -1,5 +1,6 @@
 import type { ProjectResult } from '@coldfill/contract'
 import { describe, expect, it } from 'vitest'
+import { numberRanges } from './column-definitions.ts'
 import { decimalsFor, schedules } from './schedule-table.ts'
 
 type Vessel = ProjectResult['vessels'][number]
@@ -120,5 +121,15 @@ describe('decimals of a column', () => {
     [[1e-7], 5],
   ])('for %j is %d', (numbers, decimals) => {
     expect(decimalsFor(numbers)).toBe(decimals)
+  })
+})
+
+describe('numbers of assumptions in a row', () => {
+  it.each([
+    [[3, 1, 2, 5], 'A1–A3, A5'],
+    [[1, 2], 'A1, A2'],
+    [[], ''],
+  ])('of %j are %s', (numbers, words) => {
+    expect(numberRanges(numbers)).toBe(words)
   })
 })

@@ -1,4 +1,4 @@
-import { revisionTitle, type Project, type Revision } from '@coldfill/contract'
+import { type Project, type Revision } from '@coldfill/contract'
 import { useQuery } from '@tanstack/react-query'
 import { useState, type FormEvent } from 'react'
 import { Failure } from '#components/failure.tsx'
@@ -6,6 +6,7 @@ import { Loaded } from '#components/loaded.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { TextArea } from '#components/ui/field.tsx'
 import { SectionHeading } from '#components/ui/heading.tsx'
+import { revisionPhrase } from '#lib/words.ts'
 import { useAction } from '#lib/use-action.ts'
 import { gatesQuery, issueForConstruction } from '../api/issue.ts'
 import { GateTable } from './gate-table.tsx'
@@ -43,7 +44,7 @@ export const ConstructionIssue = ({
   }
   return (
     <section className="flex flex-col">
-      <SectionHeading note={`Of ${revisionTitle(revision.label)}, as it was reviewed`}>
+      <SectionHeading note={`Of ${revisionPhrase(revision.label)}, as it was reviewed`}>
         Issue for construction
       </SectionHeading>
       <Loaded query={gates} what="Checking the gates" rows={4}>

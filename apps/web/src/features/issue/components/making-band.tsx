@@ -1,5 +1,5 @@
 import type { Revision } from '@coldfill/contract'
-import { revisionTitle } from '@coldfill/contract'
+import { revisionPhrase } from '#lib/words.ts'
 import { Failure } from '#components/failure.tsx'
 import { Band } from '#components/ui/band.tsx'
 import { Button } from '#components/ui/button.tsx'
@@ -17,7 +17,7 @@ export const MakingBand = ({ project, revision }: { readonly project: string; re
         <Band
           tone="error"
           live="alert"
-          title={`The files of ${revisionTitle(revision.label)} stopped at stage ${making.stage} of ${making.of}: ${making.name}.`}
+          title={`The files of ${revisionPhrase(revision.label)} stopped at stage ${making.stage} of ${making.of}: ${making.name}.`}
           actions={
             <Button busy={busy} onClick={() => void run(() => makeFiles(project, revision.label))}>
               Try again from there
@@ -33,7 +33,7 @@ export const MakingBand = ({ project, revision }: { readonly project: string; re
   return (
     <Band
       live="status"
-      title={`Making the files of ${revisionTitle(revision.label)}: stage ${making.stage} of ${making.of}`}
+      title={`Making the files of ${revisionPhrase(revision.label)}: stage ${making.stage} of ${making.of}`}
     >
       <p>{making.name}. You may leave this sheet; the files are made all the same.</p>
       <progress

@@ -1,4 +1,4 @@
-import { revisionTitle, type Project } from '@coldfill/contract'
+import { type Project } from '@coldfill/contract'
 import { useQuery } from '@tanstack/react-query'
 import { useState, type FormEvent } from 'react'
 import { Failure } from '#components/failure.tsx'
@@ -6,6 +6,7 @@ import { Loaded } from '#components/loaded.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { TextArea } from '#components/ui/field.tsx'
 import { SectionHeading } from '#components/ui/heading.tsx'
+import { revisionPhrase } from '#lib/words.ts'
 import { useAction } from '#lib/use-action.ts'
 import { gatesQuery, issueForReview } from '../api/issue.ts'
 import { GateTable } from './gate-table.tsx'
@@ -29,15 +30,7 @@ export const ReviewIssue = ({ project }: { readonly project: Project }) => {
   }
   return (
     <section className="flex flex-col">
-      <SectionHeading
-        note={
-          project.nextRevision === ''
-            ? 'It will be the first issue'
-            : `It will be ${revisionTitle(project.nextRevision)}`
-        }
-      >
-        Issue for review
-      </SectionHeading>
+      <SectionHeading note={`It will be ${revisionPhrase(project.nextRevision)}`}>Issue for review</SectionHeading>
       <Loaded query={gates} what="Checking the gates" rows={3}>
         {(list) => <GateTable gates={list} />}
       </Loaded>

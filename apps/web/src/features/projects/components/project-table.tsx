@@ -12,7 +12,7 @@ import { day } from '#lib/format.ts'
 const opening = (project: ProjectSummary): string =>
   project.sheets.includes('cover') ? paths.cover(project.number) : paths.handover(project.number)
 
-const Row = ({ project }: { readonly project: ProjectSummary }) => (
+const Row = ({ project, handoversOnly }: { readonly project: ProjectSummary; readonly handoversOnly: boolean }) => (
   <tr className="hover:bg-steel-wash">
     <RowHead className="font-mono">
       <Link to={opening(project)}>{project.number}</Link>
@@ -27,8 +27,12 @@ const Row = ({ project }: { readonly project: ProjectSummary }) => (
       <StateWord state={project.state} />
     </Cell>
     <Cell>{project.revision === null ? '—' : revisionTitle(project.revision)}</Cell>
-    <Cell>{project.waitingOnYou ? <strong className="font-semibold">You</strong> : '—'}</Cell>
-    <Cell figures>{project.openRedlines === 0 ? '—' : project.openRedlines}</Cell>
+    {handoversOnly ? null : (
+      <>
+        <Cell>{project.waitingOnYou ? <strong className="font-semibold">You</strong> : '—'}</Cell>
+        <Cell figures>{project.openRedlines === 0 ? '—' : project.openRedlines}</Cell>
+      </>
+    )}
     <Cell figures>
       {project.lastIssue ? (
         <>
@@ -45,9 +49,11 @@ const Row = ({ project }: { readonly project: ProjectSummary }) => (
 export const ProjectTable = ({
   projects,
   mayCreate,
+  handoversOnly,
 }: {
   readonly projects: readonly ProjectSummary[]
   readonly mayCreate: boolean
+  readonly handoversOnly: boolean
 }) => {
   const [sought, setSought] = useState('')
   if (projects.length === 0) {
@@ -89,14 +95,18 @@ export const ProjectTable = ({
             <HeadCell>Project</HeadCell>
             <HeadCell>Status</HeadCell>
             <HeadCell>Revision</HeadCell>
-            <HeadCell>Waiting on</HeadCell>
-            <HeadCell figures>Open redlines</HeadCell>
+            {handoversOnly ? null : (
+              <>
+                <HeadCell>Waiting on</HeadCell>
+                <HeadCell figures>Open redlines</HeadCell>
+              </>
+            )}
             <HeadCell figures>Last issue</HeadCell>
           </tr>
         }
       >
         {shown.map((project) => (
-          <Row key={project.number} project={project} />
+          <Row key={project.number} project={project} handoversOnly={handoversOnly} />
         ))}
       </RuledTable>
       {shown.length === 0 ? <p className="mt-3 text-pencil">No project matches “{sought}”.</p> : null}

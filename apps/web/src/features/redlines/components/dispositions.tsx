@@ -1,7 +1,7 @@
-import { OUTCOME_LABELS, revisionTitle, type Disposition } from '@coldfill/contract'
+import { OUTCOME_LABELS, type Disposition } from '@coldfill/contract'
 import { ToneSign } from '#components/ui/state-word.tsx'
 import { day } from '#lib/format.ts'
-import { outcomeTone } from '#lib/words.ts'
+import { outcomeTone, revisionPhrase } from '#lib/words.ts'
 
 const BrokenRing = () => (
   <svg width="14" height="14" viewBox="0 0 14 14" aria-hidden="true" className="keeps-colour inline-block shrink-0">
@@ -22,7 +22,7 @@ export const Dispositions = ({ dispositions }: { readonly dispositions: readonly
           {disposition.stale ? (
             <span className="inline-flex items-center gap-1 text-ochre">
               <BrokenRing />
-              Stale: set on other content, {revisionTitle(disposition.revision)}
+              Stale: set on the content of {revisionPhrase(disposition.revision)}
             </span>
           ) : null}
         </p>

@@ -21,7 +21,7 @@ export const PendingTray = ({
         {pending.length === 1 ? 'it' : 'them'} until you send the review.
       </p>
       <Link to={paths.redlines(project)} className={buttonClass('plain', true)}>
-        See them
+        Go to redlines
       </Link>
     </div>
   )

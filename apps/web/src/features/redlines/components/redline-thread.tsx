@@ -5,8 +5,8 @@ import { Failure } from '#components/failure.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { CheckField, TextArea } from '#components/ui/field.tsx'
 import { Flag, WasNow } from '#components/ui/review-marks.tsx'
-import { revisionTitle } from '@coldfill/contract'
 import { clock } from '#lib/format.ts'
+import { revisionPhrase } from '#lib/words.ts'
 import { useAction } from '#lib/use-action.ts'
 import { anchorLink, anchorStateWords, anchorWords } from '../anchor-words.ts'
 import { closeRedline, editRedline, removeRedline, reopenRedline, replyTo } from '../api/redlines.ts'
@@ -143,7 +143,7 @@ export const RedlineThread = ({ project, redline, rev, showPlace = true }: Props
               )}
             </>
           ) : null}
-          {redline.carriedFrom === null ? null : ` · carried from ${revisionTitle(redline.carriedFrom)}`}
+          {redline.carriedFrom === null ? null : ` · carried from ${revisionPhrase(redline.carriedFrom)}`}
           {redline.waitingOn ? ` · waiting on ${redline.waitingOnYou ? 'you' : `the ${redline.waitingOn}`}` : ''}
         </p>
         {redline.proposedValue === null ? null : (

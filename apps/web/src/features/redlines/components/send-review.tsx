@@ -97,20 +97,26 @@ export const SendReview = ({ project, newest, pending, why, onSent }: Props) => 
       <fieldset className="flex flex-col gap-1">
         <legend className="mb-1 font-semibold">Disposition</legend>
         {outcomes.map((choice) => (
-          <label key={choice} className="flex min-h-6 items-baseline gap-2">
+          <div key={choice} className="flex min-h-6 items-baseline gap-2">
             <input
               type="radio"
+              id={`outcome-${choice}`}
               name="outcome"
               value={choice}
               checked={outcome === choice}
               onChange={() => setOutcome(choice)}
+              aria-describedby={`outcome-${choice}-says`}
               className="translate-y-0.5 accent-steel"
             />
-            <span>
-              <span className="font-medium">{OUTCOME_LABELS[choice]}</span>
-              <span className="block text-cell text-pencil">{says[choice]}</span>
-            </span>
-          </label>
+            <div>
+              <label htmlFor={`outcome-${choice}`} className="font-medium">
+                {OUTCOME_LABELS[choice]}
+              </label>
+              <p id={`outcome-${choice}-says`} className="text-cell text-pencil">
+                {says[choice]}
+              </p>
+            </div>
+          </div>
         ))}
       </fieldset>
       <TextArea

@@ -15,7 +15,7 @@ export const RevisionSwitch = ({ project }: { readonly project: Project }) => {
       <select
         value={value}
         onChange={(event) => change({ rev: event.target.value || null, row: null, col: null })}
-        className="h-8 border border-rule bg-sheet px-1.5 text-ink"
+        className="h-8 max-w-48 border border-rule bg-sheet px-1.5 text-ink"
       >
         {working ? <option value="">Working copy</option> : null}
         {project.revisions.map((revision) => (

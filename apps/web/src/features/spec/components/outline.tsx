@@ -31,7 +31,14 @@ export const Outline = ({ model, entries, stale, onJump }: Props) => (
                   onClick={() => onJump(vessel.range)}
                   className="flex w-full items-baseline justify-between gap-2 py-0.5 pr-3 pl-6 text-left hover:bg-steel-wash"
                 >
-                  <span className="font-mono text-cell">{vessel.mark}</span>
+                  <span className="font-mono text-cell whitespace-nowrap">
+                    {vessel.mark}
+                    {entry?.was ? (
+                      <span className="ml-1 font-sans text-redline" title={`${entry.was} in the last issue`}>
+                        △
+                      </span>
+                    ) : null}
+                  </span>
                   <span
                     className={`figures truncate text-cell ${entry?.sized === false ? 'text-fault' : 'text-pencil'} ${stale ? 'opacity-60' : ''}`}
                   >

@@ -6,9 +6,10 @@ import { EditorState, Prec, type Extension } from '@codemirror/state'
 import { EditorView, keymap, type ViewUpdate } from '@codemirror/view'
 import CodeMirror from '@uiw/react-codemirror'
 import { useCallback, useEffect, useImperativeHandle, useMemo, useState, type Ref } from 'react'
-import type { Range } from '@coldfill/spec'
+import type { Range, Vocabulary } from '@coldfill/spec'
 import type { Finding } from '#lib/sized-project.ts'
 import { applyFix, findingGutter, offsetOf, showFindings } from '../editor/finding-marks.ts'
+import { languageHelp } from '../editor/language-help.ts'
 import { resultMargin, showResults } from '../editor/result-margin.ts'
 import { editorTheme } from '../editor/theme.ts'
 import type { MarginEntry } from '../margin-lines.ts'
@@ -16,7 +17,6 @@ import type { MarginEntry } from '../margin-lines.ts'
 export interface SpecEditorHandle {
   readonly jumpTo: (range: Range) => void
   readonly fix: (fix: Finding['fixes'][number]) => void
-  readonly insertLine: (line: number, insert: string) => void
 }
 
 interface Props {
@@ -24,6 +24,8 @@ interface Props {
   readonly text: string
   readonly onChange: (text: string) => void
   readonly readOnly: boolean
+  /** Names that completion and hover know; until it is there they are silent. */
+  readonly vocabulary: Vocabulary | undefined
   readonly findings: readonly Finding[]
   readonly entries: readonly MarginEntry[]
   readonly stale: boolean
@@ -54,7 +56,7 @@ const always: Extension = [
 ]
 
 /** The YAML editor of the spec: findings underlined and marked, results beside the lines. */
-export const SpecEditor = ({ ref, text, onChange, readOnly, findings, entries, stale, onLine }: Props) => {
+export const SpecEditor = ({ ref, text, onChange, readOnly, vocabulary, findings, entries, stale, onLine }: Props) => {
   const [view, setView] = useState<EditorView | null>(null)
   const jumpTo = useCallback(
     (range: Range) => {
@@ -71,16 +73,14 @@ export const SpecEditor = ({ ref, text, onChange, readOnly, findings, entries, s
     () => ({
       jumpTo,
       fix: (fix) => view && applyFix(view, fix),
-      insertLine: (line, insert) =>
-        view?.dispatch({
-          changes: { from: offsetOf(view.state.doc, { line, character: 0 }), insert },
-          userEvent: 'input',
-        }),
     }),
     [jumpTo, view],
   )
 
-  const extensions = useMemo(() => [always, EditorState.readOnly.of(readOnly)], [readOnly])
+  const extensions = useMemo(
+    () => [always, EditorState.readOnly.of(readOnly), vocabulary ? languageHelp(vocabulary) : []],
+    [readOnly, vocabulary],
+  )
   const onUpdate = useCallback(
     ({ state, selectionSet }: ViewUpdate) => {
       if (selectionSet) onLine(state.doc.lineAt(state.selection.main.head).number - 1)

@@ -27,6 +27,15 @@ const look = EditorView.theme({
     border: '2px solid var(--color-ink)',
     maxWidth: '440px',
   },
+  '.cm-tooltip.cm-tooltip-autocomplete > ul': { fontFamily: 'var(--font-mono)', maxHeight: '14em' },
+  '.cm-tooltip.cm-tooltip-autocomplete > ul > li': { padding: '2px 8px', lineHeight: '18px' },
+  '.cm-tooltip.cm-tooltip-autocomplete > ul > li[aria-selected]': {
+    backgroundColor: 'var(--color-steel)',
+    color: 'var(--color-sheet)',
+  },
+  '.cm-completionDetail': { fontStyle: 'normal', opacity: '0.75', marginLeft: '12px' },
+  '.cm-completionMatchedText': { textDecoration: 'none', fontWeight: '700' },
+  '.cm-tooltip.cm-completionInfo': { fontFamily: 'var(--font-sans)', fontSize: '13px', padding: '6px 10px' },
   '.cm-diagnostic': {
     fontFamily: 'var(--font-sans)',
     fontSize: '13px',
