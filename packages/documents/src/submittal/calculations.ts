@@ -15,7 +15,6 @@ import {
 import { equationParagraph, equationThenText, paragraph, stepParagraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
-import { scheduleWords } from '../schedules/schedule-words.ts'
 import { basisWords } from '../words/basis-words.ts'
 import { valueText } from '../calculation/value-text.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
@@ -84,9 +83,8 @@ const ANSWERS: readonly (readonly [key: string, words: string])[] = [
 ]
 
 /** The result in one sentence, in the digits of the schedule. */
-const answer = (vessel: Vessel, { result, options }: SubmittalContext): string => {
+const answer = (vessel: Vessel, { shown }: SubmittalContext): string => {
   if (vessel.status !== 'sized') return `${statusWords[vessel.status]}. ${sentenceCase(vessel.reason ?? '')}`
-  const shown = scheduleWords(result, options.units)
   const parts = ANSWERS.filter(([key]) => vessel.results[key]).map(([key, words]) => `${words} ${shown(vessel, key)}`)
   return `${vessel.mark}: ${parts.join(', ')}.`
 }

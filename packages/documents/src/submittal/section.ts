@@ -2,6 +2,7 @@ import type { ProjectResult } from '@coldfill/sizing'
 import type { FileChild } from 'docx'
 import type { DocumentOptions } from '../document-options.ts'
 import type { Headings } from '../docx/paragraph.ts'
+import type { scheduleWords } from '../schedules/schedule-words.ts'
 import type { Captions } from '../docx/table.ts'
 
 /** What every section of a submittal is written from. */
@@ -10,6 +11,8 @@ export interface SubmittalContext {
   readonly options: DocumentOptions
   readonly headings: Headings
   readonly captions: Captions
+  /** Says a number of a vessel in the digits of its schedule. */
+  readonly shown: ReturnType<typeof scheduleWords>
   /** Width of the text in twips. */
   readonly width: number
 }

@@ -1,15 +1,13 @@
 import { paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
-import { scheduleWords } from '../schedules/schedule-words.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import type { Section } from './section.ts'
 
 const counted = (count: number, one: string): string => `${count} ${one}${count === 1 ? '' : 's'}`
 
 /** Every vessel on one table, and in words how many could not be sized. */
-export const summary: Section = ({ result, options, headings, captions, width }) => {
+export const summary: Section = ({ result, headings, captions, shown, width }) => {
   const { vessels } = result
-  const shown = scheduleWords(result, options.units)
   const unsized = vessels.filter((vessel) => vessel.status !== 'sized')
   const sentences = [
     `This submittal covers ${counted(vessels.length, 'vessel')} in ${counted(result.systems.length, 'system')}.`,

@@ -8,6 +8,7 @@ import { plainText } from '../docx/plain-text.ts'
 import { settled } from '../docx/settled-part.ts'
 import { stylesXml } from '../docx/styles.ts'
 import { Captions } from '../docx/table.ts'
+import { scheduleWords } from '../schedules/schedule-words.ts'
 import { assumptions } from './assumptions.ts'
 import { calculations } from './calculations.ts'
 import { cautions } from './cautions.ts'
@@ -25,9 +26,10 @@ export const writeSubmittal = async (result: ProjectResult, options: DocumentOpt
   const { titleBlock } = options
   const headings = new Headings()
   const captions = new Captions()
+  const shown = scheduleWords(result, options.units)
   const children = (orientation: Orientation, sections: readonly Section[]): FileChild[] =>
     sections.flatMap((section) =>
-      section({ result, options, headings, captions, width: textWidth(options, orientation) }),
+      section({ result, options, headings, captions, shown, width: textWidth(options, orientation) }),
     )
   const page = (orientation: Orientation, content: readonly FileChild[]): ISectionOptions => ({
     properties: pageProperties(options, orientation),

@@ -89,8 +89,11 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   writeSources(workbook, sources, result, options)
   inOrder(workbook, [cover, ...contents.map((entry) => entry.sheet)])
 
-  return fixedArchive(new Uint8Array(await workbook.xlsx.writeBuffer()))
+  return fixedArchive(new Uint8Array(await workbook.xlsx.writeBuffer(STORED)))
 }
+
+/** The archive is packed again, so its first packing need not be small. The library hands these on to its packer; its types do not list them. */
+const STORED = { zip: { compression: 'STORE' } } as Partial<ExcelJS.XlsxWriteOptions>
 
 /** Sorts the sheets, first one shown on opening. */
 const inOrder = (workbook: ExcelJS.Workbook, names: readonly string[]): void => {
