@@ -19,6 +19,22 @@ export interface RunOutcome {
   readonly notFinite: string | null
 }
 
+const hyphens = new Map<string, string>()
+
+/** `expansion volume` → `expansion-volume`; the names of methods recur in every vessel, so each is worked out once. */
+const hyphenated = (name: string): string => {
+  let made = hyphens.get(name)
+  if (made === undefined) {
+    made = name
+      .toLowerCase()
+      .replace(/[^a-z0-9]+/g, '-')
+      .replace(/^-|-$/g, '')
+    // Labels that people type are bounded by the specs of one process, but not by this program.
+    if (hyphens.size < 5000) hyphens.set(name, made)
+  }
+  return made
+}
+
 /**
  * One vessel's calculation: methods are run into it one after the other, and it keeps every input and step in order.
  * A symbol means one thing in a calculation; giving it twice is a programmer's mistake and throws.
@@ -77,10 +93,7 @@ export class Calculation {
   }
 
   private idFor(name: string): string {
-    const base = `${this.mark}/${name
-      .toLowerCase()
-      .replace(/[^a-z0-9]+/g, '-')
-      .replace(/^-|-$/g, '')}`
+    const base = `${this.mark}/${hyphenated(name)}`
     let id = base
     for (let n = 2; this.byId.has(id); n += 1) id = `${base}-${n}`
     return id

@@ -13,9 +13,12 @@ export const sensitivities = (
   functions: Functions,
   result: string,
 ): Readonly<Record<string, number>> => {
-  const values = Object.fromEntries(entries.map((entry) => [entry.symbol, entry.value]))
+  const values: Record<string, number> = {}
+  for (const entry of entries) values[entry.symbol] = entry.value
   const adjoint: Record<string, number> = { [result]: 1 }
-  for (const entry of entries.toReversed()) {
+  for (let n = entries.length - 1; n >= 0; n -= 1) {
+    const entry = entries[n]
+    if (!entry) continue
     const weight = adjoint[entry.symbol]
     if (entry.entry === 'input' || weight === undefined || weight === 0) continue
     const formula = compiled(entry.formula, functions)
@@ -24,11 +27,12 @@ export const sensitivities = (
       adjoint[symbol] = (adjoint[symbol] ?? 0) + weight * derivative
     }
   }
-  return Object.fromEntries(
-    entries
-      .filter((entry) => entry.entry === 'input' && adjoint[entry.symbol] !== undefined)
-      .map((entry) => [entry.symbol, adjoint[entry.symbol] ?? 0]),
-  )
+  const slopes: Record<string, number> = {}
+  for (const { entry, symbol } of entries) {
+    const slope = adjoint[symbol]
+    if (entry === 'input' && slope !== undefined) slopes[symbol] = slope
+  }
+  return slopes
 }
 
 /** Computes the steps again with one input changed and returns the values of all symbols. */

@@ -7,7 +7,9 @@ interface Use {
   readonly assumption: Assumption
   readonly value: string
   readonly override: SpecModel['assumptions'][number] | undefined
-  readonly usedBy: string[]
+  readonly usedBy: Set<string>
+  /** Read once from the text of the value; undefined until asked for. */
+  number?: AssumedNumber | undefined
 }
 
 /** A number that an assumption stands in for, with the kind in which it was given. */
@@ -31,6 +33,7 @@ const numberOf = (assumption: Assumption, text: string): AssumedNumber | null =>
 export class AssumptionRegister {
   private readonly overrides: ReadonlyMap<string, SpecModel['assumptions'][number]>
   private readonly uses = new Map<string, Use>()
+  private readonly byVessel = new Map<string, Set<string>>()
 
   constructor(overrides: SpecModel['assumptions']) {
     this.overrides = new Map(overrides.map((override) => [override.id, override]))
@@ -46,19 +49,22 @@ export class AssumptionRegister {
       if (override && assumption.kind === 'words' && !assumption.choices?.includes(override.value.value))
         override = undefined
       if (override && assumption.kind !== 'words' && !numberOf(assumption, override.value.value)) override = undefined
-      use = { assumption, override, value: override?.value.value ?? assumption.value, usedBy: [] }
+      use = { assumption, override, value: override?.value.value ?? assumption.value, usedBy: new Set() }
       this.uses.set(id, use)
     }
-    if (!use.usedBy.includes(vessel)) use.usedBy.push(vessel)
+    use.usedBy.add(vessel)
+    const ids = this.byVessel.get(vessel)
+    if (ids) ids.add(id)
+    else this.byVessel.set(vessel, new Set([id]))
     return use
   }
 
   /** The number assumed, in SI units of its kind. */
   number(id: string, vessel: string): AssumedNumber {
     const use = this.use(id, vessel)
-    const number = numberOf(use.assumption, use.value)
-    if (!number) throw new Error(`assumption ${id} has a value that is no quantity: ${use.value}`)
-    return number
+    use.number ??= numberOf(use.assumption, use.value) ?? undefined
+    if (!use.number) throw new Error(`assumption ${id} has a value that is no quantity: ${use.value}`)
+    return use.number
   }
 
   /** The number that would be assumed, without counting it as used. */
@@ -78,7 +84,8 @@ export class AssumptionRegister {
 
   /** Ids that a vessel leaned on, in order of number. */
   usedBy(vessel: string): readonly string[] {
-    return [...this.uses.values()].filter((use) => use.usedBy.includes(vessel)).map((use) => use.assumption.id)
+    const ids = this.byVessel.get(vessel)
+    return ids ? [...this.uses.keys()].filter((id) => ids.has(id)) : []
   }
 
   list(): readonly UsedAssumption[] {
@@ -94,7 +101,7 @@ export class AssumptionRegister {
         source,
         because,
         path: override?.path ?? assumption.overriddenBy,
-        usedBy,
+        usedBy: [...usedBy],
       }
       return override ? { ...used, reason: override.reason.value } : used
     })

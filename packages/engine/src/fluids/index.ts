@@ -9,7 +9,13 @@ export type { ExpansionCheck, FluidReading, Glycol } from './glycol.ts'
 export type { InhibitedGlycolTable } from './inhibited-glycol.ts'
 export type { PolynomialTable } from './polynomial.ts'
 export { inValidity } from './fluid.ts'
-export { enthalpy, saturationPressure, saturationSlope, saturationTemperature } from './if97.ts'
+export {
+  enthalpy,
+  saturationPressure,
+  saturationSlope,
+  saturationTemperature,
+  volume as specificVolume,
+} from './if97.ts'
 export { steamFunctions, vapourDensityAt, type SteamFunctionName } from './steam.ts'
 export { water } from './water.ts'
 export { if97Region1, if97Region1Reducing } from '../tables/iapws-r7-97.region-1.ts'

@@ -21,8 +21,26 @@ const alongSaturation = (T: number, partials: typeof volumePartials): number => 
   return byTemperature + byPressure * saturationSlope(T)
 }
 
-const v = (T: number): number => volume(T, saturationPressure(T))
-const dv = (T: number): number => alongSaturation(T, volumePartials)
+/**
+ * The last few values of a function of the temperature. One calculation asks for the same two or three temperatures again
+ * and again: for the step, for the static head, for the slope.
+ */
+const recalling = (compute: (T: number) => number): ((T: number) => number) => {
+  const temperatures = new Float64Array(4).fill(Number.NaN)
+  const values = new Float64Array(4)
+  let next = 0
+  return (T) => {
+    for (let n = 0; n < 4; n += 1) if (temperatures[n] === T) return values[n] ?? Number.NaN
+    const value = compute(T)
+    temperatures[next] = T
+    values[next] = value
+    next = (next + 1) % 4
+    return value
+  }
+}
+
+const v = recalling((T) => volume(T, saturationPressure(T)))
+const dv = recalling((T) => alongSaturation(T, volumePartials))
 
 /** Density in kg/m3 of the saturated liquid, or at P in Pa absolute where it is liquid there; NaN elsewhere. */
 const density = (T: number, P?: number): number => {
