@@ -2,8 +2,8 @@ import { limitOf, type Method, sensitivities, type TraceInput } from '@coldfill/
 import type { HeadroomRow, SelectedVessel } from './result.ts'
 import type { VesselContext } from './vessel-context.ts'
 
-/** Inputs that are constants of nature or of the material, which nobody moves. */
-const FIXED = /^alpha/
+/** Constants of the material and published dimensions, which nobody moves. */
+const isFixed = (input: TraceInput): boolean => input.symbol.startsWith('alpha') || input.origin.from === 'table'
 
 /**
  * How the required volume answers to each input, and where the chosen vessel stops being enough: by volume, or by the water
@@ -31,7 +31,7 @@ export const headroomRows = (
     return required <= selected.volume * selected.quantity && takenUp <= acceptance
   }
   return chain
-    .filter((entry): entry is TraceInput => entry.entry === 'input' && !FIXED.test(entry.symbol))
+    .filter((entry): entry is TraceInput => entry.entry === 'input' && !isFixed(entry))
     .flatMap((input) => {
       const sensitivity = slopes[input.symbol]
       if (sensitivity === undefined || sensitivity === 0 || !Number.isFinite(sensitivity)) return []
