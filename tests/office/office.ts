@@ -12,7 +12,7 @@ export const leftOut = hasOffice ? '' : ' (left out: LibreOffice is not installe
  * Converts a file with LibreOffice, in a profile of its own. Its exit code says nothing, so the output file is what
  * counts; without one this throws.
  */
-export const convert = (name: string, bytes: Uint8Array, to: 'pdf' | 'xlsx'): Uint8Array => {
+export const convert = (name: string, bytes: Uint8Array, to: 'pdf' | 'xlsx' | 'odt'): Uint8Array => {
   const folder = mkdtempSync(join(tmpdir(), 'coldfill-office-'))
   try {
     const source = join(folder, name)
