@@ -67,7 +67,7 @@ export const createApp = (deps: Deps): Express => {
     next()
   })
   app.use('/api', api(deps))
-  app.use('/schema', schemaRouter())
+  app.use('/schema', schemaRouter(), unknownAddress)
   app.use(webApp(deps.webFolder))
   app.use(unknownAddress)
   app.use(errorHandler(deps.log))

@@ -8,7 +8,7 @@ coldfill: 1
 project:
   number: ${JSON.stringify(number)}
   title: ${JSON.stringify(title)}
-  client: ""                        # who it is prepared for
+  # client: who it is prepared for
   elevation: 0 ft                   # height above sea level of the plant room
   units: US                         # US or SI: what schedules and documents show
 

@@ -1,7 +1,8 @@
 import { readFile } from 'node:fs/promises'
 import { join } from 'node:path'
-import express, { Router } from 'express'
+import express, { type RequestHandler, Router } from 'express'
 import { notFound } from './errors.ts'
+import { unknownAddress } from './middleware/error-handler.ts'
 
 const NONCE = '__CSP_NONCE__'
 
@@ -10,21 +11,7 @@ const NONCE = '__CSP_NONCE__'
  * for the editor's style sheets.
  */
 export const webApp = (folder: string): Router => {
-  const router = Router()
-  router.use(
-    '/assets',
-    express.static(join(folder, 'assets'), { immutable: true, maxAge: '1y', index: false, redirect: false }),
-  )
-  router.use(express.static(folder, { index: false, redirect: false, maxAge: '1h' }))
-  router.get('/*splat', async (req, res) => {
-    // A missing file is missing; only addresses of the app itself fall through to it.
-    if (/\.[a-z0-9]+$/i.test(req.path) && !req.accepts('html')) throw notFound()
-    await send(res)
-  })
-  router.get('/', async (_req, res) => {
-    await send(res)
-  })
-  const send = async (res: express.Response): Promise<void> => {
+  const send: RequestHandler = async (_req, res) => {
     let page: string
     try {
       page = await readFile(join(folder, 'index.html'), 'utf8')
@@ -36,5 +23,15 @@ export const webApp = (folder: string): Router => {
       .type('html')
       .send(page.replaceAll(NONCE, String(res.locals['nonce'])))
   }
+  const router = Router()
+  router.use(
+    '/assets',
+    express.static(join(folder, 'assets'), { immutable: true, maxAge: '1y', index: false, redirect: false }),
+    unknownAddress,
+  )
+  // Before the files of the folder: the page is never sent without its nonce.
+  router.get('/index.html', send)
+  router.use(express.static(folder, { index: false, redirect: false, maxAge: '1h' }))
+  router.get(['/', '/*splat'], send)
   return router
 }
