@@ -2,7 +2,7 @@ import { water } from '@coldfill/engine'
 import { strFromU8, unzipSync } from 'fflate'
 import { beforeAll, describe, expect, it } from 'vitest'
 import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
-import { clinicProject, documentOptions } from '../testing/index.ts'
+import { clinicProject, documentOptions, si } from '../testing/index.ts'
 import { cautions } from '../words/cautions.ts'
 import { writeSubmittal } from './write-submittal.ts'
 
@@ -137,6 +137,34 @@ describe('the submittal', () => {
 
   it('says why a vessel has no size', () => {
     expect(paragraphs(document, 'CalculationAnswer').join('\n')).toMatch(/No vessel can do it\. .*\n.*\nNot sized\. /)
+  })
+
+  it('says how far each input may move before the chosen vessel is too small', async () => {
+    const headroom = [
+      {
+        entry: 'TET-1/storage-temperature',
+        symbol: 't_h',
+        name: 'storage temperature',
+        kind: 'temperature',
+        value: si('140 °F', 'temperature'),
+        sensitivity: 0.001,
+        limit: si('167 °F', 'temperature'),
+      },
+    ] as const
+    const vessels = project.vessels.map((vessel) => (vessel.mark === 'TET-1' ? { ...vessel, headroom } : vessel))
+    const written = partsOf(await writeSubmittal({ ...project, vessels }, documentOptions('US'))).get(
+      'word/document.xml',
+    )
+    const rows = all(written ?? '', 'tbl').find((table) => table.includes('w:val="TET-1, headroom"'))
+    // By hand: 0.001 m3 a kelvin is 1 L / 1.8 = 0.5556 L a degree Fahrenheit, at 3.785411784 L a gallon 0.147 gal.
+    expect(
+      all(rows ?? '', 'tc')
+        .map(textOf)
+        .slice(5),
+    ).toEqual(['th', 'Storage temperature', '140 °F', '+0.147 gal a °F', '167 °F'])
+    expect(textOf(written ?? '')).toContain(
+      'Chosen: Invented Vessel Works T 50, 50 gal each, rated 150 psig and 200 °F, stamped.',
+    )
   })
 
   it('uses A4 for SI and Letter for US unless told otherwise', async () => {
