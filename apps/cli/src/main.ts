@@ -11,6 +11,7 @@ const verbs: Readonly<Record<string, () => Promise<Verb>>> = {
   fluid: async () => (await import('./commands/fluid.ts')).fluid,
   schema: async () => (await import('./commands/schema.ts')).schema,
   explain: async () => (await import('./commands/explain.ts')).explain,
+  verify: async () => (await import('./commands/verify.ts')).verify,
 }
 
 const usage = `coldfill VERB …
@@ -22,6 +23,7 @@ const usage = `coldfill VERB …
   fluid --fluid "propylene glycol 40 % mass" --temperature "20 °C" [--pressure "3 bar abs"]
   schema                         the JSON Schema of the spec
   explain CODE                   what a finding means and how to mend it
+  verify                         every published case: expected, computed, deviation
 
   --format text|json|github|sarif   --fail-on error|warning|note   --units US|SI
 

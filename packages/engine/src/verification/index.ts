@@ -1,0 +1,2 @@
+export { casesNotRun } from './cases/not-run.ts'
+export { verificationCases, verificationRows, type VerificationRow, type Verdict } from './rows.ts'
