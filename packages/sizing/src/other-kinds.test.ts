@@ -248,3 +248,20 @@ describe('steam vessels', () => {
     expect(only(result).status).toBe('blocked')
   })
 })
+
+describe('pressure tank by further rules', () => {
+  const booster = (vessel: string): string =>
+    spec('domestic cold water', '    pressure: { cut-in: 30 psi, cut-out: 50 psi }', `kind: pressure tank, ${vessel}`)
+
+  // Recommended Standards for Water Works, 7.2.2 b: ten times the flow of the largest pump.
+  it('is 2,500 gal for a pump of 250 gpm by the rule for public water', () => {
+    expect(off(gallons(sized(booster('method: ten states, pump-flow: 250 gpm'))), 2500)).toBeLessThanOrEqual(1e-9)
+  })
+
+  // Common practice, no source: the least demand for the time that the pumps stay off, 4 gpm for 5 min.
+  it('draws down 20 gal for a least demand of 4 gpm and five minutes', () => {
+    const vessel = sized(booster('low-demand: 4 gpm, off-time: 5 min'))
+    expect(vessel.method).toBe('off time')
+    expect(off(gallons(vessel, 'drawdown'), 20)).toBeLessThanOrEqual(1e-9)
+  })
+})

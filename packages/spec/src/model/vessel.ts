@@ -363,6 +363,8 @@ export const vesselKinds = {
           drawdown: 'the drawdown is given',
           'run time': 'the flow of the pump for its least run time',
           'starts per hour': 'a quarter of a cycle at half the flow of the pump',
+          'off time': 'the least demand while variable-speed pumps stay off',
+          'ten states': 'ten minutes of the largest pump, for public water systems',
         },
         'How the drawdown is found.',
         'starts per hour',
@@ -372,15 +374,21 @@ export const vesselKinds = {
       'starts-per-hour': number('Most starts of the pump in an hour.', '6', { least: 0 }),
       'run-time': quantity(['time'], 'Least time that the pump runs.', '2 min', { positive: true }),
       drawdown: quantity(['volume'], 'Water given between cut-out and cut-in.', '25 gal', { positive: true }),
+      'low-demand': quantity(['flow'], 'Least demand, at which variable-speed pumps stop.', '4 gpm', {
+        positive: true,
+      }),
+      'off-time': quantity(['time'], 'Time for which the pumps stay off at the least demand.', '5 min', {
+        positive: true,
+      }),
       precharge: quantity(pressureReading, 'Pressure of the gas when the vessel is empty of water.', '38 psi', {
         fallback: '2 psi below cut-in, and then an assumption',
         positive: true,
       }),
     },
     needs: [
-      { keys: ['vessel.pump-flow', 'vessel.drawdown'], to: 'to know the drawdown' },
+      { keys: ['vessel.pump-flow', 'vessel.drawdown', 'vessel.low-demand'], to: 'to know the drawdown' },
       {
-        keys: ['vessel.starts-per-hour', 'vessel.run-time', 'vessel.drawdown'],
+        keys: ['vessel.starts-per-hour', 'vessel.run-time', 'vessel.drawdown', 'vessel.off-time'],
         to: 'to know the drawdown',
         only: { key: 'method', is: [''] },
       },
@@ -391,6 +399,12 @@ export const vesselKinds = {
         to: 'to be sized by starts per hour',
         only: { key: 'method', is: ['starts per hour'] },
       },
+      ...(['vessel.low-demand', 'vessel.off-time'] as const).map((key): Need => ({
+        keys: [key],
+        to: 'to be sized by off time',
+        only: { key: 'method', is: ['off time'] },
+      })),
+      { keys: ['vessel.pump-flow'], to: 'to be sized by ten states', only: { key: 'method', is: ['ten states'] } },
       { keys: ['pressure.cut-in'], to: 'to know when the pump starts' },
       { keys: ['pressure.cut-out'], to: 'to know when the pump stops' },
     ],

@@ -14,13 +14,15 @@ import { commonPractice } from '../../sources/common-practice.ts'
 import { groundwaterColumn } from '../../sources/groundwater-column.ts'
 import { idaho580108 } from '../../sources/idaho-58-01-08.ts'
 import { waDoh } from '../../sources/wa-doh.ts'
+import { tenStatesTank } from './ten-states.ts'
 
 const gasLaw = cite(boyle, 'gas volume at charge, cut-in and cut-out')
 const cycle = cite(waDoh, 'a quarter of a cycle at half the flow of the pump')
+const offRule = cite(commonPractice, 'shutdown of variable-speed sets: the least demand for 3 to 30 minutes')
 const runRule = cite(commonPractice, 'the pump runs its least time on the drawdown')
 
 type Way = {
-  readonly method: 'drawdown' | 'run time' | 'starts per hour'
+  readonly method: 'drawdown' | 'run time' | 'starts per hour' | 'off time'
   readonly impliedBy: readonly string[]
   readonly inputs: Readonly<Record<string, MethodInput>>
   readonly steps: Readonly<Record<string, MethodStep>>
@@ -114,6 +116,29 @@ const ways: readonly Way[] = [
       },
     ],
   },
+  {
+    method: 'off time',
+    impliedBy: ['low-demand', 'off-time'],
+    inputs: {
+      Q_l: keyed('flow', 'least demand, at which the pumps stop', 'vessel', 'low-demand'),
+      tau: keyed('time', 'time for which the pumps stay off', 'vessel', 'off-time'),
+    },
+    steps: { V_d: step('volume', 'drawdown', 'Q_l * tau', offRule) },
+    basis:
+      'The drawdown carries the least demand while variable-speed pumps stay off. A rule of the trade, 3 to 30 minutes; large vessels let drinking water stand.',
+    examples: [
+      {
+        id: 'off-time-five-minutes',
+        title: 'Least demand of 4 gpm for five minutes',
+        origin: 'by hand',
+        source: offRule,
+        given: { ...pressures, Q_l: '4 gpm', tau: '5 min', p_0: '28 psig' },
+        expected: { V_d: '20 gal', V_t: '67.730445 gal' },
+        tolerance: 1e-7,
+        because: 'By hand: 20 / (42.7/44.7 − 42.7/64.7).',
+      },
+    ],
+  },
 ]
 
 const build = (way: Way, written: boolean): Method =>
@@ -204,4 +229,7 @@ const build = (way: Way, written: boolean): Method =>
   })
 
 /** With a written precharge first, because it is the more particular. */
-export const pressureTankMethods: readonly Method[] = ways.flatMap((way) => [build(way, true), build(way, false)])
+export const pressureTankMethods: readonly Method[] = [
+  ...ways.flatMap((way) => [build(way, true), build(way, false)]),
+  tenStatesTank,
+]

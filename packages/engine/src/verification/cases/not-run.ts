@@ -23,11 +23,6 @@ export const casesNotRun: readonly { readonly id: string; readonly title: string
   },
   { id: 'D25', title: '28 L a person and day at 60 °C (CTE DB-HE4)', reason: 'The method is not offered.' },
   {
-    id: 'N05',
-    title: 'Ten times the flow of the largest pump (Ten States)',
-    reason: 'A rule for public water, held by a check.',
-  },
-  {
     id: 'N08',
     title: 'Pressure vessel by CTE DB-HS4',
     reason: 'The formula is from memory and odd in its physics, so it is not offered.',

@@ -134,6 +134,19 @@ export const vesselCases: readonly VerificationCase[] = [
   ),
   byMethod(
     {
+      id: 'N05',
+      source: 'Recommended Standards for Water Works (Ten States, 2012 and 2018), 7.2.2 b',
+      title: 'Pump of 250 gpm',
+      origin: 'published',
+      tolerance: 0.001,
+      because: 'Arithmetic only.',
+    },
+    'pressure-tank.ten-states',
+    { Q_p: '250 gpm', p_on: '40 psig', p_off: '60 psig' },
+    { V_t: '2500 gal' },
+  ),
+  byMethod(
+    {
       id: 'N06',
       source: 'Washington State DOH, Water System Design Manual 331-123 (2009), equation 11-2',
       title: '50 gpm, 40 to 60 psig, six starts an hour; without the water seal of 47.0 gal',
