@@ -1,7 +1,7 @@
 import { type ChildProcess, spawn } from 'node:child_process'
 import { once } from 'node:events'
 import { existsSync, mkdtempSync, readFileSync, rmSync, utimesSync, writeFileSync } from 'node:fs'
-import { tmpdir } from 'node:os'
+import { hostname, tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
@@ -77,9 +77,9 @@ describe('the file in a data folder', () => {
   })
 
   it('does not take another process for the one whose number it was given', async () => {
-    const { hostname } = await import('node:os')
     leave({ pid: process.ppid, host: hostname(), started: '1' })
     const lock = await lockDataFolder(folder)
+    expect(JSON.parse(readFileSync(join(folder, 'lock.json'), 'utf8'))).toMatchObject({ pid: process.pid })
     await lock.release()
   })
 
@@ -95,6 +95,7 @@ describe('the file in a data folder', () => {
   it('holds nothing where it cannot be read', async () => {
     writeFileSync(join(folder, 'lock.json'), 'half a fi')
     const lock = await lockDataFolder(folder)
+    expect(JSON.parse(readFileSync(join(folder, 'lock.json'), 'utf8'))).toMatchObject({ pid: process.pid })
     await lock.release()
   })
 })

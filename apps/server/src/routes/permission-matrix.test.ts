@@ -156,10 +156,8 @@ describe.each(MATRIX)('$route at $path', (line) => {
   if (line.path.startsWith('/office/') && !line.path.includes('MAIL')) expected.stranger = 'in'
   it.each(Object.entries(expected))('%s: %s', async (who, status) => {
     const got = await ask(line, who as Who)
-    if (status === 'in') {
-      expect(NOT_IN.has(got), `got ${got}`).toBe(false)
-      expect(got).toBeLessThan(500)
-    } else expect(got).toBe(status)
+    // Being let in shows in any answer but these; a fault of the server is never one.
+    expect(NOT_IN.has(got) || got >= 500 ? got : 'in').toBe(status)
   })
 })
 

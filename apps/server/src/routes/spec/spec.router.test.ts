@@ -71,7 +71,7 @@ describe('PUT spec', () => {
         team.consultant.put(`${team.at}/spec`).send({ text: loopSpec({ title }), baseVersion: version }),
       ),
     )
-    expect(saves.map(({ status }) => status).toSorted()).toEqual([200, 409, 409])
+    expect(saves.map(({ status }) => String(status)).toSorted()).toEqual(['200', '409', '409'])
     expect((await read()).version).toBe(version + 1)
   })
 
