@@ -87,7 +87,7 @@ const shown = (text: string, finding: Finding, reading: SpecReading): string => 
 export interface ExpectedDiagnostic {
   readonly code: FindingCode
   /** How many more findings the one mistake may give; none where not said. */
-  readonly more?: number
+  readonly more?: number | undefined
 }
 
 /**

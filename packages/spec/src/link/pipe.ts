@@ -1,7 +1,7 @@
 import type { Vocabulary } from '../model/spec-model.ts'
-import { choiceHint, wrongChoice } from '../read/choice.ts'
+import { wrongChoice } from '../read/choice.ts'
 import type { Context } from '../read/context.ts'
-import { oneOf } from '../read/nearest.ts'
+import { allOf } from '../read/nearest.ts'
 import type { At } from '../report.ts'
 
 /** Case, the kind of cross and doubled or missing spaces do not tell sizes apart. */
@@ -53,8 +53,8 @@ export const linkPipeSize = (context: Context, at: At, family: string, written: 
   const near = neighbours(sizes, written)
   context.report.add('CF-S041', at, {
     message: `\`${family}\` has no size \`${written}\`.`,
-    hint: near.length === 0 ? 'It has no sizes.' : `Sizes next to it are ${oneOf(near)}.`,
-    fixes: choiceHint(at, written, near).fixes,
+    hint: near.length === 0 ? 'It has no sizes.' : `Sizes next to it are ${allOf(near)}.`,
+    fixes: near.map((size) => ({ title: `Write ${size}`, span: at.span, text: size })),
   })
   return undefined
 }

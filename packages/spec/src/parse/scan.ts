@@ -174,7 +174,7 @@ export const createScan = (report: Report, text: string): Scan => {
           'CF-Y002',
           { path: '', span },
           {
-            message: `The ${mark === '[' || mark === '{' ? 'bracket' : 'quotation mark'} \`${mark}\` that opens here is not closed.`,
+            message: `The ${mark === '[' ? 'bracket' : mark === '{' ? 'brace' : 'quotation mark'} \`${mark}\` that opens here is not closed.`,
             hint: `Write \`${closing}\` where it ends.`,
           },
         )

@@ -3,7 +3,7 @@ import type { At, Edit } from '../report.ts'
 import type { Context } from './context.ts'
 import { nearest, oneOf } from './nearest.ts'
 
-const MOST_LISTED = 12
+const MOST_LISTED = 20
 
 /** The choices, and the nearest to what was written, for the hint and the fix. */
 export const choiceHint = (
@@ -16,7 +16,7 @@ export const choiceHint = (
   const list =
     listed.length === 0
       ? ''
-      : `Write ${oneOf(listed.slice(0, MOST_LISTED))}${listed.length > MOST_LISTED ? ' or another of its kind' : ''}.`
+      : `Write ${oneOf(listed.slice(0, MOST_LISTED))}${listed.length > MOST_LISTED ? ' or another of the reference' : ''}.`
   return {
     hint: near === undefined ? list : `Did you mean \`${near}\`? ${list}`.trim(),
     fixes: near === undefined ? [] : [{ title: `Write ${near}`, span: at.span, text: near }],

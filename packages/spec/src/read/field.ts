@@ -45,6 +45,16 @@ const outOfRange = (context: Context, at: At, message: string, example: string):
   return undefined
 }
 
+/** Few mean an absolute pressure where a gauge reading may stand, so it is not offered. */
+const usualProblem = (field: QuantityField, text: string): QuantityProblem | undefined => {
+  if (!field.kinds.includes('gauge pressure')) return undefined
+  const reading = parseQuantity(
+    text,
+    field.kinds.filter((kind) => kind !== 'absolute pressure'),
+  )
+  return reading.ok ? undefined : reading.problem
+}
+
 const readQuantity = (
   context: Context,
   field: QuantityField,
@@ -53,7 +63,7 @@ const readQuantity = (
 ): FieldValue<QuantityField> | undefined => {
   const reading = parseQuantity(text, field.kinds)
   if (!reading.ok) {
-    reportQuantity(context, at, reading.problem, field.example)
+    reportQuantity(context, at, usualProblem(field, text) ?? reading.problem, field.example)
     return undefined
   }
   const { quantity } = reading

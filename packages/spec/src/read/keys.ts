@@ -1,7 +1,7 @@
 import { below } from '../parse/source-tree.ts'
 import type { Edit } from '../report.ts'
 import { type Block, type Context, type Entry, keyAt } from './context.ts'
-import { nearest, oneOf } from './nearest.ts'
+import { allOf, nearest, oneOf } from './nearest.ts'
 
 const MOST_LISTED = 16
 
@@ -36,19 +36,25 @@ export interface UnknownKey {
   /** "an expansion tank", "`pressure`" */
   readonly owner: string
   readonly known: readonly string[]
+  /** Those of them that are shown; all where not said. */
+  readonly listed?: readonly string[]
   /** What a person who writes this key here most likely looked for. */
   readonly elsewhere?: (key: string) => string | undefined
 }
 
 /** Says that a block has no such key, and which it has. */
-export const unknownKey = (context: Context, entry: Entry, { owner, known, elsewhere }: UnknownKey): void => {
+export const unknownKey = (
+  context: Context,
+  entry: Entry,
+  { owner, known, listed = known, elsewhere }: UnknownKey,
+): void => {
   const place = elsewhere?.(entry.key)
   const near = place === undefined ? nearest(entry.key, known) : undefined
   if (near !== undefined) context.meant.add(entry.path.slice(0, entry.path.length - entry.key.length) + near)
   const list =
-    known.length === 0
+    listed.length === 0
       ? 'It has no keys.'
-      : `Its keys are ${oneOf(known.slice(0, MOST_LISTED))}${known.length > MOST_LISTED ? ' and others' : ''}.`
+      : `Its keys are ${allOf(listed.slice(0, MOST_LISTED))}${listed.length > MOST_LISTED ? ' and others' : ''}.`
   context.report.add('CF-S003', keyAt(entry), {
     message: `${owner} has no key \`${entry.key}\`.`,
     hint: place ?? (near === undefined ? list : `Did you mean \`${near}\`? ${list}`),

@@ -11,7 +11,7 @@ import { readSystemFluid } from './fluid.ts'
 import { missingKey, unknownKey } from './keys.ts'
 import { readMark } from './mark.ts'
 import { checkNeeds, type WrittenVessel } from './needs.ts'
-import { oneOf } from './nearest.ts'
+import { allOf } from './nearest.ts'
 import { expectBlock } from './shape.ts'
 import { readVessel } from './vessel.ts'
 
@@ -25,7 +25,7 @@ const unused = (context: Context, entry: Entry, service: Service, keys: readonly
     hint:
       keys.length === 0
         ? 'Take it out, or check `service`.'
-        : `Such a system uses ${oneOf(keys)}. Take it out, or check \`service\`.`,
+        : `Such a system uses ${allOf(keys)}. Take it out, or check \`service\`.`,
   })
 
 /** Reads `temperatures:` or `pressure:`. A key that the service does not use is said and left out. */
@@ -47,6 +47,7 @@ const readReadings = <T extends Fields>(
   const read = readFields(context, block, service ? pick(fields, used) : fields, {
     owner: `\`${block.path.split('.').at(-1)}\``,
     others: service ? Object.keys(fields).filter((key) => !used.includes(key)) : [],
+    ...(service && { listed: used }),
     elsewhere: entry.key === 'pressure' ? inTemperatures : inPressure,
   })
   if (service)

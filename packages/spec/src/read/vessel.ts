@@ -16,7 +16,7 @@ import { type Block, type Context, type Entry, entryOf, valueAt } from './contex
 import { readField, readFields } from './field.ts'
 import { missingKey } from './keys.ts'
 import { readMark } from './mark.ts'
-import { oneOf } from './nearest.ts'
+import { allOf, oneOf } from './nearest.ts'
 import type { WrittenVessel } from './needs.ts'
 import { expectBlock, expectText } from './shape.ts'
 
@@ -112,7 +112,7 @@ const misplaced = (context: Context, entry: Entry, kind: VesselKind, service: Se
     hint:
       others.length === 0
         ? 'Check `kind` and `service`.'
-        : `Vessels of such a system are ${oneOf(others)}. Check \`kind\` and \`service\`.`,
+        : `Vessels of such a system are ${allOf(others)}. Check \`kind\` and \`service\`.`,
   })
 }
 
@@ -129,7 +129,7 @@ export const readVessel = (context: Context, entry: Entry, service: Service | un
   if (!sized)
     context.report.add('CF-S021', valueAt(named.entry), {
       message: `This version does not size ${kind}s yet; \`${entry.key}\` is left out of the schedule.`,
-      hint: `It sizes ${oneOf(sizedKinds(context))}. Keep the vessel in the spec or take it out.`,
+      hint: `It sizes ${allOf(sizedKinds(context))}. Keep the vessel in the spec or take it out.`,
     })
   const place = valueAt(named.entry)
   const read = {
