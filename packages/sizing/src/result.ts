@@ -64,6 +64,10 @@ export interface VesselResult {
   readonly serves: string
   readonly service: string
   readonly fluid: string
+  /** The fluid in numbers, so that whoever recomputes a property need not read the label. Fractions of 1. */
+  readonly solution: { readonly base: 'water' | 'propylene glycol' | 'ethylene glycol'; readonly massFraction: number }
+  /** Where the vessel stands; empty where the spec does not say. */
+  readonly location: string
   readonly status: VesselStatus
   /** Why an infeasible or blocked vessel has no size, one sentence. */
   readonly reason?: string

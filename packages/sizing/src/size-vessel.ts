@@ -185,6 +185,8 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     serves: vessel.fields.serves?.value ?? system.title?.value ?? system.id,
     service: system.service?.value ?? '',
     fluid: fluid.label,
+    solution: { base: fluid.base, massFraction: fluid.massFraction },
+    location: vessel.fields.location?.value ?? '',
     notes: vessel.fields.note ? [vessel.fields.note.value] : [],
   }
   let outcome: Outcome

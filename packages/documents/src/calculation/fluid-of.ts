@@ -1,14 +1,9 @@
-import { fluid, type Fluid, type FluidBase } from '@coldfill/engine'
+import { fluid, type Fluid } from '@coldfill/engine'
+import type { VesselResult } from '@coldfill/sizing'
 
-const LABEL = /^(propylene glycol|ethylene glycol) ([0-9.]+) % (vol|mass)$/
-
-/** The fluid that a result names by its label. An unknown label is a programmer's mistake and throws. */
-export const fluidOf = (label: string): Fluid => {
-  const [, base, percent, by] = LABEL.exec(label) ?? []
-  const read =
-    base === undefined
-      ? fluid(label as FluidBase)
-      : fluid(base as FluidBase, { value: Number(percent) / 100, by: by === 'vol' ? 'volume' : 'mass' })
-  if (!read.ok) throw new Error(`${label}: ${read.message}`)
+/** The fluid of a vessel. A result without one is a programmer's mistake and throws. */
+export const fluidOf = ({ solution: { base, massFraction } }: Pick<VesselResult, 'solution'>): Fluid => {
+  const read = base === 'water' ? fluid(base) : fluid(base, { value: massFraction, by: 'mass' })
+  if (!read.ok) throw new Error(read.message)
   return read.fluid
 }

@@ -107,7 +107,7 @@ const checkLines = (vessel: Vessel, calculation: VesselCalculation, context: Sub
 
 const vesselLines = (vessel: Vessel, context: SubmittalContext): FileChild[] => {
   const { result, options, headings } = context
-  const calculation = vesselCalculation(vessel, result, options.units, fluidOf(vessel.fluid).functions)
+  const calculation = vesselCalculation(vessel, result, options.units, fluidOf(vessel).functions)
   const findings = result.findings.filter(
     (finding) => finding.path === vessel.path || finding.path.startsWith(`${vessel.path}.`),
   )

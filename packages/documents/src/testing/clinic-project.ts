@@ -126,6 +126,8 @@ const heatingTank = (functions: Readonly<Record<string, FormulaFunction>>): Vess
     serves: 'Heating water',
     service: 'heating water',
     fluid: 'water',
+    solution: { base: 'water', massFraction: 0 },
+    location: '',
     status: 'sized',
     results: {
       'required-volume': b.result('V_t', 'Required volume'),
@@ -214,6 +216,8 @@ const thermalTank = (functions: Readonly<Record<string, FormulaFunction>>): Vess
     serves: 'Domestic hot water',
     service: 'domestic hot water',
     fluid: 'water',
+    solution: { base: 'water', massFraction: 0 },
+    location: '',
     status: 'sized',
     results: {
       'required-volume': b.result('V_t', 'Required volume'),

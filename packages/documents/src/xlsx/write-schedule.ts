@@ -44,7 +44,7 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   const calculations = result.vessels
     .filter((vessel) => vessel.trace.length > 0)
     .map((vessel): CalculationSheet => {
-      const fluid = fluidOf(vessel.fluid)
+      const fluid = fluidOf(vessel)
       return {
         name: names.take(vessel.mark),
         vessel,

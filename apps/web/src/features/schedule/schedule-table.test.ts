@@ -20,6 +20,8 @@ const vessel = (mark: string, more: Partial<Vessel>): Vessel => ({
   serves: 'Heating water',
   service: 'heating water',
   fluid: 'water',
+  solution: { base: 'water', massFraction: 0 },
+  location: '',
   status: 'sized',
   results: {},
   trace: [],
