@@ -50,7 +50,7 @@ export const anotherTab = async ({ page, complaints }: Person): Promise<Person> 
 export const toSheet = async (page: Page, name: string): Promise<void> => {
   await page
     .getByRole('navigation', { name: 'Sheets' })
-    .getByRole('link', { name: new RegExp(`${name}`, 'u') })
+    .getByRole('link', { name: new RegExp(name, 'u') })
     .click()
   await page.getByRole('heading', { name, level: 1 }).waitFor()
 }
