@@ -6,21 +6,18 @@ const kinds = { schedule: 'Equipment schedule, workbook', submittal: 'Submittal,
 
 /** A file of a revision: what it is, size, fingerprint, and the way to get it. */
 export const FileRow = ({ file }: { readonly file: RevisionFile }) => (
-  <li className="flex flex-wrap items-start justify-between gap-x-6 gap-y-2 border-b border-hair py-2.5">
-    <div className="min-w-0 flex-1 basis-72">
-      <p className="font-semibold break-words">{file.name}</p>
-      <p className="text-cell text-pencil">
-        {kinds[file.kind]} · <span className="figures">{fileSize(file.size)}</span>
-      </p>
-      <p className="font-mono text-zone break-all text-pencil">
-        <abbr title="fingerprint of the bytes" className="no-underline">
-          SHA-256
-        </abbr>{' '}
-        {file.sha256}
-      </p>
+  <li className="border-b border-hair py-2.5">
+    <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
+      <div className="min-w-0">
+        <p className="font-semibold break-words">{file.name}</p>
+        <p className="text-cell text-pencil">
+          {kinds[file.kind]} · <span className="figures">{fileSize(file.size)}</span>
+        </p>
+      </div>
+      <a href={file.href} download={file.name} aria-label={`Download ${file.name}`} className={buttonClass('plain')}>
+        Download
+      </a>
     </div>
-    <a href={file.href} download={file.name} className={buttonClass('plain')}>
-      Download {file.name}
-    </a>
+    <p className="mt-1 font-mono text-zone break-all text-pencil">SHA-256 {file.sha256}</p>
   </li>
 )

@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query'
 import { Link, type LoaderFunctionArgs } from 'react-router-dom'
 import { Frame } from '#components/layouts/frame.tsx'
 import { Sheet } from '#components/layouts/sheet.tsx'
-import { TitleStrip } from '#components/layouts/title-strip.tsx'
+import { NumberAndTitle, TitleStrip } from '#components/layouts/title-strip.tsx'
 import { paths } from '#config/paths.ts'
 import { handoverQuery } from '#features/handover/api/handover.ts'
 import { HandoverFiles } from '#features/handover/components/handover-files.tsx'
@@ -33,7 +33,7 @@ export function Component() {
             { caption: 'Prepared for', value: handover?.project.client || '—', room: 'wide' },
             {
               caption: 'Title',
-              value: handover ? `${handover.project.number} ${handover.project.title}` : number,
+              value: <NumberAndTitle number={number} title={handover?.project.title ?? ''} />,
               room: 'always',
               grows: true,
             },

@@ -96,6 +96,11 @@ export function Component() {
             {list.length === 0 ? (
               <div className="border-t-[3px] border-ink pt-3">
                 <p className="text-read">{filter === 'waiting' ? 'Nothing waits on you.' : 'No redline here.'}</p>
+                {project.revisions.length > 1 && (filter === 'closed' || filter === 'all') ? (
+                  <p className="mt-1 text-pencil">
+                    A closed redline stays with the revision it was written on: choose that under Content.
+                  </p>
+                ) : null}
                 {project.waitingOn.map(({ who, what }) => (
                   <p key={`${who} ${what}`} className="mt-1 text-pencil">
                     Waiting on {who}: {what}
@@ -113,7 +118,11 @@ export function Component() {
                   {thread ? (
                     <RedlineThread key={thread.number} project={number} redline={thread} rev={rev} />
                   ) : (
-                    <p className="text-pencil">Choose a redline to read it.</p>
+                    <p className="text-pencil">
+                      {chosen === null
+                        ? 'Choose a redline to read it.'
+                        : `Redline ${chosen} is not among these. A closed one stays with the revision it was written on.`}
+                    </p>
                   )}
                 </div>
               </div>

@@ -101,7 +101,10 @@ export function Component() {
       actions={
         <>
           <RevisionSwitch project={project} />
-          {changed ? (
+          {changed && changed.vessels.length === 0 ? (
+            <span className="text-cell text-pencil">No size changed since {revisionPhrase(changed.revision)}</span>
+          ) : null}
+          {changed && changed.vessels.length > 0 ? (
             <label className="inline-flex h-8 items-center gap-1.5 text-cell font-semibold">
               <input
                 type="checkbox"

@@ -37,3 +37,10 @@ export const TitleStrip = ({ fields }: { readonly fields: readonly StripField[] 
     ))}
   </dl>
 )
+
+/** Number and title of a project; on a phone the number alone. */
+export const NumberAndTitle = ({ number, title }: { readonly number: string; readonly title: string }) => (
+  <>
+    {number} <span className="hidden desk:inline">{title}</span>
+  </>
+)

@@ -1,5 +1,5 @@
 import { OUTCOME_LABELS, revisionTitle, type Project } from '@coldfill/contract'
-import { TitleStrip } from '#components/layouts/title-strip.tsx'
+import { NumberAndTitle, TitleStrip } from '#components/layouts/title-strip.tsx'
 import { StateWord } from '#components/ui/state-word.tsx'
 import { paths } from '#config/paths.ts'
 import { day } from '#lib/format.ts'
@@ -15,7 +15,7 @@ export const ProjectStrip = ({ project, sheet }: { readonly project: Project; re
         { caption: 'Prepared for', value: project.client || '—', to: paths.cover(project.number), room: 'wide' },
         {
           caption: 'Title',
-          value: `${project.number} ${project.title}`,
+          value: <NumberAndTitle number={project.number} title={project.title} />,
           to: paths.cover(project.number),
           room: 'always',
           grows: true,
