@@ -54,4 +54,9 @@ export const main = async (argv: readonly string[]): Promise<number> => {
   }
 }
 
+// A reader that has seen enough, as `| head`, closes the pipe; that is no failure of the command.
+process.stdout.on('error', (error: NodeJS.ErrnoException) => {
+  process.exit(error.code === 'EPIPE' ? exitStatus.ok : exitStatus.cannotWrite)
+})
+
 process.exitCode = await main(process.argv.slice(2))
