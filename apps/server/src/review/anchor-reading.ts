@@ -76,6 +76,16 @@ export const readAnchor = (anchor: Anchor, content: Content): Reading | null => 
   return anchor.type === 'row' ? readRow(vessel, content) : readCell(vessel, anchor.column, content)
 }
 
+/**
+ * What stands at an anchor that was written on an earlier revision. A cell that has become empty, as when its vessel can no longer be
+ * sized, is still a place: only a row that is gone leaves a redline adrift.
+ */
+export const readCarriedAnchor = (anchor: Anchor, content: Content): Reading | null => {
+  const reading = readAnchor(anchor, content)
+  if (reading || anchor.type !== 'cell') return reading
+  return content.result.vessels.some(({ mark }) => mark === anchor.mark) ? words('') : null
+}
+
 /** How an anchor stands in `now`, written when `then` was in front of the reviewer. */
 export const anchorState = (then: Reading | null, now: Reading | null): AnchorState => {
   if (!now) return 'adrift'

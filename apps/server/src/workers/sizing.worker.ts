@@ -9,4 +9,6 @@ port.on('message', ({ id, text }: SizingQuestion) => {
   const answer: SizingAnswer = { id, json: JSON.stringify(sizeSpec(text)) }
   port.postMessage(answer)
 })
+// The first sizing loads tables and compiles formulas; no text of a person pays for that out of its time limit.
+sizeSpec('')
 port.postMessage('ready')

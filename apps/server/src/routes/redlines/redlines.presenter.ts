@@ -1,6 +1,6 @@
 import type { Redline } from '@coldfill/contract'
 import { is, type ProjectAccess } from '../../policies/project-access.ts'
-import { type Content, anchorState, readAnchor } from '../../review/anchor-reading.ts'
+import { type Content, anchorState, readAnchor, readCarriedAnchor } from '../../review/anchor-reading.ts'
 import { type ProjectFacts, type RevisionRow, turnAfter } from '../../review/project-facts.ts'
 import { redlinePermissions } from '../../policies/redlines.ts'
 import type { MessageRow, RedlineRow } from './redlines.queries.ts'
@@ -15,7 +15,7 @@ export const presentRedline = (
   contents: { readonly viewed: RevisionRow; contentOf(revisionId: string): Content },
 ): Redline => {
   const written = facts.revisions.find((revision) => revision.id === row.revisionId)
-  const now = readAnchor(row.anchor, contents.contentOf(contents.viewed.id))
+  const now = readCarriedAnchor(row.anchor, contents.contentOf(contents.viewed.id))
   const then = readAnchor(row.anchor, contents.contentOf(row.revisionId))
   const last = messages.at(-1)
   const turn = row.state === 'open' && last ? turnAfter(facts.members, last.author.id) : null
