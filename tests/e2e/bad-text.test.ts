@@ -1,7 +1,7 @@
 import type { Browser } from 'playwright-core'
 import { afterAll, afterEach, beforeAll, expect, it } from 'vitest'
 import { launchBrowser } from './browser.ts'
-import { editorOf, overwriteSpec, type Person, picture, signIn } from './person.ts'
+import { editorOf, overwriteSpec, type Person, picture, signIn, typedText } from './person.ts'
 import { serve, type Served } from './serve.ts'
 
 /** What goes wrong in a text is said beside it; the text stays, and so does the server. */
@@ -9,7 +9,6 @@ let served: Served
 let browser: Browser
 let person: Person
 
-const inEditor = async (): Promise<string> => (await editorOf(person.page).innerText()).replaceAll('\u00a0', ' ')
 const findings = () => person.page.getByRole('tabpanel', { name: /^Findings/u })
 
 beforeAll(async () => {
@@ -41,8 +40,8 @@ it('broken YAML has a finding with its line, and keeps the last results', async 
       .getByText(/CF-Y\d{3}/u)
       .count(),
   ).toBeGreaterThan(0)
-  expect(await inEditor()).toContain('number: "FC-241')
-  // Indentation that the editor adds aside, the outline still shows the last text that could be read.
+  expect(await typedText(person.page)).toContain('number: "FC-241')
+  // The results of the last text that could be read stay in sight.
   expect(await page.getByText(/Cannot be sized; results of|sizing…/iu).count()).toBeGreaterThan(0)
 })
 
@@ -60,7 +59,7 @@ it('a bomb of aliases is refused with a finding', async () => {
     .first()
     .waitFor()
   await picture(person.page, '41-bomb')
-  expect(await inEditor()).toContain('a11: &a11')
+  expect(await typedText(person.page)).toContain('a11: &a11')
 })
 
 it('unknown keys, wrong units and impossible pressures are named at their lines', async () => {
@@ -110,7 +109,7 @@ it('a text above the limit is refused when it is saved, and nothing of it is los
   await page.getByRole('button', { name: 'Save', exact: true }).click()
   await expect.poll(() => page.getByRole('alert').or(page.getByText(/256/u)).count()).toBeGreaterThan(0)
   await picture(page, '43-too-large')
-  expect(await inEditor()).toContain('# the end of 300 kB')
+  expect(await typedText(person.page)).toContain('# the end of 300 kB')
   const saved = (await (await page.request.get('/api/projects/FC-241/spec')).json()) as {
     text: string
     version: number
@@ -137,6 +136,8 @@ it('the text is still there after all of it, on the next visit', async () => {
   await page.reload()
   await editorOf(page).waitFor()
   await page.getByText('A text that was not saved is kept on this device').first().waitFor()
-  expect(await inEditor()).toContain('Fernhollow Community Clinic')
+  expect(await typedText(person.page)).toContain('Fernhollow Community Clinic')
+  await page.getByRole('button', { name: 'Take it up' }).first().click()
+  expect(await typedText(page)).toContain('# the end of 300 kB')
   expect(person.complaints).toEqual([])
 })

@@ -26,6 +26,7 @@ export const signIn = async (browser: Browser, address: string, email: string): 
     viewport: { width: 1440, height: 900 },
     acceptDownloads: true,
     locale: 'en-US',
+    permissions: ['clipboard-read', 'clipboard-write'],
   })
   context.setDefaultTimeout(30_000)
   const page = await context.newPage()
@@ -70,11 +71,22 @@ export const replaceInSpec = async (page: Page, was: string, now: string): Promi
   await page.keyboard.insertText(now)
 }
 
-/** Types a whole text in place of what is in the editor. */
+/** Pastes a whole text in place of what is in the editor. */
 export const overwriteSpec = async (page: Page, text: string): Promise<void> => {
+  await page.evaluate((pasted) => navigator.clipboard.writeText(pasted), text)
   await editorOf(page).click()
   await page.keyboard.press('ControlOrMeta+a')
-  await page.keyboard.insertText(text)
+  await page.keyboard.press('ControlOrMeta+v')
+}
+
+/** The whole text of the editor, which draws only the lines in sight. */
+export const typedText = async (page: Page): Promise<string> => {
+  await editorOf(page).click()
+  await page.keyboard.press('ControlOrMeta+a')
+  await page.keyboard.press('ControlOrMeta+c')
+  const text = await page.evaluate(() => navigator.clipboard.readText())
+  await page.keyboard.press('ControlOrMeta+Home')
+  return text
 }
 
 export const saveSpec = async (page: Page): Promise<void> => {

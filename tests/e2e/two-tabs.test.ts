@@ -1,7 +1,7 @@
 import type { Browser } from 'playwright-core'
 import { afterAll, beforeAll, expect, it } from 'vitest'
 import { launchBrowser } from './browser.ts'
-import { anotherTab, editorOf, type Person, picture, replaceInSpec, saveSpec, signIn } from './person.ts'
+import { anotherTab, editorOf, type Person, picture, replaceInSpec, saveSpec, signIn, typedText } from './person.ts'
 import { serve, type Served } from './serve.ts'
 
 /** Two tabs of one person on one spec: neither overwrites the other, and nothing typed is lost. */
@@ -17,20 +17,9 @@ interface SpecAnswer {
 const onServer = async (): Promise<SpecAnswer> =>
   (await (await first.page.request.get('/api/projects/FC-241/spec')).json()) as SpecAnswer
 
-/** The whole text of the editor, which draws only the lines in sight. */
-const typedText = async ({ page }: Person): Promise<string> => {
-  await editorOf(page).click()
-  await page.keyboard.press('ControlOrMeta+a')
-  await page.keyboard.press('ControlOrMeta+c')
-  const text = await page.evaluate(() => navigator.clipboard.readText())
-  await page.keyboard.press('ControlOrMeta+Home')
-  return text
-}
-
 beforeAll(async () => {
   ;[served, browser] = await Promise.all([serve(), launchBrowser()])
   first = await signIn(browser, served.address, 'consultant@demo.example')
-  await first.page.context().grantPermissions(['clipboard-read', 'clipboard-write'])
   second = await anotherTab(first)
   await first.page.goto('/p/FC-241/spec')
   await second.page.goto('/p/FC-241/spec')
@@ -55,16 +44,16 @@ it('the second save is refused where the first tab saved meanwhile, and its text
   expect(version).toBe(2)
   expect(text).toContain('relief-valve: 60 psi')
   expect(text).not.toContain('static-height: 43 ft')
-  expect(await typedText(second)).toContain('static-height: 43 ft')
+  expect(await typedText(second.page)).toContain('static-height: 43 ft')
 })
 
 it('taking the other text keeps the own one on the device, and gives it back', async () => {
   const { page } = second
   await page.getByRole('button', { name: 'Take version 2' }).click()
   await page.getByText('A text that was not saved is kept on this device').waitFor()
-  expect(await typedText(second)).toContain('relief-valve: 60 psi')
+  expect(await typedText(second.page)).toContain('relief-valve: 60 psi')
   await page.getByRole('button', { name: 'Take it up' }).click()
-  const mine = await typedText(second)
+  const mine = await typedText(second.page)
   expect(mine).toContain('static-height: 43 ft')
   expect(mine).toContain('relief-valve: 50 psi')
 })
@@ -75,7 +64,7 @@ it('a text that was never saved outlives a reload', async () => {
   await second.page.getByText('A text that was not saved is kept on this device').first().waitFor()
   expect((await onServer()).text).toContain('relief-valve: 60 psi')
   await second.page.getByRole('button', { name: 'Take it up' }).first().click()
-  expect(await typedText(second)).toContain('static-height: 43 ft')
+  expect(await typedText(second.page)).toContain('static-height: 43 ft')
 })
 
 it('saving over the other text is asked for, and then takes effect', async () => {
@@ -88,7 +77,7 @@ it('saving over the other text is asked for, and then takes effect', async () =>
   await first.page.bringToFront()
   await first.page.reload()
   await editorOf(first.page).waitFor()
-  expect(await typedText(first)).toContain('static-height: 43 ft')
+  expect(await typedText(first.page)).toContain('static-height: 43 ft')
 })
 
 it('no sheet complained in the console of a browser', () => {
