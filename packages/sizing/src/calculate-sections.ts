@@ -54,8 +54,13 @@ const lineFrom = (context: VesselContext, line: ContentLine, index: number): Con
   }
 }
 
-/** Whether any line of the contents says what it is made of. */
+/** What contents that name no material are made of, where a thermal expansion tank says so. */
+const materialElsewhere = (context: VesselContext): 'steel' | 'copper' | 'none' | undefined =>
+  context.vessel.kind === 'thermal expansion tank' ? context.vessel.fields.material?.value : undefined
+
+/** Whether anything says what the contents are made of; the family of a pipe alone does not, which errs on the large side. */
 export const namesMaterials = (context: VesselContext): boolean =>
+  (materialElsewhere(context) ?? 'none') !== 'none' ||
   context.system.contents.some(
     (line) => 'material' in line && (line.material === 'steel' || line.material === 'copper'),
   )
@@ -69,7 +74,9 @@ const runContents = (context: VesselContext): RunOutcome | null => {
     return null
   }
   const withMaterials = context.vessel.kind === 'thermal expansion tank' && namesMaterials(context)
-  const section = contents(lines, withMaterials)
+  const elsewhere = materialElsewhere(context)
+  const said = elsewhere ? lines.map((line) => (line.material ? line : { ...line, material: elsewhere })) : lines
+  const section = contents(said, withMaterials)
   return context.calculation.run(section.method, section.given)
 }
 

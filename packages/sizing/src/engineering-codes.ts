@@ -115,6 +115,14 @@ export const engineeringCodes = {
     'Give the temperature of the plant room in a shutdown as `temperatures.high`.',
     'BS 7074-3; ASHRAE Handbook, HVAC Systems and Equipment.',
   ),
+  'CF-E016': code(
+    'warning',
+    'A key that the method does not use',
+    'The vessel has a key that plays no part in the method that sizes it.',
+    'Its author expects it to count; the size is as if it were not there.',
+    'Remove the key, or choose the method that uses it.',
+    'The method of the vessel.',
+  ),
   'CF-E020': code(
     'error',
     'No room between fill and highest pressure',

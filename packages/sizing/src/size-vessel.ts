@@ -4,6 +4,7 @@ import { chooseMethod } from './choose-method.ts'
 import type { AssumptionRegister } from './assumption-register.ts'
 import { bindInputs } from './bind-inputs.ts'
 import { runSection } from './calculate-sections.ts'
+import { checkUnusedKeys } from './checks/unused-keys.ts'
 import { checkVessel } from './checks/check-vessel.ts'
 import { headroomRows } from './headroom-rows.ts'
 import type { HeadroomRow, ResultValue, SelectedVessel, VesselResult, VesselStatus } from './result.ts'
@@ -201,6 +202,7 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     report(context, 'CF-E004', { message, hint: `Choose one of: ${methodNames(vessel.kind).join(', ')}.` })
     outcome = { status: 'blocked', reason: message }
   } else {
+    checkUnusedKeys(context, choice.method)
     outcome = run(context, choice.method, atmosphere)
     if (outcome.status === 'sized') {
       results = { ...resultsOf(context, choice.method), ...shareEqually(context, choice.method, quantity) }

@@ -131,15 +131,6 @@ export const vesselKinds = {
       material,
       precharge,
       'relief-margin': reliefMargin,
-      'water-reserve': quantity(
-        ['volume', 'ratio'],
-        'Water kept in the vessel when the system is cold, as a volume or as a part of the contents.',
-        '3 L',
-        {
-          fallback: 'the larger of 0.5 % of the contents and 3 L under en 12828, none under ashrae',
-          least: 0,
-        },
-      ),
     },
     needs: [
       { keys: ['contents'], to: 'to know how much water expands' },
