@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 import { Band } from '#components/ui/band.tsx'
 import { buttonClass } from '#components/ui/button.tsx'
 import { paths } from '#config/paths.ts'
+import { marginPresent } from './margin.tsx'
 import { sessionEnded } from '#lib/query-client.ts'
 import { useStore } from '#lib/store.ts'
 
@@ -21,23 +22,26 @@ interface Props {
 /** The frame of every screen: sheet list, sheet, margin, title strip. */
 export const Frame = ({ list, children, tray, strip }: Props) => {
   const ended = useStore(sessionEnded)
+  const hasMargin = useStore(marginPresent)
   return (
     <div
       className={`grid h-dvh grid-cols-[minmax(0,1fr)] grid-rows-[auto_minmax(0,1fr)_auto_auto_auto] bg-paper print:block print:h-auto ${
         list ? 'bench:grid-cols-[176px_minmax(0,1fr)_auto]' : 'bench:grid-cols-[minmax(0,1fr)_auto]'
       } bench:grid-rows-[minmax(0,1fr)_auto_auto]`}
     >
-      <div className="absolute">
+      <nav aria-label="Skip" className="absolute">
         <a className={skip} href="#sheet">
           Skip to the sheet
         </a>
-        <a className={skip} href="#margin">
-          Skip to the margin
-        </a>
+        {hasMargin ? (
+          <a className={skip} href="#margin">
+            Skip to the margin
+          </a>
+        ) : null}
         <a className={skip} href="#strip">
           Skip to the title strip
         </a>
-      </div>
+      </nav>
       {list}
       {children}
       <div className="bench:col-span-full print:hidden">

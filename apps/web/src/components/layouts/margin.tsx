@@ -1,12 +1,19 @@
-import type { ReactNode } from 'react'
+import { useEffect, type ReactNode } from 'react'
 import { createStore, useStore } from '#lib/store.ts'
 
 /** Whether the margin is drawn out; kept while the page is open. */
 export const marginOpen = createStore(typeof window === 'undefined' || window.matchMedia('(width >= 1100px)').matches)
 
+/** Whether the sheet has a margin, for the link that skips to it. */
+export const marginPresent = createStore(false)
+
 /** The drawer at the right: trace, redlines, help of the focused thing. A sheet from below on narrow screens. */
 export const Margin = ({ title, children }: { readonly title: string; readonly children: ReactNode }) => {
   const open = useStore(marginOpen)
+  useEffect(() => {
+    marginPresent.set(true)
+    return () => marginPresent.set(false)
+  }, [])
   return (
     <aside
       id="margin"

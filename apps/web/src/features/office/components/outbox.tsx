@@ -20,7 +20,7 @@ const MailPreview = ({ mail }: { readonly mail: Mail }) => {
   return (
     <article aria-label={mail.subject} className="flex flex-col gap-3">
       <header className="border-b border-hair pb-2">
-        <h3 className="font-semibold">{mail.subject}</h3>
+        <h2 className="font-semibold">{mail.subject}</h2>
         <p className="text-cell">
           To {mail.to.name} &lt;{mail.to.email}&gt;
         </p>

@@ -29,7 +29,7 @@ export const Outline = ({ model, entries, stale, onJump }: Props) => (
                 <button
                   type="button"
                   onClick={() => onJump(vessel.range)}
-                  className="flex w-full items-baseline justify-between gap-2 py-0.5 pr-3 pl-6 text-left hover:bg-steel-wash"
+                  className="flex w-full items-baseline justify-between gap-2 py-[3px] pr-3 pl-6 text-left hover:bg-steel-wash"
                 >
                   <span className="font-mono text-cell whitespace-nowrap">
                     {vessel.mark}

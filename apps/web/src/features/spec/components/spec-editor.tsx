@@ -50,6 +50,7 @@ const always: Extension = [
   EditorView.contentAttributes.of({
     'aria-label': 'Spec text. Press Escape, then Tab, to leave the editor.',
     spellcheck: 'false',
+    tabindex: '0',
     autocorrect: 'off',
     autocapitalize: 'off',
   }),
