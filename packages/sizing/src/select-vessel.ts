@@ -1,4 +1,4 @@
-import { type CatalogueRow, type Method, methods, type Requirement, selectRow, type Selection } from '@coldfill/engine'
+import { type CatalogueRow, fullWeight, type Method, methods, type Requirement, selectRow, type Selection } from '@coldfill/engine'
 import { formatQuantity, type Kind } from '@coldfill/units'
 import { gaugeFromSpec } from './calculate-sections.ts'
 import { stampReasons } from './checks/stamp.ts'
@@ -146,6 +146,26 @@ export const selectVessel = (
   return selectedFrom(found.choice.row, found.choice.quantity)
 }
 
+const resultsAs = (context: VesselContext, results: Method['results']): Record<string, ResultValue> =>
+  Object.fromEntries(
+    Object.entries(results).map(([name, symbol]) => {
+      const entry = context.calculation.entry(symbol)
+      return [name, { kind: entry.kind, value: entry.value, name: entry.name, entry: entry.id }]
+    }),
+  )
+
+/** What the structure has to carry, where the catalogue has the empty weight. */
+export const weighVessel = (context: VesselContext, selected: SelectedVessel): Record<string, ResultValue> => {
+  if (selected.weightEmpty === undefined) return {}
+  const origin = { from: 'catalogue' } as const
+  context.calculation.section('Weight')
+  context.calculation.run(fullWeight, {
+    W_0: { value: selected.weightEmpty, origin },
+    V_1c: { value: selected.volume, origin },
+  })
+  return resultsAs(context, fullWeight.results)
+}
+
 /** What becomes of the pressures with the chosen vessel. */
 export const checkBack = (
   context: VesselContext,
@@ -166,10 +186,5 @@ export const checkBack = (
     report(context, 'CF-E030', { message: `${context.vessel.mark}: ${failed.message}`, hint: failed.hint })
     return {}
   }
-  return Object.fromEntries(
-    Object.entries(back.results).map(([name, symbol]) => {
-      const entry = calculation.entry(symbol)
-      return [name, { kind: entry.kind, value: entry.value, name: entry.name, entry: entry.id }]
-    }),
-  )
+  return resultsAs(context, back.results)
 }

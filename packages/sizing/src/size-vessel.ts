@@ -8,7 +8,7 @@ import { checkUnusedKeys } from './checks/unused-keys.ts'
 import { checkVessel } from './checks/check-vessel.ts'
 import { headroomRows } from './headroom-rows.ts'
 import type { HeadroomRow, ResultValue, SelectedVessel, VesselResult, VesselStatus } from './result.ts'
-import { checkBack, selectVessel } from './select-vessel.ts'
+import { checkBack, selectVessel, weighVessel } from './select-vessel.ts'
 import { report, type VesselContext } from './vessel-context.ts'
 
 interface Outcome {
@@ -209,7 +209,8 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
       selected = selectVessel(context, input.catalogue, results, choice.construction, atmosphere)
       results = { ...results, ...checkVessel(context, choice.method, results, choice.construction, atmosphere) }
       headroom = headroomRows(context, choice.method, selected)
-      if (selected) results = { ...results, ...checkBack(context, choice.method, selected) }
+      if (selected)
+        results = { ...results, ...checkBack(context, choice.method, selected), ...weighVessel(context, selected) }
     }
   }
   const result: VesselResult = {
