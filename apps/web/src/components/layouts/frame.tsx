@@ -25,7 +25,7 @@ export const Frame = ({ list, children, tray, strip }: Props) => {
   const hasMargin = useStore(marginPresent)
   return (
     <div
-      className={`grid h-dvh grid-cols-[minmax(0,1fr)] grid-rows-[auto_minmax(0,1fr)_auto_auto_auto] bg-paper print:block print:h-auto ${
+      className={`grid h-dvh grid-cols-[minmax(0,1fr)] grid-rows-[auto_minmax(0,1fr)_auto_auto_auto] bg-paper print:table print:h-auto print:w-full ${
         list ? 'bench:grid-cols-[176px_minmax(0,1fr)_auto]' : 'bench:grid-cols-[minmax(0,1fr)_auto]'
       } bench:grid-rows-[minmax(0,1fr)_auto_auto]`}
     >
@@ -68,7 +68,7 @@ export const Frame = ({ list, children, tray, strip }: Props) => {
         id="strip"
         tabIndex={-1}
         aria-label="Title strip"
-        className="min-w-0 border-t-[3px] border-ink bg-sheet bench:col-span-full print:fixed print:right-0 print:bottom-0 print:left-0"
+        className="min-w-0 border-t-[3px] border-ink bg-sheet bench:col-span-full print:table-footer-group print:break-inside-avoid"
       >
         {strip}
       </footer>

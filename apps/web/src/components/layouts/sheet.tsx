@@ -40,7 +40,7 @@ export const Sheet = ({ title, tab, actions, bands, fills = false, margin, child
       <main
         id="sheet"
         tabIndex={-1}
-        className="flex min-h-0 min-w-0 flex-col outline-none zones:pr-2 zones:pb-2 print:block"
+        className="flex min-h-0 min-w-0 flex-col outline-none zones:pr-2 zones:pb-2 print:table-row-group"
       >
         <Zones side="top" />
         <div className="flex min-h-0 min-w-0 flex-1 print:block">

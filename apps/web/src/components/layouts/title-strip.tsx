@@ -15,7 +15,7 @@ const rooms = { always: 'flex', desk: 'hidden desk:flex', wide: 'hidden bench:fl
 
 /** Title-block data along the bottom edge, as on a drawing. Fields are links to where they are decided. */
 export const TitleStrip = ({ fields }: { readonly fields: readonly StripField[] }) => (
-  <dl className="flex h-[53px] min-w-0 divide-x divide-rule">
+  <dl className="flex h-[53px] print:border-t-[3px] print:border-ink min-w-0 divide-x divide-rule">
     {fields.map((field) => (
       <div
         key={field.caption}

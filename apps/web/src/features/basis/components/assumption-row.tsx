@@ -38,9 +38,15 @@ export const AssumptionRow = ({ assumption, sources, chosen, onChoose, flags }: 
       </p>
     </div>
     <p className="figures font-mono desk:text-right">
-      {assumption.overridden ? <WasNow was={assumption.defaultValue} now={assumption.value} /> : assumption.value}
+      {assumption.overridden && assumption.value !== assumption.defaultValue ? (
+        <WasNow was={assumption.defaultValue} now={assumption.value} />
+      ) : (
+        assumption.value
+      )}
       <span className="block font-sans text-cell text-pencil">
-        {assumption.overridden ? 'set by the project' : 'documented default'}
+        {assumption.overridden && assumption.value !== assumption.defaultValue
+          ? 'set by the project'
+          : 'documented default'}
       </span>
     </p>
   </li>

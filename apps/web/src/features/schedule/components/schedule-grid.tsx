@@ -126,7 +126,7 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                   <th
                     key={header.id}
                     scope="col"
-                    className={`sticky top-0 z-10 border-b-2 border-ink bg-sheet px-2.5 py-1.5 align-bottom leading-4 font-semibold ${
+                    className={`sticky top-0 z-10 border-b-2 border-ink bg-sheet px-2.5 py-1.5 print:px-1 align-bottom leading-4 font-semibold ${
                       header.column.id === 'mark' ? 'left-0 z-20 border-r border-r-hair' : ''
                     } ${column?.figures ? 'text-right' : ''} ${column && column.heading.length > 9 ? 'max-w-24' : ''}`}
                   >
@@ -162,7 +162,7 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                       key={cell.id}
                       scope="row"
                       {...common}
-                      className={`sticky left-0 z-[5] border-r border-b border-r-hair border-b-hair px-2.5 py-1.5 align-top font-mono whitespace-nowrap outline-offset-[-3px] ${ground}`}
+                      className={`sticky left-0 z-[5] border-r border-b border-r-hair border-b-hair px-2.5 py-1.5 print:px-1 align-top font-mono whitespace-nowrap outline-offset-[-3px] ${ground}`}
                     >
                       <span className="inline-flex items-center gap-1.5">
                         {row.original.vessel.mark}
@@ -181,7 +181,7 @@ export const ScheduleGrid = ({ schedule, hidden, chosen, onChoose, onTrace, onRe
                         ? undefined
                         : `${String(Number(value.number.toPrecision(12)))} ${column?.unit ?? ''}`
                     }
-                    className={`relative border-b border-b-hair px-2.5 py-1.5 align-top outline-offset-[-3px] ${ground} ${column?.figures ? 'figures text-right whitespace-nowrap' : (wordWidths[key] ?? 'min-w-16')} ${column?.mono ? 'font-mono' : ''}`}
+                    className={`relative border-b border-b-hair px-2.5 py-1.5 print:px-1 align-top outline-offset-[-3px] ${ground} ${column?.figures ? 'figures text-right whitespace-nowrap' : (wordWidths[key] ?? 'min-w-16')} ${column?.mono ? 'font-mono' : ''}`}
                   >
                     {own.around}
                     {own.value ?? (cell.getValue() as string)}
