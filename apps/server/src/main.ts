@@ -10,6 +10,8 @@ const EXIT_USAGE = 64
 const EXIT_CANNOT_LISTEN = 69
 const EXIT_INTERNAL = 70
 const EXIT_DATABASE = 78
+/** One Ctrl+C reaches the process twice where npm hands it on. Only a later one asks for an end without closing. */
+const IMPATIENCE_MS = 2_000
 
 /** Says why the server did not start, in words for the person who started it, and gives the exit status. */
 const explain = (error: unknown): number => {
@@ -36,11 +38,15 @@ const signIns = (): string =>
   ]).join('\n')
 
 const stopOnSignals = (server: RunningServer): void => {
-  let stopping = false
+  let stoppingSince: number | null = null
   for (const signal of ['SIGINT', 'SIGTERM'] as const)
     process.on(signal, () => {
-      if (stopping) process.exit(130)
-      stopping = true
+      const now = Date.now()
+      if (stoppingSince !== null) {
+        if (now - stoppingSince > IMPATIENCE_MS) process.exit(130)
+        return
+      }
+      stoppingSince = now
       consoleLog.info('Closing the database …')
       void server
         .close()

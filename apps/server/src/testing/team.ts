@@ -70,7 +70,9 @@ export const createTeam = async (t: TestApp, number = 'T-1', text?: string): Pro
     issue: async () => {
       const issued = await signedIn.consultant.post(`${at}/revisions`).send({ purpose: 'review' }).expect(201)
       await t.settle()
-      return revision(segment((issued.body as Revision).label))
+      const made = await revision(segment((issued.body as Revision).label))
+      if (made.files.length === 0) throw new Error(`The files were not made. ${t.errors.join('\n')}`)
+      return made
     },
     review: async ({ label, contentHash }, outcome, reason = '') => {
       await signedIn.reviewer
