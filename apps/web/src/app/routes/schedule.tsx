@@ -67,6 +67,9 @@ export function Component() {
     marginOpen.set(true)
     if (project.permissions.redline.allowed) setComposing(anchorOf(to, key))
   }
+  const toCell = () => {
+    requestAnimationFrame(() => document.querySelector<HTMLElement>('[role="grid"] [aria-selected="true"]')?.focus())
+  }
   const toTrace = () => {
     marginOpen.set(true)
     requestAnimationFrame(() => document.getElementById('margin')?.focus())
@@ -126,6 +129,7 @@ export function Component() {
       bands={<ContentBand project={project} shown={results.data} />}
       margin={{
         title: composing ? 'New redline' : 'Trace',
+        onEscape: toCell,
         content: (
           <ScheduleMargin
             project={project}
@@ -139,7 +143,10 @@ export function Component() {
             redlines={redlines.data ?? []}
             composing={composing}
             onCompose={() => row && startRedline(row, column)}
-            onComposed={() => setComposing(null)}
+            onComposed={() => {
+              setComposing(null)
+              toCell()
+            }}
             sought={asked !== null && row === null && rows.length > 0 ? asked : null}
           />
         ),

@@ -8,7 +8,16 @@ export const marginOpen = createStore(typeof window === 'undefined' || window.ma
 export const marginPresent = createStore(false)
 
 /** The drawer at the right: trace, redlines, help of the focused thing. A sheet from below on narrow screens. */
-export const Margin = ({ title, children }: { readonly title: string; readonly children: ReactNode }) => {
+export const Margin = ({
+  title,
+  children,
+  onEscape,
+}: {
+  readonly title: string
+  readonly children: ReactNode
+  /** Where Escape leads from within. */
+  readonly onEscape?: (() => void) | undefined
+}) => {
   const open = useStore(marginOpen)
   useEffect(() => {
     marginPresent.set(true)
@@ -19,6 +28,9 @@ export const Margin = ({ title, children }: { readonly title: string; readonly c
       id="margin"
       tabIndex={-1}
       aria-label={`Margin: ${title}`}
+      onKeyDown={(event) => {
+        if (event.key === 'Escape' && !event.defaultPrevented) onEscape?.()
+      }}
       className={`flex min-h-0 min-w-0 flex-col border-ink bg-sheet max-bench:border-t-2 bench:border-l-2 print:hidden ${open ? 'max-bench:max-h-[45dvh] bench:w-[312px]' : 'bench:w-9'}`}
     >
       <div

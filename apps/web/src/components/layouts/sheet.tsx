@@ -11,7 +11,7 @@ interface Props {
   readonly bands?: ReactNode
   /** Fills the height and scrolls inside itself, as an editor does. */
   readonly fills?: boolean
-  readonly margin?: { readonly title: string; readonly content: ReactNode }
+  readonly margin?: { readonly title: string; readonly content: ReactNode; readonly onEscape?: () => void }
   readonly children: ReactNode
 }
 
@@ -59,7 +59,11 @@ export const Sheet = ({ title, tab, actions, bands, fills = false, margin, child
           </div>
         </div>
       </main>
-      {margin ? <Margin title={margin.title}>{margin.content}</Margin> : null}
+      {margin ? (
+        <Margin title={margin.title} onEscape={margin.onEscape}>
+          {margin.content}
+        </Margin>
+      ) : null}
     </>
   )
 }

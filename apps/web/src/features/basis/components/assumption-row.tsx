@@ -44,9 +44,7 @@ export const AssumptionRow = ({ assumption, sources, chosen, onChoose, flags }: 
         assumption.value
       )}
       <span className="block font-sans text-cell text-pencil">
-        {assumption.overridden && assumption.value !== assumption.defaultValue
-          ? 'set by the project'
-          : 'documented default'}
+        {assumption.overridden ? 'set by the project' : 'documented default'}
       </span>
     </p>
   </li>
