@@ -5,7 +5,7 @@ import { specShape } from '../model/spec-shape.ts'
 import type { Vocabulary } from '../model/spec-model.ts'
 import { isService, serviceKeys } from '../model/system.ts'
 import { type VesselKindDefinition, isVesselKind, vesselKinds } from '../model/vessel.ts'
-import type { Span } from '../parse/line-index.ts'
+import { lineStart, type Span } from '../parse/line-index.ts'
 import { entryOf, type SourceMap } from '../parse/source-tree.ts'
 import { asScalar } from '../read/keys.ts'
 import { type Cursor, cursorAt, isProbe } from './cursor.ts'
@@ -51,8 +51,7 @@ const behindKey = (cursor: Cursor, shape: Shape, indent: string): string => {
   return shape.shape === 'list' ? `:\n${indent}  - ` : `:\n${indent}  `
 }
 
-const indentOf = (text: string, at: number): string =>
-  ' '.repeat(Math.max(0, at - (text.lastIndexOf('\n', at - 1) + 1)))
+const indentOf = (text: string, at: number): string => ' '.repeat(Math.max(0, at - lineStart(text, at)))
 
 const keyOption = (text: string, cursor: Cursor, key: string, shape: Shape): Completion => ({
   label: key,

@@ -1,4 +1,4 @@
-import type { Span } from '../parse/line-index.ts'
+import { lineEnd, lineStart, type Span } from '../parse/line-index.ts'
 import { parseUnfinished } from '../parse/parse-spec.ts'
 import { type Step, places } from '../parse/path.ts'
 import type { SourceMap } from '../parse/source-tree.ts'
@@ -45,19 +45,18 @@ const openBrace = (line: string): number => {
 
 /** The key with its value that the cursor is in. */
 const segmentAt = (text: string, offset: number): Segment | null => {
-  const lineStart = text.lastIndexOf('\n', offset - 1) + 1
-  const lineBreak = text.indexOf('\n', offset)
-  const lineEnd = lineBreak < 0 ? text.length : lineBreak
-  const before = text.slice(lineStart, offset)
+  const start = lineStart(text, offset)
+  const end = lineEnd(text, offset)
+  const before = text.slice(start, offset)
   if (/(?:^|\s)#/u.test(before)) return null
   const brace = openBrace(before)
   if (brace >= 0) {
-    const rest = /^[^,}\]#]*/u.exec(text.slice(offset, lineEnd))?.[0].length ?? 0
-    return { start: lineStart + brace, end: offset + rest, inBraces: true }
+    const rest = /^[^,}\]#]*/u.exec(text.slice(offset, end))?.[0].length ?? 0
+    return { start: start + brace, end: offset + rest, inBraces: true }
   }
   const lead = /^\s*(?:-\s+)*/u.exec(before)?.[0].length ?? 0
-  const comment = /\s#/u.exec(text.slice(offset, lineEnd))
-  return { start: lineStart + lead, end: comment ? offset + comment.index : lineEnd, inBraces: false }
+  const comment = /\s#/u.exec(text.slice(offset, end))
+  return { start: start + lead, end: comment ? offset + comment.index : end, inBraces: false }
 }
 
 const trimmed = (text: string, span: Span): Span => {

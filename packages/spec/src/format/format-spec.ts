@@ -1,3 +1,4 @@
+import { lineStart } from '../parse/line-index.ts'
 import { parseSpec } from '../parse/parse-spec.ts'
 import type { SourceMap, SourceNode } from '../parse/source-tree.ts'
 import { spaceLine } from './space-line.ts'
@@ -11,7 +12,7 @@ interface Placed {
   readonly was: number
 }
 
-const columnOf = (text: string, offset: number): number => offset - (text.lastIndexOf('\n', offset - 1) + 1)
+const columnOf = (text: string, offset: number): number => offset - lineStart(text, offset)
 
 /** The column of the first key or dash of each line that has one, by line number. */
 const placeLines = (text: string, tree: SourceMap, lineOf: (offset: number) => number): Map<number, Placed> => {
@@ -19,8 +20,8 @@ const placeLines = (text: string, tree: SourceMap, lineOf: (offset: number) => n
 
   const place = (offset: number, column: number): void => {
     const line = lineOf(offset)
-    const lineStart = text.lastIndexOf('\n', offset - 1) + 1
-    const first = lineStart + (/^\s*/u.exec(text.slice(lineStart, offset))?.[0].length ?? 0)
+    const start = lineStart(text, offset)
+    const first = start + (/^\s*/u.exec(text.slice(start, offset))?.[0].length ?? 0)
     // A key behind a dash stands where the dash puts it.
     if (first !== offset || placed.has(line)) return
     placed.set(line, { column, was: columnOf(text, offset) })

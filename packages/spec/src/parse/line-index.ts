@@ -6,6 +6,16 @@ export interface Span {
   readonly end: number
 }
 
+/** Offset of the first character of the line that an offset is on. */
+export const lineStart = (text: string, offset: number): number =>
+  offset <= 0 ? 0 : text.lastIndexOf('\n', offset - 1) + 1
+
+/** Offset behind the last character of the line that an offset is on. */
+export const lineEnd = (text: string, offset: number): number => {
+  const end = text.indexOf('\n', offset)
+  return end < 0 ? text.length : end
+}
+
 /** Turns offsets of a text into lines and characters and back. */
 export interface LineIndex {
   readonly lines: number

@@ -1,13 +1,9 @@
 import type { YAMLError } from 'yaml'
 import type { Edit, Report } from '../report.ts'
-import type { Span } from './line-index.ts'
+import { lineEnd, lineStart, type Span } from './line-index.ts'
 import { reportTightColon, tightColon } from './tight-colon.ts'
 
-const lineOf = (text: string, offset: number): Span => {
-  const start = text.lastIndexOf('\n', offset - 1) + 1
-  const end = text.indexOf('\n', offset)
-  return { start, end: end < 0 ? text.length : end }
-}
+const lineOf = (text: string, offset: number): Span => ({ start: lineStart(text, offset), end: lineEnd(text, offset) })
 
 /** What is written on a line, without indentation, dash and comment. */
 const written = (text: string, line: Span): Span => {

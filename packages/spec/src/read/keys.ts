@@ -1,3 +1,4 @@
+import { lineStart } from '../parse/line-index.ts'
 import { below } from '../parse/source-tree.ts'
 import type { Edit } from '../report.ts'
 import { type Block, type Context, type Entry, keyAt } from './context.ts'
@@ -28,8 +29,7 @@ export const insertKey = (context: Context, block: Block, key: string, example: 
   }
   const at = first.keySpan.start
   if (inBraces) return [{ title, span: { start: at, end: at }, text: `${line}, ` }]
-  const lineStart = context.text.lastIndexOf('\n', at - 1) + 1
-  return [{ title, span: { start: at, end: at }, text: `${line}\n${' '.repeat(at - lineStart)}` }]
+  return [{ title, span: { start: at, end: at }, text: `${line}\n${' '.repeat(at - lineStart(context.text, at))}` }]
 }
 
 export interface UnknownKey {
