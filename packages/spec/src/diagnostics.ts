@@ -293,6 +293,12 @@ export const findingCodes = {
     'The key counts or compares, so it has no unit.',
     'Write the number alone.',
   ),
+  'CF-S019': error(
+    'Still to be filled in',
+    '`…` stands where a value is due.',
+    'The key was put in without a value, so that none is made up.',
+    'Write the value, or take the key out.',
+  ),
   'CF-S020': error(
     'Unknown kind of vessel',
     '`kind` names no kind of vessel.',

@@ -14,6 +14,8 @@ export type Severity = 'error' | 'warning' | 'note'
 /** A change of the text that mends a finding: replaces `range` by `text`. */
 export interface Fix {
   readonly title: string
+  /** It puts in a value that nobody has said, or is one of several that may be meant: for a person to choose, never made unseen. */
+  readonly guess?: true
   readonly edits: readonly { readonly range: Range; readonly text: string }[]
 }
 

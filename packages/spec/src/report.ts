@@ -14,6 +14,7 @@ export interface Edit {
   readonly title: string
   readonly span: Span
   readonly text: string
+  readonly guess?: true
 }
 
 export interface Said {
@@ -55,7 +56,11 @@ export const createReport = (lineIndex: LineIndex): Report => {
           path: each.path,
           range: lineIndex.range(each.span),
         })),
-        fixes: fixes.map(({ title, span, text }): Fix => ({ title, edits: [{ range: lineIndex.range(span), text }] })),
+        fixes: fixes.map(({ title, span, text, guess }): Fix => ({
+          title,
+          ...(guess && { guess }),
+          edits: [{ range: lineIndex.range(span), text }],
+        })),
       })
     },
     isSound: (path, ...except) =>

@@ -54,7 +54,7 @@ export const linkPipeSize = (context: Context, at: At, family: string, written: 
   context.report.add('CF-S041', at, {
     message: `\`${family}\` has no size \`${written}\`.`,
     hint: near.length === 0 ? 'It has no sizes.' : `Sizes next to it are ${allOf(near)}.`,
-    fixes: near.map((size) => ({ title: `Write ${size}`, span: at.span, text: size })),
+    fixes: near.map((size) => ({ title: `Write ${size}`, span: at.span, text: size, guess: true })),
   })
   return undefined
 }

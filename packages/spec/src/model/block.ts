@@ -43,6 +43,11 @@ export const selectedRowFields = {
   model: { ...text('Model of the row, as the catalogue names it.', 'NB-400'), required: true as const },
 }
 
+/** Stands where a value is still to be filled in. It is never read as a value. */
+export const placeholder = '…'
+
+export const isPlaceholder = (text: string): boolean => text === placeholder || text === '...'
+
 /** Ids and marks: letters and digits, parted by hyphens, underscores or slashes. They are parts of paths, so they hold no dot or space. */
 export const markPattern = /^[\p{L}\p{N}](?:[\p{L}\p{N}_-]*[\p{L}\p{N}])?$/u
 

@@ -36,7 +36,12 @@ export const reportQuantity = (context: Context, at: At, problem: QuantityProble
       problem.suggestions.length > 0
         ? `Write ${problem.suggestions.map((each) => `\`${each}\``).join(' or ')}.`
         : `Write it as in \`${example}\`.`,
-    fixes: problem.suggestions.map((suggestion) => ({ title: `Write ${suggestion}`, span: at.span, text: suggestion })),
+    fixes: problem.suggestions.map((suggestion) => ({
+      title: `Write ${suggestion}`,
+      span: at.span,
+      text: suggestion,
+      ...(problem.suggestions.length > 1 && { guess: true }),
+    })),
   })
 }
 

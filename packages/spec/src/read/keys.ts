@@ -1,3 +1,4 @@
+import { placeholder } from '../model/block.ts'
 import { lineStart } from '../parse/line-index.ts'
 import { below } from '../parse/source-tree.ts'
 import type { Edit } from '../report.ts'
@@ -16,11 +17,11 @@ export const asScalar = (text: string, inBraces: boolean): string => {
   return plain ? text : `'${text.replaceAll("'", "''")}'`
 }
 
-/** A change that puts a key at the head of a block, in its own style. */
-export const insertKey = (context: Context, block: Block, key: string, example: string): Edit[] => {
+/** A change that puts a key with its value at the head of a block, in its own style. */
+export const insertKey = (context: Context, block: Block, key: string, value: string): Edit[] => {
   const first = block.map.entries[0]
   const inBraces = block.map.flow
-  const line = `${key}: ${example.startsWith('{') || example.startsWith('[') ? example : asScalar(example, inBraces)}`
+  const line = `${key}: ${/^[{[]/u.test(value) || value === placeholder ? value : asScalar(value, inBraces)}`
   const title = `Put in \`${line}\``
   if (!first) {
     if (!inBraces) return []
@@ -66,12 +67,18 @@ export interface MissingKey {
   readonly keys: readonly [string, ...string[]]
   readonly message: string
   readonly example: string
+  /** What is put in where the fix is taken: a placeholder, or a block around one. */
+  readonly put?: string
   /** Paths that cannot be sized without it; the block where not said. */
   readonly blocks?: readonly string[]
 }
 
 /** Says once that a block lacks a key, unless a misspelled key in it most likely is that key. */
-export const missingKey = (context: Context, block: Block, { keys, message, example, blocks }: MissingKey): void => {
+export const missingKey = (
+  context: Context,
+  block: Block,
+  { keys, message, example, put = placeholder, blocks }: MissingKey,
+): void => {
   if (keys.some((key) => context.meant.has(below(block.path, key)))) return
   const [first] = keys
   context.report.add(
@@ -80,7 +87,8 @@ export const missingKey = (context: Context, block: Block, { keys, message, exam
     {
       message,
       hint: `Write \`${first}: ${example}\`${keys.length > 1 ? `, or give ${oneOf(keys.slice(1))}` : ''}.`,
-      fixes: insertKey(context, block, first, example),
+      // A value would be made up, so that what is still to be said is said by nobody.
+      fixes: insertKey(context, block, first, put),
       ...(blocks && { blocks }),
     },
   )

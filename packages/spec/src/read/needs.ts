@@ -1,4 +1,5 @@
 import type { VesselModel } from '../model/spec-model.ts'
+import { placeholder } from '../model/block.ts'
 import { pressureFields, temperatureFields } from '../model/system.ts'
 import { type Need, type VesselKindDefinition, vesselKinds } from '../model/vessel.ts'
 import { below } from '../parse/source-tree.ts'
@@ -48,19 +49,27 @@ const EXAMPLES: Readonly<Record<string, string>> = {
 
 const tables: Readonly<Record<string, Fields>> = { temperatures: temperatureFields, pressure: pressureFields }
 
-/** A value for a missing key, wrapped in its block where the block is missing too. */
-const placeholder = (need: string, lackingKey: string, fields: Fields): { key: string; example: string } => {
+const PUT: Readonly<Record<string, string>> = {
+  contents: `[{ volume: ${placeholder} }]`,
+  fixtures: `{ lavatory: ${placeholder} }`,
+}
+
+/** Example and placeholder for a missing key, wrapped in its block where the block is missing too. */
+const valueFor = (need: string, lackingKey: string, fields: Fields): { key: string; example: string; put: string } => {
   const [head = '', ...rest] = need.split('.')
   const last = rest.at(-1) ?? head
-  const example = (rest.length > 0 ? tables[head] : fields)?.[last]?.example ?? EXAMPLES[last] ?? '…'
+  const example = (rest.length > 0 ? tables[head] : fields)?.[last]?.example ?? EXAMPLES[last] ?? placeholder
+  const put = PUT[last] ?? placeholder
   const [outer = '', ...inner] = lackingKey.split('.')
-  return inner.length === 0 ? { key: outer, example } : { key: outer, example: `{ ${inner.join('.')}: ${example} }` }
+  const within = (value: string): string => (inner.length === 0 ? value : `{ ${inner.join('.')}: ${value} }`)
+  return { key: outer, example: within(example), put: within(put) }
 }
 
 interface Gap {
   readonly block: Block
   readonly key: string
   readonly example: string
+  readonly put: string
   readonly alternatives: readonly string[]
   readonly to: string
   readonly marks: string[]
@@ -84,11 +93,12 @@ export const checkNeeds = (context: Context, system: Block, vessels: readonly Wr
       const name = (key: string): string => (key.startsWith(OF_VESSEL) ? key.slice(OF_VESSEL.length) : key)
       const wanted = name(need.keys[0])
       const id = `${first.block.path} ${wanted}`
-      const { key, example } = placeholder(wanted, first.key, fields)
+      const { key, example, put } = valueFor(wanted, first.key, fields)
       const gap = gaps.get(id) ?? {
         block: first.block,
         key,
         example,
+        put,
         alternatives: need.keys.map(name),
         to: need.to,
         marks: [],
@@ -100,12 +110,13 @@ export const checkNeeds = (context: Context, system: Block, vessels: readonly Wr
       gap.paths.push(vessel.model.path)
     }
   }
-  for (const { block, key, example, alternatives, to, marks, paths } of gaps.values()) {
+  for (const { block, key, example, put, alternatives, to, marks, paths } of gaps.values()) {
     const [first = '', ...others] = alternatives
     missingKey(context, block, {
       keys: [key, ...others],
       message: `${allOf(marks)} ${marks.length === 1 ? 'needs' : 'need'} \`${first}\` ${to}.`,
       example,
+      put,
       blocks: paths,
     })
   }

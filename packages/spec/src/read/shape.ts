@@ -1,3 +1,4 @@
+import { isPlaceholder } from '../model/block.ts'
 import type { SourceText } from '../parse/source-tree.ts'
 import { reportTightColon, tightColon } from '../parse/tight-colon.ts'
 import type { Block, Context, Entry } from './context.ts'
@@ -33,9 +34,17 @@ const nothingWritten = (context: Context, entry: Entry, example: string): void =
               title: `Write ${example}`,
               span: behindColon(context.text, entry.keySpan.end),
               text: `: ${example}`,
+              guess: true,
             },
           ]
         : [],
+  })
+
+/** Says once that a placeholder stands where a value is due. */
+const stillToSay = (context: Context, entry: Entry, example: string): void =>
+  context.report.add('CF-S019', valueAt(entry), {
+    message: `\`${entry.key}\` is still to be filled in.`,
+    hint: `Write it as in \`${entry.key}: ${example}\`.`,
   })
 
 /** The colon behind a key with the spaces that follow on the line; a key in braces may have none. */
@@ -51,7 +60,11 @@ export const expectText = (context: Context, entry: Entry, due: string, example:
     nothingWritten(context, entry, example)
     return undefined
   }
-  if (value.node === 'text') return value
+  if (value.node === 'text') {
+    if (value.quoted || !isPlaceholder(value.text.trim())) return value
+    stillToSay(context, entry, example)
+    return undefined
+  }
   wrongShape(context, entry, due, `${entry.key}: ${example}`)
   return undefined
 }
