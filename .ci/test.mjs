@@ -35,7 +35,11 @@ const status = run(process.execPath, [
 ])
 const counts = (() => {
   try {
-    const { numPassedTests: passed, numFailedTests: failed, numPendingTests: skipped } = JSON.parse(readFileSync(report, 'utf8'))
+    const {
+      numPassedTests: passed,
+      numFailedTests: failed,
+      numPendingTests: skipped,
+    } = JSON.parse(readFileSync(report, 'utf8'))
     return { passed, failed, skipped }
   } catch {
     return { passed: 0, failed: 1, skipped: 0 }
@@ -45,7 +49,9 @@ rmSync(folder, { recursive: true, force: true })
 
 const office = spawnSync('soffice', ['--version'], { stdio: 'ignore' })
 if (office.error || office.status !== 0)
-  console.error('\nLeft out for want of LibreOffice (soffice): the forced recalculation of workbooks and the rendering of documents.')
+  console.error(
+    '\nLeft out for want of LibreOffice (soffice): the forced recalculation of workbooks and the rendering of documents.',
+  )
 for (const [name] of broken) console.error(`\nThe ${name} failed.`)
 
 const failed = counts.failed + broken.length + (status !== 0 && counts.failed === 0 ? 1 : 0)

@@ -10,7 +10,10 @@ const projects = ['packages', 'apps']
 
 const check = (project) =>
   new Promise((resolve) => {
-    const tsc = spawn(process.execPath, ['node_modules/typescript/bin/tsc', '-p', project], { cwd: root, stdio: 'inherit' })
+    const tsc = spawn(process.execPath, ['node_modules/typescript/bin/tsc', '-p', project], {
+      cwd: root,
+      stdio: 'inherit',
+    })
     tsc.on('exit', (code) => resolve(code === 0 ? null : project))
   })
 

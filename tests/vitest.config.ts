@@ -9,13 +9,25 @@ export default defineConfig({
     maxWorkers: 2,
     pool: 'forks',
     projects: [
-      project('unit', ['packages/*/src/**/*.test.ts', 'apps/cli/src/**/*.test.ts', 'tests/*.test.ts', 'tests/golden/**/*.test.ts'], {
-        testTimeout: 30_000,
-      }),
+      project(
+        'unit',
+        ['packages/*/src/**/*.test.ts', 'apps/cli/src/**/*.test.ts', 'tests/*.test.ts', 'tests/golden/**/*.test.ts'],
+        {
+          testTimeout: 30_000,
+        },
+      ),
       project('server', ['apps/server/src/**/*.test.ts'], { testTimeout: 60_000, hookTimeout: 120_000 }),
       project('web', ['apps/web/src/**/*.test.ts']),
-      project('browser', ['tests/e2e/**/*.test.ts'], { testTimeout: 300_000, hookTimeout: 180_000, fileParallelism: false }),
-      project('office', ['tests/office/**/*.test.ts'], { testTimeout: 180_000, hookTimeout: 120_000, fileParallelism: false }),
+      project('browser', ['tests/e2e/**/*.test.ts'], {
+        testTimeout: 300_000,
+        hookTimeout: 180_000,
+        fileParallelism: false,
+      }),
+      project('office', ['tests/office/**/*.test.ts'], {
+        testTimeout: 180_000,
+        hookTimeout: 120_000,
+        fileParallelism: false,
+      }),
     ],
   },
 })

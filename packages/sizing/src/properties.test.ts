@@ -25,7 +25,7 @@ const spec = (job: Job, system: 'SI' | 'US' = 'SI'): string => {
   const q = (value: number, si: string, us: string, toUs: (v: number) => number) =>
     system === 'SI' ? `${value} ${si}` : `${toUs(value)} ${us}`
   const degrees = (t: number) => q(t, '°C', '°F', (v) => v * 1.8 + 32)
-  const bar = (p: number) => q(p, 'bar', 'psi', (v) => v / 0.06894757293168361)
+  const bar = (p: number) => q(p, 'bar', 'psi', (v) => v / 0.0689475729316836)
   return `coldfill: 1
 project:
   number: P

@@ -1,4 +1,12 @@
-import { type CatalogueRow, fullWeight, type Method, methods, type Requirement, selectRow, type Selection } from '@coldfill/engine'
+import {
+  type CatalogueRow,
+  fullWeight,
+  type Method,
+  methods,
+  type Requirement,
+  selectRow,
+  type Selection,
+} from '@coldfill/engine'
 import { formatQuantity, type Kind } from '@coldfill/units'
 import { gaugeFromSpec } from './calculate-sections.ts'
 import { stampReasons } from './checks/stamp.ts'

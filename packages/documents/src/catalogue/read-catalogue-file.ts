@@ -16,7 +16,7 @@ const cellText = (value: ExcelJS.CellValue): string => {
   if (typeof value === 'object') {
     if ('richText' in value) return value.richText.map((part) => part.text).join('')
     if ('result' in value) return cellText(value.result ?? null)
-    if ('text' in value) return String(value.text)
+    if ('text' in value) return value.text
     return ''
   }
   return String(value)
@@ -36,11 +36,12 @@ const isWorkbook = (bytes: Uint8Array): boolean => bytes[0] === 0x50 && bytes[1]
  * What is wrong comes back as problems; nothing throws for bad bytes.
  */
 export const readCatalogueFile = async (bytes: Uint8Array): Promise<CatalogueReading> => {
-  if (bytes.length > maxCatalogueBytes) return refused(`The catalogue has ${bytes.length} bytes; ${maxCatalogueBytes} are read at most.`)
+  if (bytes.length > maxCatalogueBytes)
+    return refused(`The catalogue has ${bytes.length} bytes; ${maxCatalogueBytes} are read at most.`)
   const workbook = new ExcelJS.Workbook()
   try {
     if (isWorkbook(bytes)) {
-      await workbook.xlsx.load(bytes.slice().buffer as ArrayBuffer)
+      await workbook.xlsx.load(bytes.slice().buffer)
       const [sheet] = workbook.worksheets
       return sheet ? readCatalogue(tableOf(sheet)) : refused('The workbook has no sheet.')
     }
@@ -54,6 +55,8 @@ export const readCatalogueFile = async (bytes: Uint8Array): Promise<CatalogueRea
     })
     return readCatalogue(tableOf(sheet))
   } catch (error) {
-    return refused(`The catalogue cannot be read as CSV (UTF-8) or as a workbook: ${error instanceof Error ? error.message : String(error)}`)
+    return refused(
+      `The catalogue cannot be read as CSV (UTF-8) or as a workbook: ${error instanceof Error ? error.message : String(error)}`,
+    )
   }
 }

@@ -24,7 +24,7 @@ export interface ClosedPressureFacts {
 }
 
 const G = '9.80665[m/s2]'
-const static_: Citation = cite(hydrostatics, 'pressure of a column of liquid')
+const columnOfLiquid: Citation = cite(hydrostatics, 'pressure of a column of liquid')
 
 /**
  * `handbook`: fill pressure `p_f` and highest pressure `p_max`. `european`: least charge `p_0`, never below 0.7 bar, and
@@ -48,7 +48,7 @@ export const closedPressures = (
     if (steps['rho_f']) return
     if (!facts.fillTemperature) throw new Error('a height of liquid without a fill temperature')
     need('t_f', 'temperature', 'fill temperature', facts.fillTemperature)
-    steps['rho_f'] = step('density', 'density at the fill temperature', 'rho(t_f)', static_)
+    steps['rho_f'] = step('density', 'density at the fill temperature', 'rho(t_f)', columnOfLiquid)
   }
   const charged = rule !== 'handbook'
   const fillSymbol = charged ? 'p_0' : 'p_f'
@@ -59,12 +59,12 @@ export const closedPressures = (
     density()
     need('h_st', 'length', 'static height', facts.staticHeight)
     need('p_t', 'gauge pressure', 'pressure kept at the highest point, cold', facts.topMargin)
-    steps['p_st'] = step('pressure difference', 'static pressure', `rho_f * ${G} * h_st`, static_)
+    steps['p_st'] = step('pressure difference', 'static pressure', `rho_f * ${G} * h_st`, columnOfLiquid)
     let raised = 'p_t + p_st'
     if (facts.pumpHead) {
       if (facts.pumpHead.as === 'length') {
         need('h_p', 'length', 'pump head', facts.pumpHead.given)
-        steps['dp_p'] = step('pressure difference', 'pump pressure', `rho_f * ${G} * h_p`, static_)
+        steps['dp_p'] = step('pressure difference', 'pump pressure', `rho_f * ${G} * h_p`, columnOfLiquid)
       } else {
         need('dp_p', 'pressure difference', 'pump pressure', facts.pumpHead.given)
       }

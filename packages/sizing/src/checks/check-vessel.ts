@@ -32,14 +32,11 @@ export const checkVessel = (
   atmosphere: number,
 ): Record<string, ResultValue> => {
   checkStamp(context, results, atmosphere)
-  switch (context.vessel.kind) {
-    case 'expansion tank':
-      checkHydronic(context, results, construction, atmosphere)
-      return checkCodeMinimum(context, method, results, construction)
-    case 'thermal expansion tank':
-      checkDomestic(context, results, atmosphere)
-      return {}
-    default:
-      return {}
+  const { kind } = context.vessel
+  if (kind === 'expansion tank') {
+    checkHydronic(context, results, construction, atmosphere)
+    return checkCodeMinimum(context, method, results, construction)
   }
+  if (kind === 'thermal expansion tank') checkDomestic(context, results, atmosphere)
+  return {}
 }
