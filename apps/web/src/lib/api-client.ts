@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import { ApiError, apiErrorFrom } from './api-error.ts'
+import { sessionEnded } from './session-ended.ts'
 
 type Schema<T> = z.ZodType<T>
 interface Options {
@@ -24,6 +25,8 @@ const send = async (method: string, path: string, body: unknown, options: Option
     if (error instanceof DOMException && error.name === 'AbortError') throw error
     throw new ApiError(0, 'no_answer', 'The server does not answer. Check the connection and try again.')
   }
+  // Asking who is signed in is answered by 401 before anyone is; that is no session that ended.
+  if (response.status === 401 && path !== '/api/session') sessionEnded.set(true)
   if (!response.ok) throw await apiErrorFrom(response)
   return response
 }

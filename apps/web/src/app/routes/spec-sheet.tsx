@@ -15,8 +15,10 @@ import { SpecBands } from '#features/spec/components/spec-bands.tsx'
 import { Tray } from '#features/spec/components/tray.tsx'
 import { marginEntries } from '#features/spec/margin-lines.ts'
 import { mergeFindings } from '#features/spec/merge-findings.ts'
+import { keptWords, sizedWords } from '#features/spec/status-words.ts'
 import { useSizing } from '#features/spec/use-sizing.ts'
 import { useSpecDraft } from '#features/spec/use-spec-draft.ts'
+import { messageOf } from '#lib/api-error.ts'
 import { clock } from '#lib/format.ts'
 import { revisionPhrase } from '#lib/words.ts'
 import { useAddress, useUnits } from '#lib/search-params.ts'
@@ -97,18 +99,13 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
     setTimeout(() => editor.current?.jumpTo(range), 60)
   })
 
-  const status =
-    good === null
-      ? typed.error
-        ? 'Sizing failed; checks go on here'
-        : 'Sizing…'
-      : typed.error && !readOnly
-        ? `The server did not size this; results of ${clock(good.at)}`
-        : latest && latest.text === text && latest !== good
-          ? `Cannot be sized; results of ${clock(good.at)}`
-          : stale
-            ? 'Sizing…'
-            : 'Sized'
+  const status = sizedWords({
+    text,
+    goodText: good?.text ?? null,
+    goodAt: good ? clock(good.at) : '',
+    latestText: latest?.text ?? null,
+    failure: typed.error === null ? null : messageOf(typed.error),
+  })
 
   return (
     <Sheet
@@ -117,13 +114,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
       actions={
         <>
           <span className="w-full text-cell text-pencil desk:w-auto" role="status">
-            {draft.saving
-              ? 'Saving…'
-              : dirty
-                ? draft.kept
-                  ? 'Not saved; kept on this device'
-                  : 'Not saved, and this browser keeps no draft'
-                : `Saved ${clock(base.savedAt)}, version ${base.version}`}
+            {keptWords({ ...draft, readOnly, savedAt: clock(base.savedAt), version: base.version })}
           </span>
           <UnitsSwitch units={units} onChoose={setUnits} />
           <Button

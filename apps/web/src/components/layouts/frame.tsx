@@ -3,7 +3,7 @@ import { Band } from '#components/ui/band.tsx'
 import { buttonClass } from '#components/ui/button.tsx'
 import { paths } from '#config/paths.ts'
 import { marginPresent } from './margin.tsx'
-import { sessionEnded } from '#lib/query-client.ts'
+import { sessionEnded } from '#lib/session-ended.ts'
 import { useStore } from '#lib/store.ts'
 
 const skip =

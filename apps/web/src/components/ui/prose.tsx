@@ -6,7 +6,7 @@ export const Prose = ({ text }: { readonly text: string }) =>
     ) : (
       // The parts of one sentence never change places.
       // oxlint-disable-next-line react/no-array-index-key
-      <code key={at} className="bg-well px-0.5 font-mono text-[0.92em]">
+      <code key={at} className="bg-well px-0.5 font-mono text-[0.92em] break-words">
         {part}
       </code>
     ),

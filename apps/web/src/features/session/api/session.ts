@@ -1,7 +1,8 @@
 import { Session, type SignInRequest } from '@coldfill/contract'
 import { queryOptions, useSuspenseQuery } from '@tanstack/react-query'
 import { api } from '#lib/api-client.ts'
-import { queryClient, sessionEnded } from '#lib/query-client.ts'
+import { queryClient } from '#lib/query-client.ts'
+import { sessionEnded } from '#lib/session-ended.ts'
 
 export const sessionQuery = queryOptions({
   queryKey: ['session'],

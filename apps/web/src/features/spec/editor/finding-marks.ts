@@ -113,6 +113,20 @@ const applyFix = (view: EditorView, fix: Finding['fixes'][number]) => {
   view.focus()
 }
 
+const wordsOf = (finding: Finding): string => (finding.hint ? `${finding.message} ${finding.hint}` : finding.message)
+
+/** Text of the spec, between backticks, is set in its type. */
+const rendered = (text: string): Node => {
+  const holder = document.createElement('span')
+  text.split('`').forEach((part, at) => {
+    const piece = document.createElement(at % 2 === 0 ? 'span' : 'code')
+    piece.className = at % 2 === 0 ? '' : 'bg-well px-0.5 font-mono'
+    piece.textContent = part
+    holder.append(piece)
+  })
+  return holder
+}
+
 const diagnosticOf = (state: EditorState, finding: Finding): Diagnostic => {
   const from = offsetOf(state.doc, finding.range.start)
   return {
@@ -120,7 +134,8 @@ const diagnosticOf = (state: EditorState, finding: Finding): Diagnostic => {
     to: Math.max(from, offsetOf(state.doc, finding.range.end)),
     severity: finding.severity === 'note' ? 'info' : finding.severity,
     source: finding.code,
-    message: finding.hint ? `${finding.message} ${finding.hint}` : finding.message,
+    message: wordsOf(finding),
+    renderMessage: () => rendered(wordsOf(finding)),
     actions: finding.fixes.map((fix) => ({ name: fix.title, apply: (view) => applyFix(view, fix) })),
   }
 }

@@ -7,7 +7,7 @@ const look = EditorView.theme({
   '&': { height: '100%', backgroundColor: 'var(--color-well)', color: 'var(--color-ink)', fontSize: '13px' },
   '&.cm-focused': { outline: 'none' },
   '.cm-scroller': { fontFamily: 'var(--font-mono)', lineHeight: '20px', overflow: 'auto' },
-  '.cm-content': { padding: '8px 0', caretColor: 'var(--color-ink)' },
+  '.cm-content': { padding: '8px 0 60px', caretColor: 'var(--color-ink)' },
   '.cm-line': { padding: '0 12px 0 6px' },
   '.cm-cursor': { borderLeftColor: 'var(--color-ink)', borderLeftWidth: '2px' },
   '.cm-gutters': { backgroundColor: 'var(--color-well)', color: 'var(--color-pencil)', border: 'none' },
