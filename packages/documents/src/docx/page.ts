@@ -94,7 +94,7 @@ export const footer = (options: DocumentOptions, orientation: Orientation): Foot
         children: [
           new TextRun({
             children: [
-              plainText([office, date.slice(0, 10), ...hash].join('  ·  ')),
+              plainText([office, date.slice(0, 10), ...hash].filter((part) => part !== '').join('  ·  ')),
               new Tab(),
               'Page ',
               PageNumber.CURRENT,

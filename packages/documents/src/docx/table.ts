@@ -12,7 +12,7 @@ import {
 } from 'docx'
 import type { Box } from '@coldfill/formula'
 import { symbolRuns } from './symbol-runs.ts'
-import { columnWidths } from './column-widths.ts'
+import { columnWidths, type TableSize } from './column-widths.ts'
 import { plainText } from './plain-text.ts'
 import { STYLE, TABLE_STYLE } from './styles.ts'
 
@@ -34,7 +34,7 @@ export interface TableContent {
   readonly description: string
   /** Twips. */
   readonly width: number
-  readonly size?: 'table' | 'schedule'
+  readonly size?: TableSize
   /** Words of the first column in the built-in style Strong. */
   readonly strongFirst?: boolean
   /** Least height of body rows in twips, for cells that a person fills in. */
@@ -49,6 +49,7 @@ const STYLES = {
     text: STYLE.scheduleText,
     number: STYLE.scheduleNumber,
   },
+  small: { head: STYLE.smallHead, headNumber: STYLE.smallHeadNumber, text: STYLE.smallText, number: STYLE.smallNumber },
 }
 
 class DescribedTable extends Table {
@@ -72,7 +73,7 @@ class DescribedTable extends Table {
 /** A table with a repeating head row, rows that stay whole, and nothing merged. */
 export const table = (content: TableContent): Table => {
   const { columns, rows, width } = content
-  const widths = columnWidths(columns, rows, width, content.size ?? 'table')
+  const widths = columnWidths(columns, rows, width, content.size ?? 'table', content.strongFirst)
   const style = STYLES[content.size ?? 'table']
   const cell = (content: TableCellContent, index: number, paragraphStyle: string, strong = false) =>
     new TableCell({

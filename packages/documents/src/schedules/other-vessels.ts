@@ -1,6 +1,6 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import { sentenceCase } from '../words/vessel-words.ts'
-import { defineSchedule, optional, resultNumber, type ScheduleDefinition } from './schedule.ts'
+import { defineSchedule, resultNumber, type ScheduleDefinition } from './schedule.ts'
 import * as shared from './shared-columns.ts'
 
 /** A schedule of any kind that has no columns of its own yet: every result that one of its vessels has, in order of first appearance. */
@@ -19,9 +19,10 @@ export const otherVessels = (kind: string, result: ProjectResult): ScheduleDefin
     purpose: `Every ${kind} of the project with the numbers it was sized to. Pressures are gauge, at the vessel connection.`,
     columns: [
       shared.serves,
+      shared.location,
       shared.count,
       ...columns.values(),
-      optional(shared.selectedVolume),
+      ...shared.selection,
       shared.method,
       shared.assumptions,
     ],

@@ -18,6 +18,8 @@ export interface ScheduleColumn {
   readonly width: number
   /** Decimals that every number of the column is shown with; null for words. */
   readonly decimals: number | null
+  /** What the chosen vessel is; every other column says what the vessel has to do and how that was found. */
+  readonly part?: 'selection'
 }
 
 export interface ScheduleCell {
@@ -107,11 +109,14 @@ export const scheduleTable = (result: ProjectResult, kind: string, units: UnitSy
 
   for (const column of definition.columns) {
     const { key, heading, width } = column
+    const part = column.part === undefined ? {} : { part: column.part }
     if (column.shows === 'words') {
-      columns.push({ key, heading, unit: '', align: column.align ?? 'left', width, decimals: null })
-      contexts.forEach((context, row) => {
+      const texts = contexts.map((context) => column.words(context))
+      if (column.optional && texts.every((text) => text === '')) continue
+      columns.push({ key, heading, unit: '', align: column.align ?? 'left', width, decimals: null, ...part })
+      texts.forEach((text, row) => {
         const cell = cells[row]
-        if (cell) cell[key] = words(column.words(context) || '—')
+        if (cell) cell[key] = words(text || '—')
       })
       continue
     }
@@ -121,7 +126,7 @@ export const scheduleTable = (result: ProjectResult, kind: string, units: UnitSy
     })
     if (column.optional && numbers.every((found) => found === null)) continue
     const decimals = decimalsFor(numbers.flatMap((found) => (found ? [found.value] : [])))
-    columns.push({ key, heading, unit: unitLabel(column.kind, units), align: 'right', width, decimals })
+    columns.push({ key, heading, unit: unitLabel(column.kind, units), align: 'right', width, decimals, ...part })
     contexts.forEach(({ vessel }, row) => {
       const [cell, found] = [cells[row], numbers[row]]
       if (cell) cell[key] = found ? { text: fixedText(found.value, decimals), ...found } : missing(vessel, column)

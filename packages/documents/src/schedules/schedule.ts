@@ -17,8 +17,10 @@ interface ColumnBase {
   readonly heading: string
   /** Width in characters of the body type. */
   readonly width: number
-  /** Left out of a schedule in which no vessel has a number for it. */
+  /** Left out of a schedule in which no vessel has anything for it. */
   readonly optional?: true
+  /** What the chosen vessel is; every other column says what the vessel has to do and how that was found. */
+  readonly part?: 'selection'
 }
 
 /** A column as data: words, a number of the vessel's results, or a number found elsewhere in the project. */
@@ -94,3 +96,9 @@ export const quantity = (
 ): ScheduleColumnDefinition => ({ shows: 'quantity', key, heading, width, kind, number })
 
 export const optional = (column: ScheduleColumnDefinition): ScheduleColumnDefinition => ({ ...column, optional: true })
+
+export const ofSelection = (column: ScheduleColumnDefinition): ScheduleColumnDefinition => ({
+  ...column,
+  optional: true,
+  part: 'selection',
+})

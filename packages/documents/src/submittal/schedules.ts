@@ -1,9 +1,38 @@
+import type { FileChild } from 'docx'
 import { numberedNote, paragraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
-import { table } from '../docx/table.ts'
-import { headerText, scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
+import { stackedParts } from '../docx/stacked-tables.ts'
+import { table, type Captions } from '../docx/table.ts'
+import { headerText, scheduleKinds, scheduleTable, type ScheduleTable } from '../schedules/schedule-table.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import type { Section } from './section.ts'
+
+/** The schedule as one table, or where the page is too narrow for it as tables under each other that repeat the mark. */
+const scheduleTables = (schedule: ScheduleTable, captions: Captions, width: number): FileChild[] => {
+  const columns = schedule.columns.map((column) => ({
+    heading: headerText(column),
+    width: column.width,
+    align: column.align,
+  }))
+  const rows = schedule.rows.map((row) => schedule.columns.map((column) => row.cells[column.key]?.text ?? ''))
+  const chosen = schedule.columns.findIndex((column) => column.part === 'selection')
+  const parts = stackedParts(columns, rows, width, chosen > 0 ? [chosen] : [])
+  return parts.flatMap((part, index) => {
+    const which = parts.length > 1 ? `, part ${index + 1} of ${parts.length}` : ''
+    return [
+      captions.next(`${schedule.title} schedule${which}`),
+      table({
+        title: `${schedule.title} schedule${which}`,
+        description: schedule.purpose,
+        width,
+        size: part.size,
+        strongFirst: true,
+        columns: part.columns.flatMap((place) => columns[place] ?? []),
+        rows: rows.map((row) => part.columns.map((place) => row[place] ?? '')),
+      }),
+    ]
+  })
+}
 
 /** One schedule a kind of vessel, with its keyed notes under it. Stands in a landscape section. */
 export const schedules: Section = ({ result, options, headings, captions, width }) => [
@@ -14,20 +43,7 @@ export const schedules: Section = ({ result, options, headings, captions, width 
     return [
       headings.heading(schedule.title, 2),
       paragraph([...(section ? [`Spec section ${section}.`] : []), schedule.purpose].join(' ')),
-      captions.next(`${schedule.title} schedule`),
-      table({
-        title: `${schedule.title} schedule`,
-        description: schedule.purpose,
-        width,
-        size: 'schedule',
-        strongFirst: true,
-        columns: schedule.columns.map((column) => ({
-          heading: headerText(column),
-          width: column.width,
-          align: column.align,
-        })),
-        rows: schedule.rows.map((row) => schedule.columns.map((column) => row.cells[column.key]?.text ?? '')),
-      }),
+      ...scheduleTables(schedule, captions, width),
       paragraph(`${gaugeRemark(options.units)} — does not apply; ? an input is missing.`, STYLE.remark),
       ...schedule.notes.map(({ number, text }) => numberedNote(`${number}`, text)),
     ]

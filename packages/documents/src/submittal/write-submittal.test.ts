@@ -1,7 +1,8 @@
 import { water } from '@coldfill/engine'
 import { strFromU8, unzipSync } from 'fflate'
 import { beforeAll, describe, expect, it } from 'vitest'
-import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
+import { lineWidth } from '../docx/letter-widths.ts'
+import { headerText, scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
 import { clinicProject, documentOptions, si } from '../testing/index.ts'
 import { cautions } from '../words/cautions.ts'
 import { writeSubmittal } from './write-submittal.ts'
@@ -73,17 +74,44 @@ describe('the submittal', () => {
     }
   })
 
-  it('prints each schedule as the table of the schedule says, in a landscape section', () => {
+  it('prints every cell of a schedule in a landscape section, in as many tables as its columns need, the mark in each', () => {
     const tables = all(document, 'tbl')
     for (const kind of scheduleKinds(project)) {
       const schedule = scheduleTable(project, kind, 'US')
-      const printed = tables.find((table) => table.includes(`<w:tblCaption w:val="${schedule.title} schedule"/>`))
-      const rows = all(printed ?? '', 'tr').map((row) => all(row, 'tc').map(textOf))
-      expect(rows.slice(1)).toEqual(
-        schedule.rows.map((row) => schedule.columns.map((column) => row.cells[column.key]?.text)),
+      const parts = tables
+        .filter((table) => table.includes(`<w:tblCaption w:val="${schedule.title} schedule`))
+        .map((table) => all(table, 'tr').map((row) => all(row, 'tc').map(textOf)))
+      expect(parts.length).toBeGreaterThan(0)
+      for (const [head, ...rows] of parts) {
+        expect(head?.[0]).toBe('Mark')
+        expect(rows.map((row) => row[0])).toEqual(schedule.rows.map((row) => row.mark))
+      }
+      const whole = [schedule.columns.map(headerText)].concat(
+        schedule.rows.map((row) => schedule.columns.map((column) => row.cells[column.key]?.text ?? '')),
+      )
+      expect(whole.map((row, index) => [row[0], ...parts.flatMap((part) => part[index]?.slice(1) ?? [])])).toEqual(
+        whole,
       )
     }
     expect(document.match(/<w:pgSz [^>]*w:orient="landscape"/g)).toHaveLength(1)
+  })
+
+  it('gives each column of a table room for its longest word', () => {
+    // Type of the styles in points; cells have 3.5 pt of margin on each side.
+    const sizes = { TableText: 8.5, ScheduleText: 7.5, SmallScheduleText: 7 }
+    const cramped: string[] = []
+    for (const table of all(document, 'tbl')) {
+      const [, size = 0] = Object.entries(sizes).find(([style]) => table.includes(`w:val="${style}"`)) ?? []
+      const widths = [...table.matchAll(/<w:gridCol w:w="(\d+)"/g)].map(([, width]) => Number(width) / 20)
+      for (const row of all(table, 'tr').slice(1)) {
+        all(row, 'tc').forEach((cell, index) => {
+          for (const word of textOf(cell).split(' ')) {
+            if (word.length <= 22 && lineWidth(word) * size + 7 > (widths[index] ?? 0)) cramped.push(word)
+          }
+        })
+      }
+    }
+    expect(cramped).toEqual([])
   })
 
   it('writes every step of a calculation twice as a native equation: in symbols and with its numbers', () => {
@@ -155,7 +183,9 @@ describe('the submittal', () => {
     const written = partsOf(await writeSubmittal({ ...project, vessels }, documentOptions('US'))).get(
       'word/document.xml',
     )
-    const rows = all(written ?? '', 'tbl').find((table) => table.includes('w:val="TET-1, headroom"'))
+    const rows = all(written ?? '', 'tbl').find((table) =>
+      table.includes('w:val="TET-1, headroom with the chosen vessel"'),
+    )
     // By hand: 0.001 m3 a kelvin is 1 L / 1.8 = 0.5556 L a degree Fahrenheit, at 3.785411784 L a gallon 0.147 gal.
     expect(
       all(rows ?? '', 'tc')

@@ -1,11 +1,12 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import type { Workbook } from 'exceljs'
 import type { DocumentOptions } from '../document-options.ts'
+import { longestWord } from '../docx/letter-widths.ts'
 import { PENCIL } from '../look.ts'
 import { headerText, type ScheduleTable } from '../schedules/schedule-table.ts'
 import type { EntryCells } from './calculation-sheet.ts'
 import { decimalsFormat, putCell, sheetReference, type CellContent } from './put-cell.ts'
-import { addSheet, fitHeight, font, writeTitle } from './sheet.ts'
+import { addSheet, CELL_EDGES, CHARACTER, fitHeight, font, writeTitle } from './sheet.ts'
 import { setPrintArea, writeTable } from './text-table.ts'
 
 /** Where the numbers of a vessel stand: its calculation sheet, and the cell of each trace entry there. */
@@ -13,6 +14,13 @@ export interface VesselCells {
   readonly sheet: string
   readonly cells: EntryCells
 }
+
+/** Points of type in a table. */
+const TYPE = 9
+
+/** Characters of width in which no word of a text is broken: its longest word, the indent and the edges of a cell. */
+const wordRoom = (text: string, bold: boolean): number =>
+  Math.min(40, (longestWord(text, bold) * TYPE + CELL_EDGES) / CHARACTER)
 
 /** One flat schedule of one kind of vessel; its numbers are live references to the calculation sheets. */
 export const writeScheduleSheet = (
@@ -25,7 +33,11 @@ export const writeScheduleSheet = (
 ): void => {
   const columns = schedule.columns.map((column) => ({
     heading: headerText(column),
-    width: column.align === 'right' ? column.width - 0.5 : column.width + 1,
+    width: Math.max(
+      column.align === 'right' ? column.width - 0.5 : column.width + 1,
+      wordRoom(headerText(column), true),
+      ...schedule.rows.map((row) => wordRoom(row.cells[column.key]?.text ?? '', column.key === 'mark')),
+    ),
     align: column.align,
   }))
   const sheet = addSheet(workbook, name, project, options, {

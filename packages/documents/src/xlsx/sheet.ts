@@ -1,5 +1,6 @@
 import type { Alignment, Borders, Fill, Font, Row, Workbook, Worksheet } from 'exceljs'
 import { draftWarning, revisionWords, type DocumentOptions } from '../document-options.ts'
+import { lineWidth } from '../docx/letter-widths.ts'
 import { paperOf } from '../paper.ts'
 import { BODY_FONT, HAIR, INK, OCHRE, PENCIL, SHEET, WELL } from '../look.ts'
 import { putCell } from './put-cell.ts'
@@ -29,6 +30,8 @@ export const wrapped = (
 
 /** A paper size code of the file format. */
 const PAPER = { Letter: 1, A4: 9 } as const
+/** Tabloid and A3. */
+const LARGE_PAPER = { Letter: 3, A4: 8 } as const
 
 /** User text inside a footer: `&` starts a code there. */
 const footerText = (text: string, most: number): string =>
@@ -40,6 +43,9 @@ export interface SheetOptions {
   readonly widths: readonly number[]
 }
 
+/** Characters of all columns beyond which the usual page would set the type too small to read: then it takes the next larger. */
+const WIDEST = 205
+
 /** A sheet set up for the printer: fitted to the width, page x of y, project and revision in the footer. */
 export const addSheet = (
   workbook: Workbook,
@@ -49,9 +55,10 @@ export const addSheet = (
   { orientation, widths }: SheetOptions,
 ): Worksheet => {
   const { titleBlock, contentHash } = options
+  const wide = widths.reduce((sum, width) => sum + width, 0) > WIDEST
   const sheet = workbook.addWorksheet(name, {
     pageSetup: {
-      paperSize: PAPER[paperOf(options)] as never,
+      paperSize: (wide ? LARGE_PAPER : PAPER)[paperOf(options)] as never,
       orientation,
       fitToPage: true,
       fitToWidth: 1,
@@ -92,18 +99,27 @@ export const writeTitle = (sheet: Worksheet, title: string, purpose: string, opt
   return 5
 }
 
+/** Points of a character by which the widths of columns are counted, and of the indent and edges of a cell. */
+export const CHARACTER = 5.25
+export const CELL_EDGES = 10.75
+
 /** Lines that a wrapped text takes in a column, so that a row can be given its height: no program fits it by itself on opening. */
 const lines = (text: string, width: number, size: number): number => {
-  // The indent of a wrapped cell takes about a character.
-  const perLine = Math.max(1, Math.floor(((width - 1) * 10.6) / size))
+  const perLine = Math.max(1, (width * CHARACTER - CELL_EDGES) / size)
+  const space = lineWidth(' ')
   return text.split('\n').reduce((all, part) => {
     let [count, used] = [1, 0]
     for (const word of part.split(' ')) {
-      const length = word.length + (used > 0 ? 1 : 0)
-      if (used + length <= perLine) used += length
+      // A little wider than regular type, for heads and first columns are bold.
+      const length = lineWidth(word) * 1.06
+      if (used === 0 || used + space + length <= perLine) used += length + (used > 0 ? space : 0)
       else {
-        count += used > 0 ? Math.max(1, Math.ceil(word.length / perLine)) : Math.ceil(word.length / perLine) - 1
-        used = word.length % perLine || Math.min(word.length, perLine)
+        count += 1
+        used = length
+      }
+      while (used > perLine) {
+        count += 1
+        used -= perLine
       }
     }
     return all + count
