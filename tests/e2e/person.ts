@@ -36,7 +36,8 @@ export const signIn = async (browser: Browser, address: string, email: string): 
   await page.getByLabel('E-mail').fill(email)
   await page.getByLabel('Password').fill(PASSWORD)
   await page.getByRole('button', { name: 'Sign in' }).click()
-  await page.getByRole('heading', { name: 'Projects', level: 1 }).waitFor()
+  await page.waitForURL('/')
+  await page.getByRole('heading', { level: 1 }).waitFor()
   return { page, complaints }
 }
 
@@ -99,7 +100,7 @@ export const resultLine = (page: Page, mark: string) =>
   page
     .getByRole('tabpanel', { name: /^Results/u })
     .getByRole('listitem')
-    .filter({ hasText: mark })
+    .filter({ hasText: new RegExp(`^${mark}`, 'u') })
 
 /** Writes a picture where COLDFILL_SCREENSHOTS names a folder. */
 export const picture = async (page: Page, name: string): Promise<void> => {

@@ -30,7 +30,7 @@ const scheduleCell = (page: Page, mark: string, column: string) =>
           head.textContent?.startsWith(heading ?? ''),
         )
         for (const row of table.querySelectorAll('tbody tr'))
-          if (row.querySelector('th')?.textContent?.includes(wantedMark ?? ''))
+          if (row.querySelector('th')?.textContent?.startsWith(wantedMark ?? ''))
             return row.children[at]?.textContent ?? null
       }
       return null
@@ -58,7 +58,8 @@ const clickCell = async (page: Page, mark: string, column: string): Promise<void
 const downloads = async (place: Locator, count: number): Promise<string[]> => {
   const links = place.getByRole('link', { name: /^Download/u })
   await expect.poll(() => links.count(), { timeout: 90_000 }).toBe(count)
-  return (await links.allTextContents()).map((name) => name.split('.').at(-1) ?? '').sort()
+  const names = await links.evaluateAll((found) => found.map((link) => link.getAttribute('download') ?? ''))
+  return names.map((name) => name.split('.').at(-1) ?? '').sort()
 }
 
 beforeAll(async () => {
