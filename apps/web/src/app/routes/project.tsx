@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query'
 import type { Sheet as SheetName } from '@coldfill/contract'
-import { Outlet, useLocation, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom'
+import { useEffect, useEffectEvent } from 'react'
+import { Outlet, useLocation, useNavigate, useSearchParams, type LoaderFunctionArgs } from 'react-router-dom'
 import { Frame } from '#components/layouts/frame.tsx'
 import { SheetList, type SheetLink } from '#components/layouts/sheet-list.tsx'
 import { paths, withQuery } from '#config/paths.ts'
@@ -30,6 +31,7 @@ export function Component() {
   const project = useProject(number)
   const session = useSession()
   const { pathname } = useLocation()
+  const navigate = useNavigate()
   const [search] = useSearchParams()
   const redlines = useQuery({
     ...redlinesQuery(number, search.get('rev')),
@@ -66,6 +68,19 @@ export function Component() {
   const here = sheets.findLastIndex(
     ({ sheet }) => pathname === paths[sheet](number) || pathname.startsWith(`${paths[sheet](number)}/`),
   )
+
+  const onKey = useEffectEvent((event: KeyboardEvent) => {
+    if (!event.altKey || event.ctrlKey || event.metaKey || event.shiftKey) return
+    const link = /^Digit[1-9]$/.test(event.code) ? links[Number(event.code.slice(5)) - 1] : undefined
+    if (!link) return
+    event.preventDefault()
+    void navigate(link.to)
+  })
+  useEffect(() => {
+    const listen = (event: KeyboardEvent) => onKey(event)
+    window.addEventListener('keydown', listen)
+    return () => window.removeEventListener('keydown', listen)
+  }, [])
 
   return (
     <Frame

@@ -15,7 +15,9 @@ import { useStore } from '#lib/store.ts'
 import { chooseTheme, themeStore } from '#lib/theme.ts'
 
 const shortcuts: readonly (readonly [keys: string, where: string, does: string])[] = [
+  ['Alt+1 … Alt+7', 'Project', 'Go to a sheet, in the order of the list'],
   ['Ctrl+S', 'Spec', 'Save'],
+  ['Ctrl+Space', 'Spec', 'Completion'],
   ['F8, Shift+F8', 'Spec', 'Next and previous finding'],
   ['Ctrl+F', 'Spec', 'Search and replace'],
   ['Esc, then Tab', 'Spec', 'Leave the editor'],

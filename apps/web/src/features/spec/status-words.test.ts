@@ -19,7 +19,8 @@ describe('what the results are worth', () => {
     expect(sizedWords({ ...sizing, text: 'b' })).toBe('Sizing…')
   })
   it('dates the last results where the text has nothing to size', () => {
-    expect(sizedWords({ ...sizing, text: 'b', latestText: 'b' })).toBe('Nothing to size. Results of 14:02.')
+    expect(sizedWords({ ...sizing, text: 'b', latestText: 'b' })).toBe('Cannot be sized; results of 14:02')
+    expect(sizedWords({ ...sizing, text: 'b', latestText: 'b', goodText: null })).toBe('Nothing to size')
   })
   it('dates the last results where the server did not answer, and says why', () => {
     expect(sizedWords({ ...sizing, text: 'b', failure: 'Too long.' })).toBe('Too long. Results of 14:02.')

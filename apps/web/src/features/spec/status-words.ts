@@ -27,6 +27,7 @@ export const sizedWords = (sizing: {
   const fallback = sizing.goodText === null ? '' : ` Results of ${sizing.goodAt}.`
   if (sizing.failure !== null) return `${sizing.failure}${fallback}`
   if (sizing.goodText === sizing.text) return 'Sized'
-  if (sizing.latestText === sizing.text) return `Nothing to size.${fallback}`
+  if (sizing.latestText === sizing.text)
+    return sizing.goodText === null ? 'Nothing to size' : `Cannot be sized; results of ${sizing.goodAt}`
   return 'Sizing…'
 }
