@@ -4,12 +4,13 @@ import { type BlockShape, docOf, exampleOf, type FieldShape, type Shape } from '
 import { specShape } from '../model/spec-shape.ts'
 import type { Vocabulary } from '../model/spec-model.ts'
 import { isService, serviceKeys } from '../model/system.ts'
-import { type VesselKindDefinition, isVesselKind, vesselKinds } from '../model/vessel.ts'
 import { lineStart, type Span } from '../parse/line-index.ts'
 import { entryOf, type SourceMap } from '../parse/source-tree.ts'
 import { asScalar } from '../read/keys.ts'
 import { type Cursor, cursorAt, isProbe } from './cursor.ts'
+import { givenNames } from './names.ts'
 import { blockFor, type PlaceInLanguage, shapeAt, textBehind } from './shape-at.ts'
+import { fittingKinds, freshName, type Snippet, systemSnippets, vesselSnippets } from './snippets.ts'
 
 export interface Completion {
   /** What the list shows. */
@@ -84,47 +85,16 @@ const keysOfBlock = (
 const writtenKeys = (place: PlaceInLanguage): Set<string> =>
   new Set(place.node?.node === 'map' ? place.node.entries.map(({ key }) => key).filter((key) => !isProbe(key)) : [])
 
-/** A mark that no vessel and no system has yet, after the example: `ET-1`, `ET-2`. */
-const freshMark = (example: string, written: ReadonlySet<string>): string => {
-  if (!written.has(example)) return example
-  const stem = example.replace(/-?\d+$/u, '')
-  for (let number = 2; ; number++) if (!written.has(`${stem}-${number}`)) return `${stem}-${number}`
-}
+const whole = (detail: string, snippets: readonly Snippet[]): Completion[] =>
+  snippets.map(({ label, text, doc }) => ({ label, insert: text, sort: 'snippet', detail, doc }))
 
-const MARKS: Readonly<Record<string, string>> = {
-  'expansion tank': 'ET-1',
-  'thermal expansion tank': 'TET-1',
-  'storage tank': 'ST-1',
-  'buffer tank': 'BT-1',
-  'pressure tank': 'PT-1',
-  'solar expansion tank': 'SET-1',
-  'glycol feeder': 'GF-1',
-  'air and dirt separator': 'AS-1',
-  'hydraulic separator': 'HS-1',
-  'drain-back tank': 'DBT-1',
-  'flash tank': 'FT-1',
-  'blowdown separator': 'BS-1',
-  'condensate receiver': 'CR-1',
-  'break tank': 'BKT-1',
-}
-
-const fitting = (vocabulary: Vocabulary, service: string | undefined): string[] =>
-  vocabulary.kinds.filter((kind) => {
-    if (!isVesselKind(kind)) return false
-    const { services }: VesselKindDefinition = vesselKinds[kind]
-    return service === undefined || !isService(service) || services.includes(service)
-  })
-
-/** A whole vessel of each kind that fits the service of the system. */
-const vesselSnippets = (vocabulary: Vocabulary, place: PlaceInLanguage, written: ReadonlySet<string>): Completion[] =>
-  fitting(vocabulary, serviceAt(place)).flatMap((kind) => {
-    if (!isVesselKind(kind)) return []
-    const { doc, example }: VesselKindDefinition = vesselKinds[kind]
-    const mark = freshMark(MARKS[kind] ?? 'V-1', written)
-    return [
-      { label: `${mark}: ${kind}`, insert: `${mark}: ${example}`, sort: 'snippet', detail: 'a whole vessel', doc },
-    ]
-  })
+/** Marks of all vessels: a mark stands once in a spec. */
+const marksIn = (tree: SourceMap): Set<string> =>
+  new Set(
+    givenNames(tree)
+      .filter(({ sort }) => sort === 'vessel')
+      .map(({ name }) => name),
+  )
 
 const keyOptions = (
   text: string,
@@ -139,8 +109,14 @@ const keyOptions = (
       return Object.entries(shape.names)
         .filter(([name]) => !written.has(name))
         .map(([name, doc]) => ({ ...keyOption(text, cursor, name, shape.of), doc }))
-    if (/^systems\.[^.]+\.vessels$/u.test(cursor.path)) return vesselSnippets(vocabulary, place, written)
-    const name = freshMark(shape.exampleKey, written)
+    if (/^systems\.[^.]+\.vessels$/u.test(cursor.path))
+      return whole('a whole vessel', vesselSnippets(vocabulary, serviceAt(place), marksIn(cursor.tree)))
+    if (cursor.path === 'systems' && !cursor.inBraces)
+      return whole(
+        'a whole system',
+        systemSnippets(vocabulary, { ids: written, marks: marksIn(cursor.tree) }, indentOf(text, cursor.span.start)),
+      )
+    const name = freshName(shape.exampleKey, written)
     return [{ ...keyOption(text, cursor, name, shape.of), sort: 'snippet' }]
   }
   if (shape.shape === 'list') return NOTHING
@@ -203,7 +179,7 @@ const fieldOptions = (
   if (refersTo === 'fluid') return choiceOptions(fluidNames(cursor.tree), 'name')
   if (refersTo === 'pipe size') return choiceOptions(sizeNames(vocabulary, place), 'name')
   if (/\.kind$/u.test(cursor.path) && field.field === 'choice') {
-    const fit = fitting(vocabulary, serviceAt(place))
+    const fit: readonly string[] = fittingKinds(vocabulary, serviceAt(place))
     return choiceOptions(
       Object.fromEntries(Object.entries(field.choices).filter(([kind]) => fit.includes(kind))),
       'choice',
