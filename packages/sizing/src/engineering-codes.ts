@@ -228,12 +228,12 @@ export const engineeringCodes = {
     'Rule of this program.',
   ),
   'CF-E035': code(
-    'warning',
-    'Vessel rated below the relief valve',
-    'The working pressure of the chosen vessel is below the relief valve setting at its height.',
-    'The vessel would be the weakest part of the system when the valve opens.',
-    'Choose a vessel rated for the relief setting or above.',
-    'ASME BPVC; common practice of the trade.',
+    'note',
+    'Hung vessel above the usual size',
+    'A vessel that is hung from piping or a wall is larger than the sizes usually hung.',
+    'A membrane may fail and the whole shell fill with water; piping carries only small vessels, as their listing says.',
+    'Stand the vessel on the floor, or show its supports: twice the weight full of water.',
+    `Common practice, no source; UMC 1004.1 for the supports. ${local}`,
   ),
   'CF-E036': code(
     'note',
@@ -410,6 +410,14 @@ export const engineeringCodes = {
     'Vessels at different points of a loop shift the point of no pressure change.',
     'Connect them at one point and charge each for its own height.',
     'ASHRAE Handbook, HVAC Systems and Equipment.',
+  ),
+  'CF-E071': code(
+    'warning',
+    'Closed loop without an expansion tank',
+    'A closed heating or cooling loop has vessels but no expansion tank.',
+    'Its water has nowhere to go when it warms up; the mechanical codes ask for an expansion tank in every hot-water system.',
+    'Add an expansion tank, or accept the finding with the reason.',
+    `IMC 1009.1 (${memory}). ${local}`,
   ),
   'CF-E090': code(
     'warning',

@@ -67,6 +67,17 @@ const requirementOf = (
 
 const label = (row: CatalogueRow): string => `${row.maker} ${row.model}`
 
+/** Largest vessel that is usually hung, 15 gal in m3. */
+const LARGEST_HUNG = 15 * 3.785411784e-3
+
+const sayHung = (context: VesselContext, row: CatalogueRow): void => {
+  if (row.mounting !== 'hung' || row.volume <= LARGEST_HUNG * 1.001) return
+  report(context, 'CF-E035', {
+    message: `${context.vessel.mark} is ${label(row)}, ${show(context, 'volume', row.volume)}, hung; vessels above 15 gal (57 L) usually stand on the floor.`,
+    hint: 'Write `mounting: floor`, or show the supports.',
+  })
+}
+
 const sayNear = (context: VesselContext, selection: Selection): void => {
   const { choice, nearMiss, ties } = selection
   if (!choice) return
@@ -123,6 +134,7 @@ const namedRow = (context: VesselContext, rows: readonly CatalogueRow[], need: R
       at: selection,
     })
   }
+  sayHung(context, row)
   return selectedFrom(row, need.quantity ?? 1)
 }
 
@@ -151,6 +163,7 @@ export const selectVessel = (
     return null
   }
   sayNear(context, found)
+  sayHung(context, found.choice.row)
   return selectedFrom(found.choice.row, found.choice.quantity)
 }
 

@@ -2,6 +2,7 @@ import type { Assumption } from '../assumption.ts'
 import { averageTemperature } from './average-temperature.ts'
 import { emitterClasses } from './emitters.ts'
 import { bufferCredit, bufferLoadMinimum, bufferVolumePerTon } from './buffer.ts'
+import { glycolExpansionUncertainty } from './glycol.ts'
 import { copperExpansion, domesticMaterial, steelExpansion, systemMaterial } from './material.ts'
 import {
   pressureTankPrecharge,
@@ -64,6 +65,7 @@ const all: readonly Assumption[] = [
   steelExpansion,
   copperExpansion,
   averageTemperature,
+  glycolExpansionUncertainty,
   bufferLoadMinimum,
   bufferCredit,
   bufferVolumePerTon,

@@ -13,6 +13,7 @@ import { codeMinimumDiaphragm, codeMinimumPlainSteel } from './expansion-tank/co
 import { din4807 } from './expansion-tank/din-4807.ts'
 import { checkBackEuropean, en12828Glycol, en12828Water } from './expansion-tank/en-12828.ts'
 import { checkBackUne, une100155Glycol, une100155Water } from './expansion-tank/une-100155.ts'
+import { glycolUncertainty } from './glycol-uncertainty.ts'
 import { fullWeight } from './full-weight.ts'
 import { pressureTankMethods } from './pressure-tank/pressure-tank.ts'
 import { storageTankMethods } from './storage-tank/index.ts'
@@ -77,6 +78,7 @@ const all: readonly Method[] = [
   checkBackUne,
   checkBackBs7074,
   fullWeight,
+  glycolUncertainty,
 ]
 
 export const methods: Readonly<Record<string, Method>> = Object.fromEntries(all.map((method) => [method.id, method]))

@@ -1,10 +1,12 @@
-import type { Finding, SpecModel, SystemModel } from '@coldfill/spec'
+import { type Finding, hydronicServices, type SpecModel, type SystemModel } from '@coldfill/spec'
 import { gaugeFromSpec } from '../calculate-sections.ts'
 import { glycolMakeUp } from './hydronic.ts'
 import { engineeringCodes, type EngineeringCode } from '../engineering-codes.ts'
 
 const PSI = 6894.757293168361
 const SIXTY_C = 333.15
+const CLOSED_LOOPS: ReadonlySet<string> = new Set(hydronicServices)
+const EXPANSION_KINDS: ReadonlySet<string> = new Set(['expansion tank', 'solar expansion tank', 'drain-back tank'])
 
 /** Checks of a system as a whole, whether or not its vessels could be sized. `atmosphere` in Pa abs. */
 export const checkSystem = (_spec: SpecModel, system: SystemModel, atmosphere: number): readonly Finding[] => {
@@ -89,6 +91,15 @@ export const checkSystem = (_spec: SpecModel, system: SystemModel, atmosphere: n
   }
   if (system.fluid && system.fluid.base !== 'water') {
     report('CF-E061', system.fluid, glycolMakeUp, 'Schedule a feeder, or say how the loop is made up.')
+  }
+  const closedLoop = service !== undefined && CLOSED_LOOPS.has(service)
+  if (closedLoop && vessels.length > 0 && !vessels.some(({ kind }) => EXPANSION_KINDS.has(kind))) {
+    report(
+      'CF-E071',
+      system,
+      `${system.id} is a closed loop and has no expansion tank in this spec.`,
+      'Add a vessel of kind `expansion tank`, or accept this with the reason (one that exists, or stands in another spec).',
+    )
   }
   const tanks = vessels.filter((vessel) => vessel.kind === 'expansion tank')
   const second = tanks[1]

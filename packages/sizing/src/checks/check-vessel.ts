@@ -3,6 +3,7 @@ import type { ResultValue } from '../result.ts'
 import { report, type VesselContext } from '../vessel-context.ts'
 import { checkCodeMinimum } from './code-minimum.ts'
 import { checkDomestic } from './domestic.ts'
+import { glycolUpperVolume } from './glycol-uncertainty.ts'
 import { checkHydronic } from './hydronic.ts'
 import { stampReasons } from './stamp.ts'
 
@@ -35,7 +36,10 @@ export const checkVessel = (
   const { kind } = context.vessel
   if (kind === 'expansion tank') {
     checkHydronic(context, results, construction, atmosphere)
-    return checkCodeMinimum(context, method, results, construction)
+    return {
+      ...checkCodeMinimum(context, method, results, construction),
+      ...glycolUpperVolume(context, method),
+    }
   }
   if (kind === 'thermal expansion tank') checkDomestic(context, results, atmosphere)
   return {}
