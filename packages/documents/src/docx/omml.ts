@@ -1,5 +1,6 @@
 import { BuilderElement, MathRun, type ParagraphChild, type XmlComponent } from 'docx'
 import type { Box } from '@coldfill/formula'
+import { inParagraph } from './xml-element.ts'
 
 /** An Office Math element with its children. */
 const element = (name: string, children: readonly XmlComponent[] = []): XmlComponent =>
@@ -60,9 +61,6 @@ export const ommlOf = (box: Box): XmlComponent[] => {
       ]
   }
 }
-
-// A paragraph takes any element; the library's type only lists the equations that it can build itself.
-const inParagraph = (component: XmlComponent): ParagraphChild => component as unknown as ParagraphChild
 
 /** An equation among words. */
 export const inlineEquation = (box: Box): ParagraphChild => inParagraph(element('oMath', ommlOf(box)))

@@ -1,4 +1,4 @@
-import { Bookmark, Paragraph, Tab, TextRun } from 'docx'
+import { Bookmark, Paragraph, Tab, TextRun, type ParagraphChild } from 'docx'
 import type { Box } from '@coldfill/formula'
 import { displayEquation, inlineEquation } from './omml.ts'
 import { plainText } from './plain-text.ts'
@@ -8,6 +8,16 @@ type Style = (typeof STYLE)[keyof typeof STYLE] | 'Title' | 'Subtitle' | 'Captio
 
 export const paragraph = (text: string, style: Style = 'Normal'): Paragraph =>
   new Paragraph({ style, children: [new TextRun(plainText(text))] })
+
+/** A paragraph of words and fields, one after the other. */
+export const runningText = (
+  parts: readonly (string | readonly ParagraphChild[])[],
+  style: Style = 'Normal',
+): Paragraph =>
+  new Paragraph({
+    style,
+    children: parts.flatMap((part) => (typeof part === 'string' ? [new TextRun(plainText(part))] : part)),
+  })
 
 /** A paragraph with some words in the built-in style Strong. */
 export const strongThenText = (strong: string, text: string, style: Style = 'Normal'): Paragraph =>
@@ -54,11 +64,12 @@ export interface HeadingEntry {
 export class Headings {
   readonly entries: HeadingEntry[] = []
 
-  heading(text: string, level: 1 | 2 | 3): Paragraph {
+  heading(text: string, level: 1 | 2 | 3, newPage = false): Paragraph {
     const anchor = `_Toc${String(100_000 + this.entries.length)}`
     this.entries.push({ text: plainText(text), level, anchor })
     return new Paragraph({
       style: `Heading${level}`,
+      ...(newPage ? { pageBreakBefore: true } : {}),
       children: [new Bookmark({ id: anchor, children: [new TextRun(plainText(text))] })],
     })
   }

@@ -82,6 +82,7 @@ const DEFINITIONS: readonly StyleDefinition[] = [
   { id: 'TOC1', name: 'toc 1', bold: true, before: 140, after: 30 },
   { id: 'TOC2', name: 'toc 2', left: 300, before: 0, after: 20 },
   { id: 'TOC3', name: 'toc 3', left: 600, before: 0, after: 20 },
+  { id: 'TableofFigures', name: 'table of figures', before: 0, after: 20 },
   { id: 'Header', name: 'header', size: 16, color: PENCIL, ...tight, bottom: fine },
   { id: 'Footer', name: 'footer', size: 16, color: PENCIL, ...tight, top: fine },
   { id: 'Strong', name: 'Strong', type: 'character', bold: true },

@@ -1,7 +1,6 @@
 import {
   BuilderElement,
   Paragraph,
-  SimpleField,
   Table,
   TableCell,
   TableLayoutType,
@@ -122,21 +121,4 @@ export const table = (content: TableContent): Table => {
       ),
     ],
   }).describe(content.title, content.description)
-}
-
-/** Numbers the tables of a document; the caption stands above its table. */
-export class Captions {
-  #tables = 0
-
-  next(text: string): Paragraph {
-    this.#tables += 1
-    return new Paragraph({
-      style: 'Caption',
-      children: [
-        new TextRun('Table '),
-        new SimpleField('SEQ Table \\* ARABIC', String(this.#tables)),
-        new TextRun(plainText(`. ${text}`)),
-      ],
-    })
-  }
 }

@@ -8,14 +8,17 @@ import type { Section } from './section.ts'
 export const assumptions: Section = ({ result, headings, captions, width }) => {
   const { assumptions: used } = result
   if (used.length === 0) {
-    return [headings.heading('Assumptions', 1), paragraph('Every value is given in the spec; nothing is assumed.')]
+    return [
+      headings.heading('Assumptions', 1, true),
+      paragraph('Every value is given in the spec; nothing is assumed.'),
+    ]
   }
   return [
-    headings.heading('Assumptions', 1),
+    headings.heading('Assumptions', 1, true),
     paragraph(
       'Each stands in where the spec is silent, or was changed there with a reason. The numbers are those of the schedules.',
     ),
-    captions.next('Assumptions'),
+    captions.next('Assumptions', 'assumptions'),
     table({
       title: 'Assumptions',
       description: 'Number, name, value, source and reason of every assumption, and the vessels that lean on it',

@@ -12,7 +12,7 @@ import {
   type StepLine,
   type VesselCalculation,
 } from '../calculation/vessel-calculation.ts'
-import { equationParagraph, equationThenText, paragraph, stepParagraph } from '../docx/paragraph.ts'
+import { equationParagraph, equationThenText, paragraph, runningText, stepParagraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
 import { basisWords } from '../words/basis-words.ts'
@@ -20,6 +20,7 @@ import { valueText } from '../calculation/value-text.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import { chosenVessel } from './chosen-vessel.ts'
+import { scheduleKey } from './schedules.ts'
 import type { Section, SubmittalContext } from './section.ts'
 
 type Vessel = ProjectResult['vessels'][number]
@@ -105,15 +106,20 @@ const checkLines = (vessel: Vessel, calculation: VesselCalculation, context: Sub
   ]
 }
 
-const vesselLines = (vessel: Vessel, context: SubmittalContext): FileChild[] => {
-  const { result, options, headings } = context
+const vesselLines = (vessel: Vessel, context: SubmittalContext, first: boolean): FileChild[] => {
+  const { result, options, headings, captions } = context
   const calculation = vesselCalculation(vessel, result, options.units, fluidOf(vessel).functions)
   const findings = result.findings.filter(
     (finding) => finding.path === vessel.path || finding.path.startsWith(`${vessel.path}.`),
   )
   return [
-    headings.heading(`${vessel.mark}  ${sentenceCase(vessel.kind)}`, 2),
-    paragraph(basisWords(vessel, result).join(' ')),
+    headings.heading(`${vessel.mark}  ${sentenceCase(vessel.kind)}`, 2, !first),
+    runningText([
+      basisWords(vessel, result).join(' '),
+      ' It is scheduled in ',
+      captions.reference(scheduleKey(vessel.kind)),
+      '.',
+    ]),
     paragraph(answer(vessel, context), STYLE.answer),
     ...(vessel.status === 'sized' ? chosenVessel(vessel, context) : []),
     ...findings.map((finding) =>
@@ -133,6 +139,6 @@ export const calculations: Section = (context) => {
     paragraph(
       `Each step stands in symbols and then with its numbers. Shown digits give the shown result; the full numbers are in the schedule workbook. ${gaugeRemark(options.units)}`,
     ),
-    ...result.vessels.flatMap((vessel) => vesselLines(vessel, context)),
+    ...result.vessels.flatMap((vessel, index) => vesselLines(vessel, context, index === 0)),
   ]
 }

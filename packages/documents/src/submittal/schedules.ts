@@ -2,10 +2,14 @@ import type { FileChild } from 'docx'
 import { numberedNote, paragraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
 import { stackedParts } from '../docx/stacked-tables.ts'
-import { table, type Captions } from '../docx/table.ts'
+import type { Captions } from '../docx/captions.ts'
+import { table } from '../docx/table.ts'
 import { headerText, scheduleKinds, scheduleTable, type ScheduleTable } from '../schedules/schedule-table.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import type { Section } from './section.ts'
+
+/** The key by which words refer to the schedule of a kind. */
+export const scheduleKey = (kind: string): string => `schedule of ${kind}`
 
 /** The schedule as one table, or where the page is too narrow for it as tables under each other that repeat the mark. */
 const scheduleTables = (schedule: ScheduleTable, captions: Captions, width: number): FileChild[] => {
@@ -20,7 +24,7 @@ const scheduleTables = (schedule: ScheduleTable, captions: Captions, width: numb
   return parts.flatMap((part, index) => {
     const which = parts.length > 1 ? `, part ${index + 1} of ${parts.length}` : ''
     return [
-      captions.next(`${schedule.title} schedule${which}`),
+      captions.next(`${schedule.title} schedule${which}`, index === 0 ? scheduleKey(schedule.kind) : undefined),
       table({
         title: `${schedule.title} schedule${which}`,
         description: schedule.purpose,

@@ -3,7 +3,7 @@ import type { FileChild } from 'docx'
 import type { DocumentOptions } from '../document-options.ts'
 import type { Headings } from '../docx/paragraph.ts'
 import type { scheduleWords } from '../schedules/schedule-words.ts'
-import type { Captions } from '../docx/table.ts'
+import type { Captions } from '../docx/captions.ts'
 
 /** What every section of a submittal is written from. */
 export interface SubmittalContext {

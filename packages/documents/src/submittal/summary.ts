@@ -1,6 +1,8 @@
-import { paragraph } from '../docx/paragraph.ts'
+import { runningText } from '../docx/paragraph.ts'
+import { scheduleKinds } from '../schedules/schedule-table.ts'
 import { table } from '../docx/table.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
+import { scheduleKey } from './schedules.ts'
 import type { Section } from './section.ts'
 
 const counted = (count: number, one: string): string => `${count} ${one}${count === 1 ? '' : 's'}`
@@ -8,6 +10,7 @@ const counted = (count: number, one: string): string => `${count} ${one}${count 
 /** Every vessel on one table, and in words how many could not be sized. */
 export const summary: Section = ({ result, headings, captions, shown, width }) => {
   const { vessels } = result
+  const kinds = scheduleKinds(result)
   const unsized = vessels.filter((vessel) => vessel.status !== 'sized')
   const sentences = [
     `This submittal covers ${counted(vessels.length, 'vessel')} in ${counted(result.systems.length, 'system')}.`,
@@ -16,11 +19,25 @@ export const summary: Section = ({ result, headings, captions, shown, width }) =
       : [
           `${counted(unsized.length, 'vessel')} ${unsized.length === 1 ? 'has' : 'have'} no size; the reason stands in the table and in the notes of the schedule.`,
         ]),
-    'Each number is worked out under Calculations, each default is listed under Assumptions.',
   ]
   return [
     headings.heading('Summary', 1),
-    paragraph(sentences.join(' ')),
+    runningText([
+      sentences.join(' '),
+      ...(kinds.length > 0 ? [' The schedules are '] : []),
+      ...kinds.flatMap((kind, index) => [
+        ...(index > 0 ? [index === kinds.length - 1 ? ' and ' : ', '] : []),
+        captions.reference(scheduleKey(kind)),
+      ]),
+      ...(kinds.length > 0 ? ['.'] : []),
+      ...(result.assumptions.length > 0
+        ? [
+            ' Each number is worked out under Calculations, each default is listed in ',
+            captions.reference('assumptions'),
+            '.',
+          ]
+        : []),
+    ]),
     captions.next('Vessels of the project'),
     table({
       title: 'Vessels of the project',

@@ -52,13 +52,71 @@ describe('the submittal', () => {
   it('lists its headings in a contents field that is complete, clean and asks for no update', () => {
     const listed = [...paragraphs(document, 'TOC1'), ...paragraphs(document, 'TOC2')].sort()
     expect(listed).toEqual([...paragraphs(document, 'Heading1'), ...paragraphs(document, 'Heading2')].sort())
+    expect(paragraphs(document, 'TableofFigures')).toEqual(paragraphs(document, 'Caption'))
     for (const xml of parts.values()) {
       expect(xml).not.toContain('updateFields')
-      expect(xml).not.toMatch(/w:dirty="(true|1)"/)
+      expect(xml).not.toMatch(/w:dirty=/)
     }
     const anchors = [...document.matchAll(/w:anchor="([^"]+)"/g)].map(([, anchor]) => anchor)
-    expect(anchors.length).toBe(listed.length)
+    expect(anchors.length).toBe(listed.length + paragraphs(document, 'Caption').length)
     for (const anchor of anchors) expect(document).toContain(`w:name="${anchor}"`)
+    // Each field is begun, separated and ended.
+    const marks = (type: string) => document.split(`w:fldCharType="${type}"`).length
+    expect([marks('separate'), marks('end')]).toEqual([marks('begin'), marks('begin')])
+  })
+
+  it('has no page numbers in its lists unless somebody says them', () => {
+    expect(document).not.toMatch(/PAGEREF|page of/)
+    expect(document).toContain('TOC \\o &quot;1-2&quot; \\h \\n &quot;1-2&quot;')
+  })
+
+  it('puts the page of every heading and caption behind its entry', async () => {
+    const asked: Uint8Array[] = []
+    const page = (name: string): number => Number(name.slice(-2)) + 3
+    const written = partsOf(
+      await writeSubmittal(project, documentOptions('US'), {
+        findPages: (docx) => {
+          asked.push(docx)
+          const names =
+            partsOf(docx)
+              .get('word/document.xml')
+              ?.matchAll(/w:name="(_Toc\d+)"/g) ?? []
+          return Promise.resolve(new Map([...names].map(([, name = '']) => [name, page(name)])))
+        },
+      }),
+    ).get('word/document.xml')
+    expect(asked).toHaveLength(1)
+    expect(written).not.toContain('page of')
+    const entries = ['TOC1', 'TOC2', 'TableofFigures'].flatMap((style) =>
+      all(written ?? '', 'p').filter((entry) => entry.includes(`<w:pStyle w:val="${style}"/>`)),
+    )
+    expect(entries.length).toBeGreaterThan(10)
+    for (const entry of entries) {
+      const [, anchor = ''] = /PAGEREF (_Toc\d+) /.exec(entry) ?? []
+      expect(entry).toContain(`w:anchor="${anchor}"`)
+      expect(textOf(entry)).toMatch(new RegExp(`\\D${page(anchor)}$`))
+    }
+  })
+
+  it('leaves the numbers out where laying out fails or misses a place, and is else the same', async () => {
+    const failing = () => Promise.reject(new Error('no layout'))
+    for (const findPages of [failing, () => Promise.resolve(new Map([['_Toc100000', 2]]))]) {
+      const written = await writeSubmittal(project, documentOptions('US'), { findPages })
+      expect(Buffer.from(written).equals(Buffer.from(bytes))).toBe(true)
+    }
+  })
+
+  it('refers to its tables by fields whose cached words are the number of the table', () => {
+    const bookmarks = new Map(
+      [...document.matchAll(/<w:bookmarkStart [^>]*w:name="(_Ref\d+)"\/>(.*?)<w:bookmarkEnd/gs)].map(
+        ([, name, inside]) => [name, textOf(inside ?? '')],
+      ),
+    )
+    const references = [
+      ...document.matchAll(/REF (_Ref\d+) \\h <.*?w:fldCharType="separate"\/><\/w:r>(.*?)<w:r><w:fldChar/gs),
+    ]
+    expect(references.length).toBeGreaterThan(4)
+    for (const [, name, cached] of references) expect(textOf(cached ?? '')).toBe(bookmarks.get(name))
   })
 
   it('repeats the head row of every table, keeps rows whole and merges nothing', () => {

@@ -7,7 +7,8 @@ import { Headings } from '../docx/paragraph.ts'
 import { plainText } from '../docx/plain-text.ts'
 import { settled } from '../docx/settled-part.ts'
 import { stylesXml } from '../docx/styles.ts'
-import { Captions } from '../docx/table.ts'
+import { Captions } from '../docx/captions.ts'
+import { withPages, type PageFinder } from '../pages/page-tokens.ts'
 import { scheduleWords } from '../schedules/schedule-words.ts'
 import { assumptions } from './assumptions.ts'
 import { calculations } from './calculations.ts'
@@ -20,8 +21,8 @@ import type { Section } from './section.ts'
 import { sources } from './sources.ts'
 import { summary } from './summary.ts'
 
-/** The submittal as a .docx file. The same result and options give the same bytes. */
-export const writeSubmittal = async (result: ProjectResult, options: DocumentOptions): Promise<Uint8Array> => {
+/** Every part of the submittal; page numbers stand as tokens where `pages` asks for them, and are left out elsewhere. */
+const documentOf = (result: ProjectResult, options: DocumentOptions, pages: boolean): Document => {
   const { project } = result
   const { titleBlock } = options
   const headings = new Headings()
@@ -48,7 +49,7 @@ export const writeSubmittal = async (result: ProjectResult, options: DocumentOpt
   const frontProperties = pageProperties(options, 'portrait')
 
   const author = plainText(titleBlock.preparedBy || titleBlock.office)
-  const document = new Document({
+  return new Document({
     title: plainText(`${project.number} ${project.title}: submittal`),
     subject: 'Vessel schedules and calculations',
     creator: author,
@@ -71,10 +72,56 @@ export const writeSubmittal = async (result: ProjectResult, options: DocumentOpt
         footers: { default: footer(options, 'portrait') },
         children: first,
       },
-      page('portrait', [...contents(headings), ...overview]),
+      page('portrait', [...contents(headings, captions, pages, textWidth(options, 'portrait')), ...overview]),
       ...body,
     ],
   })
-  const bytes = new Uint8Array(await Packer.toArrayBuffer(document))
-  return fixedArchive(bytes, settled(dateOf(titleBlock)))
+}
+
+const packed = async (document: Document): Promise<Uint8Array> => new Uint8Array(await Packer.toArrayBuffer(document))
+
+export interface SubmittalSurroundings {
+  /**
+   * Lays a .docx file out and says on which page each bookmark stands. With it the contents list has page numbers;
+   * without it, or where it fails or leaves one out, the list has links and no numbers, for a guess could be wrong.
+   */
+  readonly findPages?: PageFinder | null
+}
+
+/** Archive with the pages in the lists, or null where not all of them were found. */
+const withFoundPages = async (
+  result: ProjectResult,
+  options: DocumentOptions,
+  findPages: PageFinder,
+): Promise<Uint8Array | null> => {
+  const bytes = await packed(documentOf(result, options, true))
+  const settle = settled(dateOf(options.titleBlock))
+  const archive = (page: (anchor: string) => string) =>
+    fixedArchive(bytes, (name, xml) =>
+      name === 'word/document.xml' ? withPages(settle(name, xml), page) : settle(name, xml),
+    )
+  let pages: ReadonlyMap<string, number>
+  try {
+    // Two digits are what most numbers will take, so that the lists break as they will in the end.
+    pages = await findPages(archive(() => '00'))
+  } catch {
+    return null
+  }
+  let missing = false
+  const found = archive((anchor) => {
+    const page = pages.get(anchor)
+    missing ||= page === undefined
+    return String(page ?? '')
+  })
+  return missing ? null : found
+}
+
+/** The submittal as a .docx file. The same result, options and page numbers give the same bytes. */
+export const writeSubmittal = async (
+  result: ProjectResult,
+  options: DocumentOptions,
+  { findPages }: SubmittalSurroundings = {},
+): Promise<Uint8Array> => {
+  const numbered = findPages ? await withFoundPages(result, options, findPages) : null
+  return numbered ?? fixedArchive(await packed(documentOf(result, options, false)), settled(dateOf(options.titleBlock)))
 }

@@ -1,0 +1,34 @@
+import { readFileSync } from 'node:fs'
+import { officePages, writeSubmittal } from '@coldfill/documents'
+import { documentOptions } from '@coldfill/documents/testing'
+import { sizeSpec } from '@coldfill/sizing'
+import { strFromU8, unzipSync } from 'fflate'
+import { expect, it } from 'vitest'
+import { convert, hasOffice, leftOut } from './office.ts'
+
+/** The outline leaves out the second of two spaces. */
+const oneSpaced = (text: string): string => text.replace(/\s+/g, ' ')
+
+/** Page of each heading by the outline of the PDF, in order; the numbers in the contents list come by another way. */
+const outline = (pdf: Uint8Array): [title: string, page: number][] => {
+  const text = Buffer.from(pdf).toString('latin1')
+  const kids = /\/Type\s*\/Pages\b[^>]*?\/Kids\s*\[([^\]]*)\]/s.exec(text)?.[1] ?? ''
+  const pages = [...kids.matchAll(/(\d+)\s+0\s+R/g)].map(([, object]) => object)
+  return [...text.matchAll(/\/Title<FEFF([0-9A-F]+)>\s*\/Dest\[(\d+) 0 R/g)].map(([, title = '', object]) => [
+    oneSpaced(Buffer.from(title, 'hex').swap16().toString('utf16le')),
+    pages.indexOf(object) + 1,
+  ])
+}
+
+it.skipIf(!hasOffice)(`the contents list has the pages that the file is printed on${leftOut}`, async () => {
+  const text = readFileSync(new URL('../../examples/fernhollow/spec.yaml', import.meta.url), 'utf8')
+  const findPages = await officePages()
+  const bytes = await writeSubmittal(sizeSpec(text), documentOptions('US'), { findPages })
+  const document = strFromU8(unzipSync(bytes)['word/document.xml'] ?? new Uint8Array())
+  const entries = (document.match(/<w:p>.*?<\/w:p>/gs) ?? [])
+    .filter((paragraph) => /w:pStyle w:val="TOC[12]"/.test(paragraph))
+    .map((paragraph) => [...paragraph.matchAll(/<w:t [^>]*>([^<]*)</g)].map(([, words = '']) => words))
+  expect(entries.length).toBeGreaterThan(8)
+  const printed = new Map(outline(convert('submittal.docx', bytes, 'pdf')))
+  expect(entries).toEqual(entries.map(([title = '']) => [title, String(printed.get(oneSpaced(title)))]))
+})
