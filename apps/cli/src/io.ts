@@ -1,4 +1,4 @@
-import { mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs'
+import { chmodSync, mkdirSync, readFileSync, realpathSync, renameSync, rmSync, statSync, writeFileSync } from 'node:fs'
 import { dirname, resolve } from 'node:path'
 import { maxSpecBytes } from '@coldfill/spec'
 import { exitStatus, Stop } from './exit-status.ts'
@@ -24,13 +24,26 @@ export const readText = (path: string): string => {
   }
 }
 
+/** The file behind a link, so that the link stays one. */
+const linkedTo = (path: string): string => {
+  try {
+    return realpathSync(path)
+  } catch {
+    return path
+  }
+}
+
+const modeOf = (path: string): number | undefined => statSync(path, { throwIfNoEntry: false })?.mode
+
 /** Writes beside the target and renames, so that a failed write leaves the old file whole. */
 export const writeBytes = (path: string, bytes: Uint8Array): void => {
-  const target = fromHere(path)
+  const target = linkedTo(fromHere(path))
   const beside = `${target}.${process.pid}.part`
   try {
     mkdirSync(dirname(target), { recursive: true })
     writeFileSync(beside, bytes)
+    const mode = modeOf(target)
+    if (mode !== undefined) chmodSync(beside, mode)
     renameSync(beside, target)
   } catch (error) {
     rmSync(beside, { force: true })
@@ -40,6 +53,9 @@ export const writeBytes = (path: string, bytes: Uint8Array): void => {
     )
   }
 }
+
+/** Writes a text as `writeBytes` writes bytes. */
+export const writeText = (path: string, text: string): void => writeBytes(path, new TextEncoder().encode(text))
 
 /** Writes to standard output and waits until it is taken, also by a slow pipe. */
 export const print = (text: string): Promise<void> =>

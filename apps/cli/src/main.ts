@@ -5,6 +5,8 @@ type Verb = (args: readonly string[]) => Promise<number>
 // Loaded when asked for: `size` does not wait for the libraries that write documents.
 const verbs: Readonly<Record<string, () => Promise<Verb>>> = {
   check: async () => (await import('./commands/check.ts')).check,
+  format: async () => (await import('./commands/format.ts')).format,
+  compare: async () => (await import('./commands/compare.ts')).compare,
   size: async () => (await import('./commands/size.ts')).size,
   schedule: async () => (await import('./commands/write-document.ts')).schedule,
   submittal: async () => (await import('./commands/write-document.ts')).submittal,
@@ -16,8 +18,10 @@ const verbs: Readonly<Record<string, () => Promise<Verb>>> = {
 
 const usage = `coldfill VERB …
 
-  check FILE                     findings only
+  check FILE [--fix]             findings only; --fix mends errors whose mending leaves nothing to choose
   size FILE [--catalogue FILE]   sizes every vessel
+  compare OLD NEW                what differs in the specs and in the sized vessels
+  format FILE [--write]          tidies indentation and spacing; prints, or writes the file
   schedule FILE --out FILE.xlsx  writes the equipment schedule
   submittal FILE --out FILE.docx writes the Word submittal
   fluid --fluid "propylene glycol 40 % mass" --temperature "20 °C" [--pressure "3 bar abs"]

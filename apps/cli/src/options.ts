@@ -15,6 +15,8 @@ export interface Options {
   readonly fluid?: string
   readonly temperature?: string
   readonly pressure?: string
+  readonly write: boolean
+  readonly fix: boolean
 }
 
 const known = {
@@ -26,6 +28,8 @@ const known = {
   fluid: { type: 'string' },
   temperature: { type: 'string' },
   pressure: { type: 'string' },
+  write: { type: 'boolean', default: false },
+  fix: { type: 'boolean', default: false },
 } as const
 
 export type OptionName = keyof typeof known
@@ -52,7 +56,9 @@ export const readOptions = (
   const { values, positionals } = parsed
   for (const name of Object.keys(values) as OptionName[]) {
     const isDefault =
-      (name === 'format' && values.format === 'text') || (name === 'fail-on' && values['fail-on'] === 'error')
+      (name === 'format' && values.format === 'text') ||
+      (name === 'fail-on' && values['fail-on'] === 'error') ||
+      values[name] === false
     if (!isDefault && !allowed.includes(name)) throw new Stop(exitStatus.usage, `${verb} has no option --${name}.`)
   }
   if (positionals.length !== files)
@@ -63,6 +69,8 @@ export const readOptions = (
   return {
     files: positionals,
     format: oneOf('format', values.format, ['text', 'json', 'github', 'sarif']),
+    write: values.write,
+    fix: values.fix,
     failOn: oneOf('fail-on', values['fail-on'], ['error', 'warning', 'note']),
     ...(values.out === undefined ? {} : { out: values.out }),
     ...(values.catalogue === undefined ? {} : { catalogue: values.catalogue }),

@@ -11,8 +11,11 @@ export interface SizedFile {
 }
 
 /** Reads a spec file and sizes it. */
-export const sizeFile = async (file: string, cataloguePath?: string): Promise<SizedFile> => {
-  const text = readText(file)
+export const sizeFile = async (file: string, cataloguePath?: string): Promise<SizedFile> =>
+  sizeText(file, readText(file), cataloguePath)
+
+/** Sizes a text that was read from a file. */
+export const sizeText = async (file: string, text: string, cataloguePath?: string): Promise<SizedFile> => {
   const catalogue = await readCatalogueOption(cataloguePath)
   const result = sizeSpec(text, catalogue ? { catalogue } : {})
   return { file, text, result, read: result.readable }
