@@ -9,7 +9,13 @@ export type Binding =
   /** An earlier section of the calculation has the symbol: the site, the contents, the pressures. */
   | { readonly at: 'section' }
   /** A key of the spec; where it is not written, an assumption stands in, or the vessel is blocked. */
-  | { readonly at: BindingPlace; readonly key: string; readonly assumption?: string }
+  | {
+      readonly at: BindingPlace
+      readonly key: string
+      readonly assumption?: string
+      /** Another key of the same place whose value stands in, as the assumption in words says. */
+      readonly standIn?: string
+    }
   | { readonly at: 'assumption'; readonly id: string }
   /** A property of the fluid of the system. */
   | { readonly at: 'fluid'; readonly property: 'volume fraction' }

@@ -42,7 +42,11 @@ const bindOne = (context: VesselContext, input: MethodInput, atmosphere: number)
     return { value: context.fluid.volumeFraction, origin: { from: 'spec', path } }
   }
   if (from.at === 'assumption') return context.register.number(from.id, context.reference)
-  const value = written(context, from.at, from.key)
+  let value = written(context, from.at, from.key)
+  if (!value && from.standIn !== undefined && from.assumption !== undefined) {
+    value = written(context, from.at, from.standIn)
+    if (value) context.register.words(from.assumption, context.reference)
+  }
   if (value) {
     if (!isQuantity(value)) return numberFromSpec(value)
     return input.kind === 'gauge pressure' ? gaugeFromSpec(value, atmosphere) : fromSpec(value)

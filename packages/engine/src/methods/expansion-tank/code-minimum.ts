@@ -1,5 +1,5 @@
 import { cite, citeFromMemory, type Citation } from '../../citation.ts'
-import { defineMethod, given, keyed, step, type Method, type WorkedExample } from '../../method.ts'
+import { defineMethod, given, step, type Method, type WorkedExample } from '../../method.ts'
 import { boyle } from '../../sources/boyle.ts'
 import { commonPractice } from '../../sources/common-practice.ts'
 import { imc } from '../../sources/imc.ts'
@@ -19,7 +19,11 @@ const shared = {
   sections,
   inputs: {
     V_s: given('volume', 'system volume'),
-    t_a: keyed('temperature', 'average operating temperature', 'temperatures', 'average', 'average-temperature'),
+    t_a: {
+      kind: 'temperature' as const,
+      name: 'average operating temperature',
+      from: { at: 'temperatures' as const, key: 'average', standIn: 'high', assumption: 'average-temperature' },
+    },
     ...pressureInputs,
   },
   checks: [
