@@ -201,7 +201,10 @@ it('the reviewer sees what moved, closes the redline and accepts', async () => {
   const review = page.getByRole('form', { name: 'Send review' })
   await review.getByRole('radio', { name: /^Accepted(?! as noted)/u }).check()
   await review.getByRole('button', { name: 'Send review' }).click()
-  await page.getByText('Disposition of Rev A').waitFor()
+  await page
+    .getByRole('listitem')
+    .filter({ hasText: /^Accepted/u })
+    .waitFor()
   await picture(page, '17-accepted')
 })
 
