@@ -7,6 +7,7 @@ import { requireInsider, requireProject } from './middleware/require-project.ts'
 import { requireUser } from './middleware/require-user.ts'
 import { sameOriginWrites } from './middleware/same-origin-writes.ts'
 import { securityHeaders } from './middleware/security-headers.ts'
+import { catalogueRouter } from './routes/catalogue/catalogue.router.ts'
 import { gatesRouter } from './routes/gates/gates.router.ts'
 import { handoverRouter } from './routes/handover/handover.router.ts'
 import { healthRouter } from './routes/health/health.router.ts'
@@ -19,6 +20,7 @@ import { revisionsRouter } from './routes/revisions/revisions.router.ts'
 import { sessionRouter } from './routes/session/session.router.ts'
 import { sizingRouter } from './routes/sizing/sizing.router.ts'
 import { specRouter } from './routes/spec/spec.router.ts'
+import { verificationRouter } from './routes/verification/verification.router.ts'
 import { webApp } from './web-app.ts'
 
 /** A spec of 256 kB as a JSON text, where each character may take six. The spec itself is measured again. */
@@ -48,8 +50,11 @@ const api = (deps: Deps): Router =>
     .use(sameOriginWrites)
     .use('/session', sessionRouter(deps))
     // From here on nothing is answered, and no body read, for one who is not signed in.
-    .use(requireUser(deps), json({ limit: BODY_LIMIT }))
+    .use(requireUser(deps))
+    .use('/office/catalogue', catalogueRouter(deps))
+    .use(json({ limit: BODY_LIMIT }))
     .use('/reference', referenceRouter())
+    .use('/verification', verificationRouter())
     .use('/office', officeRouter(deps))
     .use('/projects', projectsRouter(deps))
     .use('/projects/:project', projectRouter(deps))

@@ -8,6 +8,8 @@ import { startWorker } from './workers/start-worker.ts'
 export interface SizingQuestion {
   readonly id: number
   readonly text: string
+  /** Rows as JSON text; left out where the thread had those of this hash with the question before. */
+  readonly catalogue: { readonly hash: string; readonly rowsJson?: string } | null
 }
 export interface SizingAnswer {
   readonly id: number
@@ -21,14 +23,23 @@ export interface Sized {
   readonly json: string
 }
 
+/** The catalogue that vessels are chosen from. */
+export interface SizingCatalogue {
+  /** SHA-256 of the rows: the same hash is the same rows. */
+  readonly hash: string
+  /** CatalogueRow[] as JSON text. */
+  readonly rowsJson: () => Promise<string>
+}
+
 export interface SizingService {
-  /** @throws {AppError} 413 above SPEC_LIMIT bytes, 422 where the text takes longer than the limit. */
-  size(text: string): Promise<Sized>
+  /** Without a catalogue no vessel is chosen. @throws {AppError} 413 above SPEC_LIMIT bytes, 422 where the text takes longer than the limit. */
+  size(text: string, catalogue?: SizingCatalogue | null): Promise<Sized>
   close(): Promise<void>
 }
 
 const MEBIBYTES = 512
 const KEPT_RESULTS = 64
+const KEPT_CATALOGUES = 4
 
 const tooLong = (limit: number): AppError =>
   new AppError(
@@ -46,8 +57,19 @@ const failed = (): AppError =>
     'Sizing stopped. Nothing was lost, the text is as you typed it.',
   )
 
+/** Marks an entry as just used and lets the longest unused ones go. */
+const keep = <T>(kept: Map<string, T>, key: string, value: T, most: number): void => {
+  kept.delete(key)
+  kept.set(key, value)
+  for (const oldest of kept.keys()) {
+    if (kept.size <= most) break
+    kept.delete(oldest)
+  }
+}
+
 interface Waiting {
   readonly text: string
+  readonly catalogue: { readonly hash: string; readonly rowsJson: string } | null
   readonly resolve: (json: string) => void
   readonly reject: (error: Error) => void
 }
@@ -61,11 +83,14 @@ export const createSizingService = ({
   module = new URL('./workers/sizing.worker.ts', import.meta.url),
 }: { limit?: number; module?: URL } = {}): SizingService => {
   const kept = new Map<string, Sized>()
+  const catalogues = new Map<string, string>()
   const queue: Waiting[] = []
   let worker: Worker | null = null
   let ready = false
   let current: { id: number; waiting: Waiting; timer: NodeJS.Timeout } | null = null
   let lastId = 0
+  /** Hash of the catalogue that the thread holds. */
+  let held: string | null = null
   let closed = false
 
   const settle = (act: (waiting: Waiting) => void): void => {
@@ -80,6 +105,7 @@ export const createSizingService = ({
     const old = worker
     worker = null
     ready = false
+    held = null
     old?.removeAllListeners()
     // A late error of the thread being ended must not end the process.
     old?.on('error', () => undefined)
@@ -113,30 +139,37 @@ export const createSizingService = ({
     if (!waiting) return
     const id = ++lastId
     current = { id, waiting, timer: setTimeout(() => drop(tooLong(limit)), limit) }
-    worker.postMessage({ id, text: waiting.text } satisfies SizingQuestion)
+    const { text, catalogue } = waiting
+    const known = catalogue !== null && catalogue.hash === held
+    if (catalogue) held = catalogue.hash
+    worker.postMessage({
+      id,
+      text,
+      catalogue: catalogue && known ? { hash: catalogue.hash } : catalogue,
+    } satisfies SizingQuestion)
   }
 
   return {
-    size: async (text) => {
+    size: async (text, catalogue = null) => {
       if (Buffer.byteLength(text) > SPEC_LIMIT)
         throw new AppError(413, 'spec_too_large', 'The spec is too large', `A spec may have ${SPEC_LIMIT / 1024} kB.`)
-      const key = createHash('sha256').update(text).digest('hex')
+      const hash = catalogue?.hash ?? ''
+      const key = createHash('sha256')
+        .update(JSON.stringify([hash, text]))
+        .digest('hex')
       const known = kept.get(key)
       if (known) {
-        kept.delete(key)
-        kept.set(key, known)
+        keep(kept, key, known, KEPT_RESULTS)
         return known
       }
+      const rowsJson = catalogue && (catalogues.get(hash) ?? (await catalogue.rowsJson()))
+      if (rowsJson !== null) keep(catalogues, hash, rowsJson, KEPT_CATALOGUES)
       const json = await new Promise<string>((resolve, reject) => {
-        queue.push({ text, resolve, reject })
+        queue.push({ text, catalogue: rowsJson === null ? null : { hash, rowsJson }, resolve, reject })
         next()
       })
       const sized: Sized = { json, result: JSON.parse(json) as ProjectResult }
-      kept.set(key, sized)
-      for (const oldest of kept.keys()) {
-        if (kept.size <= KEPT_RESULTS) break
-        kept.delete(oldest)
-      }
+      keep(kept, key, sized, KEPT_RESULTS)
       return sized
     },
     close: async () => {

@@ -1,10 +1,11 @@
 import { z } from 'zod'
 
-/** One thing that is wrong with a request: `pointer` into the JSON body, or a place in the spec text (1-based). */
+/** One thing that is wrong with a request: `pointer` into the JSON body, a place in the spec text (1-based), or line and column heading of a table. */
 export const ProblemIssue = z.object({
   pointer: z.string().optional(),
   line: z.number().optional(),
   col: z.number().optional(),
+  column: z.string().optional(),
   code: z.string().optional(),
   message: z.string(),
 })

@@ -70,7 +70,7 @@ export const Revision = z.object({
   issuedAt: z.string(),
   issuedBy: Person,
   note: z.string(),
-  /** SHA-256 over spec text, results and engine version. */
+  /** SHA-256 over spec text, results, engine version and the catalogue that vessels were chosen from. */
   contentHash: z.string(),
   engine: z.string(),
   files: z.array(RevisionFile),

@@ -30,7 +30,7 @@ export const gatesFailed = (gates: readonly Gate[], failing: readonly Gate[]): A
  */
 export const issueForReview = async (deps: Deps, access: ProjectAccess, note: string): Promise<string> => {
   // Sized before the transaction: sizing is slow, and the text is compared by version inside.
-  const working = await workingCopy(deps.db, deps.sizing, access.project.id)
+  const working = await workingCopy(deps.db, deps.sizing, access.project)
   const now = deps.clock()
   const id = await withTx(deps.db, async (tx) => {
     const facts = await projectFacts(tx, access.project)
@@ -72,6 +72,7 @@ export const issueForReview = async (deps: Deps, access: ProjectAccess, note: st
         label,
         specText: working.text,
         resultJson: working.json,
+        catalogueId: working.catalogue?.id ?? null,
         engine: working.result.engine,
         contentHash: working.contentHash,
         note,

@@ -1,5 +1,7 @@
 import { readFile } from 'node:fs/promises'
 import { join } from 'node:path'
+import { exampleCatalogueFile } from '../catalogue/example-catalogue.ts'
+import { putCatalogue } from '../commands/put-catalogue.ts'
 import { blankSpec } from '../blank-spec.ts'
 import type { Clock } from '../clock.ts'
 import type { Database } from '../db/client.ts'
@@ -17,6 +19,15 @@ const specOf = async (examplesFolder: string, project: DemoProject): Promise<str
       if ((error as NodeJS.ErrnoException).code !== 'ENOENT') throw error
     }
   return blankSpec(project.number, project.title)
+}
+
+const exampleCatalogue = async (examplesFolder: string): Promise<Uint8Array | null> => {
+  try {
+    return await readFile(exampleCatalogueFile(examplesFolder))
+  } catch (error) {
+    if ((error as NodeJS.ErrnoException).code !== 'ENOENT') throw error
+    return null
+  }
 }
 
 interface Demo {
@@ -51,8 +62,9 @@ export const addDemoOffice = async ({ db, clock, passwords, sizing, examplesFold
       ),
     })),
   )
+  const given: { name: string; office: { id: string; name: string } }[] = []
   await withTx(db, async (tx) => {
-    for (const { name, people, projects: opened } of prepared) {
+    for (const { name, people, catalogue, projects: opened } of prepared) {
       const [office] = await tx.insert(offices).values({ name, createdAt: now }).returning()
       if (!office) throw new Error('The demo office was not written.')
       const added = await tx
@@ -70,6 +82,8 @@ export const addDemoOffice = async ({ db, clock, passwords, sizing, examplesFold
           })),
         )
         .returning()
+      const administrator = people.find((person) => person.administrator)
+      if (catalogue && administrator) given.push({ name: administrator.name, office: { id: office.id, name } })
       const idOf = new Map(added.map((user) => [user.email, user.id]))
       const consultant = people.find(({ roles }) => roles.includes('consultant'))
       for (const [index, { number, title, client, text }] of opened.entries()) {
@@ -93,5 +107,7 @@ export const addDemoOffice = async ({ db, clock, passwords, sizing, examplesFold
       }
     }
   })
+  const bytes = given.length === 0 ? null : await exampleCatalogue(examplesFolder)
+  if (bytes) for (const by of given) await putCatalogue({ db, clock }, by, 'vessels.csv', bytes)
   return true
 }

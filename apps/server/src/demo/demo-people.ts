@@ -23,6 +23,8 @@ export interface DemoProject {
 export interface DemoOffice {
   readonly name: string
   readonly people: readonly DemoPerson[]
+  /** Whether the office begins with the example catalogue of vessels. */
+  readonly catalogue?: true
   readonly projects: readonly DemoProject[]
 }
 
@@ -30,6 +32,7 @@ export interface DemoOffice {
 export const DEMO_OFFICES: readonly DemoOffice[] = [
   {
     name: 'Tarn & Vale Engineers',
+    catalogue: true,
     people: [
       {
         email: 'consultant@demo.example',

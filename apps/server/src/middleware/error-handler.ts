@@ -28,7 +28,11 @@ const FRAMEWORK: Readonly<Record<number, { code: string; title: string; detail: 
     title: 'The request cannot be read',
     detail: 'The body is not JSON, or the address is malformed.',
   },
-  413: { code: 'too_large', title: 'The request is too large', detail: 'A spec may have 256 kB.' },
+  413: {
+    code: 'too_large',
+    title: 'The request is too large',
+    detail: 'A spec may have 256 kB, a catalogue file 2 MB.',
+  },
   415: {
     code: 'unsupported_type',
     title: 'The content type is not supported',

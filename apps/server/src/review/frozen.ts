@@ -1,8 +1,8 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import { eq } from 'drizzle-orm'
 import type { Reader } from '../db/client.ts'
-import { revisions } from '../db/schema/index.ts'
-import { contentHash } from './content-hash.ts'
+import { catalogues, revisions } from '../db/schema/index.ts'
+import { contentHash, sha256 } from './content-hash.ts'
 
 export interface Frozen {
   readonly specText: string
@@ -23,11 +23,15 @@ export const frozenContent = async (db: Reader, revisionId: string): Promise<Fro
       resultJson: revisions.resultJson,
       engine: revisions.engine,
       contentHash: revisions.contentHash,
+      rowsJson: catalogues.rowsJson,
     })
     .from(revisions)
+    .leftJoin(catalogues, eq(catalogues.id, revisions.catalogueId))
     .where(eq(revisions.id, revisionId))
   if (!row) throw new Error(`There is no revision ${revisionId}.`)
-  if (contentHash(row.engine, row.specText, row.resultJson) !== row.contentHash)
+  const { rowsJson, ...frozen } = row
+  const catalogueHash = rowsJson === null ? null : sha256(rowsJson)
+  if (contentHash(row.engine, row.specText, row.resultJson, catalogueHash) !== row.contentHash)
     throw new Error(`The stored content of revision ${revisionId} is not the content that was frozen.`)
-  return { ...row, result: JSON.parse(row.resultJson) as ProjectResult }
+  return { ...frozen, result: JSON.parse(row.resultJson) as ProjectResult }
 }

@@ -1,11 +1,15 @@
 import { Readable } from 'node:stream'
 import { type CatalogueReading, readCatalogue } from '@coldfill/sizing'
 import ExcelJS from 'exceljs'
+import { Unzip, UnzipInflate } from 'fflate'
 
-/** Largest catalogue that is read; an unpacked workbook of this size stays within memory. */
+/** Largest catalogue that is read. */
 export const maxCatalogueBytes = 2_000_000
+/** Largest sum of the parts of a workbook, unpacked: a small archive can hold a thousand times its size. */
+const maxUnpackedBytes = 40_000_000
 const maxRows = 20_000
 const maxColumns = 64
+const PIECE = 16_384
 
 const refused = (message: string): CatalogueReading => ({ rows: [], problems: [{ line: 1, column: '', message }] })
 
@@ -29,6 +33,24 @@ const tableOf = (sheet: ExcelJS.Worksheet): string[][] => {
   )
 }
 
+/** Whether the parts stay within the limit. Counts what comes out piece by piece: the sizes that an archive tells may be wrong. */
+const unpacksSmall = (bytes: Uint8Array): boolean => {
+  let unpacked = 0
+  const archive = new Unzip((part) => {
+    part.ondata = (error, chunk) => {
+      if (error) throw error
+      unpacked += chunk.length
+    }
+    part.start()
+  })
+  archive.register(UnzipInflate)
+  for (let at = 0; at < bytes.length; at += PIECE) {
+    archive.push(bytes.subarray(at, at + PIECE), at + PIECE >= bytes.length)
+    if (unpacked > maxUnpackedBytes) return false
+  }
+  return true
+}
+
 const isWorkbook = (bytes: Uint8Array): boolean => bytes[0] === 0x50 && bytes[1] === 0x4b
 
 /**
@@ -41,6 +63,8 @@ export const readCatalogueFile = async (bytes: Uint8Array): Promise<CatalogueRea
   const workbook = new ExcelJS.Workbook()
   try {
     if (isWorkbook(bytes)) {
+      if (!unpacksSmall(bytes))
+        return refused(`The workbook unpacks to more than ${maxUnpackedBytes / 1e6} MB. Save the sheet as CSV.`)
       await workbook.xlsx.load(bytes.slice().buffer)
       const [sheet] = workbook.worksheets
       return sheet ? readCatalogue(tableOf(sheet)) : refused('The workbook has no sheet.')

@@ -1,4 +1,5 @@
 export * from './audit-events.ts'
+export * from './catalogues.ts'
 export * from './dispositions.ts'
 export * from './mails.ts'
 export * from './makings.ts'

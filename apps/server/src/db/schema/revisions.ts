@@ -1,10 +1,11 @@
 import { sql } from 'drizzle-orm'
 import { check, foreignKey, integer, pgTable, primaryKey, text, unique, uuid } from 'drizzle-orm/pg-core'
 import { instant } from './columns.ts'
+import { catalogues } from './catalogues.ts'
 import { projects } from './projects.ts'
 import { users } from './users.ts'
 
-/** A frozen issue. Text, result, engine and hash never change after the row is written; only what became of it does. */
+/** A frozen issue. Text, result, catalogue, engine and hash never change after the row is written; only what became of it does. */
 export const revisions = pgTable(
   'revisions',
   {
@@ -17,6 +18,8 @@ export const revisions = pgTable(
     specText: text('spec_text').notNull(),
     /** ProjectResult as the JSON text that was hashed: a json column would give back other bytes. */
     resultJson: text('result_json').notNull(),
+    /** The catalogue that vessels were chosen from, where the office had one. */
+    catalogueId: uuid('catalogue_id'),
     engine: text('engine').notNull(),
     contentHash: text('content_hash').notNull(),
     note: text('note').notNull(),
@@ -38,6 +41,7 @@ export const revisions = pgTable(
     foreignKey({ name: 'revisions_project_fk', columns: [t.projectId], foreignColumns: [projects.id] }).onDelete(
       'cascade',
     ),
+    foreignKey({ name: 'revisions_catalogue_fk', columns: [t.catalogueId], foreignColumns: [catalogues.id] }),
     foreignKey({ name: 'revisions_issued_by_fk', columns: [t.issuedBy], foreignColumns: [users.id] }),
     foreignKey({ name: 'revisions_construction_by_fk', columns: [t.constructionBy], foreignColumns: [users.id] }),
     foreignKey({ name: 'revisions_withdrawn_by_fk', columns: [t.withdrawnBy], foreignColumns: [users.id] }),

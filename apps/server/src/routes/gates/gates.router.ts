@@ -18,7 +18,7 @@ export const gatesRouter = (deps: Deps): Router =>
     const facts = await projectFacts(deps.db, access.project)
     if (purpose === 'review') {
       if (!seesWorkingCopy(access)) throw notAllowed('The gates of the working copy are for those who see it.')
-      const working = await workingCopy(deps.db, deps.sizing, access.project.id)
+      const working = await workingCopy(deps.db, deps.sizing, access.project)
       res.json({ for: 'review', gates: reviewGates(facts, working) } satisfies GateList)
       return
     }

@@ -4,6 +4,7 @@ import { z } from 'zod'
 import { recordEvent } from '../../commands/record-event.ts'
 import type { Deps } from '../../deps.ts'
 import { notFound } from '../../errors.ts'
+import { requireAdministrator } from '../../middleware/require-administrator.ts'
 import { principalIn } from '../../middleware/require-user.ts'
 import { presentEvents, presentMail, presentPeople } from './office.presenter.ts'
 import { officeEvents, officeMails, officeMemberships, officePeople, requeueMail } from './office.queries.ts'
@@ -12,10 +13,7 @@ import { officeEvents, officeMails, officeMemberships, officePeople, requeueMail
 export const officeRouter = (deps: Deps): Router => {
   const { db, clock, postman } = deps
   const router = Router()
-  router.use((_req, res, next) => {
-    if (!principalIn(res).administrator) throw notFound()
-    next()
-  })
+  router.use(requireAdministrator)
   router.get('/outbox', async (_req, res) => {
     const rows = await officeMails(db, principalIn(res).office.id)
     res.json({ mails: rows.map(presentMail) } satisfies Outbox)

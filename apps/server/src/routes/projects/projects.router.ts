@@ -24,7 +24,7 @@ import { visibleProjects } from './projects.queries.ts'
 const workingHash = async (deps: Deps, access: ProjectAccess): Promise<string | null> => {
   if (!seesWorkingCopy(access)) return null
   try {
-    return (await workingCopy(deps.db, deps.sizing, access.project.id)).contentHash
+    return (await workingCopy(deps.db, deps.sizing, access.project)).contentHash
   } catch (error) {
     if (error instanceof AppError && error.status === 422) return null
     throw error

@@ -21,7 +21,7 @@ export const resultsRouter = (deps: Deps): Router =>
         ? { revision: before.label, vessels: changedResults((await frozenContent(deps.db, before.id)).result, now) }
         : null
     if (rev === undefined && seesWorkingCopy(access)) {
-      const { result, contentHash } = await workingCopy(deps.db, deps.sizing, access.project.id)
+      const { result, contentHash } = await workingCopy(deps.db, deps.sizing, access.project)
       const changedSince = await since(facts.revisions[0], result)
       res.json({ revision: null, contentHash, result, changedSince } satisfies Results)
       return

@@ -23,7 +23,7 @@ describe('issuing for review', () => {
   it('freezes text, results and engine under one hash', async () => {
     const [row] = await t.deps.db.select().from(revisions).where(eq(revisions.id, first.id))
     expect(row?.specText).toBe(loopSpec({ number: 'T-1' }))
-    expect(contentHash(row?.engine ?? '', row?.specText ?? '', row?.resultJson ?? '')).toBe(first.contentHash)
+    expect(contentHash(row?.engine ?? '', row?.specText ?? '', row?.resultJson ?? '', null)).toBe(first.contentHash)
     expect(Revision.parse(first)).toEqual(first)
   })
 

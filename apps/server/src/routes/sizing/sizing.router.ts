@@ -1,5 +1,6 @@
 import { SizeTextRequest } from '@coldfill/contract'
 import { Router } from 'express'
+import { catalogueInForce } from '../../catalogue/catalogue-in-force.ts'
 import type { Deps } from '../../deps.ts'
 import { accessIn } from '../../middleware/require-project.ts'
 import { parseBody } from '../../parse-request.ts'
@@ -11,6 +12,7 @@ export const sizingRouter = (deps: Deps): Router =>
   Router({ mergeParams: true }).post('/', async (req, res) => {
     const access = accessIn(res)
     requirePermission(projectPermissions(access, await projectFacts(deps.db, access.project)).editSpec)
-    const { json } = await deps.sizing.size(parseBody(SizeTextRequest, req).text)
+    const { text } = parseBody(SizeTextRequest, req)
+    const { json } = await deps.sizing.size(text, await catalogueInForce(deps.db, access.project.officeId))
     res.type('application/json').send(json)
   })
