@@ -40,6 +40,18 @@ const oneOf = <T extends string>(name: string, value: string, choices: readonly 
   return found
 }
 
+/** Joins a value that begins with a minus sign to its option: `--temperature "-10 °C"` is one thing to its author. */
+const negativeValues = (args: readonly string[]): string[] => {
+  const joined: string[] = []
+  for (const arg of args) {
+    const before = joined.at(-1)
+    if (before !== undefined && /^--(?:temperature|pressure)$/u.test(before) && /^-\d/u.test(arg))
+      joined[joined.length - 1] = `${before}=${arg}`
+    else joined.push(arg)
+  }
+  return joined
+}
+
 /** Reads the arguments after the verb. `allowed` are the options the verb has; anything else is a usage error. */
 export const readOptions = (
   verb: string,
@@ -49,7 +61,7 @@ export const readOptions = (
 ): Options => {
   let parsed
   try {
-    parsed = parseArgs({ args: [...args], options: known, allowPositionals: true, strict: true })
+    parsed = parseArgs({ args: negativeValues(args), options: known, allowPositionals: true, strict: true })
   } catch (error) {
     throw new Stop(exitStatus.usage, `${verb}: ${error instanceof Error ? error.message : String(error)}`)
   }

@@ -250,3 +250,26 @@ describe('the JSON of the command', () => {
     expect(JSON.stringify(sizeSpec(text))).toBe(JSON.stringify(sizeSpec(text)))
   })
 })
+
+describe('limits typed in the other units', () => {
+  // 160 °F and 60 °C are not exact in kelvin; a limit that a person types exactly is inside the range.
+  it('are inside the range', () => {
+    const system = `    temperatures: { low: 60 °F, high: 160 °F }
+    pressure: { static-height: 30 ft, relief-valve: 50 psi }
+    contents:
+      - volume: 500 gal`
+    expect(codes(sizeSpec(heating(system, 'method: code minimum')))).not.toContain('CF-E013')
+  })
+  it('take DIN 4807-5 at its 1.67 % for 140 °F as for 60 °C', () => {
+    const text = (storage: string) =>
+      domestic('{ supply: 4 bar, relief-valve: 10 bar }', '      - volume: 200 L')
+        .replace('140 °F', storage)
+        .replace(
+          'TET-1: { kind: thermal expansion tank }',
+          'TET-1: { kind: thermal expansion tank, method: din 4807-5 }',
+        )
+    // Evaluated apart from this program: 9.31995 L.
+    for (const storage of ['60 °C', '140 °F'])
+      within(valueIn(only(sizeSpec(text(storage))), 'required-volume', 'volume', 'L'), 9.31995, 1e-5)
+  })
+})

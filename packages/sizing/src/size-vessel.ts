@@ -1,4 +1,5 @@
 import { Calculation, type CatalogueRow, type Fluid, type Method, methodNames, type RunOutcome } from '@coldfill/engine'
+import { formatQuantity } from '@coldfill/units'
 import type { Finding, SpecModel, SystemModel, VesselModel } from '@coldfill/spec'
 import { chooseMethod } from './choose-method.ts'
 import type { AssumptionRegister } from './assumption-register.ts'
@@ -68,8 +69,9 @@ const outsideFluid = (context: VesselContext): Outcome | null => {
     if (!located) continue
     const kelvin = located.value.value
     if (kelvin >= fluid.validity.least && kelvin <= fluid.validity.most) continue
-    const celsius = (value: number) => `${Math.round((value - 273.15) * 10) / 10} °C`
-    const message = `${located.value.authored ?? celsius(kelvin)} is outside the range of the data for ${fluid.label}, ${celsius(fluid.validity.least)} to ${celsius(fluid.validity.most)}.`
+    const show = (value: number) =>
+      formatQuantity({ kind: 'temperature', value }, context.spec.project.units?.value ?? 'US')
+    const message = `${located.value.authored ?? show(kelvin)} is outside the range of the data for ${fluid.label}, ${show(fluid.validity.least)} to ${show(fluid.validity.most)}.`
     const hint =
       fluid.base === 'water'
         ? 'Check the temperature; water data hold from the freezing point up.'

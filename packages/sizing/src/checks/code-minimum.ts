@@ -89,8 +89,8 @@ export const checkCodeMinimum = (
       },
       checks: [],
       validity: [
-        { condition: 'fahrenheit(t_k) >= 160', source: equation, message: '' },
-        { condition: 'fahrenheit(t_k) <= 280', source: equation, message: '' },
+        { condition: 'fahrenheit(t_k) >= 159.999', source: equation, message: '' },
+        { condition: 'fahrenheit(t_k) <= 280.001', source: equation, message: '' },
       ],
       results: {},
       basis: '',

@@ -37,12 +37,12 @@ const shared = {
   ],
   validity: [
     {
-      condition: 'fahrenheit(t_a) >= 160',
+      condition: 'fahrenheit(t_a) >= 159.999',
       source: equation,
       message: 'The code equation is stated for 160 to 280 °F; below 160 °F it asks for less than the water expands.',
     },
     {
-      condition: 'fahrenheit(t_a) <= 280',
+      condition: 'fahrenheit(t_a) <= 280.001',
       source: equation,
       message: 'The code equation is stated for 160 to 280 °F; above it the equation is not validated.',
     },

@@ -35,12 +35,12 @@ export const en12828Water = defineMethod({
   checks: [chargeBelowHighest],
   validity: [
     {
-      condition: 'celsius(t_h) >= 30',
+      condition: 'celsius(t_h) >= 29.999',
       source: annexD,
       message: 'The expansion coefficient of EN 12828 is tabled from 30 °C; below it overstates the expansion by half.',
     },
     {
-      condition: 'celsius(t_h) <= 130',
+      condition: 'celsius(t_h) <= 130.001',
       source: annexD,
       message: 'The expansion coefficient of EN 12828 is tabled up to 130 °C.',
     },

@@ -51,12 +51,12 @@ export const une100155Water = defineMethod({
   ],
   validity: [
     {
-      condition: 'celsius(t_h) >= 30',
+      condition: 'celsius(t_h) >= 29.999',
       source: clause9,
       message: 'UNE 100155 states its coefficient for 30 to 120 °C.',
     },
     {
-      condition: 'celsius(t_h) <= 120',
+      condition: 'celsius(t_h) <= 120.001',
       source: clause9,
       message: 'UNE 100155 states its coefficient for 30 to 120 °C.',
     },
@@ -111,14 +111,26 @@ export const une100155Glycol = defineMethod({
     ...rest,
   },
   validity: [
-    { condition: 'celsius(t_h) >= 65', source: glycolFactor, message: 'The glycol factor is stated for 65 to 115 °C.' },
     {
-      condition: 'celsius(t_h) <= 115',
+      condition: 'celsius(t_h) >= 64.999',
       source: glycolFactor,
       message: 'The glycol factor is stated for 65 to 115 °C.',
     },
-    { condition: 'G >= 0.2', source: glycolFactor, message: 'The glycol factor is stated for 20 to 50 % by volume.' },
-    { condition: 'G <= 0.5', source: glycolFactor, message: 'The glycol factor is stated for 20 to 50 % by volume.' },
+    {
+      condition: 'celsius(t_h) <= 115.001',
+      source: glycolFactor,
+      message: 'The glycol factor is stated for 65 to 115 °C.',
+    },
+    {
+      condition: 'G >= 0.19999',
+      source: glycolFactor,
+      message: 'The glycol factor is stated for 20 to 50 % by volume.',
+    },
+    {
+      condition: 'G <= 0.50001',
+      source: glycolFactor,
+      message: 'The glycol factor is stated for 20 to 50 % by volume.',
+    },
   ],
   basis: 'As UNE 100155 for water, with the factor of the standard for glycol solutions (formula from memory).',
   examples: [

@@ -21,7 +21,7 @@ export const din4807Part5Vessel = defineMethod({
     n: step(
       'ratio',
       'relative expansion, 10 to 60 °C',
-      'when(t_h <= 60[°C], 0.0167, v_sat(t_h) / v_sat(10[°C]) - 1)',
+      'when(t_h < 60.01[°C], 0.0167, v_sat(t_h) / v_sat(10[°C]) - 1)',
       design,
     ),
     V_e: step('volume', 'expansion volume', 'n * V_s', design),
