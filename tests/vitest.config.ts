@@ -11,7 +11,7 @@ export default defineConfig({
     projects: [
       project(
         'unit',
-        ['packages/*/src/**/*.test.ts', 'apps/cli/src/**/*.test.ts', 'tests/*.test.ts', 'tests/golden/**/*.test.ts'],
+        ['packages/*/src/**/*.test.ts', 'apps/cli/src/**/*.test.ts', 'tests/*.test.ts', 'tests/golden/**/*.test.ts', 'tests/language-server/**/*.test.ts'],
         {
           testTimeout: 30_000,
         },

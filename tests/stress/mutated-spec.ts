@@ -12,7 +12,7 @@ const seeds: readonly string[] = [
 ]
 
 const signs = [
-  ...':-#"\'{}[],&*!%|>?@`~=\\/.…°',
+  ...Array.from(':-#"\'{}[],&*!%|>?@`~=\\/.…°'),
   '\t',
   '\n',
   '\r\n',
