@@ -14,3 +14,5 @@ export {
   type ScheduleTable,
 } from './schedules/schedule-table.ts'
 export { maxCatalogueBytes, readCatalogueFile } from './catalogue/read-catalogue-file.ts'
+export { acceptanceDrawing } from './drawings/acceptance-drawing.ts'
+export { pressureDrawing } from './drawings/pressure-drawing.ts'

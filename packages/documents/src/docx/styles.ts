@@ -22,6 +22,7 @@ export const STYLE = {
   zone: 'Zone',
   draft: 'DraftWarning',
   note: 'KeyedNote',
+  figure: 'Figure',
   caution: 'Caution',
 } as const
 
@@ -164,6 +165,7 @@ const DEFINITIONS: readonly StyleDefinition[] = [
   },
   // The sentences belong together: none is left alone on the next page.
   { id: STYLE.caution, name: 'Caution', custom: true, keepNext: true, keepLines: true },
+  { id: STYLE.figure, name: 'Figure', custom: true, before: 0, after: 160 },
   { id: STYLE.note, name: 'Keyed Note', custom: true, size: 16, left: 360, hanging: 360, before: 0, after: 30 },
 ]
 

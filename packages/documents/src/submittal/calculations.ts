@@ -20,6 +20,8 @@ import { valueText } from '../calculation/value-text.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import { chosenVessel } from './chosen-vessel.ts'
+import { figure } from './pictures.ts'
+import { pressureKey } from './pressures.ts'
 import { scheduleKey } from './schedules.ts'
 import type { Section, SubmittalContext } from './section.ts'
 
@@ -108,6 +110,8 @@ const checkLines = (vessel: Vessel, calculation: VesselCalculation, context: Sub
 
 const vesselLines = (vessel: Vessel, context: SubmittalContext, first: boolean): FileChild[] => {
   const { result, options, headings, captions } = context
+  const picture = context.pictures.acceptance.get(vessel)
+  const hasPressures = [...context.pictures.pressures.keys()].some(({ id }) => id === vessel.system)
   const calculation = vesselCalculation(vessel, result, options.units, fluidOf(vessel).functions)
   const findings = result.findings.filter(
     (finding) => finding.path === vessel.path || finding.path.startsWith(`${vessel.path}.`),
@@ -118,10 +122,12 @@ const vesselLines = (vessel: Vessel, context: SubmittalContext, first: boolean):
       basisWords(vessel, result).join(' '),
       ' It is scheduled in ',
       captions.reference(scheduleKey(vessel.kind)),
+      ...(hasPressures ? [' and its pressures are drawn in ', captions.reference(pressureKey(vessel.system))] : []),
       '.',
     ]),
     paragraph(answer(vessel, context), STYLE.answer),
     ...(vessel.status === 'sized' ? chosenVessel(vessel, context) : []),
+    ...(picture ? figure(picture, `${vessel.mark}, water in the vessel against pressure`, captions) : []),
     ...findings.map((finding) =>
       paragraph(`${sentenceCase(finding.severity)} ${finding.code}: ${finding.message} ${finding.hint}`, STYLE.remark),
     ),
@@ -135,7 +141,7 @@ export const calculations: Section = (context) => {
   const { result, options, headings } = context
   if (result.vessels.length === 0) return []
   return [
-    headings.heading('Calculations', 1),
+    headings.heading('Calculations', 1, true),
     paragraph(
       `Each step stands in symbols and then with its numbers. Shown digits give the shown result; the full numbers are in the schedule workbook. ${gaugeRemark(options.units)}`,
     ),

@@ -4,6 +4,7 @@ import type { DocumentOptions } from '../document-options.ts'
 import type { Headings } from '../docx/paragraph.ts'
 import type { scheduleWords } from '../schedules/schedule-words.ts'
 import type { Captions } from '../docx/captions.ts'
+import type { Pictures } from './pictures.ts'
 
 /** What every section of a submittal is written from. */
 export interface SubmittalContext {
@@ -13,6 +14,7 @@ export interface SubmittalContext {
   readonly captions: Captions
   /** Says a number of a vessel in the digits of its schedule. */
   readonly shown: ReturnType<typeof scheduleWords>
+  readonly pictures: Pictures
   /** Width of the text in twips. */
   readonly width: number
 }

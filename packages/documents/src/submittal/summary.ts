@@ -21,7 +21,7 @@ export const summary: Section = ({ result, headings, captions, shown, width }) =
         ]),
   ]
   return [
-    headings.heading('Summary', 1),
+    headings.heading('Summary', 1, true),
     runningText([
       sentences.join(' '),
       ...(kinds.length > 0 ? [' The schedules are '] : []),

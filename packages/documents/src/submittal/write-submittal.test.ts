@@ -39,6 +39,7 @@ describe('the submittal', () => {
     expect(paragraphs(document, 'Heading1')).toEqual([
       'Summary',
       'Schedules',
+      ...(project.systems.some((system) => system.pressures.length > 0) ? ['System pressures'] : []),
       'Calculations',
       'Assumptions',
       'Findings',
@@ -52,7 +53,8 @@ describe('the submittal', () => {
   it('lists its headings in a contents field that is complete, clean and asks for no update', () => {
     const listed = [...paragraphs(document, 'TOC1'), ...paragraphs(document, 'TOC2')].sort()
     expect(listed).toEqual([...paragraphs(document, 'Heading1'), ...paragraphs(document, 'Heading2')].sort())
-    expect(paragraphs(document, 'TableofFigures')).toEqual(paragraphs(document, 'Caption'))
+    const captioned = (label: string) => paragraphs(document, 'Caption').filter((text) => text.startsWith(label))
+    expect(paragraphs(document, 'TableofFigures')).toEqual([...captioned('Table '), ...captioned('Figure ')])
     for (const xml of parts.values()) {
       expect(xml).not.toContain('updateFields')
       expect(xml).not.toMatch(/w:dirty=/)
@@ -253,6 +255,23 @@ describe('the submittal', () => {
     expect(textOf(written ?? '')).toContain(
       'Chosen: Invented Vessel Works T 50, 50 gal each, rated 150 psig and 200 °F, stamped.',
     )
+  })
+
+  it('draws each charged vessel in the line, as an SVG and as dots, with words for who cannot see it', () => {
+    const pictures = document.match(/<wp:inline.*?<\/wp:inline>/gs) ?? []
+    expect(pictures).toHaveLength(project.vessels.filter((vessel) => vessel.status === 'sized').length)
+    for (const picture of pictures) {
+      expect(picture).toMatch(/<wp:docPr [^>]*descr="[^"]{40,}"/)
+      expect(picture).toContain('svgBlip')
+    }
+    const ids = [...document.matchAll(/<wp:docPr [^>]*\bid="(\d+)"/g)].map(([, id]) => Number(id))
+    expect(ids).toEqual(ids.map((_, index) => index + 1))
+    const media = Object.entries(unzipSync(bytes)).filter(([name]) => name.startsWith('word/media/'))
+    expect(media.filter(([name]) => name.endsWith('.svg'))).toHaveLength(pictures.length)
+    const dots = media.filter(([name]) => name.endsWith('.png'))
+    expect(dots).toHaveLength(pictures.length)
+    for (const [, png] of dots) expect(Buffer.from(png.subarray(1, 4)).toString()).toBe('PNG')
+    expect(document).not.toContain('wp:anchor')
   })
 
   it('uses A4 for SI and Letter for US unless told otherwise', async () => {

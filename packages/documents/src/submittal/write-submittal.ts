@@ -16,13 +16,15 @@ import { cautions } from './cautions.ts'
 import { contents } from './contents.ts'
 import { cover } from './cover.ts'
 import { findings } from './findings.ts'
+import { drawPictures, type Pictures } from './pictures.ts'
+import { pressures } from './pressures.ts'
 import { schedules } from './schedules.ts'
 import type { Section } from './section.ts'
 import { sources } from './sources.ts'
 import { summary } from './summary.ts'
 
 /** Every part of the submittal; page numbers stand as tokens where `pages` asks for them, and are left out elsewhere. */
-const documentOf = (result: ProjectResult, options: DocumentOptions, pages: boolean): Document => {
+const documentOf = (result: ProjectResult, options: DocumentOptions, pictures: Pictures, pages: boolean): Document => {
   const { project } = result
   const { titleBlock } = options
   const headings = new Headings()
@@ -30,7 +32,7 @@ const documentOf = (result: ProjectResult, options: DocumentOptions, pages: bool
   const shown = scheduleWords(result, options.units)
   const children = (orientation: Orientation, sections: readonly Section[]): FileChild[] =>
     sections.flatMap((section) =>
-      section({ result, options, headings, captions, shown, width: textWidth(options, orientation) }),
+      section({ result, options, headings, captions, shown, pictures, width: textWidth(options, orientation) }),
     )
   const page = (orientation: Orientation, content: readonly FileChild[]): ISectionOptions => ({
     properties: pageProperties(options, orientation),
@@ -44,7 +46,7 @@ const documentOf = (result: ProjectResult, options: DocumentOptions, pages: bool
   const overview = children('portrait', [summary])
   const body = [
     ...(result.vessels.length > 0 ? [page('landscape', children('landscape', [schedules]))] : []),
-    page('portrait', children('portrait', [calculations, assumptions, findings, sources, cautions])),
+    page('portrait', children('portrait', [pressures, calculations, assumptions, findings, sources, cautions])),
   ].filter((section) => section.children.length > 0)
   const frontProperties = pageProperties(options, 'portrait')
 
@@ -92,9 +94,10 @@ export interface SubmittalSurroundings {
 const withFoundPages = async (
   result: ProjectResult,
   options: DocumentOptions,
+  pictures: Pictures,
   findPages: PageFinder,
 ): Promise<Uint8Array | null> => {
-  const bytes = await packed(documentOf(result, options, true))
+  const bytes = await packed(documentOf(result, options, pictures, true))
   const settle = settled(dateOf(options.titleBlock))
   const archive = (page: (anchor: string) => string) =>
     fixedArchive(bytes, (name, xml) =>
@@ -122,6 +125,10 @@ export const writeSubmittal = async (
   options: DocumentOptions,
   { findPages }: SubmittalSurroundings = {},
 ): Promise<Uint8Array> => {
-  const numbered = findPages ? await withFoundPages(result, options, findPages) : null
-  return numbered ?? fixedArchive(await packed(documentOf(result, options, false)), settled(dateOf(options.titleBlock)))
+  const pictures = await drawPictures(result, options)
+  const numbered = findPages ? await withFoundPages(result, options, pictures, findPages) : null
+  return (
+    numbered ??
+    fixedArchive(await packed(documentOf(result, options, pictures, false)), settled(dateOf(options.titleBlock)))
+  )
 }

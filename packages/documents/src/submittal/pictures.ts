@@ -1,0 +1,63 @@
+import type { ProjectResult, SystemResult, VesselResult } from '@coldfill/sizing'
+import { ImageRun, Paragraph, type FileChild } from 'docx'
+import type { DocumentOptions } from '../document-options.ts'
+import type { Captions } from '../docx/captions.ts'
+import { plainText } from '../docx/plain-text.ts'
+import { STYLE } from '../docx/styles.ts'
+import { drawAcceptance } from '../drawings/acceptance-drawing.ts'
+import { drawPressures } from '../drawings/pressure-drawing.ts'
+import type { Drawing } from '../drawings/svg.ts'
+import { pngRenderer } from '../raster/png-of-svg.ts'
+
+/** A drawing, and the same as dots for programs that do not draw. */
+export interface Picture {
+  readonly drawing: Drawing
+  readonly png: Uint8Array
+}
+
+/** Drawings of a project by what they show. */
+export interface Pictures {
+  readonly pressures: ReadonlyMap<SystemResult, Picture>
+  readonly acceptance: ReadonlyMap<VesselResult, Picture>
+}
+
+/** Pixels across of the dots: about 150 to the inch of paper. */
+const DOTS = 850
+
+export const drawPictures = async (result: ProjectResult, { units }: DocumentOptions): Promise<Pictures> => {
+  const pngOf = await pngRenderer()
+  const pictures = <T>(things: readonly T[], draw: (thing: T) => Drawing | null): Map<T, Picture> =>
+    new Map(
+      things.flatMap((thing) => {
+        const drawing = draw(thing)
+        return drawing ? [[thing, { drawing, png: pngOf(drawing.svg, DOTS) }] as const] : []
+      }),
+    )
+  return {
+    pressures: pictures(result.systems, (system) => drawPressures(system, units, result.vessels)),
+    acceptance: pictures(result.vessels, (vessel) => drawAcceptance(vessel, units)),
+  }
+}
+
+/** Pixels of the page, 96 to the inch. */
+const ACROSS = 540
+
+/** A picture in the line, under its caption. */
+export const figure = ({ drawing, png }: Picture, caption: string, captions: Captions, key?: string): FileChild[] => {
+  const { svg, title, words, width, height } = drawing
+  return [
+    captions.figure(caption, key),
+    new Paragraph({
+      style: STYLE.figure,
+      children: [
+        new ImageRun({
+          type: 'svg',
+          data: new TextEncoder().encode(svg),
+          fallback: { type: 'png', data: png },
+          transformation: { width: ACROSS, height: Math.round((ACROSS * height) / width) },
+          altText: { title: plainText(title), description: plainText(words), name: plainText(title) },
+        }),
+      ],
+    }),
+  ]
+}
