@@ -1,12 +1,12 @@
-import { compile, differentiate, formulaTree, symbolsIn, type Dual, type FormulaFunction } from '@coldfill/formula'
+import { compile, formulaTree, type FormulaFunction, partial, symbolsIn } from '@coldfill/formula'
 
 type Functions = Readonly<Record<string, FormulaFunction>>
 type Values = Readonly<Record<string, number>>
 
 export interface CompiledFormula {
   readonly evaluate: (values: Values) => number
-  readonly differentiate: (values: Values, seeds: Values) => Dual
-  readonly symbols: readonly string[]
+  /** Partial derivative by each symbol of the formula that moves it. */
+  readonly partials: () => readonly (readonly [symbol: string, slope: (values: Values) => number])[]
 }
 
 const cache = new WeakMap<Functions, Map<string, CompiledFormula>>()
@@ -18,11 +18,14 @@ export const compiled = (formula: string, functions: Functions): CompiledFormula
   let found = byText.get(formula)
   if (!found) {
     const tree = formulaTree(formula)
-    let slope: CompiledFormula['differentiate'] | undefined
+    let slopes: ReturnType<CompiledFormula['partials']> | undefined
     found = {
       evaluate: compile(tree, functions),
-      differentiate: (values, seeds) => (slope ??= differentiate(tree, functions))(values, seeds),
-      symbols: symbolsIn(tree),
+      partials: () =>
+        (slopes ??= symbolsIn(tree).flatMap((symbol) => {
+          const slope = partial(tree, symbol, functions)
+          return slope ? [[symbol, slope] as const] : []
+        })),
     }
     byText.set(formula, found)
   }

@@ -4,28 +4,31 @@ import type { TraceEntry, TraceInput } from './trace.ts'
 
 type Functions = Readonly<Record<string, FormulaFunction>>
 
+const valuesOf = (entries: readonly TraceEntry[]): Record<string, number> => {
+  const values: Record<string, number> = {}
+  for (const entry of entries) values[entry.symbol] = entry.value
+  return values
+}
+
 /**
  * Exact derivative of a result with respect to every input of its calculation, SI units of the one per SI unit of the other.
- * The chain rule is followed backwards through the steps, so that all inputs come out of one pass.
+ * The chain rule is followed backwards through the steps, so that all inputs come out of one pass. `values` are those of the
+ * symbols, where they are at hand already.
  */
 export const sensitivities = (
   entries: readonly TraceEntry[],
   functions: Functions,
   result: string,
+  values: Readonly<Record<string, number>> = valuesOf(entries),
 ): Readonly<Record<string, number>> => {
-  const values: Record<string, number> = {}
-  for (const entry of entries) values[entry.symbol] = entry.value
   const adjoint: Record<string, number> = { [result]: 1 }
   for (let n = entries.length - 1; n >= 0; n -= 1) {
     const entry = entries[n]
     if (!entry) continue
     const weight = adjoint[entry.symbol]
     if (entry.entry === 'input' || weight === undefined || weight === 0) continue
-    const formula = compiled(entry.formula, functions)
-    for (const symbol of formula.symbols) {
-      const { derivative } = formula.differentiate(values, { [symbol]: 1 })
-      adjoint[symbol] = (adjoint[symbol] ?? 0) + weight * derivative
-    }
+    for (const [symbol, slope] of compiled(entry.formula, functions).partials())
+      adjoint[symbol] = (adjoint[symbol] ?? 0) + weight * slope(values)
   }
   const slopes: Record<string, number> = {}
   for (const { entry, symbol } of entries) {

@@ -6,6 +6,7 @@ export { MAX_FORMULA_DEPTH, MAX_FORMULA_LENGTH, formulaTree, parseFormula } from
 export { compile, type Functions, type Values } from './evaluate.ts'
 export { symbolsIn } from './symbols-in.ts'
 export { type Dual, differentiate } from './derivative.ts'
+export { partial } from './partial.ts'
 export { checkDimensions } from './dimensions.ts'
 export { type LayoutOptions, equationBox, layout } from './layout.ts'
 export { layoutSymbol } from './layout-symbol.ts'

@@ -20,7 +20,7 @@ export const headroomRows = (
   const entries = calculation.trace.flatMap((section) => section.entries)
   const upTo = entries.findIndex((entry) => entry.symbol === answer)
   const chain = entries.slice(0, upTo + 1)
-  const slopes = sensitivities(chain, calculation.functions, answer)
+  const slopes = sensitivities(chain, calculation.functions, answer, calculation.values)
   const expansion = method.results['expansion-volume']
   const reserve = method.results['water-reserve']
   const isEnough = (values: Readonly<Record<string, number>>): boolean | null => {
