@@ -1,4 +1,4 @@
-/** How a row came into our table. Rows without one agree in public transcriptions of the standard. */
+/** How a row came into our table. Rows without one agree in public copies of the standard. */
 export type RowMark =
   | 'from memory'
   /** Computed by the rule of the standard (outside diameter over the dimension ratio), with a tolerance from memory. */

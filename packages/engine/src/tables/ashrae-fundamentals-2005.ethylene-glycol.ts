@@ -1,6 +1,6 @@
 import type { InhibitedGlycolTable } from '../fluids/inhibited-glycol.ts'
 
-/** Industrially inhibited ethylene glycol in water, strengths in % by volume. Two transcriptions merged; each had one typing error, mended from the other and an inch-pound table. */
+/** Industrially inhibited ethylene glycol in water, strengths in % by volume. Two public copies merged; each had one typing error, mended from the other and an inch-pound table. */
 export const inhibitedEthyleneGlycol: InhibitedGlycolTable = {
   density: {
     strengths: [10, 20, 30, 40, 50, 60],

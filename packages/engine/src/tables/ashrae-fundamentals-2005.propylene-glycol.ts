@@ -1,6 +1,6 @@
 import type { InhibitedGlycolTable } from '../fluids/inhibited-glycol.ts'
 
-/** Industrially inhibited propylene glycol in water, strengths in % by volume. Two transcriptions agree in every common cell. */
+/** Industrially inhibited propylene glycol in water, strengths in % by volume. Two public copies agree in every common cell. */
 export const inhibitedPropyleneGlycol: InhibitedGlycolTable = {
   density: {
     strengths: [10, 20, 30, 40, 50, 60],

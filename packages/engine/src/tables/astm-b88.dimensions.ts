@@ -1,6 +1,6 @@
 import type { InchRow } from '../pipes/dimensions.ts'
 
-// Inches. Each value agrees in two transcriptions of the standard (8 in: one; above: from memory). Two errors seen in print are not
+// Inches. Each value agrees in two public copies of the standard (8 in: one; above: from memory). Two errors seen in print are not
 // here: 3-1/2 in outside diameter 6.625 (it is 3.625, nominal size + 1/8), and type L 4 in wall 0.114 (it is 0.110).
 
 /** Type K: size, DN, outside diameter and nominal wall in inches. */

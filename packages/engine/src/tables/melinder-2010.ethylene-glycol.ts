@@ -1,6 +1,6 @@
 import type { PolynomialTable } from '../fluids/polynomial.ts'
 
-// Aqueous ethylene glycol, uninhibited. Three transcriptions agree but for one term without effect above 0.006 kg/m3. The coefficients of the specific heat: one transcription.
+// Aqueous ethylene glycol, uninhibited. Three public copies agree but for one term without effect above 0.006 kg/m3. The coefficients of the specific heat: one public copy.
 
 /** Base of every polynomial: strength in % by mass and temperature in °C. */
 const base = { strength: 30.8462, temperature: 31.728 }

@@ -1,6 +1,6 @@
 import type { PolynomialTable } from '../fluids/polynomial.ts'
 
-// Aqueous propylene glycol, uninhibited. Three transcriptions agree. The coefficients of the specific heat: one transcription.
+// Aqueous propylene glycol, uninhibited. Three public copies agree. The coefficients of the specific heat: one public copy.
 
 /** Base of every polynomial: strength in % by mass and temperature in °C. */
 const base = { strength: 30.7031, temperature: 32.7083 }
