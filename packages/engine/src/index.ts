@@ -28,3 +28,5 @@ export { type CatalogueRow, type Choice, type Requirement, selectRow, type Selec
 export * from './verification/index.ts'
 export { fullWeight } from './methods/full-weight.ts'
 export { glycolUncertainty } from './methods/glycol-uncertainty.ts'
+export { codeMinimumCheck } from './methods/expansion-tank/code-minimum-check.ts'
+export { equalShares } from './methods/equal-shares.ts'

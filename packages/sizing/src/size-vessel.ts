@@ -1,4 +1,12 @@
-import { Calculation, type CatalogueRow, type Fluid, type Method, methodNames, type RunOutcome } from '@coldfill/engine'
+import {
+  Calculation,
+  type CatalogueRow,
+  equalShares,
+  type Fluid,
+  type Method,
+  methodNames,
+  type RunOutcome,
+} from '@coldfill/engine'
 import { formatQuantity } from '@coldfill/units'
 import type { Finding, SpecModel, SystemModel, VesselModel } from '@coldfill/spec'
 import { chooseMethod } from './choose-method.ts'
@@ -112,36 +120,12 @@ const resultsOf = (context: VesselContext, method: Method): Record<string, Resul
 const shareEqually = (context: VesselContext, method: Method, quantity: number): Record<string, ResultValue> => {
   const answer = method.results['required-volume']
   if (quantity <= 1 || answer === undefined) return {}
-  const { calculation } = context
-  calculation.section('Vessel')
-  const name = 'required volume of each vessel'
-  calculation.input('N_v', 'count', 'number of equal vessels', {
-    value: quantity,
-    origin: { from: 'spec', path: `${context.vessel.path}.quantity` },
+  const shares = equalShares(answer)
+  context.calculation.section('Vessel')
+  context.calculation.run(shares, {
+    N_v: { value: quantity, origin: { from: 'spec', path: `${context.vessel.path}.quantity` } },
   })
-  calculation.run(
-    {
-      id: 'shared-equally',
-      revision: 1,
-      title: 'Equal vessels',
-      inputs: {},
-      steps: {
-        V_each: {
-          kind: 'volume',
-          name,
-          formula: `${answer} / N_v`,
-          source: { source: 'geometry', locator: 'equal shares' },
-        },
-      },
-      checks: [],
-      results: {},
-      basis: '',
-      examples: [],
-    },
-    {},
-  )
-  const entry = calculation.entry('V_each')
-  return { 'required-volume-each': { kind: 'volume', value: entry.value, name, entry: entry.id } }
+  return resultsOf(context, shares)
 }
 
 export interface SizingInput {

@@ -9,11 +9,13 @@ import { ashraeOpen } from './expansion-tank/ashrae-open.ts'
 import { ashraePlainSteel } from './expansion-tank/ashrae-plain-steel.ts'
 import { bs7074Bladder, bs7074Diaphragm, checkBackBs7074 } from './expansion-tank/bs-7074.ts'
 import { checkBackDiaphragm, checkBackOtherCharge, checkBackPlainSteel } from './expansion-tank/check-back.ts'
+import { codeMinimumChecks } from './expansion-tank/code-minimum-check.ts'
 import { codeMinimumDiaphragm, codeMinimumPlainSteel } from './expansion-tank/code-minimum.ts'
 import { din4807 } from './expansion-tank/din-4807.ts'
 import { checkBackEuropean, en12828Glycol, en12828Water } from './expansion-tank/en-12828.ts'
 import { checkBackUne, une100155Glycol, une100155Water } from './expansion-tank/une-100155.ts'
 import { glycolUncertainty } from './glycol-uncertainty.ts'
+import { equalShares } from './equal-shares.ts'
 import { fullWeight } from './full-weight.ts'
 import { pressureTankMethods } from './pressure-tank/pressure-tank.ts'
 import { storageTankMethods } from './storage-tank/index.ts'
@@ -77,6 +79,8 @@ const all: readonly Method[] = [
   checkBackEuropean,
   checkBackUne,
   checkBackBs7074,
+  ...codeMinimumChecks,
+  equalShares('V_t'),
   fullWeight,
   glycolUncertainty,
 ]
