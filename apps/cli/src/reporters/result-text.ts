@@ -13,17 +13,20 @@ const columns = [
   { heading: 'Chosen', align: 'left' },
 ] as const
 
+/** The required volume; of a vessel that is sized by something else, that with its name. */
+const answer = (vessel: VesselResult, units: UnitSystem): string => {
+  const volume = vessel.results['required-volume']
+  if (volume) return formatQuantity(volume, units)
+  const [first] = Object.values(vessel.results)
+  return first ? `${formatQuantity(first, units)} ${first.name}` : '—'
+}
+
 const row = (vessel: VesselResult, units: UnitSystem): readonly string[] => {
   const show = (name: string) => {
     const result = vessel.results[name]
     return result ? formatQuantity(result, units) : '—'
   }
-  const required =
-    vessel.status === 'sized'
-      ? vessel.results['required-volume']
-        ? show('required-volume')
-        : show('storage-volume')
-      : vessel.status
+  const required = vessel.status === 'sized' ? answer(vessel, units) : vessel.status
   const chosen = vessel.selected
     ? `${vessel.selected.quantity > 1 ? `${vessel.selected.quantity} × ` : ''}${vessel.selected.maker} ${vessel.selected.model}`
     : '—'
