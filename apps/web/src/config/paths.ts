@@ -7,12 +7,14 @@ export const paths = {
   cover: project,
   spec: (number: string) => `${project(number)}/spec`,
   schedule: (number: string) => `${project(number)}/schedule`,
+  trace: (number: string, mark: string) => `${project(number)}/trace/${encodeURIComponent(mark)}`,
   basis: (number: string) => `${project(number)}/basis`,
   redlines: (number: string) => `${project(number)}/redlines`,
   issue: (number: string) => `${project(number)}/issue`,
   handover: (number: string) => `/d/${encodeURIComponent(number)}`,
   office: () => '/office',
   help: (anchor?: string) => (anchor ? `/help#${encodeURIComponent(anchor)}` : '/help'),
+  verification: () => '/help/verification',
   you: () => '/you',
 }
 

@@ -3,6 +3,7 @@ import { redirect } from 'react-router-dom'
 import { Sheet } from '#components/layouts/sheet.tsx'
 import { paths } from '#config/paths.ts'
 import { AuditTrailTable } from '#features/office/components/audit-trail.tsx'
+import { Catalogue } from '#features/office/components/catalogue.tsx'
 import { OutboxList } from '#features/office/components/outbox.tsx'
 import { PeopleTable } from '#features/office/components/people.tsx'
 import { sessionQuery } from '#features/session/api/session.ts'
@@ -21,6 +22,7 @@ export const loader = async () => {
 const parts: readonly { readonly id: string; readonly name: string; readonly Part: ComponentType }[] = [
   { id: 'outbox', name: 'Outbox', Part: OutboxList },
   { id: 'people', name: 'People', Part: PeopleTable },
+  { id: 'catalogue', name: 'Catalogue', Part: Catalogue },
   { id: 'audit', name: 'Audit trail', Part: AuditTrailTable },
 ]
 

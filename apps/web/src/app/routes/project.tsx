@@ -66,7 +66,11 @@ export function Component() {
     { name: session.user.name, to: paths.you() },
   ]
   const here = sheets.findLastIndex(
-    ({ sheet }) => pathname === paths[sheet](number) || pathname.startsWith(`${paths[sheet](number)}/`),
+    ({ sheet }) =>
+      pathname === paths[sheet](number) ||
+      pathname.startsWith(`${paths[sheet](number)}/`) ||
+      // The trace of a vessel belongs to its schedule.
+      (sheet === 'schedule' && pathname.startsWith(paths.trace(number, ''))),
   )
 
   const onKey = useEffectEvent((event: KeyboardEvent) => {

@@ -82,6 +82,15 @@ export const ScheduleMargin = (props: Props) => {
             hasSpec={project.sheets.includes('spec')}
             without={<WithoutTrace row={row} column={column} heading={heading} project={project} />}
           />
+          <Link
+            to={withQuery(paths.trace(project.number, row.vessel.mark), {
+              system: row.vessel.system,
+              rev,
+              units: units.toLowerCase(),
+            })}
+          >
+            Whole calculation of {row.vessel.mark}
+          </Link>
           <div className="border-t-2 border-ink pt-3">
             <Button
               why={redline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')}

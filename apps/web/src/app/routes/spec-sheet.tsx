@@ -1,11 +1,13 @@
 import { revisionSegment, type Project, type Reference, type SpecDocument } from '@coldfill/contract'
 import { acceptFix, pathRange, readSpec, type Range } from '@coldfill/spec'
 import { useQuery, type UseQueryResult } from '@tanstack/react-query'
-import { useDeferredValue, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
+import { useCallback, useDeferredValue, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
+import { useNavigate } from 'react-router-dom'
 import { Failure } from '#components/failure.tsx'
 import { Sheet } from '#components/layouts/sheet.tsx'
 import { Band } from '#components/ui/band.tsx'
 import { Button } from '#components/ui/button.tsx'
+import { paths, withQuery } from '#config/paths.ts'
 import { resultsQuery } from '#features/results/api/results.ts'
 import { UnitsSwitch } from '#features/results/components/units-switch.tsx'
 import { CompareTexts } from '#features/spec/components/compare-texts.tsx'
@@ -40,6 +42,8 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
   const { text, change, base, dirty } = draft
   const readOnly = document.readOnly !== null
   const { get } = useAddress()
+  const navigate = useNavigate()
+  const toTrace = useCallback((address: string) => void navigate(address), [navigate])
   const editor = useRef<SpecEditorHandle>(null)
   const [line, setLine] = useState<number | null>(null)
   const [compared, setCompared] = useState<{ readonly title: string; readonly text: string } | null>(null)
@@ -72,8 +76,11 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
   const [model, setModel] = useState(reading?.model ?? null)
   if (reading?.model && reading.model !== model) setModel(reading.model)
   const entries = useMemo(
-    () => marginEntries(model, good?.result ?? null, issued.data?.result ?? null, units),
-    [model, good, issued.data, units],
+    () =>
+      marginEntries(model, good?.result ?? null, issued.data?.result ?? null, units, (system, mark) =>
+        withQuery(paths.trace(number, mark), { system, units: units.toLowerCase() }),
+      ),
+    [model, good, issued.data, units, number],
   )
 
   const onKey = useEffectEvent((event: KeyboardEvent) => {
@@ -158,6 +165,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
               entries={entries}
               stale={stale}
               onLine={setLine}
+              onTrace={toTrace}
             />
           </div>
         </div>

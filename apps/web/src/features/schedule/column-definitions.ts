@@ -71,6 +71,9 @@ const assumptions: ColumnDefinition = {
   words: ({ vessel, result: { assumptions: used } }) =>
     numberRanges(used.filter((one) => vessel.assumptions.includes(one.id)).map((one) => Number(one.number.slice(1)))),
 }
+const selectedVessel = words('selected-vessel', 'Selected vessel', ({ vessel: { selected } }) =>
+  selected ? `${selected.quantity > 1 ? `${selected.quantity} × ` : ''}${selected.maker} ${selected.model}` : '',
+)
 const selectedVolume: ColumnDefinition = {
   shows: 'quantity',
   key: 'selected-volume',
@@ -97,6 +100,7 @@ const byKind: Readonly<Record<string, readonly ColumnDefinition[]>> = {
     input('high-temperature', 'Highest temp.', 'temperature', ['t_h', 't_high', 't_max']),
     result('expansion-volume', 'Expansion volume', 'volume'),
     result('required-volume', 'Required volume', 'volume'),
+    selectedVessel,
     selectedVolume,
     result('fill-pressure', 'Fill pressure', 'gauge pressure'),
     result('precharge', 'Precharge', 'gauge pressure'),
@@ -115,6 +119,7 @@ const byKind: Readonly<Record<string, readonly ColumnDefinition[]>> = {
     input('storage-temperature', 'Storage temp.', 'temperature', ['t_h', 't_hot', 't_s', 't_high']),
     result('expansion-volume', 'Expansion volume', 'volume'),
     result('required-volume', 'Required volume', 'volume'),
+    selectedVessel,
     selectedVolume,
     result('fill-pressure', 'Supply pressure', 'gauge pressure'),
     result('precharge', 'Precharge', 'gauge pressure'),
@@ -129,17 +134,18 @@ const byKind: Readonly<Record<string, readonly ColumnDefinition[]>> = {
 /** Columns of the schedule of a kind. A kind without columns of its own shows every result that one of its vessels has. */
 export const columnsOf = (kind: string, project: ProjectResult): readonly ColumnDefinition[] => {
   const vessels = project.vessels.filter((vessel) => vessel.kind === kind)
-  const defined = byKind[kind]
-  if (defined) {
+  const chosen = vessels.some((vessel) => vessel.selected !== null)
+  const isShown = ({ key }: ColumnDefinition): boolean => {
+    if (key === 'selected-vessel' || key === 'selected-volume') return chosen
     // A result that only some methods give takes a column only where a vessel has it.
-    return defined.filter(
-      (column) => column.key !== 'final-pressure' || vessels.some((vessel) => vessel.results[column.key]),
-    )
+    return key !== 'final-pressure' || vessels.some((vessel) => vessel.results[key])
   }
+  const defined = byKind[kind]
+  if (defined) return defined.filter(isShown)
   const found = new Map<string, ColumnDefinition>()
   for (const vessel of vessels) {
     for (const [key, value] of Object.entries(vessel.results))
       if (!found.has(key)) found.set(key, result(key, value.name, value.kind))
   }
-  return [serves, count, ...found.values(), selectedVolume, method, assumptions]
+  return [serves, count, ...found.values(), selectedVessel, selectedVolume, method, assumptions].filter(isShown)
 }

@@ -15,6 +15,8 @@ export interface MarginEntry {
   readonly was: string | null
   /** Settings and pressures of the vessel. */
   readonly details: readonly string[]
+  /** Address of its whole calculation; null while it is not sized yet. */
+  readonly trace: string | null
   /** How many lines there are before the next vessel or system. */
   readonly room: number
 }
@@ -42,20 +44,26 @@ export const marginEntries = (
   result: ProjectResult | null,
   issued: ProjectResult | null,
   units: UnitSystem,
+  traceOf: (system: string, mark: string) => string,
 ): readonly MarginEntry[] => {
   if (!model) return []
   const declared = model.systems
     .flatMap((system) =>
-      system.vessels.map((vessel) => ({ path: vessel.path, mark: vessel.mark, line: vessel.range.start.line })),
+      system.vessels.map((vessel) => ({
+        system: system.id,
+        path: vessel.path,
+        mark: vessel.mark,
+        line: vessel.range.start.line,
+      })),
     )
     .toSorted((a, b) => a.line - b.line)
   const starts = [
     ...declared.map((vessel) => vessel.line),
     ...model.systems.map((system) => system.range.start.line),
   ].toSorted((a, b) => a - b)
-  return declared.map(({ path, mark, line }) => {
+  return declared.map(({ system, path, mark, line }) => {
     const vessel = result?.vessels.find((one) => one.path === path)
-    if (!vessel) return { line, mark, size: 'sizing…', sized: false, was: null, details: [], room: 0 }
+    if (!vessel) return { line, mark, size: 'sizing…', sized: false, was: null, details: [], trace: null, room: 0 }
     const before = issued?.vessels.find((one) => one.path === path)
     const size = sizeWords(vessel, units)
     const was = before ? sizeWords(before, units) : null
@@ -64,6 +72,15 @@ export const marginEntries = (
       const shown = quantity(vessel, key, units)
       return shown ? [`${word} ${shown}`] : []
     })
-    return { line, mark, size, sized: vessel.status === 'sized', was: was === size ? null : was, details, room }
+    return {
+      line,
+      mark,
+      size,
+      sized: vessel.status === 'sized',
+      was: was === size ? null : was,
+      details,
+      trace: traceOf(system, mark),
+      room,
+    }
   })
 }

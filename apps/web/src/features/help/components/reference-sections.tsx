@@ -1,7 +1,9 @@
 import type { Reference } from '@coldfill/contract'
+import { Link } from 'react-router-dom'
 import { SectionHeading } from '#components/ui/heading.tsx'
 import { Prose } from '#components/ui/prose.tsx'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
+import { paths } from '#config/paths.ts'
 import { capital } from '#lib/format.ts'
 import { citationWords } from '#lib/sized-project.ts'
 
@@ -126,6 +128,7 @@ export const ReferenceSections = ({ reference, here }: { readonly reference: Ref
           {title}
         </a>
       ))}
+      <Link to={paths.verification()}>Verification</Link>
       <a href="/schema/coldfill-1.json">JSON Schema of the spec</a>
     </nav>
     <section id="findings" tabIndex={-1} className="scroll-mt-4">

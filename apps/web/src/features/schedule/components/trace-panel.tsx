@@ -9,7 +9,7 @@ import { citationWords, type TraceEntry, type TraceInput, type TraceStep, type V
 import { drawnSymbol, drawStep, shownValue } from '../drawn-step.ts'
 import { operands, upstream } from '../upstream.ts'
 
-interface Context {
+export interface TraceContext {
   readonly project: string
   readonly result: ProjectResult
   readonly units: UnitSystem
@@ -19,7 +19,7 @@ interface Context {
 }
 
 /** Where an input comes from, as a link where there is a place to go. */
-const Source = ({ input, context }: { readonly input: TraceInput; readonly context: Context }) => {
+const Source = ({ input, context }: { readonly input: TraceInput; readonly context: TraceContext }) => {
   const { origin } = input
   if (origin.from === 'catalogue') return 'chosen vessel'
   if (origin.from === 'table') return citationWords(origin.citation, context.result.sources)
@@ -39,8 +39,21 @@ const Source = ({ input, context }: { readonly input: TraceInput; readonly conte
   )
 }
 
-const Input = ({ input, context }: { readonly input: TraceInput; readonly context: Context }) => (
-  <li className="border-b border-hair py-1.5">
+export const Input = ({
+  input,
+  context,
+  marked,
+}: {
+  readonly input: TraceInput
+  readonly context: TraceContext
+  /** Pointed out as something that a chosen step rests on; left out where nothing is pointed out. */
+  readonly marked?: boolean
+}) => (
+  <li
+    id={marked === undefined ? undefined : input.id}
+    tabIndex={marked === undefined ? undefined : -1}
+    className={`border-b border-hair py-1.5 ${marked === undefined ? '' : `scroll-mt-4 border-l-[3px] pl-3 ${marked ? 'border-l-steel bg-steel-wash' : 'border-l-transparent'}`}`}
+  >
     <div className="flex items-baseline justify-between gap-3">
       <span className="min-w-0">
         <Formula markup={drawnSymbol(input.symbol)} /> <span className="text-cell">{input.name}</span>
@@ -53,20 +66,25 @@ const Input = ({ input, context }: { readonly input: TraceInput; readonly contex
   </li>
 )
 
-const Step = ({
+export const Step = ({
   step,
   context,
   chosen = false,
+  named = true,
 }: {
   readonly step: TraceStep
-  readonly context: Context
+  readonly context: TraceContext
   readonly chosen?: boolean
+  /** Whether its name stands above it. */
+  readonly named?: boolean
 }) => {
   const drawn = useMemo(() => drawStep(step, context.all, context.units), [step, context])
   const source = citationWords(step.source, context.result.sources)
   return (
-    <div className={chosen ? 'border-t-[3px] border-ink pt-2' : 'border-b border-hair py-2'}>
-      {chosen ? null : <p className="text-cell font-semibold">{capital(step.name)}</p>}
+    <div
+      className={chosen ? 'border-t-[3px] border-ink pt-2' : `border-b border-hair ${named ? 'py-2' : 'pt-0.5 pb-2'}`}
+    >
+      {chosen || !named ? null : <p className="text-cell font-semibold">{capital(step.name)}</p>}
       {drawn ? (
         <>
           <Formula block markup={drawn.symbols} />
@@ -107,7 +125,7 @@ const UsedStep = ({
   onWalk,
 }: {
   readonly step: TraceStep
-  readonly context: Context
+  readonly context: TraceContext
   readonly onWalk: () => void
 }) => (
   <li className="border-b border-hair">
@@ -129,7 +147,7 @@ const UsedStep = ({
 export const TracePanel = ({ project, result, vessel, entry, heading, units, hasSpec, without }: Props) => {
   const [walked, setWalked] = useState<string | null>(null)
   const all = useMemo(() => vessel.trace.flatMap((section) => section.entries), [vessel])
-  const context = useMemo<Context>(
+  const context = useMemo<TraceContext>(
     () => ({ project, result, units, all, hasSpec }),
     [project, result, units, all, hasSpec],
   )

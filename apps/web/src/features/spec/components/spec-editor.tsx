@@ -31,13 +31,14 @@ interface Props {
   readonly stale: boolean
   /** Zero-based line of the cursor. Must stay the same function. */
   readonly onLine: (line: number) => void
+  /** Leads to the whole calculation of a vessel. Must stay the same function. */
+  readonly onTrace: (address: string) => void
 }
 
 const setup = { foldGutter: true, autocompletion: false, highlightActiveLine: true, lintKeymap: false, tabSize: 2 }
 const always: Extension = [
   yaml(),
   editorTheme(),
-  resultMargin(),
   findingGutter,
   Prec.highest(
     keymap.of([
@@ -57,7 +58,18 @@ const always: Extension = [
 ]
 
 /** The YAML editor of the spec: findings underlined and marked, results beside the lines. */
-export const SpecEditor = ({ ref, text, onChange, readOnly, vocabulary, findings, entries, stale, onLine }: Props) => {
+export const SpecEditor = ({
+  ref,
+  text,
+  onChange,
+  readOnly,
+  vocabulary,
+  findings,
+  entries,
+  stale,
+  onLine,
+  onTrace,
+}: Props) => {
   const [view, setView] = useState<EditorView | null>(null)
   const jumpTo = useCallback(
     (range: Range) => {
@@ -79,8 +91,13 @@ export const SpecEditor = ({ ref, text, onChange, readOnly, vocabulary, findings
   )
 
   const extensions = useMemo(
-    () => [always, EditorState.readOnly.of(readOnly), vocabulary ? languageHelp(vocabulary) : []],
-    [readOnly, vocabulary],
+    () => [
+      always,
+      resultMargin(onTrace),
+      EditorState.readOnly.of(readOnly),
+      vocabulary ? languageHelp(vocabulary) : [],
+    ],
+    [readOnly, vocabulary, onTrace],
   )
   const onUpdate = useCallback(
     ({ state, selectionSet }: ViewUpdate) => {

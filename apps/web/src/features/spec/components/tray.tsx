@@ -1,5 +1,6 @@
 import type { Range } from '@coldfill/spec'
 import { useState, type ReactNode } from 'react'
+import { Link } from 'react-router-dom'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
 import type { Finding } from '#lib/sized-project.ts'
 import type { MarginEntry } from '../margin-lines.ts'
@@ -115,6 +116,11 @@ export const Tray = ({ findings, reasons, entries, stale, readOnly, line, status
                     </span>
                   )}
                   <span className="figures text-cell text-pencil">{entry.details.join(' · ')}</span>
+                  {entry.trace === null ? null : (
+                    <Link to={entry.trace} className="text-cell" aria-label={`Trace of ${entry.mark}, as saved`}>
+                      Trace
+                    </Link>
+                  )}
                 </li>
               ))}
             </ul>

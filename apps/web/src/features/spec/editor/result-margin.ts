@@ -16,6 +16,18 @@ const line = (text: string, className: string): HTMLElement => {
   return element
 }
 
+const link = (entry: MarginEntry): HTMLElement => {
+  if (entry.trace === null) return line(entry.mark, 'font-mono text-zone text-pencil')
+  const anchor = document.createElement('a')
+  anchor.href = entry.trace
+  anchor.textContent = entry.mark
+  anchor.title = `The whole calculation of ${entry.mark}, as saved`
+  anchor.className = 'font-mono text-zone'
+  // The list under the editor has the same link for the keyboard.
+  anchor.tabIndex = -1
+  return anchor
+}
+
 class ResultMarker extends GutterMarker {
   readonly entry: MarginEntry
   readonly stale: boolean
@@ -34,7 +46,7 @@ class ResultMarker extends GutterMarker {
     const head = document.createElement('span')
     head.className = 'flex items-baseline justify-between gap-2'
     const size = line(entry.size, `font-mono text-[13px] font-semibold ${entry.sized ? 'text-ink' : 'text-fault'}`)
-    if (entry.was === null) head.append(line(entry.mark, 'font-mono text-zone text-pencil'), size)
+    if (entry.was === null) head.append(link(entry), size)
     else {
       const was = document.createElement('del')
       was.className = 'font-mono text-zone'
@@ -46,7 +58,7 @@ class ResultMarker extends GutterMarker {
       right.append(was, size)
       const left = document.createElement('span')
       left.className = 'inline-flex items-baseline gap-1'
-      left.append(line(entry.mark, 'font-mono text-zone text-pencil'), triangle)
+      left.append(link(entry), triangle)
       head.append(left, right)
     }
     holder.append(
@@ -78,13 +90,25 @@ const results = StateField.define<RangeSet<GutterMarker>>({
 })
 
 /** Sized results beside the lines on which vessels are declared. The Results list of the tray says the same to those who do not see it. */
-export const resultMargin = (): Extension => [
+export const resultMargin = (onTrace: (address: string) => void): Extension => [
   results,
   gutter({
     class: 'cm-result-margin max-desk:hidden',
     side: 'after',
     markers: (view) => view.state.field(results),
     initialSpacer: () => new Spacer(),
+    domEventHandlers: {
+      click: (_view, _line, event) => {
+        if (!(event instanceof MouseEvent) || event.button !== 0 || event.ctrlKey || event.metaKey || event.shiftKey)
+          return false
+        const anchor = event.target instanceof Element ? event.target.closest('a') : null
+        const address = anchor?.getAttribute('href')
+        if (!address) return false
+        event.preventDefault()
+        onTrace(address)
+        return true
+      },
+    },
   }),
 ]
 
