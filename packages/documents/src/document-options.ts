@@ -1,3 +1,4 @@
+import type { verificationRows } from '@coldfill/engine'
 import type { UnitSystem } from '@coldfill/units'
 
 /** Fields of the title block. `date` is an ISO date; it also dates the file, so that the same content gives the same bytes. */
@@ -21,6 +22,60 @@ export interface RevisionEntry {
   readonly by: string
 }
 
+/** What a reviewer decided on this issue. */
+export interface DispositionEntry {
+  readonly reviewer: string
+  /** In the words of the office: `Revise and resubmit`. */
+  readonly outcome: string
+  readonly reason: string
+  readonly date: string
+  /** Given on other content than this. */
+  readonly stale?: boolean
+}
+
+export interface RedlinePerson {
+  readonly name: string
+  readonly initials: string
+}
+
+/** Where a redline stands: `column` is the name of a result, `path` a path of the spec. */
+export type RedlineAnchor =
+  | { readonly type: 'row'; readonly mark: string }
+  | { readonly type: 'cell'; readonly mark: string; readonly column: string }
+  | { readonly type: 'assumption'; readonly assumption: string }
+  | { readonly type: 'spec'; readonly path: string }
+
+export interface RedlineEntry {
+  readonly number: number
+  readonly anchor: RedlineAnchor
+  /** The value as its author saw it, with its unit; may be empty. */
+  readonly quoted: string
+  readonly proposedValue: string | null
+  readonly mustAnswer: boolean
+  readonly state: 'open' | 'closed'
+  /** The first message is the redline itself. `at` is an ISO time. */
+  readonly messages: readonly { readonly author: RedlinePerson; readonly at: string; readonly text: string }[]
+}
+
+/** One result that differs from an earlier issue: SI numbers of `kind`, or words; null where there is none. */
+export interface ChangedEntry {
+  readonly system: string
+  readonly mark: string
+  readonly key: string
+  readonly name: string
+  readonly kind: string
+  readonly was: number | string | null
+  readonly now: number | string | null
+}
+
+/** A picture of the office; pixels say its proportions. */
+export interface Logo {
+  readonly data: Uint8Array
+  readonly type: 'png' | 'jpg'
+  readonly width: number
+  readonly height: number
+}
+
 export interface DocumentOptions {
   readonly units: UnitSystem
   readonly titleBlock: TitleBlock
@@ -28,6 +83,19 @@ export interface DocumentOptions {
   readonly revisions: readonly RevisionEntry[]
   /** SHA-256 of the content that reviewers judge; printed in footers where given. */
   readonly contentHash?: string
+  /** Dispositions of the reviewers; the cover keeps blank rows for a pen where none are given. */
+  readonly dispositions?: readonly DispositionEntry[]
+  /** Outcomes in the words of the office, for the blank rows. */
+  readonly outcomes?: readonly string[]
+  /** Redlines with their answers, in order of number. */
+  readonly redlines?: readonly RedlineEntry[]
+  /** Results that differ from the issue before this one, whose revision is named. */
+  readonly comparison?: { readonly revision: string; readonly changed: readonly ChangedEntry[] }
+  /** Why and by whom an issue for construction was made over a gate that did not pass. */
+  readonly override?: { readonly reason: string; readonly by: string; readonly date: string }
+  readonly logo?: Logo
+  /** Cases of the verification manual, run. */
+  readonly verification?: ReturnType<typeof verificationRows>
   /** Letter for US and A4 for SI where not said. */
   readonly paper?: 'Letter' | 'A4'
 }

@@ -1,4 +1,15 @@
-export { CONSTRUCTION_STATUS, type DocumentOptions, type RevisionEntry, type TitleBlock } from './document-options.ts'
+export {
+  CONSTRUCTION_STATUS,
+  type ChangedEntry,
+  type DispositionEntry,
+  type DocumentOptions,
+  type Logo,
+  type RedlineAnchor,
+  type RedlineEntry,
+  type RedlinePerson,
+  type RevisionEntry,
+  type TitleBlock,
+} from './document-options.ts'
 export { writeSchedule } from './xlsx/write-schedule.ts'
 export { writeSubmittal, type SubmittalSurroundings } from './submittal/write-submittal.ts'
 export { officePages } from './pages/office-pages.ts'

@@ -3,7 +3,7 @@ import { strFromU8, unzipSync } from 'fflate'
 import { beforeAll, describe, expect, it } from 'vitest'
 import { lineWidth } from '../docx/letter-widths.ts'
 import { headerText, scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
-import { clinicProject, documentOptions, si } from '../testing/index.ts'
+import { clinicProject, documentOptions, reviewedOptions, si } from '../testing/index.ts'
 import { cautions } from '../words/cautions.ts'
 import { writeSubmittal } from './write-submittal.ts'
 
@@ -272,6 +272,47 @@ describe('the submittal', () => {
     expect(dots).toHaveLength(pictures.length)
     for (const [, png] of dots) expect(Buffer.from(png.subarray(1, 4)).toString()).toBe('PNG')
     expect(document).not.toContain('wp:anchor')
+  })
+
+  it('carries what a review brought, each in its section, and no section where it is not given', async () => {
+    for (const heading of ['Changes since', 'Redlines and answers', 'Verification']) {
+      expect(paragraphs(document, 'Heading1').join()).not.toContain(heading)
+    }
+    const archive = await writeSubmittal(project, reviewedOptions('US'))
+    const written = partsOf(archive).get('word/document.xml') ?? ''
+    expect(paragraphs(written, 'Heading1')).toEqual(
+      expect.arrayContaining(['Changes since the first issue', 'Redlines and answers', 'Verification']),
+    )
+    const rows = (title: string) =>
+      all(all(written, 'tbl').find((table) => table.includes(`<w:tblCaption w:val="${title}"/>`)) ?? '', 'tr')
+        .slice(1)
+        .map((row) => all(row, 'tc').map(textOf))
+    expect(rows('Disposition block')).toEqual([
+      [
+        'Revise and resubmit (on earlier content)',
+        'B. Lark',
+        '2026-11-20',
+        'The precharge of ET-1 is below the static height.',
+      ],
+      ['Accepted as noted', 'B. Lark', '2026-11-30', 'See redline 2.'],
+    ])
+    expect(rows('Changes since the first issue')).toEqual([
+      ['ET-1', 'HWS', 'Precharge', '12 psig', '15 psig', '+25 %'],
+      ['TET-1', 'DHW', 'Status', 'Blocked', 'Sized', ''],
+      ['TET-1', 'DHW', 'Precharge', '—', '60 psig', ''],
+    ])
+    expect(rows('Redlines and answers')[0]).toEqual([
+      '1',
+      'ET-1, Precharge',
+      'B. Lark, 2026-11-20: Below the static height of the building. (On 12 psig, proposes 22.2 psig, must be answered.)',
+      'A. Rowan, 2026-11-21: Raised to the fill pressure; charge it on site.',
+      'Closed',
+    ])
+    expect(rows('Verification')).toHaveLength(reviewedOptions('US').verification?.length ?? -1)
+    expect(textOf(written)).toContain(
+      'Gates overridden. C. Heath issued this for construction on 2026-12-01 although a gate did not pass: The owner accepts ET-1 as it is.',
+    )
+    expect(written).toContain('descr="Logo of Tarn &amp; Vale Engineers"')
   })
 
   it('uses A4 for SI and Letter for US unless told otherwise', async () => {

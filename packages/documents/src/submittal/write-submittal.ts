@@ -13,15 +13,18 @@ import { scheduleWords } from '../schedules/schedule-words.ts'
 import { assumptions } from './assumptions.ts'
 import { calculations } from './calculations.ts'
 import { cautions } from './cautions.ts'
+import { comparison } from './comparison.ts'
 import { contents } from './contents.ts'
 import { cover } from './cover.ts'
 import { findings } from './findings.ts'
 import { drawPictures, type Pictures } from './pictures.ts'
 import { pressures } from './pressures.ts'
+import { redlines } from './redlines.ts'
 import { schedules } from './schedules.ts'
 import type { Section } from './section.ts'
 import { sources } from './sources.ts'
 import { summary } from './summary.ts'
+import { verification } from './verification.ts'
 
 /** Every part of the submittal; page numbers stand as tokens where `pages` asks for them, and are left out elsewhere. */
 const documentOf = (result: ProjectResult, options: DocumentOptions, pictures: Pictures, pages: boolean): Document => {
@@ -43,10 +46,14 @@ const documentOf = (result: ProjectResult, options: DocumentOptions, pictures: P
 
   const first = children('portrait', [cover])
   // The contents list stands before the headings it lists, so the body is written first.
-  const overview = children('portrait', [summary])
+  const overview = children('portrait', [summary, comparison])
   const body = [
     ...(result.vessels.length > 0 ? [page('landscape', children('landscape', [schedules]))] : []),
-    page('portrait', children('portrait', [pressures, calculations, assumptions, findings, sources, cautions])),
+    page(
+      'portrait',
+      children('portrait', [pressures, calculations, assumptions, findings, redlines, sources, cautions]),
+    ),
+    page('landscape', children('landscape', [verification])),
   ].filter((section) => section.children.length > 0)
   const frontProperties = pageProperties(options, 'portrait')
 

@@ -38,7 +38,8 @@ export const putCell = (cell: Cell, content: CellContent): void => {
     cell.value = { text: cellText(content.text), hyperlink: `#${sheetReference(content.sheet)}!A1` }
     return
   }
-  cell.value = cellText(content.text)
+  // An empty cell stays empty, so that it counts as blank for whoever fills it in.
+  if (content.text !== '') cell.value = cellText(content.text)
 }
 
 /** A sheet's name as formulas and links write it. Only names made by `SheetNames` get here. */

@@ -4,7 +4,7 @@ import ExcelJS from 'exceljs'
 import { strFromU8, unzipSync } from 'fflate'
 import { beforeAll, describe, expect, it } from 'vitest'
 import { headerText, scheduleTable } from '../schedules/schedule-table.ts'
-import { clinicProject, documentOptions } from '../testing/index.ts'
+import { clinicProject, documentOptions, reviewedOptions } from '../testing/index.ts'
 import { writeSchedule } from './write-schedule.ts'
 
 const project = clinicProject(water.functions)
@@ -43,6 +43,7 @@ describe('the schedule workbook', () => {
       'Thermal expansion tanks',
       'ET-1',
       'TET-1',
+      'Readings',
       'Assumptions',
       'Findings',
       'Sources',
@@ -128,6 +129,66 @@ describe('the schedule workbook', () => {
       return !(relativeError(cached.get(step.name.toLowerCase()), expected) < 1e-12)
     })
     expect(wrong.map((step) => step.name)).toEqual([])
+  })
+
+  it('names the cell of every input and result by mark and key', () => {
+    const vessel = project.vessels.find((each) => each.mark === 'ET-1')
+    const names = new Map(
+      [
+        ...(parts.get('xl/workbook.xml') ?? '').matchAll(
+          /<definedName name="([^"]+)">&apos;([^&]+)&apos;!\$(\w+)\$(\d+)</g,
+        ),
+      ].map(([, name, on, column, row]) => [name, { on, cell: `${column}${row}` }]),
+    )
+    const keyed = Object.entries(vessel?.results ?? {})
+    expect(keyed.length).toBeGreaterThan(4)
+    for (const [key, value] of keyed) {
+      const found = names.get(`ET_1_${key.replaceAll('-', '_')}`)
+      const cell = sheet(found?.on ?? '').getCell(found?.cell ?? 'A1')
+      expect(relativeError(cell.result, fromSi(value.value, displayUnit(value.kind, 'US')))).toBeLessThan(1e-9)
+    }
+    const inputs = vessel?.trace.flatMap((section) => section.entries).filter((entry) => entry.entry === 'input') ?? []
+    for (const { id } of inputs) expect(names.has(id.replace(/[^A-Za-z0-9]+/g, '_'))).toBe(true)
+  })
+
+  it('has cells for readings in the field, with rules, help and a key that finds the row again', () => {
+    const readings = sheet('Readings')
+    const head = (readings.getRow(5).values as unknown[]).slice(1)
+    expect(head).toEqual(expect.arrayContaining(['Mark', 'Required (psig)', 'Read (psig)', 'Date', 'Row key']))
+    expect(readings.getCell('M6').value).toMatch(/^[A-Z]+\/ET-1\/precharge$/)
+    expect(readings.getCell('E6').formula).toMatch(/^'ET-1'!\$C\$\d+$/)
+    expect(readings.getCell('G6').formula).toBe('IF(ISNUMBER(F6),F6-E6,"")')
+    expect(readings.getCell('F6').value).toBeNull()
+    const xml = [...parts.values()].find(
+      (part) => part.includes('Isolated and drained') && part.includes('dataValidation'),
+    )
+    const rules = xml?.match(/<dataValidation .*?<\/dataValidation>/gs) ?? []
+    expect(rules.map((rule) => /type="(\w+)"/.exec(rule)?.[1])).toEqual(
+      expect.arrayContaining(['decimal', 'list', 'date', 'textLength']),
+    )
+    for (const rule of rules) {
+      expect(rule).toMatch(/prompt="[^"]+"/)
+      expect(rule).toMatch(/error="[^"]+"/)
+      expect(rule).toMatch(/sqref="[A-Z]6:[A-Z]\d+"/)
+    }
+  })
+
+  it('lists what differs from the issue before, as numbers with the letter of this revision', async () => {
+    const reviewed = await read(await writeSchedule(project, reviewedOptions('US')))
+    const changes = reviewed.getWorksheet('Revision changes')
+    expect(changes?.getCell('A1').value).toBe('Changes since the first issue')
+    const values = (row: number) => ((changes?.getRow(row).values ?? []) as unknown[]).slice(1)
+    expect(values(6)).toEqual([
+      'ET-1',
+      'HWS',
+      'A',
+      'Precharge',
+      expect.closeTo(12, 9),
+      expect.closeTo(15, 9),
+      'psig',
+      '+25 %',
+    ])
+    expect(values(7).slice(3, 6)).toEqual(['Status', 'Blocked', 'Sized'])
   })
 
   it('is recalculated on opening, with results in place for viewers that do not', () => {

@@ -8,10 +8,13 @@ import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
 import { sentenceCase } from '../words/vessel-words.ts'
 import { writeAssumptions } from './assumptions-sheet.ts'
 import { writeCalculation, type CalculationSheet } from './calculation-sheet.ts'
+import { nameCells } from './cell-names.ts'
+import { writeChanges } from './changes-sheet.ts'
 import { writeCover, type ContentsEntry } from './cover-sheet.ts'
 import { writeFindings } from './findings-sheet.ts'
 import { writeFluidData, type GlycolBase } from './fluid-data-sheet.ts'
 import { cellText } from './plain-text.ts'
+import { writeReadings } from './readings-sheet.ts'
 import { writeScheduleSheet, type VesselCells } from './schedule-sheet.ts'
 import { SharedInputs } from './shared-inputs.ts'
 import { SheetNames } from './sheet-names.ts'
@@ -52,6 +55,8 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
         calculation: vesselCalculation(vessel, result, options.units, fluid.functions),
       }
     })
+  const changes = options.comparison ? names.take('Revision changes') : null
+  const readings = names.take('Readings')
   const assumptions = names.take('Assumptions')
   const findings = names.take('Findings')
   const sources = names.take('Sources')
@@ -65,6 +70,8 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
       sheet: name,
       about: `Calculation of ${vessel.mark}, ${sentenceCase(vessel.kind).toLowerCase()}, ${vessel.serves}`,
     })),
+    ...(changes === null ? [] : [{ sheet: changes, about: 'Results that differ from the issue before this one' }]),
+    { sheet: readings, about: 'What is to be read on site, with cells to write it into' },
     { sheet: assumptions, about: 'Numbered register of the defaults that the results lean on' },
     { sheet: findings, about: 'What the checks found, and what was accepted with a reason' },
     { sheet: sources, about: 'Every publication cited, under the number it is cited by' },
@@ -84,6 +91,9 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
     vessels.set(`${sheet.vessel.system}/${sheet.vessel.mark}`, { sheet: sheet.name, cells })
   }
   for (const { table, name } of schedules) writeScheduleSheet(workbook, name, table, vessels, project, options)
+  if (changes !== null && options.comparison) writeChanges(workbook, changes, result, options, options.comparison)
+  writeReadings(workbook, readings, result, options, vessels)
+  nameCells(workbook, result, vessels)
   writeAssumptions(workbook, assumptions, result, options)
   writeFindings(workbook, findings, result, options)
   writeSources(workbook, sources, result, options)
