@@ -33,13 +33,13 @@ const Head = ({ vessel, units }: { readonly vessel: Vessel; readonly units: Unit
   return (
     <div>
       <p className="text-read">
-        {vessel.serves}. {capital(vessel.kind)}
+        {vessel.serves}: {vessel.kind}
         {vessel.quantity > 1 ? ` × ${vessel.quantity}` : ''}
-        {vessel.construction ? `, ${vessel.construction}` : ''}. {vessel.methodTitle}, method {vessel.method}.
+        {vessel.construction ? `, ${vessel.construction}` : ''}. Method: {vessel.methodTitle}.
       </p>
-      <dl className="mt-3 flex flex-wrap border-y-2 border-ink">
+      <dl className="mt-3 grid grid-cols-2 border-y-2 border-ink desk:flex">
         {shown.map(({ key, name, text }) => (
-          <div key={key} className="min-w-32 flex-1 border-hair px-3 py-2 not-first:border-l first:pl-0">
+          <div key={key} className="flex-1 border-hair py-2 desk:px-3 desk:not-first:border-l desk:first:pl-0">
             <dt className="text-cell text-pencil">{capital(name)}</dt>
             <dd className="figures font-mono text-lead font-semibold whitespace-nowrap">{text}</dd>
           </div>
@@ -130,7 +130,7 @@ const Page = ({
       ) : null}
       {system && hasDrawing ? (
         <section id="pressures" tabIndex={-1} className="scroll-mt-4 break-inside-avoid outline-none">
-          <SectionHeading note={`${system.title}, ${system.fluid}, pump off`}>Pressures</SectionHeading>
+          <SectionHeading note={`${system.title} filled with ${system.fluid}, pump off`}>Pressures</SectionHeading>
           <div className="border-t-2 border-ink pt-3">
             <PressureDrawing system={system} units={units} />
           </div>

@@ -65,10 +65,10 @@ const Manual = ({ manual }: { readonly manual: Verification }) => {
   const { counts } = manual
   const fromMemory = countOf(manual.groups, 'from memory')
   return (
-    <div className="flex max-w-5xl flex-col gap-7">
+    <div className="flex max-w-6xl flex-col gap-7">
       <div className="flex max-w-[80ch] flex-col gap-2 text-read">
         <p>
-          Every published figure that the program knows, computed now by engine {manual.engine}:{' '}
+          Published figures and worked examples, computed now by engine {manual.engine}:{' '}
           <strong>{counts.holds} hold</strong>, <strong>{counts.fails} fail</strong>, and{' '}
           <strong>{counts.knownWrong} are known to be wrong in print</strong>, each with the reason. The tolerance of a
           figure comes from its printed digits.

@@ -1,13 +1,20 @@
 import { displayUnit, formatQuantity, fromSi, unitLabel, type UnitSystem } from '@coldfill/units'
 import type { System } from '#lib/sized-project.ts'
 
+export interface DrawnReading {
+  readonly x: number
+  readonly text: string
+  /** Where the text stands beside its dot, clear of the lines, which lean to the right downwards. */
+  readonly at: { readonly dx: number; readonly dy: number; readonly anchor: 'start' | 'end' }
+}
+
 export interface DrawnPoint {
   readonly label: string
   /** Height above the vessel connection with its unit. */
   readonly height: string
   readonly y: number
-  readonly cold: { readonly x: number; readonly text: string }
-  readonly hot: { readonly x: number; readonly text: string }
+  readonly cold: DrawnReading
+  readonly hot: DrawnReading
 }
 
 export interface PressurePicture {
@@ -17,7 +24,8 @@ export interface PressurePicture {
   readonly field: { readonly left: number; readonly right: number; readonly top: number; readonly bottom: number }
   /** Lowest first. */
   readonly points: readonly DrawnPoint[]
-  readonly relief: { readonly x: number; readonly y: number; readonly text: string } | null
+  /** `named`: where its name stands over the field. */
+  readonly relief: { readonly x: number; readonly y: number; readonly text: string; readonly named: number } | null
   /** Where the gauge reads zero. */
   readonly atmosphere: number
   readonly ticks: readonly { readonly x: number; readonly text: string }[]
@@ -34,9 +42,18 @@ export const niceStep = (span: number): number => {
   return (part <= 1 ? 1 : part <= 2 ? 2 : part <= 5 ? 5 : 10) * power
 }
 
-const LABELS = 104
-const RIGHT = 78
-const TOP = 34
+/** Room that a reading takes beside its dot. */
+const READING = 68
+
+const beside = (x: number, next: number, left: number, isLowest: boolean): DrawnReading['at'] =>
+  next - x < READING && x - left > READING
+    ? { dx: -9, dy: isLowest ? 17 : -7, anchor: 'end' }
+    : { dx: 9, dy: -7, anchor: 'start' }
+
+const HALF_A_NAME = 50
+const LABELS = 96
+const RIGHT = 16
+const TOP = 42
 const BOTTOM = 46
 
 /** The drawing of a system's pressures in px: height upwards, gauge pressure to the right. Null where the system has none. */
@@ -75,14 +92,24 @@ export const pressurePicture = (system: System, units: UnitSystem, width: number
     width,
     height,
     field,
-    points: points.map((point) => ({
-      label: point.label,
-      height: length(point.height),
-      y: y(point.height),
-      cold: { x: x(read(point.cold)), text: gauge(point.cold) },
-      hot: { x: x(read(point.hot)), text: gauge(point.hot) },
-    })),
-    relief: relief && { x: x(read(relief.set)), y: y(relief.height), text: gauge(relief.set) },
+    points: points.map((point, n) => {
+      const cold = x(read(point.cold))
+      const hot = x(read(point.hot))
+      const next = relief && Math.abs(y(relief.height) - y(point.height)) < 24 ? x(read(relief.set)) : Infinity
+      return {
+        label: point.label,
+        height: length(point.height),
+        y: y(point.height),
+        cold: { x: cold, text: gauge(point.cold), at: beside(cold, hot, field.left, n === 0) },
+        hot: { x: hot, text: gauge(point.hot), at: beside(hot, next, cold, n === 0) },
+      }
+    }),
+    relief: relief && {
+      x: x(read(relief.set)),
+      y: y(relief.height),
+      text: `relief ${gauge(relief.set)}`,
+      named: Math.min(x(read(relief.set)), width - HALF_A_NAME),
+    },
     atmosphere: x(0),
     ticks: Array.from({ length: last - first + 1 }, (_, n) => ({
       x: x((first + n) * step),

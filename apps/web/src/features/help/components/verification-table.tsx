@@ -27,15 +27,9 @@ const FigureRow = ({ figure }: { readonly figure: VerificationFigure }) => (
         className={`${cell} pl-0 font-normal ${figure.reason ? 'border-b-0' : ''}`}
         id={`case-${figure.id}`}
       >
-        {figure.title === figure.what ? (
-          figure.title
-        ) : (
-          <>
-            {figure.title}
-            <span className="block text-pencil">{figure.what}</span>
-          </>
-        )}
-        {figure.origin === 'published' ? null : <span className="block text-pencil italic">{figure.origin}</span>}
+        {figure.title}
+        {figure.title === figure.what ? null : <span className="text-pencil">: {figure.what}</span>}
+        {figure.origin === 'published' ? null : <em className="text-pencil"> ({figure.origin})</em>}
       </th>
       <td className={`${cell} figures text-right font-mono ${figure.reason ? 'border-b-0' : ''}`}>
         {figure.expected || '—'}
@@ -49,8 +43,8 @@ const FigureRow = ({ figure }: { readonly figure: VerificationFigure }) => (
       <td className={`${cell} ${figure.reason ? 'border-b-0' : ''}`}>
         {figure.deviation === null ? null : (
           <>
-            <span className="figures whitespace-nowrap">{toleranceWords(figure.tolerance)}</span>
-            <span className="block text-pencil">{figure.because}</span>
+            <span className="figures whitespace-nowrap">{toleranceWords(figure.tolerance)}</span>{' '}
+            <span className="text-pencil">{figure.because}</span>
           </>
         )}
       </td>
@@ -61,7 +55,7 @@ const FigureRow = ({ figure }: { readonly figure: VerificationFigure }) => (
     {figure.reason ? (
       <tr>
         <td colSpan={6} className="border-b border-hair px-0 pb-2">
-          <p className="max-w-[90ch] border-l-[3px] border-l-steel bg-steel-wash px-3 py-1">
+          <p className="max-w-[90ch] max-desk:sticky max-desk:left-0 max-desk:w-[calc(100vw-2rem)] border-l-[3px] border-l-steel bg-steel-wash px-3 py-1">
             <span className="font-semibold">Why the printed figure is wrong.</span> {figure.reason}
           </p>
         </td>
@@ -73,14 +67,14 @@ const FigureRow = ({ figure }: { readonly figure: VerificationFigure }) => (
 /** The manual as one table, so that columns align from source to source. */
 export const VerificationTable = ({ groups }: { readonly groups: Verification['groups'] }) => (
   <div className="max-w-full overflow-x-auto print:overflow-visible">
-    <table className="w-full min-w-180 table-fixed border-t-[3px] border-ink text-cell">
+    <table className="w-full min-w-220 table-fixed border-t-[3px] border-ink text-cell">
       <caption className="sr-only">Figures of publications, and what the program computes</caption>
       <colgroup>
         <col />
         <col className="w-28" />
         <col className="w-28" />
         <col className="w-22" />
-        <col className="w-44" />
+        <col className="w-62" />
         <col className="w-29" />
       </colgroup>
       <thead>
@@ -109,7 +103,9 @@ export const VerificationTable = ({ groups }: { readonly groups: Verification['g
         <tbody key={`${group.part} ${group.source}`}>
           <tr>
             <th scope="rowgroup" colSpan={6} className="border-b border-ink pt-5 pb-1 text-body">
-              {group.source}
+              <span className="block max-desk:sticky max-desk:left-0 max-desk:w-[calc(100vw-2rem)]">
+                {group.source}
+              </span>
             </th>
           </tr>
           {group.figures.map((figure) => (

@@ -1,5 +1,5 @@
 import type { CatalogueVessel } from '@coldfill/contract'
-import { formatValue, unitLabel, type Kind, type UnitSystem } from '@coldfill/units'
+import { displayUnit, fromSi, unitLabel, type Kind, type UnitSystem } from '@coldfill/units'
 import { Cell, HeadCell, RowHead, RuledTable } from '#components/ui/ruled-table.tsx'
 import { capital } from '#lib/format.ts'
 
@@ -10,11 +10,22 @@ const numbers = [
   { key: 'maxTemperature', heading: 'Max. temp.', kind: 'temperature' },
 ] as const satisfies readonly { key: keyof CatalogueVessel; heading: string; kind: Kind }[]
 
-const sizes = [
-  { key: 'diameter', heading: 'Diameter', kind: 'diameter' },
-  { key: 'height', heading: 'Height', kind: 'diameter' },
-  { key: 'weightEmpty', heading: 'Weight', kind: 'mass' },
-] as const satisfies readonly { key: keyof CatalogueVessel; heading: string; kind: Kind }[]
+type Column = (typeof numbers)[number] | typeof weight
+const weight = { key: 'weightEmpty', heading: 'Weight', kind: 'mass' } as const
+
+/** One decimal where a number of the column needs it, so that points align. */
+const shownIn = (rows: readonly CatalogueVessel[], { key, kind }: Column, units: UnitSystem) => {
+  const unit = displayUnit(kind, units)
+  const read = (row: CatalogueVessel): number | null => (row[key] === null ? null : fromSi(row[key], unit))
+  const isWhole = rows.every((row) => Math.abs((read(row) ?? 0) - Math.round(read(row) ?? 0)) < 0.05)
+  return (row: CatalogueVessel): string | null => read(row)?.toFixed(isWhole ? 0 : 1) ?? null
+}
+
+const outside = ({ diameter, height }: CatalogueVessel, units: UnitSystem): string | null => {
+  const said = (value: number | null) =>
+    value === null ? '?' : String(Number(fromSi(value, displayUnit('diameter', units)).toFixed(units === 'US' ? 1 : 0)))
+  return diameter === null && height === null ? null : `${said(diameter)} × ${said(height)}`
+}
 
 /** Most rows that are drawn; more are in the file. */
 const MOST = 500
@@ -27,26 +38,24 @@ export const CatalogueTable = ({
   readonly rows: readonly CatalogueVessel[]
   readonly units: UnitSystem
 }) => {
-  const number = (row: CatalogueVessel, { key, kind }: (typeof numbers)[number] | (typeof sizes)[number]) => {
-    const value = row[key]
-    return (
-      <Cell key={key} figures className="font-mono">
-        {value === null ? <span className="text-pencil">—</span> : formatValue({ kind, value }, units)}
-      </Cell>
-    )
-  }
-  const heads = (columns: typeof numbers | typeof sizes) =>
-    columns.map(({ key, heading, kind }) => (
-      <HeadCell key={key} figures>
-        {heading}
-        <span className="block font-mono text-zone font-medium text-pencil">{unitLabel(kind, units)}</span>
-      </HeadCell>
-    ))
+  const all: readonly Column[] = [...numbers, weight]
+  const texts = new Map(all.map((column) => [column.key, shownIn(rows, column, units)]))
+  const number = (row: CatalogueVessel, { key }: Column) => (
+    <Cell key={key} figures className="font-mono">
+      {texts.get(key)?.(row) ?? <span className="text-pencil">—</span>}
+    </Cell>
+  )
+  const head = (key: string, heading: string, kind: Kind) => (
+    <HeadCell key={key} figures>
+      <span className={key === 'outside' ? 'whitespace-nowrap' : ''}>{heading}</span>
+      <span className="block font-mono text-zone font-medium text-pencil">{unitLabel(kind, units)}</span>
+    </HeadCell>
+  )
   return (
     <>
       <RuledTable
         caption="Vessels of the catalogue"
-        className="min-w-280"
+        className="min-w-240"
         head={
           <tr>
             <HeadCell figures className="w-10">
@@ -54,12 +63,12 @@ export const CatalogueTable = ({
             </HeadCell>
             <HeadCell>Maker and model</HeadCell>
             <HeadCell>Kind</HeadCell>
-            <HeadCell>Type</HeadCell>
-            {heads(numbers)}
+            {numbers.map(({ key, heading, kind }) => head(key, heading, kind))}
             <HeadCell>Potable</HeadCell>
             <HeadCell>Stamp</HeadCell>
             <HeadCell>Mounting</HeadCell>
-            {heads(sizes)}
+            {head('outside', 'Dia. × height', 'diameter')}
+            {head(weight.key, weight.heading, weight.kind)}
             <HeadCell>Connection</HeadCell>
           </tr>
         }
@@ -70,16 +79,26 @@ export const CatalogueTable = ({
               {row.line}
             </Cell>
             <RowHead className="font-normal">
-              {row.maker} <span className="font-semibold whitespace-nowrap">{row.model}</span>
+              <span className="desk:whitespace-nowrap">{row.maker}</span>{' '}
+              <span className="block font-semibold">{row.model}</span>
             </RowHead>
-            <Cell>{capital(row.kinds.join(', '))}</Cell>
-            <Cell>{capital(row.construction ?? '—')}</Cell>
+            <Cell>
+              {row.kinds.map((kind) => (
+                <span key={kind} className="block">
+                  {capital(kind)}
+                </span>
+              ))}
+              {row.construction === null ? null : <span className="block text-pencil">{row.construction}</span>}
+            </Cell>
             {numbers.map((column) => number(row, column))}
             <Cell>{row.potable ? 'Yes' : 'No'}</Cell>
             <Cell>{row.stamped ? 'Yes' : 'No'}</Cell>
             <Cell className="whitespace-nowrap">{capital(row.mounting ?? '—')}</Cell>
-            {sizes.map((column) => number(row, column))}
-            <Cell>{row.connection ?? '—'}</Cell>
+            <Cell figures className="font-mono whitespace-nowrap">
+              {outside(row, units) ?? <span className="text-pencil">—</span>}
+            </Cell>
+            {number(row, weight)}
+            <Cell className="whitespace-nowrap">{row.connection ?? '—'}</Cell>
           </tr>
         ))}
       </RuledTable>

@@ -19,9 +19,9 @@ const Dot = ({ point, which }: { readonly point: DrawnPoint; readonly which: 'co
       className={which === 'hot' ? 'fill-ink stroke-ink' : 'fill-sheet stroke-ink'}
     />
     <text
-      x={point[which].x + (which === 'hot' ? 9 : -9)}
-      y={point.y - 7}
-      textAnchor={which === 'hot' ? 'start' : 'end'}
+      x={point[which].x + point[which].at.dx}
+      y={point.y + point[which].at.dy}
+      textAnchor={point[which].at.anchor}
       className="figures fill-ink stroke-sheet"
       {...halo}
     >
@@ -108,7 +108,7 @@ export const PressureDrawing = ({ system, units }: { readonly system: System; re
           />
           <text
             x={picture.atmosphere}
-            y={picture.field.top - 20}
+            y={picture.field.top - 22}
             textAnchor={picture.atmosphere < picture.field.left + 30 ? 'start' : 'middle'}
             className="fill-pencil"
           >
@@ -159,14 +159,11 @@ export const PressureDrawing = ({ system, units }: { readonly system: System; re
                 strokeWidth="2"
                 strokeLinejoin="round"
               />
-              <text x={picture.relief.x + 12} y={picture.relief.y + 18} className="fill-ink stroke-sheet" {...halo}>
-                relief
-              </text>
               <text
-                x={picture.relief.x + 12}
-                y={picture.relief.y + 33}
-                className="figures fill-ink stroke-sheet"
-                {...halo}
+                x={picture.relief.named}
+                y={picture.field.top - 22}
+                textAnchor="middle"
+                className="figures fill-ink font-semibold"
               >
                 {picture.relief.text}
               </text>

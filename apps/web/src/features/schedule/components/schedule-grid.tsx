@@ -32,7 +32,7 @@ const wordWidths: Readonly<Record<string, string>> = {
   fluid: 'min-w-28',
   construction: 'min-w-20',
   method: 'min-w-24',
-  'selected-vessel': 'min-w-36',
+  'selected-vessel': 'min-w-44',
   assumptions: 'min-w-28',
   notes: 'min-w-12',
 }

@@ -81,9 +81,7 @@ export const Step = ({
   const drawn = useMemo(() => drawStep(step, context.all, context.units), [step, context])
   const source = citationWords(step.source, context.result.sources)
   return (
-    <div
-      className={chosen ? 'border-t-[3px] border-ink pt-2' : `border-b border-hair ${named ? 'py-2' : 'pt-0.5 pb-2'}`}
-    >
+    <div className={chosen ? 'border-t-[3px] border-ink pt-2' : named ? 'border-b border-hair py-2' : 'pt-0.5 pb-2'}>
       {chosen || !named ? null : <p className="text-cell font-semibold">{capital(step.name)}</p>}
       {drawn ? (
         <>

@@ -41,7 +41,7 @@ export const WholeTrace = ({ vessel, context }: { readonly vessel: Vessel; reado
                   key={run.step.id}
                   id={run.step.id}
                   tabIndex={-1}
-                  className={`scroll-mt-4 ${beneath.has(run.step.id) ? marked : unmarked}`}
+                  className={`scroll-mt-4 border-b border-b-hair ${beneath.has(run.step.id) ? marked : unmarked}`}
                 >
                   <button
                     type="button"
