@@ -107,3 +107,15 @@ describe('fixAll', () => {
     expect(mended).toHaveLength(2)
   })
 })
+
+describe('a fix that does not mend', () => {
+  // Each put in one more colon for ever.
+  it.each([
+    ['two colons behind a key', ['temperature-band: 20 °F', 'temperature-band:: 20 °F']],
+    ['a sign that begins a folded text', ['selection: auto', '>']],
+  ] as const)('%s', (_, pair) => {
+    const { text, mended } = mend(seeded(pair), find, errors)
+    expect(text.length - baseSpec.length).toBeLessThan(10)
+    expect(mended.length).toBeLessThan(6)
+  })
+})

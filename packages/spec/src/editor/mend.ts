@@ -23,6 +23,33 @@ export const sureFix = (finding: Finding): Fix | undefined => finding.fixes.find
 
 const MOST_PASSES = 100
 
+/** A finding that comes back to its line so often is not mended by its fix. */
+const MOST_TRIES = 3
+
+const placeOf = ({ code, range }: Finding): string => `${code} ${range.start.line}`
+
+interface Taken {
+  readonly finding: Finding
+  readonly fix: Fix
+}
+
+/** The sure fixes that can be made together, in the order of the findings. */
+const fixesOf = (text: string, findings: readonly Finding[]): readonly Taken[] => {
+  const all = findings.flatMap((finding) => {
+    const fix = sureFix(finding)
+    return fix ? [{ finding, fix }] : []
+  })
+  const together = canStandTogether(
+    text,
+    all.flatMap(({ fix }) => fix.edits),
+  )
+  if (together) return all
+  const taken: Taken[] = []
+  for (const each of all)
+    if (canStandTogether(text, [...taken.flatMap(({ fix }) => fix.edits), ...each.fix.edits])) taken.push(each)
+  return taken
+}
+
 /**
  * Makes the first sure fix of each finding that is wanted, and reads the text again, until nothing changes. Fixes that touch
  * each other wait for the next reading.
@@ -34,15 +61,13 @@ export const mend = (
 ): Mending => {
   const mended: MendedFinding[] = []
   const seen = new Set([text])
+  const tries = new Map<string, number>()
   let now = text
   for (let pass = 0; pass < MOST_PASSES; pass++) {
     const open = findingsOf(now).filter(wanted)
-    const taken: { finding: Finding; fix: Fix }[] = []
-    for (const finding of open) {
-      const fix = sureFix(finding)
-      const edits = taken.flatMap((each) => each.fix.edits)
-      if (fix && canStandTogether(now, [...edits, ...fix.edits])) taken.push({ finding, fix })
-    }
+    const taken = fixesOf(now, open).filter(({ finding }) => (tries.get(placeOf(finding)) ?? 0) < MOST_TRIES)
+    for (const place of new Set(taken.map(({ finding }) => placeOf(finding))))
+      tries.set(place, (tries.get(place) ?? 0) + 1)
     const next = applyEdits(
       now,
       taken.flatMap(({ fix }) => fix.edits),

@@ -127,3 +127,8 @@ describe('formatSpec', () => {
     )
   })
 })
+
+it('leaves a text alone that would not come to rest', () => {
+  const text = 'coldfill: 1\nproject:\n  number: BR-7. name }\n  : Bramble Row\n  units:   US\n'
+  expect(formatSpec(formatSpec(text))).toBe(formatSpec(text))
+})

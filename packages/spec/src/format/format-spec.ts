@@ -1,4 +1,4 @@
-import { lineStart } from '../parse/line-index.ts'
+import { type LineIndex, lineStart } from '../parse/line-index.ts'
 import { parseSpec } from '../parse/parse-spec.ts'
 import type { SourceMap, SourceNode } from '../parse/source-tree.ts'
 import { spaceLine } from './space-line.ts'
@@ -76,13 +76,11 @@ const sameNode = (a: SourceNode | null, b: SourceNode | null): boolean => {
   )
 }
 
-/**
- * Tidies indentation and spacing, and nothing else: keys keep their order, texts their quotes, comments and blank lines their
- * place, long lines their length. Formatting a formatted text changes nothing. A text that cannot be read stays as it is.
- */
-export const formatSpec = (text: string): string => {
-  const { tree, lineIndex } = parseSpec(text)
-  if (!tree) return text
+/** The text laid out by its tree. */
+const layOut = (
+  text: string,
+  { tree, lineIndex }: { readonly tree: SourceMap; readonly lineIndex: LineIndex },
+): string => {
   const placed = placeLines(text, tree, (offset) => lineIndex.position(offset).line)
   const ending = text.includes('\r\n') ? '\r\n' : '\n'
   const lines = text.split(/\r?\n/u)
@@ -106,7 +104,20 @@ export const formatSpec = (text: string): string => {
     const shift = anchor === above && column === above.was ? above.column - above.was : anchor.column - anchor.was
     return ' '.repeat(Math.max(0, column + shift)) + line.trim()
   })
-  const formatted = laidOut.join(ending)
-  const again = parseSpec(formatted).tree
-  return sameNode(tree, again) ? formatted : text
+  return laidOut.join(ending)
+}
+
+/**
+ * Tidies indentation and spacing, and nothing else: keys keep their order, texts their quotes, comments and blank lines their
+ * place, long lines their length. Formatting a formatted text changes nothing. A text that cannot be read stays as it is, and
+ * so does one that would not say the same or would not come to rest.
+ */
+export const formatSpec = (text: string): string => {
+  const { tree, lineIndex } = parseSpec(text)
+  if (!tree) return text
+  const formatted = layOut(text, { tree, lineIndex })
+  if (formatted === text) return text
+  const again = parseSpec(formatted)
+  if (!again.tree || !sameNode(tree, again.tree)) return text
+  return layOut(formatted, { tree: again.tree, lineIndex: again.lineIndex }) === formatted ? formatted : text
 }

@@ -41,15 +41,17 @@ const missingColon = (report: Report, text: string, line: Span): void => {
   const source = text.slice(line.start, line.end)
   const tight = tightColon(source)
   if (tight) return reportTightColon(report, '', line.start, tight)
-  const key = /^[\p{L}][\p{L}-]*/u.exec(source)?.[0] ?? source
-  const end = line.start + key.length
+  const key = /^[\p{L}][\p{L}-]*/u.exec(source)?.[0]
+  const end = line.start + (key?.length ?? 0)
+  // Where no word stands, or a colon stands behind it already, something else is wrong.
+  const lacks = key !== undefined && !/^\s*:/u.test(source.slice(key.length))
   report.add(
     'CF-Y003',
     { path: '', span: line },
     {
       message: `This line is no key with a value: the colon behind the key is missing.`,
-      hint: `Write \`${key}:${source.slice(key.length)}\`.`,
-      fixes: [{ title: 'Put in the colon', span: { start: end, end }, text: ':' }],
+      hint: lacks ? `Write \`${key}:${source.slice(key.length)}\`.` : 'Write a key, a colon, a space and the value.',
+      fixes: lacks ? [{ title: 'Put in the colon', span: { start: end, end }, text: ':' }] : [],
     },
   )
 }
