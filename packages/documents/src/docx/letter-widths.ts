@@ -26,16 +26,20 @@ const OTHER: Readonly<Record<string, number>> = {
   '…': 1000,
 }
 
-const widthOf = (character: string, widths: readonly number[]): number => {
-  const code = character.codePointAt(0) ?? 0
-  // Accented letters are as wide as their plain ones at most; whatever else comes is given a whole em.
-  return widths[code - 32] ?? OTHER[character] ?? (code < 0x250 ? 778 : 1000)
-}
+/** Width of a character that no table has: an accented letter is as wide as its plain one at most, others get a whole em. */
+const otherWidth = (character: string): number =>
+  OTHER[character] ?? ((character.codePointAt(0) ?? 0) < 0x250 ? 778 : 1000)
 
 /** Width of a text on one line, in ems of the body family. */
 export const lineWidth = (text: string, bold = false): number => {
   const widths = bold ? BOLD : REGULAR
-  return Array.from(text).reduce((sum, character) => sum + widthOf(character, widths), 0) / 1000
+  let sum = 0
+  for (let at = 0; at < text.length; at += 1) {
+    const code = text.charCodeAt(at)
+    // The second half of a pair adds nothing to the first.
+    if (code < 0xdc00 || code > 0xdfff) sum += widths[code - 32] ?? otherWidth(text.charAt(at))
+  }
+  return sum / 1000
 }
 
 /** A word longer than this may be broken behind its hyphens and slashes. */

@@ -1,7 +1,7 @@
 import type { Fluid } from '@coldfill/engine'
 import { layout, toPlainText } from '@coldfill/formula'
 import type { ProjectResult } from '@coldfill/sizing'
-import type { Cell, Workbook } from 'exceljs'
+import type { Workbook } from 'exceljs'
 import { methodChecks } from '../calculation/method-checks.ts'
 import type { StepLine, VesselCalculation } from '../calculation/vessel-calculation.ts'
 import type { DocumentOptions } from '../document-options.ts'
@@ -11,19 +11,20 @@ import { emitFormula } from './emit-formula.ts'
 import type { FluidCells } from './fluid-data-sheet.ts'
 import { FluidCalls } from './fluid-calls.ts'
 import type { SharedInputs } from './shared-inputs.ts'
-import { putCell, type CellContent } from './put-cell.ts'
+import type { CellContent } from './put-cell.ts'
 import {
   addSheet,
-  fitHeight,
   font,
   HEAD_BORDERS,
   line,
   ROW_BORDERS,
+  rowHeight,
   SHEET_FILL,
   WELL_FILL,
   wrapped,
-  writeTitle,
+  writeTitleRows,
 } from './sheet.ts'
+import { SheetXml, type CellLook, type Palette } from './sheet-xml.ts'
 import { inputFormat, significantFormat, stepFormat } from './number-format.ts'
 
 type Vessel = ProjectResult['vessels'][number]
@@ -51,7 +52,38 @@ export interface CalculationSheet {
 const symbolText = (symbol: string): string =>
   toPlainText(layout({ type: 'symbol', name: symbol, at: { start: 0, end: 0 } }))
 
-/** Writes the calculation of one vessel; returns the address of each value by the id of its trace entry. */
+const TEXT: CellLook = { font: font(9), border: ROW_BORDERS, alignment: wrapped() }
+const VALUE: CellLook = { ...TEXT, alignment: wrapped('right') }
+const STRONG: CellLook = { ...TEXT, font: font(9, { bold: true }) }
+const STRONG_VALUE: CellLook = { ...VALUE, font: font(9, { bold: true }) }
+/** An input a reader may change. */
+const EDGE = line(RULE)
+const ENTRY: CellLook = {
+  ...VALUE,
+  border: { top: EDGE, bottom: EDGE, left: EDGE, right: EDGE },
+  fill: SHEET_FILL,
+}
+const HEADING: CellLook = {
+  font: font(9, { bold: true }, PENCIL),
+  border: { bottom: line(INK) },
+  alignment: { vertical: 'bottom' },
+}
+const HEAD: CellLook = {
+  font: font(9, { bold: true }),
+  fill: WELL_FILL,
+  border: HEAD_BORDERS,
+  alignment: wrapped('left', 'bottom'),
+}
+const HEAD_VALUE: CellLook = { ...HEAD, alignment: wrapped('right', 'bottom') }
+
+export interface WrittenCalculation {
+  readonly cells: EntryCells
+  /** The rows of its sheet, as text of the file in UTF-8: outside the heap and a byte a letter. */
+  readonly rows: Uint8Array
+  readonly range: string
+}
+
+/** Writes the calculation of one vessel; says the address of each value by the id of its trace entry. */
 export const writeCalculation = (
   workbook: Workbook,
   { name, vessel, calculation, fluid }: CalculationSheet,
@@ -59,47 +91,41 @@ export const writeCalculation = (
   options: DocumentOptions,
   fluidCells: FluidCells,
   inputs: SharedInputs,
-): EntryCells => {
+  palette: Palette,
+): WrittenCalculation => {
   const sheet = addSheet(workbook, name, project, options, { orientation: 'landscape', widths: WIDTHS })
   const purpose =
     vessel.status === 'sized'
       ? `${vessel.methodTitle}. Outlined values are inputs: change one and the sheet follows.`
       : `No size: ${vessel.reason ?? ''}`
-  const first = writeTitle(sheet, `${vessel.mark}  ${sentenceCase(vessel.kind)}, ${vessel.serves}`, purpose, options)
+  const xml = new SheetXml(palette)
+  const first = writeTitleRows(xml, `${vessel.mark}  ${sentenceCase(vessel.kind)}, ${vessel.serves}`, purpose, options)
   const answers = new Set(Object.values(vessel.results).map((result) => result.entry))
 
-  const row = (at: number, contents: readonly CellContent[]) => {
-    contents.forEach((content, index) => {
-      const cell = sheet.getCell(at, index + 1)
-      putCell(cell, content)
-      cell.font = font(9)
-      cell.border = ROW_BORDERS
-      cell.alignment = wrapped(index === 2 ? 'right' : 'left')
-    })
-    fitHeight(
-      sheet.getRow(at),
-      contents.map((content) => ('text' in content ? content.text : '')),
-      WIDTHS,
-      9,
+  const row = (at: number, contents: readonly CellContent[], strong = false, entry = false) => {
+    const texts = contents.map((content) => ('text' in content ? content.text : ''))
+    xml.row(
+      at,
+      rowHeight(texts, WIDTHS, 9),
+      contents.map((content, index) => ({
+        content,
+        look: index === 2 ? (entry ? ENTRY : strong ? STRONG_VALUE : VALUE) : strong && index < 4 ? STRONG : TEXT,
+      })),
     )
   }
   const heading = (at: number, text: string) => {
-    const cell = sheet.getCell(at, 1)
-    putCell(cell, { text })
-    cell.font = font(9, { bold: true }, PENCIL)
-    for (let column = 1; column <= COLUMNS.length; column += 1) sheet.getCell(at, column).border = { bottom: line(INK) }
-    sheet.getRow(at).height = 20
-    cell.alignment = { vertical: 'bottom' }
+    xml.row(
+      at,
+      20,
+      COLUMNS.map((_, index) => ({ content: { text: index === 0 ? text : '' }, look: HEADING })),
+    )
   }
 
-  COLUMNS.forEach((column, index) => {
-    const cell = sheet.getCell(first, index + 1)
-    putCell(cell, { text: column.heading })
-    cell.font = font(9, { bold: true })
-    cell.fill = WELL_FILL
-    cell.border = HEAD_BORDERS
-    cell.alignment = wrapped(index === 2 ? 'right' : 'left', 'bottom')
-  })
+  xml.row(
+    first,
+    null,
+    COLUMNS.map((column, index) => ({ content: { text: column.heading }, look: index === 2 ? HEAD_VALUE : HEAD })),
+  )
 
   // Rows are numbered before they are written: a fluid property stands below the steps that use it.
   const rowOf = new Map<string, number>()
@@ -135,7 +161,8 @@ export const writeCalculation = (
           : shared
             ? { formula: shared.from(name), result: current.value, format: 'General' }
             : { number: current.value, format: inputFormat(current.value) }
-      row(at, [
+      const entry = current.is === 'input' && !shared
+      const contents = [
         { text: symbolText(current.symbol) },
         { text: sentenceCase(current.name) },
         value,
@@ -144,14 +171,9 @@ export const writeCalculation = (
         {
           text: current.is === 'input' && current.authored ? `${current.source} (${current.authored})` : current.source,
         },
-      ])
-      if (current.is === 'input' && !shared) {
-        outline(sheet.getCell(at, 3))
-        inputs.add(current, name, `$C$${at}`)
-      }
-      if (answers.has(current.id)) {
-        for (const column of [1, 2, 3, 4]) sheet.getCell(at, column).font = font(9, { bold: true })
-      }
+      ]
+      row(at, contents, answers.has(current.id), entry)
+      if (current.is === 'input' && entry) inputs.add(current, name, `$C$${at}`)
       cells.set(current.id, `$C$${at}`)
       at += 1
     }
@@ -192,12 +214,5 @@ export const writeCalculation = (
   sheet.views = [{ state: 'frozen', xSplit: 0, ySplit: first, showGridLines: false, zoomScale: 100, activeCell: 'A1' }]
   sheet.pageSetup.printTitlesRow = `${first}:${first}`
   sheet.pageSetup.printArea = `A1:F${at - 1}`
-  return cells
-}
-
-/** An input a reader may change. */
-const outline = (cell: Cell): void => {
-  const edge = line(RULE)
-  cell.border = { top: edge, bottom: edge, left: edge, right: edge }
-  cell.fill = SHEET_FILL
+  return { cells, rows: new TextEncoder().encode(xml.take()), range: `A1:F${at - 1}` }
 }

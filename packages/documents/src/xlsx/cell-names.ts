@@ -1,5 +1,4 @@
 import type { ProjectResult } from '@coldfill/sizing'
-import type { Workbook } from 'exceljs'
 import { sheetReference } from './put-cell.ts'
 import type { VesselCells } from './schedule-sheet.ts'
 
@@ -23,12 +22,15 @@ export const cellName = (...parts: readonly string[]): string => {
   return name === '' || /^\d/.test(name) || isAddress(name) ? `_${name}` : name
 }
 
-/** Names the cells of all inputs and results by mark and key; where two systems use one mark, by system too. */
-export const nameCells = (
-  workbook: Workbook,
+/**
+ * Names of the cells of all inputs and results by mark and key, with the addresses they stand for; where two systems use one
+ * mark, by system too.
+ */
+export const namedCells = (
   result: ProjectResult,
   vessels: ReadonlyMap<string, VesselCells>,
-): void => {
+): ReadonlyMap<string, string> => {
+  const names = new Map<string, string>()
   const taken = new Set<string>()
   const marks = new Map<string, number>()
   for (const { mark } of result.vessels) marks.set(plain(mark), (marks.get(plain(mark)) ?? 0) + 1)
@@ -49,7 +51,18 @@ export const nameCells = (
       const name = cellName(...owner, key)
       if (address === undefined || taken.has(name.toLowerCase())) continue
       taken.add(name.toLowerCase())
-      workbook.definedNames.add(`${sheetReference(found.sheet)}!${address}`, name)
+      names.set(name, `${sheetReference(found.sheet)}!${address}`)
     }
   }
+  return names
+}
+
+/** The workbook part with these names added. Names and addresses hold nothing that has to be escaped but the quotes of sheets. */
+export const withNames = (workbookXml: string, names: ReadonlyMap<string, string>): string => {
+  const added = [...names]
+    .map(([name, address]) => `<definedName name="${name}">${address.replaceAll("'", '&apos;')}</definedName>`)
+    .join('')
+  return workbookXml.includes('</definedNames>')
+    ? workbookXml.replace('</definedNames>', () => `${added}</definedNames>`)
+    : workbookXml.replace('</sheets>', () => `</sheets>${added === '' ? '' : `<definedNames>${added}</definedNames>`}`)
 }

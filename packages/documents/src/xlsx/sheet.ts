@@ -4,6 +4,7 @@ import { lineWidth } from '../docx/letter-widths.ts'
 import { paperOf } from '../paper.ts'
 import { BODY_FONT, HAIR, INK, OCHRE, PENCIL, SHEET, WELL } from '../look.ts'
 import { putCell } from './put-cell.ts'
+import type { CellLook, SheetXml } from './sheet-xml.ts'
 
 const argb = (rgb: string) => ({ argb: `FF${rgb}` })
 
@@ -99,6 +100,19 @@ export const writeTitle = (sheet: Worksheet, title: string, purpose: string, opt
   return 5
 }
 
+const TITLE_LOOK: CellLook = { font: font(16, { bold: true }) }
+const PURPOSE_LOOK: CellLook = { font: font(9, {}, PENCIL) }
+const WARNING_LOOK: CellLook = { font: font(9, { bold: true }, OCHRE) }
+
+/** The same title for a sheet that is written as text. */
+export const writeTitleRows = (xml: SheetXml, title: string, purpose: string, options: DocumentOptions): number => {
+  const warning = draftWarning(options.titleBlock)
+  xml.row(1, 24, [{ content: { text: title }, look: TITLE_LOOK }])
+  xml.row(2, null, [{ content: { text: purpose }, look: PURPOSE_LOOK }])
+  if (warning !== null) xml.row(3, null, [{ content: { text: warning }, look: WARNING_LOOK }])
+  return 5
+}
+
 /** Points of a character by which the widths of columns are counted, and of the indent and edges of a cell. */
 export const CHARACTER = 5.25
 export const CELL_EDGES = 10.75
@@ -127,7 +141,11 @@ const lines = (text: string, width: number, size: number): number => {
 }
 
 /** Height of a row in points from the texts of its wrapped cells. */
-export const fitHeight = (row: Row, texts: readonly string[], widths: readonly number[], size: number): void => {
+export const rowHeight = (texts: readonly string[], widths: readonly number[], size: number): number => {
   const most = texts.reduce((height, text, index) => Math.max(height, lines(text, widths[index] ?? 10, size)), 1)
-  row.height = Math.max(15, most * (size * 1.28) + 4)
+  return Math.max(15, most * (size * 1.28) + 4)
+}
+
+export const fitHeight = (row: Row, texts: readonly string[], widths: readonly number[], size: number): void => {
+  row.height = rowHeight(texts, widths, size)
 }

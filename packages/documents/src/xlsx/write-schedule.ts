@@ -1,14 +1,14 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import ExcelJS from 'exceljs'
-import { fixedArchive } from '../archive/fixed-archive.ts'
+import { fixedArchive, partText } from '../archive/fixed-archive.ts'
 import { fluidOf } from '../calculation/fluid-of.ts'
 import { vesselCalculation } from '../calculation/vessel-calculation.ts'
 import { dateOf, revisionWords, type DocumentOptions } from '../document-options.ts'
 import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
 import { sentenceCase } from '../words/vessel-words.ts'
 import { writeAssumptions } from './assumptions-sheet.ts'
-import { writeCalculation, type CalculationSheet } from './calculation-sheet.ts'
-import { nameCells } from './cell-names.ts'
+import { writeCalculation, type WrittenCalculation } from './calculation-sheet.ts'
+import { namedCells, withNames } from './cell-names.ts'
 import { writeChanges } from './changes-sheet.ts'
 import { writeCover, type ContentsEntry } from './cover-sheet.ts'
 import { writeFindings } from './findings-sheet.ts'
@@ -17,6 +17,7 @@ import { cellText } from './plain-text.ts'
 import { writeReadings } from './readings-sheet.ts'
 import { writeScheduleSheet, type VesselCells } from './schedule-sheet.ts'
 import { SharedInputs } from './shared-inputs.ts'
+import { Palette, paletteNumbers, withRows } from './sheet-xml.ts'
 import { SheetNames } from './sheet-names.ts'
 import { writeSources } from './sources-sheet.ts'
 
@@ -46,15 +47,7 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   })
   const calculations = result.vessels
     .filter((vessel) => vessel.trace.length > 0)
-    .map((vessel): CalculationSheet => {
-      const fluid = fluidOf(vessel)
-      return {
-        name: names.take(vessel.mark),
-        vessel,
-        fluid,
-        calculation: vesselCalculation(vessel, result, options.units, fluid.functions),
-      }
-    })
+    .map((vessel) => ({ name: names.take(vessel.mark), vessel }))
   const changes = options.comparison ? names.take('Revision changes') : null
   const readings = names.take('Readings')
   const assumptions = names.take('Assumptions')
@@ -81,25 +74,58 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   // Sheets stand in the order in which a reader turns to them, but each can only be written when what it refers to is.
   writeCover(workbook, cover, result, options, contents)
   const bases = [
-    ...new Set(calculations.flatMap(({ fluid }) => (fluid.massFraction > 0 ? [fluid.base as GlycolBase] : []))),
+    ...new Set(
+      calculations.flatMap(({ vessel: { solution } }) =>
+        solution.base !== 'water' && solution.massFraction > 0 ? [solution.base as GlycolBase] : [],
+      ),
+    ),
   ]
   const fluidCells = writeFluidData(workbook, fluidData, project, options, bases)
   const inputs = new SharedInputs()
   const vessels = new Map<string, VesselCells>()
-  for (const sheet of calculations) {
-    const cells = writeCalculation(workbook, sheet, project, options, fluidCells, inputs)
-    vessels.set(`${sheet.vessel.system}/${sheet.vessel.mark}`, { sheet: sheet.name, cells })
+  const palette = new Palette()
+  const written = new Map<string, WrittenCalculation>()
+  for (const { name, vessel } of calculations) {
+    // One calculation is in memory at a time; of each only the rows of its sheet are kept.
+    const fluid = fluidOf(vessel)
+    const calculation = vesselCalculation(vessel, result, options.units, fluid.functions)
+    const sheet = writeCalculation(
+      workbook,
+      { name, vessel, fluid, calculation },
+      project,
+      options,
+      fluidCells,
+      inputs,
+      palette,
+    )
+    written.set(name, sheet)
+    vessels.set(`${vessel.system}/${vessel.mark}`, { sheet: name, cells: sheet.cells })
   }
   for (const { table, name } of schedules) writeScheduleSheet(workbook, name, table, vessels, project, options)
   if (changes !== null && options.comparison) writeChanges(workbook, changes, result, options, options.comparison)
   writeReadings(workbook, readings, result, options, vessels)
-  nameCells(workbook, result, vessels)
+  const cellNames = namedCells(result, vessels)
   writeAssumptions(workbook, assumptions, result, options)
   writeFindings(workbook, findings, result, options)
   writeSources(workbook, sources, result, options)
   inOrder(workbook, [cover, ...contents.map((entry) => entry.sheet)])
 
-  return fixedArchive(new Uint8Array(await workbook.xlsx.writeBuffer(STORED)))
+  const [sample] = calculations
+  const sampleSheet = sample && workbook.getWorksheet(sample.name)
+  if (sampleSheet) palette.writeInto(sampleSheet)
+  // The library names the part of a sheet by its id.
+  const partOf = new Map(workbook.worksheets.map(({ id, name }) => [`xl/worksheets/sheet${id}.xml`, name]))
+  const bytes = new Uint8Array(await workbook.xlsx.writeBuffer(STORED))
+  const samplePart = [...partOf].find(([, name]) => name === sample?.name)?.[0]
+  const numbers = samplePart === undefined ? new Map<string, string>() : paletteNumbers(partText(bytes, samplePart))
+  return fixedArchive(bytes, (part, xml) => {
+    if (part === 'xl/workbook.xml') return withNames(xml, cellNames)
+    const name = partOf.get(part) ?? ''
+    const calculation = written.get(name)
+    if (!calculation) return xml
+    written.delete(name)
+    return withRows(xml, new TextDecoder().decode(calculation.rows), numbers, calculation.range)
+  })
 }
 
 /** The archive is packed again, so its first packing need not be small. The library hands these on to its packer; its types do not list them. */
