@@ -13,7 +13,7 @@ afterEach(async () => {
   for (const one of open.splice(0)) await one.close()
 })
 
-/** A thread that never answers the text "hang", dies of the text "die", and gives any other back. */
+/** A thread that never answers the text "hang", dies of the text "die", and gives any other back, with whether it was sent a catalogue. */
 const moody = new URL('./testing/moody.worker.ts', import.meta.url)
 
 it('hands back the result with the JSON that it was read from', async () => {
@@ -41,6 +41,45 @@ it('outlives a thread that dies of a text', async () => {
   const behind = sizing.size('fine')
   await expect(dying).rejects.toMatchObject({ status: 422, code: 'sizing_failed' })
   expect((await behind).json).toBe('"fine"')
+})
+
+it('chooses from the catalogue it is given, and keeps results of one apart from those of another', async () => {
+  const sizing = service()
+  const row = {
+    maker: 'Wendholt',
+    kinds: ['expansion tank'],
+    construction: null,
+    volume: 2,
+    acceptance: null,
+    maxPressure: 1e6,
+    maxTemperature: 400,
+    potable: false,
+    stamped: true,
+    mounting: null,
+    line: 2,
+  }
+  const of = (model: string) => ({
+    hash: model,
+    rowsJson: () => Promise.resolve(JSON.stringify([{ ...row, model }])),
+  })
+  const chosen = async (catalogue: ReturnType<typeof of> | null) =>
+    (await sizing.size(loopSpec(), catalogue)).result.vessels[0]?.selected?.model
+  expect([await chosen(of('A')), await chosen(of('B')), await chosen(null), await chosen(of('A'))]).toEqual([
+    'A',
+    'B',
+    undefined,
+    'A',
+  ])
+})
+
+it('sends the rows of a catalogue once to each thread', async () => {
+  const sizing = service({ limit: 300, module: moody })
+  const catalogue = { hash: 'A', rowsJson: () => Promise.resolve('[]') }
+  const sent = async (text: string) => JSON.parse((await sizing.size(text, catalogue)).json) as unknown
+  expect(await sent('one')).toEqual({ text: 'one', rowsSent: true })
+  expect(await sent('two')).toEqual({ text: 'two', rowsSent: false })
+  await expect(sizing.size('hang', catalogue)).rejects.toMatchObject({ status: 422 })
+  expect(await sent('three')).toEqual({ text: 'three', rowsSent: true })
 })
 
 it('refuses more than 256 kB, counted in bytes', async () => {

@@ -34,6 +34,16 @@ export interface SelectedVessel {
   readonly mounting?: string
   readonly stamped: boolean
   readonly quantity: number
+  /** The next size down, and by how much each vessel of it falls short, m3. Left out where the spec names the row. */
+  readonly nextDown?: {
+    readonly maker: string
+    readonly model: string
+    readonly volume: number
+    readonly short: number
+    readonly of: 'volume' | 'acceptance volume'
+  }
+  /** Other rows of the same volume that would do as well. */
+  readonly ties?: readonly { readonly maker: string; readonly model: string }[]
 }
 
 /** How the required volume answers to one input, and how far the input can go with the chosen vessel. */

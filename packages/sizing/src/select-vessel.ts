@@ -110,6 +110,21 @@ const selectedFrom = (row: CatalogueRow, quantity: number): SelectedVessel => ({
   quantity,
 })
 
+const besides = ({ nearMiss, ties }: Selection): Pick<SelectedVessel, 'nextDown' | 'ties'> => ({
+  ...(nearMiss
+    ? {
+        nextDown: {
+          maker: nearMiss.row.maker,
+          model: nearMiss.row.model,
+          volume: nearMiss.row.volume,
+          short: nearMiss.short,
+          of: nearMiss.of,
+        },
+      }
+    : {}),
+  ...(ties.length > 0 ? { ties: ties.map(({ maker, model }) => ({ maker, model })) } : {}),
+})
+
 const namedRow = (context: VesselContext, rows: readonly CatalogueRow[], need: Requirement): SelectedVessel | null => {
   const { selection } = context.vessel
   if (selection.choose !== 'row') return null
@@ -164,7 +179,7 @@ export const selectVessel = (
   }
   sayNear(context, found)
   sayHung(context, found.choice.row)
-  return selectedFrom(found.choice.row, found.choice.quantity)
+  return { ...selectedFrom(found.choice.row, found.choice.quantity), ...besides(found) }
 }
 
 const resultsAs = (context: VesselContext, results: Method['results']): Record<string, ResultValue> =>

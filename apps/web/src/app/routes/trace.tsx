@@ -71,6 +71,7 @@ const Page = ({
     }),
     [project.number, result, units, vessel, hasSpec],
   )
+  const { get } = useAddress()
   const { hash } = useLocation()
   useEffect(() => {
     const target = hash === '' ? null : document.getElementById(decodeURIComponent(hash.slice(1)))
@@ -106,7 +107,9 @@ const Page = ({
           {hasSpec ? (
             <Link to={withQuery(paths.spec(project.number), { path: vessel.path })}>{vessel.mark} in the spec</Link>
           ) : null}
-          <Link to={withQuery(paths.schedule(project.number), { row: vessel.mark })}>
+          <Link
+            to={withQuery(paths.schedule(project.number), { row: vessel.mark, rev: get('rev'), units: get('units') })}
+          >
             {vessel.mark} in the schedule
           </Link>
         </nav>

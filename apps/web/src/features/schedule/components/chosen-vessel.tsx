@@ -14,6 +14,8 @@ export const choiceFindings = (findings: readonly Finding[], vessel: Vessel): re
     ({ code, path }) => ofChoice.has(code) && (path === vessel.path || path.startsWith(`${vessel.path}.`)),
   )
 
+type Selected = NonNullable<Vessel['selected']>
+
 const facts = (vessel: Vessel, units: UnitSystem): readonly (readonly [string, string])[] => {
   const { selected } = vessel
   if (!selected) return []
@@ -44,6 +46,25 @@ const facts = (vessel: Vessel, units: UnitSystem): readonly (readonly [string, s
   ]
 }
 
+/** What lies next to the chosen row. */
+const Besides = ({ selected, units }: { readonly selected: Selected; readonly units: UnitSystem }) => {
+  const { nextDown, ties = [] } = selected
+  const said = (value: number): string => formatQuantity({ kind: 'volume', value }, units)
+  return (
+    <ul className="mt-3 flex max-w-[80ch] flex-col gap-1">
+      {nextDown ? (
+        <li>
+          Next size down: {nextDown.maker} {nextDown.model}, {said(nextDown.volume)}. It falls short by{' '}
+          <strong className="figures font-semibold">{said(nextDown.short)}</strong> of {nextDown.of}.
+        </li>
+      ) : null}
+      {ties.length > 0 ? (
+        <li>Would do as well: {ties.map(({ maker, model }) => `${maker} ${model}`).join(', ')}.</li>
+      ) : null}
+    </ul>
+  )
+}
+
 /** The row of the catalogue that was chosen, and what lies next to it. */
 export const ChosenVessel = ({
   vessel,
@@ -55,7 +76,10 @@ export const ChosenVessel = ({
   readonly units: UnitSystem
 }) => {
   const { selected } = vessel
-  const said = choiceFindings(findings, vessel)
+  // What the note says in the units of the project stands above in the units shown.
+  const said = choiceFindings(findings, vessel).filter(
+    ({ code }) => code !== 'CF-E034' || (!selected?.nextDown && !selected?.ties),
+  )
   return (
     <div className="border-t-2 border-ink pt-2">
       {selected ? (
@@ -74,6 +98,7 @@ export const ChosenVessel = ({
                 </div>
               ))}
           </dl>
+          <Besides selected={selected} units={units} />
         </>
       ) : (
         <p className="max-w-[80ch] text-read">
