@@ -145,7 +145,7 @@ export const columnsOf = (kind: string, project: ProjectResult): readonly Column
   const found = new Map<string, ColumnDefinition>()
   for (const vessel of vessels) {
     for (const [key, value] of Object.entries(vessel.results))
-      if (!found.has(key)) found.set(key, result(key, value.name, value.kind))
+      if (!found.has(key)) found.set(key, result(key, capital(value.name), value.kind))
   }
   return [serves, count, ...found.values(), selectedVessel, selectedVolume, method, assumptions].filter(isShown)
 }
