@@ -3,6 +3,7 @@ import { specVersion } from './model/block.ts'
 import type { SpecModel, SystemModel, Vocabulary } from './model/spec-model.ts'
 import type { LineIndex } from './parse/line-index.ts'
 import { parseSpec } from './parse/parse-spec.ts'
+import { recall } from './parse/recent.ts'
 import type { SourceMap } from './parse/source-tree.ts'
 import { type Acceptance, readAcceptances } from './read/acceptance.ts'
 import { readAssumptions } from './read/assumption.ts'
@@ -129,6 +130,7 @@ const inOrder = (findings: readonly Finding[]): readonly Finding[] =>
 /** Reads a spec: text, tree, typed model. Never throws; every mistake is a finding. */
 export const readSpec = (text: string, vocabulary: Vocabulary): SpecReading => {
   const { report, lineIndex, tree, comments } = parseSpec(text)
+  recall({ text, tree, comments, lineIndex })
   const context: Context = { text, report, vocabulary, meant: new Set() }
   const root = tree && { map: tree, path: '', span: tree.entries[0]?.keySpan ?? { start: 0, end: 0 } }
   const model = root && readVersion(context, root) ? readModel(context, root) : null

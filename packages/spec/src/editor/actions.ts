@@ -1,7 +1,7 @@
 import type { Finding, Fix } from '../finding.ts'
 import type { Vocabulary } from '../model/spec-model.ts'
 import { indexLines } from '../parse/line-index.ts'
-import { parseSpec, parseUnfinished } from '../parse/parse-spec.ts'
+import { treeForHelp } from '../parse/recent.ts'
 import { acceptFix } from './accept-fix.ts'
 import { conversionsAt } from './convert-unit.ts'
 import { applyEdits, canStandTogether, type TextEdit } from './edits.ts'
@@ -59,7 +59,7 @@ export const actionsAt = (
   const lines = indexLines(text)
   const tabs = tabsToSpaces(text)
   const atTab = tabs.some(({ range }) => range.start.line === lines.position(offset).line)
-  const tree = parseSpec(text).tree ?? parseUnfinished(text)
+  const tree = treeForHelp(text)
   return [
     ...here.flatMap(({ code, fixes }) => fixes.map((fix): Action => ({ ...fix, sort: 'fix', code }))),
     ...codes.flatMap((code) => fixAllOf(text, code, findings) ?? []),

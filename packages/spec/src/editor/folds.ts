@@ -1,5 +1,5 @@
 import { indexLines, type LineIndex } from '../parse/line-index.ts'
-import { parseSpec, parseUnfinished } from '../parse/parse-spec.ts'
+import { treeForHelp } from '../parse/recent.ts'
 import { below, type SourceList, type SourceMap, type SourceNode } from '../parse/source-tree.ts'
 
 /** Lines that can be shown as one: the first stays, the others up to `end` go. */
@@ -35,7 +35,7 @@ const commentFolds = (text: string): Fold[] => {
 
 /** What can be folded, in the order of the text; of several that begin on a line the outermost. */
 export const foldsOf = (text: string): readonly Fold[] => {
-  const tree = parseSpec(text).tree ?? parseUnfinished(text)
+  const tree = treeForHelp(text)
   const comments = commentFolds(text)
   if (!tree) return comments
   const lines = indexLines(text)

@@ -3,7 +3,7 @@ import type { Range } from '../finding.ts'
 import { docOf, exampleOf, type FieldShape, type Shape } from '../model/shape.ts'
 import type { Vocabulary } from '../model/spec-model.ts'
 import { specShape } from '../model/spec-shape.ts'
-import { parseUnfinished } from '../parse/parse-spec.ts'
+import { treeForHelp } from '../parse/recent.ts'
 import { pathAtOffset, placeOf } from '../parse/path.ts'
 import { indexLines } from '../parse/line-index.ts'
 import { blockFor, shapeAt } from './shape-at.ts'
@@ -37,7 +37,7 @@ const meaning = (field: FieldShape | undefined, text: string | undefined): Hover
 
 /** What the language says of the key or value at an offset. Null outside of both. */
 export const hoverAt = (text: string, offset: number, vocabulary: Vocabulary): Hover | null => {
-  const tree = parseUnfinished(text)
+  const tree = treeForHelp(text)
   if (!tree) return null
   const { path, part } = pathAtOffset(tree, offset)
   const found = placeOf(tree, path)

@@ -1,7 +1,7 @@
 import type { Range } from '../finding.ts'
 import type { Span } from '../parse/line-index.ts'
 import { indexLines } from '../parse/line-index.ts'
-import { parseSpec, parseUnfinished } from '../parse/parse-spec.ts'
+import { treeForHelp } from '../parse/recent.ts'
 import { below, entryOf, type SourceEntry, type SourceMap } from '../parse/source-tree.ts'
 import { textBehind } from './shape-at.ts'
 
@@ -46,7 +46,7 @@ const partsOf = (map: SourceMap | null, key: string, path: string): Part[] => {
  * with mistakes too, as far as that can be read. Null where nothing can be read.
  */
 export const outlineOf = (text: string): OutlineItem | null => {
-  const tree = parseSpec(text).tree ?? parseUnfinished(text)
+  const tree = treeForHelp(text)
   if (!tree) return null
   const lines = indexLines(text)
   const trimmed = ({ start, end }: Span): Range => {

@@ -1,6 +1,6 @@
 import { longestMark, markPattern } from '../model/block.ts'
 import type { Vocabulary } from '../model/spec-model.ts'
-import { parseSpec } from '../parse/parse-spec.ts'
+import { parsedText } from '../parse/recent.ts'
 import type { SourceMap } from '../parse/source-tree.ts'
 import type { TextEdit } from './edits.ts'
 import { givenNames, type Name } from './names.ts'
@@ -32,7 +32,7 @@ const objection = (tree: SourceMap, { sort, name }: Name, to: string): string | 
  * text cannot be read, where no name of the author's stands, and where the new name is malformed or taken.
  */
 export const renameAt = (text: string, offset: number, to: string, vocabulary: Vocabulary): Renaming => {
-  const { tree } = parseSpec(text)
+  const { tree } = parsedText(text)
   if (!tree) return no('The text cannot be read as it is; mend that first.')
   const uses = usesOf(text, offset, vocabulary)
   if (!uses) return no('No mark, system or fluid stands here.')
@@ -43,7 +43,7 @@ export const renameAt = (text: string, offset: number, to: string, vocabulary: V
 
 /** What the new name would be refused for before one is typed; null where the name under the cursor can be changed. */
 export const renameRefusal = (text: string, offset: number, vocabulary: Vocabulary): string | null => {
-  const { tree } = parseSpec(text)
+  const { tree } = parsedText(text)
   if (!tree) return 'The text cannot be read as it is; mend that first.'
   const name = usesOf(text, offset, vocabulary)?.name
   if (!name) return 'No mark, system or fluid stands here.'

@@ -1,7 +1,7 @@
 import type { Range } from '../finding.ts'
 import type { Vocabulary } from '../model/spec-model.ts'
 import { type LineIndex, lineEnd, lineStart } from '../parse/line-index.ts'
-import { parseSpec, parseUnfinished } from '../parse/parse-spec.ts'
+import { parsedText, treeForHelp } from '../parse/recent.ts'
 import { placeOf } from '../parse/path.ts'
 import type { Comment } from '../parse/scan.ts'
 import type { SourceMap } from '../parse/source-tree.ts'
@@ -34,8 +34,8 @@ interface Source {
 }
 
 const sourceOf = (text: string): Source | null => {
-  const { tree, comments, lineIndex } = parseSpec(text)
-  const found = tree ?? parseUnfinished(text)
+  const { comments, lineIndex } = parsedText(text)
+  const found = treeForHelp(text)
   return found && { text, tree: found, comments, lineIndex }
 }
 

@@ -116,3 +116,14 @@ describe('the pages of the codes', () => {
       }
   })
 })
+
+it('lists the kinds once, where vessels are described', () => {
+  expect(section('systems-vessels').keys.map(({ key, choices }) => [key, choices.length])).toEqual([
+    ['kind', vesselKindNames.length],
+  ])
+  expect(section('systems-vessels-buffer-tank').keys[0]).toMatchObject({
+    key: 'kind',
+    example: 'buffer tank',
+    choices: [],
+  })
+})

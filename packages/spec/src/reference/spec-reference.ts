@@ -176,7 +176,9 @@ const createWriter = () => {
       if (!names) {
         if (of.shape === 'block') return { named: shape.exampleKey, keys: keysOf(of, inside) }
         describe(of, inside)
-        return { named: shape.exampleKey }
+        const lead = of.shape === 'branch by value' ? Object.values(of.branches)[0]?.keys[of.by] : undefined
+        const keys = of.shape === 'branch by value' && lead ? [keyOf(of.by, lead, inside, true)] : []
+        return { named: shape.exampleKey, keys }
       }
       const { id, title } = headingOf(path)
       const section =
@@ -203,8 +205,15 @@ const createWriter = () => {
         describe(shape.of, [...path, '…'])
         return {}
       })
-    for (const [name, branch] of Object.entries(shape.branches))
-      blockSection(branch, path, { id: idOf([...path, name]), title: name })
+    for (const [name, branch] of Object.entries(shape.branches)) {
+      const heading = { id: idOf([...path, name]), title: name }
+      // The key that chooses the branch has one value in it.
+      const chosen = (entry: ReferenceKey): ReferenceKey =>
+        shape.shape === 'branch by value' && entry.key === shape.by
+          ? { ...entry, takes: 'this word', choices: [], example: name }
+          : entry
+      put(branch, path, () => ({ keys: keysOf(branch, path).map(chosen) }), heading)
+    }
     return undefined
   }
 
