@@ -27,8 +27,14 @@ export const pngRenderer = async (): Promise<(svg: string, width: number) => Uin
       fitTo: { mode: 'width', value: width },
     })
     try {
-      return drawing.render().asPng()
+      const image = drawing.render()
+      try {
+        return image.asPng()
+      } finally {
+        image.free()
+      }
     } finally {
+      // Their memory is the renderer's, where no collector looks.
       drawing.free()
     }
   }

@@ -3,9 +3,7 @@ import { sheetReference } from './put-cell.ts'
 import type { VesselCells } from './schedule-sheet.ts'
 
 const plain = (text: string): string =>
-  text
-    .normalize('NFKD')
-    .replace(/[\u0300-\u036f]/g, '')
+  (/^[ -~]*$/.test(text) ? text : text.normalize('NFKD').replace(/[\u0300-\u036f]/g, ''))
     .replace(/[^A-Za-z0-9]+/g, '_')
     .replace(/^_+|_+$/g, '')
 

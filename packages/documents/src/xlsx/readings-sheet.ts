@@ -1,6 +1,6 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import { unitLabel } from '@coldfill/units'
-import type { DataValidation, Workbook, Worksheet } from 'exceljs'
+import type { DataValidation, Style, Workbook, Worksheet } from 'exceljs'
 import { displayNumber } from '../calculation/display-number.ts'
 import type { DocumentOptions } from '../document-options.ts'
 import { RULE } from '../look.ts'
@@ -106,12 +106,13 @@ const entryColumns = (options: DocumentOptions): EntryColumn[] => {
 const openForEntry = (sheet: Worksheet, options: DocumentOptions, first: number, last: number): void => {
   const edge = line(RULE)
   for (const { column, validation } of entryColumns(options)) {
-    for (let row = first; row <= last; row += 1) {
-      const cell = sheet.getCell(`${column}${row}`)
-      cell.border = { top: edge, bottom: edge, left: edge, right: edge }
-      cell.fill = SHEET_FILL
-      if (column === 'J') cell.numFmt = 'yyyy-mm-dd'
+    const look: Partial<Style> = {
+      ...sheet.getCell(`${column}${first}`).style,
+      border: { top: edge, bottom: edge, left: edge, right: edge },
+      fill: SHEET_FILL,
+      ...(column === 'J' ? { numFmt: 'yyyy-mm-dd' } : {}),
     }
+    for (let row = first; row <= last; row += 1) sheet.getCell(`${column}${row}`).style = look
     // The library takes rules by range; its types do not list this.
     const rules = (sheet as unknown as { dataValidations: { add(range: string, rule: DataValidation): void } })
       .dataValidations

@@ -10,7 +10,9 @@ export interface CellLook {
   readonly alignment?: Partial<Alignment>
 }
 
-const escaped = (text: string): string =>
+const escaped = (text: string): string => (/[&<>"]/.test(text) ? replaced(text) : text)
+
+const replaced = (text: string): string =>
   text.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('>', '&gt;').replaceAll('"', '&quot;')
 
 /** The looks that the sheets of a workbook use, each with its number format. */

@@ -120,8 +120,11 @@ export const CELL_EDGES = 10.75
 /** Lines that a wrapped text takes in a column, so that a row can be given its height: no program fits it by itself on opening. */
 const lines = (text: string, width: number, size: number): number => {
   const perLine = Math.max(1, (width * CHARACTER - CELL_EDGES) / size)
+  // No letter is wider than an em, and most texts are short.
+  if (text.length <= perLine && !text.includes('\n')) return 1
   const space = lineWidth(' ')
   return text.split('\n').reduce((all, part) => {
+    if (lineWidth(part) * 1.06 <= perLine) return all + 1
     let [count, used] = [1, 0]
     for (const word of part.split(' ')) {
       // A little wider than regular type, for heads and first columns are bold.

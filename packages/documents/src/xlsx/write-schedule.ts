@@ -76,7 +76,7 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   const bases = [
     ...new Set(
       calculations.flatMap(({ vessel: { solution } }) =>
-        solution.base !== 'water' && solution.massFraction > 0 ? [solution.base as GlycolBase] : [],
+        solution.base !== 'water' && solution.massFraction > 0 ? [solution.base] : [],
       ),
     ),
   ]
