@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs'
-import { officePages, writeSubmittal } from '@coldfill/documents'
-import { documentOptions } from '@coldfill/documents/testing'
+import { officePages, writeReviewCopy, writeSubmittal } from '@coldfill/documents'
+import { documentOptions, reviewedOptions } from '@coldfill/documents/testing'
 import { sizeSpec } from '@coldfill/sizing'
 import { strFromU8, unzipSync } from 'fflate'
 import { expect, it } from 'vitest'
@@ -31,4 +31,15 @@ it.skipIf(!hasOffice)(`the contents list has the pages that the file is printed 
   expect(entries.length).toBeGreaterThan(8)
   const printed = new Map(outline(convert('submittal.docx', bytes, 'pdf')))
   expect(entries).toEqual(entries.map(([title = '']) => [title, String(printed.get(oneSpaced(title)))]))
+})
+
+it.skipIf(!hasOffice)(`a review copy opens with every redline and answer as a comment${leftOut}`, async () => {
+  const text = readFileSync(new URL('../../examples/fernhollow/spec.yaml', import.meta.url), 'utf8')
+  const options = reviewedOptions('US', 'Issued for review')
+  const opened = unzipSync(convert('review.docx', await writeReviewCopy(sizeSpec(text), options), 'odt'))
+  const content = strFromU8(opened['content.xml'] ?? new Uint8Array())
+  const comments = content.match(/<office:annotation .*?<\/office:annotation>/gs) ?? []
+  const messages = (options.redlines ?? []).flatMap((redline) => redline.messages)
+  expect(comments).toHaveLength(messages.length)
+  for (const { author } of messages) expect(content).toContain(`<dc:creator>${author.name}</dc:creator>`)
 })

@@ -11,7 +11,7 @@ import { formulaResults, readWorkbook, recalculated } from './recalculate.ts'
 const TOLERANCE = 1e-9
 
 const off = (found: unknown, expected: unknown): boolean =>
-  typeof expected === 'string' ? found !== expected : offNumber(found, expected)
+  typeof expected === 'number' ? offNumber(found, expected) : found !== expected
 
 const offNumber = (found: unknown, expected: unknown): boolean =>
   typeof found !== 'number' ||

@@ -1,8 +1,8 @@
 import type { ProjectResult } from '@coldfill/sizing'
 
-export type DocumentKind = 'schedule' | 'submittal'
+export type DocumentKind = 'schedule' | 'submittal' | 'review-copy'
 
-const EXTENSION: Record<DocumentKind, string> = { schedule: 'xlsx', submittal: 'docx' }
+const EXTENSION: Record<DocumentKind, string> = { schedule: 'xlsx', submittal: 'docx', 'review-copy': 'docx' }
 
 /** Letters, digits and single hyphens only: safe in every file system, header and address. */
 const plain = (text: string): string =>

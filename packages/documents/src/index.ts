@@ -11,7 +11,7 @@ export {
   type TitleBlock,
 } from './document-options.ts'
 export { writeSchedule } from './xlsx/write-schedule.ts'
-export { writeSubmittal, type SubmittalSurroundings } from './submittal/write-submittal.ts'
+export { writeReviewCopy, writeSubmittal, type SubmittalSurroundings } from './submittal/write-submittal.ts'
 export { officePages } from './pages/office-pages.ts'
 export type { PageFinder } from './pages/page-tokens.ts'
 export { fileName, type DocumentKind } from './file-name.ts'

@@ -1,4 +1,4 @@
-import { unzipSync, Zip, ZipDeflate } from 'fflate'
+import { unzipSync, Zip, ZipDeflate, ZipPassThrough } from 'fflate'
 
 /** Earliest time a ZIP entry can carry; every entry gets it, so that the time of writing does not show. */
 const EPOCH = new Date(1980, 0, 1)
@@ -42,7 +42,8 @@ export const fixedArchive = (
   for (const name of names) {
     const part = parts[name] ?? new Uint8Array()
     const isText = name.endsWith('.xml') || name.endsWith('.rels')
-    const entry = new ZipDeflate(name, { level: LEVEL })
+    // A picture is packed as it is.
+    const entry = /\.(?:png|jpe?g)$/.test(name) ? new ZipPassThrough(name) : new ZipDeflate(name, { level: LEVEL })
     entry.mtime = EPOCH
     zip.add(entry)
     entry.push(isText ? encoder.encode(edit(name, decoder.decode(part))) : part, true)

@@ -12,6 +12,7 @@ import {
 import type { Box } from '@coldfill/formula'
 import { symbolRuns } from './symbol-runs.ts'
 import { columnWidths, type TableSize } from './column-widths.ts'
+import { commented } from './review-comments.ts'
 import { plainText } from './plain-text.ts'
 import { STYLE, TABLE_STYLE } from './styles.ts'
 
@@ -36,6 +37,8 @@ export interface TableContent {
   readonly size?: TableSize
   /** Words of the first column in the built-in style Strong. */
   readonly strongFirst?: boolean
+  /** Ids of the comments on a cell of the body, by its row and column. */
+  readonly comments?: (row: number, column: number) => readonly number[]
   /** Least height of body rows in twips, for cells that a person fills in. */
   readonly rowHeight?: number
 }
@@ -74,17 +77,24 @@ export const table = (content: TableContent): Table => {
   const { columns, rows, width } = content
   const widths = columnWidths(columns, rows, width, content.size ?? 'table', content.strongFirst)
   const style = STYLES[content.size ?? 'table']
-  const cell = (content: TableCellContent, index: number, paragraphStyle: string, strong = false) =>
+  const cell = (
+    content: TableCellContent,
+    index: number,
+    paragraphStyle: string,
+    strong = false,
+    comments: readonly number[] = [],
+  ) =>
     new TableCell({
       width: { size: widths[index] ?? 0, type: WidthType.DXA },
       children: [
         new Paragraph({
           style: paragraphStyle,
-          children: [
-            ...(typeof content === 'string'
+          children: commented(
+            comments,
+            typeof content === 'string'
               ? [new TextRun({ text: plainText(content), ...(strong ? { style: 'Strong' } : {}) })]
-              : symbolRuns(content)),
-          ],
+              : symbolRuns(content),
+          ),
         }),
       ],
     })
@@ -103,7 +113,7 @@ export const table = (content: TableContent): Table => {
         ),
       }),
       ...rows.map(
-        (row) =>
+        (row, place) =>
           new TableRow({
             cantSplit: true,
             ...(content.rowHeight === undefined
@@ -115,6 +125,7 @@ export const table = (content: TableContent): Table => {
                 index,
                 column.align === 'right' ? style.number : style.text,
                 content.strongFirst === true && index === 0,
+                content.comments?.(place, index),
               ),
             ),
           }),

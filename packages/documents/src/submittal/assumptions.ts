@@ -5,7 +5,7 @@ import { sentenceCase } from '../words/vessel-words.ts'
 import type { Section } from './section.ts'
 
 /** The numbered register of every default that the results lean on, and of what replaced one. */
-export const assumptions: Section = ({ result, headings, captions, width }) => {
+export const assumptions: Section = ({ result, headings, captions, comments, width }) => {
   const { assumptions: used } = result
   if (used.length === 0) {
     return [
@@ -24,6 +24,17 @@ export const assumptions: Section = ({ result, headings, captions, width }) => {
       description: 'Number, name, value, source and reason of every assumption, and the vessels that lean on it',
       width,
       strongFirst: true,
+      ...(comments
+        ? {
+            comments: (row, column) =>
+              comments.place(
+                (anchor) =>
+                  column === 0 &&
+                  anchor.type === 'assumption' &&
+                  [used[row]?.id, used[row]?.number].includes(anchor.assumption),
+              ),
+          }
+        : {}),
       columns: [
         { heading: 'No.', width: 6 },
         { heading: 'Assumption', width: 20 },

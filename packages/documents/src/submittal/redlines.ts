@@ -5,7 +5,7 @@ import { sentenceCase } from '../words/vessel-words.ts'
 import type { Section } from './section.ts'
 
 /** What reviewers wrote and what was answered, one row a redline. */
-export const redlines: Section = ({ result, options, headings, captions, width }) => {
+export const redlines: Section = ({ result, options, headings, captions, comments, width }) => {
   const { redlines: entries } = options
   if (entries === undefined) return []
   if (entries.length === 0) return [headings.heading('Redlines and answers', 1), paragraph('No redline was written.')]
@@ -17,6 +17,12 @@ export const redlines: Section = ({ result, options, headings, captions, width }
       description: 'Number, place, text, answers and state of every redline',
       width,
       strongFirst: true,
+      // Redlines on the spec, and those whose place is gone, have no other place in the file than their row here.
+      ...(comments
+        ? {
+            comments: (row, column) => comments.place((_, number) => column === 0 && number === entries[row]?.number),
+          }
+        : {}),
       columns: [
         { heading: 'No.', width: 6 },
         { heading: 'Where', width: 18 },

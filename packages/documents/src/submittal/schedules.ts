@@ -2,17 +2,31 @@ import type { FileChild } from 'docx'
 import { numberedNote, paragraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
 import { stackedParts } from '../docx/stacked-tables.ts'
-import type { Captions } from '../docx/captions.ts'
+import type { ReviewComments } from '../docx/review-comments.ts'
 import { table } from '../docx/table.ts'
 import { headerText, scheduleKinds, scheduleTable, type ScheduleTable } from '../schedules/schedule-table.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
-import type { Section } from './section.ts'
+import type { Section, SubmittalContext } from './section.ts'
 
 /** The key by which words refer to the schedule of a kind. */
 export const scheduleKey = (kind: string): string => `schedule of ${kind}`
 
+/** Redlines on a cell: those of the cell itself, and at the mark those of the row and of results that have no column. */
+const commentsOn = (schedule: ScheduleTable, comments: ReviewComments, row: number, place: number): number[] => {
+  const [mark, column] = [schedule.rows[row]?.mark, schedule.columns[place]?.key]
+  const isColumn = (key: string) => schedule.columns.some((each) => each.key === key)
+  return comments.place((anchor) => {
+    if (anchor.type === 'row') return anchor.mark === mark && column === 'mark'
+    if (anchor.type !== 'cell' || anchor.mark !== mark) return false
+    return anchor.column === column || (column === 'mark' && !isColumn(anchor.column))
+  })
+}
+
 /** The schedule as one table, or where the page is too narrow for it as tables under each other that repeat the mark. */
-const scheduleTables = (schedule: ScheduleTable, captions: Captions, width: number): FileChild[] => {
+const scheduleTables = (
+  schedule: ScheduleTable,
+  { captions, comments, width }: Pick<SubmittalContext, 'captions' | 'comments' | 'width'>,
+): FileChild[] => {
   const columns = schedule.columns.map((column) => ({
     heading: headerText(column),
     width: column.width,
@@ -31,6 +45,9 @@ const scheduleTables = (schedule: ScheduleTable, captions: Captions, width: numb
         width,
         size: part.size,
         strongFirst: true,
+        ...(comments
+          ? { comments: (row, place) => commentsOn(schedule, comments, row, part.columns[place] ?? 0) }
+          : {}),
         columns: part.columns.flatMap((place) => columns[place] ?? []),
         rows: rows.map((row) => part.columns.map((place) => row[place] ?? '')),
       }),
@@ -39,15 +56,16 @@ const scheduleTables = (schedule: ScheduleTable, captions: Captions, width: numb
 }
 
 /** One schedule a kind of vessel, with its keyed notes under it. Stands in a landscape section. */
-export const schedules: Section = ({ result, options, headings, captions, width }) => [
-  headings.heading('Schedules', 1),
-  ...scheduleKinds(result).flatMap((kind) => {
+export const schedules: Section = (context) => [
+  context.headings.heading('Schedules', 1),
+  ...scheduleKinds(context.result).flatMap((kind) => {
+    const { result, options, headings } = context
     const schedule = scheduleTable(result, kind, options.units)
     const section = result.project.specSections[kind]
     return [
       headings.heading(schedule.title, 2),
       paragraph([...(section ? [`Spec section ${section}.`] : []), schedule.purpose].join(' ')),
-      ...scheduleTables(schedule, captions, width),
+      ...scheduleTables(schedule, context),
       paragraph(`${gaugeRemark(options.units)} — does not apply; ? an input is missing.`, STYLE.remark),
       ...schedule.notes.map(({ number, text }) => numberedNote(`${number}`, text)),
     ]

@@ -5,6 +5,7 @@ import { dateOf, revisionWords, type DocumentOptions } from '../document-options
 import { coverHeader, footer, header, pageProperties, textWidth, type Orientation } from '../docx/page.ts'
 import { Headings } from '../docx/paragraph.ts'
 import { plainText } from '../docx/plain-text.ts'
+import { ReviewComments } from '../docx/review-comments.ts'
 import { settled } from '../docx/settled-part.ts'
 import { stylesXml } from '../docx/styles.ts'
 import { Captions } from '../docx/captions.ts'
@@ -27,7 +28,13 @@ import { summary } from './summary.ts'
 import { verification } from './verification.ts'
 
 /** Every part of the submittal; page numbers stand as tokens where `pages` asks for them, and are left out elsewhere. */
-const documentOf = (result: ProjectResult, options: DocumentOptions, pictures: Pictures, pages: boolean): Document => {
+const documentOf = (
+  result: ProjectResult,
+  options: DocumentOptions,
+  pictures: Pictures,
+  pages: boolean,
+  comments: ReviewComments | null = null,
+): Document => {
   const { project } = result
   const { titleBlock } = options
   const headings = new Headings()
@@ -35,7 +42,16 @@ const documentOf = (result: ProjectResult, options: DocumentOptions, pictures: P
   const shown = scheduleWords(result, options.units)
   const children = (orientation: Orientation, sections: readonly Section[]): FileChild[] =>
     sections.flatMap((section) =>
-      section({ result, options, headings, captions, shown, pictures, width: textWidth(options, orientation) }),
+      section({
+        result,
+        options,
+        headings,
+        captions,
+        shown,
+        pictures,
+        comments,
+        width: textWidth(options, orientation),
+      }),
     )
   const page = (orientation: Orientation, content: readonly FileChild[]): ISectionOptions => ({
     properties: pageProperties(options, orientation),
@@ -74,6 +90,7 @@ const documentOf = (result: ProjectResult, options: DocumentOptions, pictures: P
       ...(options.contentHash === undefined ? [] : [{ name: 'Content hash', value: options.contentHash }]),
     ],
     externalStyles: stylesXml,
+    ...(comments ? { comments: comments.options() } : {}),
     sections: [
       {
         properties: frontProperties,
@@ -138,4 +155,20 @@ export const writeSubmittal = async (
     numbered ??
     fixedArchive(await packed(documentOf(result, options, pictures, false)), settled(dateOf(options.titleBlock)))
   )
+}
+
+/**
+ * The submittal as a review copy: the same content, each redline as a comment on its row, its answers below it, closed ones
+ * resolved. Redlines on the spec, or on what is no longer there, stand at their row of the list of redlines.
+ */
+export const writeReviewCopy = async (result: ProjectResult, options: DocumentOptions): Promise<Uint8Array> => {
+  const redlines = options.redlines ?? []
+  const document = documentOf(
+    result,
+    { ...options, redlines },
+    await drawPictures(result, options),
+    false,
+    redlines.length > 0 ? new ReviewComments(redlines) : null,
+  )
+  return fixedArchive(await packed(document), settled(dateOf(options.titleBlock)))
 }
