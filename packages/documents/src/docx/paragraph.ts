@@ -9,6 +9,10 @@ type Style = (typeof STYLE)[keyof typeof STYLE] | 'Title' | 'Subtitle' | 'Captio
 export const paragraph = (text: string, style: Style = 'Normal'): Paragraph =>
   new Paragraph({ style, children: [new TextRun(plainText(text))] })
 
+/** A paragraph that stays on the page of what it leads to. */
+export const leadIn = (text: string): Paragraph =>
+  new Paragraph({ style: 'Normal', keepNext: true, children: [new TextRun(plainText(text))] })
+
 /** A paragraph of words and fields, one after the other. */
 export const runningText = (
   parts: readonly (string | readonly ParagraphChild[])[],

@@ -1,4 +1,4 @@
-import { paragraph } from '../docx/paragraph.ts'
+import { leadIn, paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import { citationWords } from '../words/source-words.ts'
 import { sentenceCase } from '../words/vessel-words.ts'
@@ -15,7 +15,7 @@ export const assumptions: Section = ({ result, headings, captions, comments, wid
   }
   return [
     headings.heading('Assumptions', 1, true),
-    paragraph(
+    leadIn(
       'Each stands in where the spec is silent, or was changed there with a reason. The numbers are those of the schedules.',
     ),
     captions.next('Assumptions', 'assumptions'),

@@ -12,10 +12,16 @@ import type { SubmittalContext } from './section.ts'
 
 type Vessel = ProjectResult['vessels'][number]
 
+/** Shown digits of a chosen vessel and of the headroom table. */
+const DIGITS = 4
+
 const chosenWords = ({ selected }: Vessel, units: UnitSystem): string => {
   if (selected === null) return 'No vessel is chosen in the spec.'
   const said = (value: number, kind: Kind) =>
-    valueText({ value: displayNumber(value, kind, units), unit: unitLabel(kind, units) })
+    valueText({
+      value: Number(displayNumber(value, kind, units).toPrecision(DIGITS)),
+      unit: unitLabel(kind, units),
+    })
   const parts = [
     `${said(selected.volume, 'volume')} each`,
     ...(selected.acceptance === undefined ? [] : [`acceptance ${said(selected.acceptance, 'volume')}`]),
@@ -25,9 +31,6 @@ const chosenWords = ({ selected }: Vessel, units: UnitSystem): string => {
   const many = selected.quantity > 1 ? `${selected.quantity} × ` : ''
   return `Chosen: ${many}${selected.maker} ${selected.model}, ${parts.join(', ')}.`
 }
-
-/** Shown digits of a number of the headroom table. */
-const DIGITS = 4
 
 /** The limit in few digits, rounded towards the present value, so that what is printed is still enough. */
 const limitText = (limit: number, value: number, kind: Kind): string => {

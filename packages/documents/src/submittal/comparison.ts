@@ -1,4 +1,4 @@
-import { paragraph } from '../docx/paragraph.ts'
+import { leadIn, paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import { changedWords, changeInPercent, comparisonTitle } from '../words/change-words.ts'
 import type { Section } from './section.ts'
@@ -13,7 +13,7 @@ export const comparison: Section = ({ options, headings, captions, width }) => {
   }
   return [
     headings.heading(title, 1),
-    paragraph('Every result of a vessel that differs. What is not listed has not changed.'),
+    leadIn('Every result of a vessel that differs. What is not listed has not changed.'),
     captions.next(title, 'comparison'),
     table({
       title,

@@ -1,4 +1,4 @@
-import { paragraph } from '../docx/paragraph.ts'
+import { leadIn } from '../docx/paragraph.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import { figure } from './pictures.ts'
 import type { Section } from './section.ts'
@@ -14,7 +14,7 @@ export const pressures: Section = ({ result, options, headings, captions, pictur
   if (drawn.length === 0) return []
   return [
     headings.heading('System pressures', 1),
-    paragraph(
+    leadIn(
       `Cold is the system filled and at rest, hot the highest pressure with the chosen vessel, or with the smallest that is enough where none is chosen. ${gaugeRemark(options.units)}`,
     ),
     ...drawn.flatMap(({ system, picture }) =>

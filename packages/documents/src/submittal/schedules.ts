@@ -1,5 +1,5 @@
 import type { FileChild } from 'docx'
-import { numberedNote, paragraph } from '../docx/paragraph.ts'
+import { numberedNote, leadIn, paragraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
 import { stackedParts } from '../docx/stacked-tables.ts'
 import type { ReviewComments } from '../docx/review-comments.ts'
@@ -64,7 +64,7 @@ export const schedules: Section = (context) => [
     const section = result.project.specSections[kind]
     return [
       headings.heading(schedule.title, 2),
-      paragraph([...(section ? [`Spec section ${section}.`] : []), schedule.purpose].join(' ')),
+      leadIn([...(section ? [`Spec section ${section}.`] : []), schedule.purpose].join(' ')),
       ...scheduleTables(schedule, context),
       paragraph(`${gaugeRemark(options.units)} — does not apply; ? an input is missing.`, STYLE.remark),
       ...schedule.notes.map(({ number, text }) => numberedNote(`${number}`, text)),

@@ -1,4 +1,4 @@
-import { paragraph } from '../docx/paragraph.ts'
+import { leadIn } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import { FROM_MEMORY, numberedSources } from '../words/source-words.ts'
 import type { Section } from './section.ts'
@@ -9,7 +9,7 @@ export const sources: Section = ({ result, headings, captions, width }) => {
   if (list.length === 0) return []
   return [
     headings.heading('Sources', 1),
-    paragraph(`Where a place is marked "from memory", read: ${FROM_MEMORY}.`),
+    leadIn(`Where a place is marked "from memory", read: ${FROM_MEMORY}.`),
     captions.next('Sources'),
     table({
       title: 'Sources',

@@ -1,5 +1,5 @@
 import { numberText } from '../calculation/value-text.ts'
-import { paragraph } from '../docx/paragraph.ts'
+import { leadIn } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import type { Section } from './section.ts'
 
@@ -18,7 +18,7 @@ export const verification: Section = ({ result, options, headings, captions, wid
   if (rows === undefined || rows.length === 0) return []
   return [
     headings.heading('Verification', 1),
-    paragraph(
+    leadIn(
       `Cases with a known answer, run by the engine of this submittal (${result.engine}). Deviation is computed over expected less one.`,
     ),
     captions.next('Verification'),
