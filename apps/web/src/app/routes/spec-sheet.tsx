@@ -1,7 +1,7 @@
 import { revisionSegment, type Project, type Reference, type SpecDocument } from '@coldfill/contract'
 import { acceptFix, pathRange, readSpec, type Range } from '@coldfill/spec'
 import { useQuery, type UseQueryResult } from '@tanstack/react-query'
-import { useCallback, useDeferredValue, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
+import { useCallback, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
 import { useNavigate } from 'react-router-dom'
 import { Failure } from '#components/failure.tsx'
 import { Sheet } from '#components/layouts/sheet.tsx'
@@ -15,9 +15,11 @@ import { Outline } from '#features/spec/components/outline.tsx'
 import { SpecEditor, type SpecEditorHandle } from '#features/spec/components/spec-editor.tsx'
 import { SpecBands } from '#features/spec/components/spec-bands.tsx'
 import { Tray } from '#features/spec/components/tray.tsx'
+import { computedValues } from '#features/spec/computed-values.ts'
 import { marginEntries } from '#features/spec/margin-lines.ts'
 import { mergeFindings } from '#features/spec/merge-findings.ts'
 import { keptWords, sizedWords } from '#features/spec/status-words.ts'
+import { useSettled } from '#features/spec/use-settled.ts'
 import { useSizing } from '#features/spec/use-sizing.ts'
 import { useSpecDraft } from '#features/spec/use-spec-draft.ts'
 import { messageOf } from '#lib/api-error.ts'
@@ -65,7 +67,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
   const stale = good === null || good.text !== text
   const { units, setUnits } = useUnits(good?.result.project.units)
 
-  const settled = useDeferredValue(text)
+  const settled = useSettled(text)
   const vocabulary = reference.data?.vocabulary
   const reading = useMemo(() => (vocabulary ? readSpec(settled, vocabulary) : null), [settled, vocabulary])
   const findings = useMemo(
@@ -82,6 +84,8 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
       ),
     [model, good, issued.data, units, number],
   )
+
+  const computed = useCallback((path: string) => computedValues(good?.result ?? null, path, units), [good, units])
 
   const onKey = useEffectEvent((event: KeyboardEvent) => {
     if (event.key.toLowerCase() !== 's' || !(event.ctrlKey || event.metaKey)) return
@@ -131,6 +135,9 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
           >
             Compare
           </Button>
+          <Button why={readOnly ? document.readOnly?.reason : null} onClick={() => editor.current?.format()}>
+            Format
+          </Button>
           <Button
             look="main"
             busy={draft.saving}
@@ -151,7 +158,13 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
     >
       <div className="flex min-h-0 flex-1 border-t-2 border-ink">
         <div className="hidden w-52 shrink-0 zones:block">
-          <Outline model={model} entries={entries} stale={stale} onJump={(range) => editor.current?.jumpTo(range)} />
+          <Outline
+            text={settled}
+            findings={findings}
+            entries={entries}
+            stale={stale}
+            onJump={(range) => editor.current?.jumpTo(range)}
+          />
         </div>
         <div className="relative min-h-0 min-w-0 flex-1">
           <div className="absolute inset-0">
@@ -164,6 +177,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
               findings={findings}
               entries={entries}
               stale={stale}
+              computed={computed}
               onLine={setLine}
               onTrace={toTrace}
             />

@@ -1,10 +1,20 @@
 import type { SpecConflict, SpecDocument } from '@coldfill/contract'
+import { mergeSpecs, type MergeChange } from '@coldfill/spec'
 import { useCallback, useEffect, useRef, useState } from 'react'
 import { refreshProject } from '#lib/refresh.ts'
 import { conflictOf, saveSpec } from './api/spec.ts'
 import { draftsOf, dropDraft, keepDraft, type Draft, type DraftOwner } from './draft-store.ts'
 
 const newSlot = (): string => `${Date.now().toString(36)}${Math.random().toString(36).slice(2, 8)}`
+
+/** A merge with what somebody saved meanwhile, and what is left to choose. */
+export interface MergedText {
+  readonly version: number
+  readonly base: string
+  readonly theirs: string
+  readonly taken: number
+  readonly conflicts: readonly MergeChange[]
+}
 
 /**
  * The text in the editor and its life: kept on this device while it is not saved, saved against the version it was made from,
@@ -17,6 +27,7 @@ export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
     draftsOf(localStorage, owner).filter((draft) => draft.text !== document.text),
   )
   const [conflict, setConflict] = useState<SpecConflict | null>(null)
+  const [merged, setMerged] = useState<MergedText | null>(null)
   const [saving, setSaving] = useState(false)
   const [error, setError] = useState<unknown>(null)
   const [kept, setKept] = useState(true)
@@ -99,6 +110,43 @@ export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
     setConflict(null)
   }
 
+  /** Puts their changes into the own text by path. False where a text cannot be read, so that only comparing is left. */
+  const mergeBoth = (): boolean => {
+    if (!conflict) return false
+    const merge = mergeSpecs(base.text, text, conflict.text)
+    if (!merge.ok) return false
+    const mine: Draft = { slot, text, baseVersion: base.version, at: new Date().toISOString() }
+    const inSlot = newSlot()
+    setKept(keepDraft(localStorage, owner, mine))
+    setOffered((drafts) => [mine, ...drafts])
+    setSlot(inSlot)
+    setMerged({
+      version: conflict.version,
+      base: base.text,
+      theirs: conflict.text,
+      taken: merge.taken.length,
+      conflicts: merge.conflicts,
+    })
+    setBase(conflict)
+    setText(merge.text)
+    keep(merge.text, conflict, inSlot)
+    setConflict(null)
+    return true
+  }
+
+  /** Chooses their value at one place that both changed. */
+  const takeTheirsAt = (path: string) => {
+    if (!merged) return
+    const merge = mergeSpecs(merged.base, text, merged.theirs, (each) => (each === path ? 'theirs' : 'mine'))
+    if (!merge.ok) return
+    change(merge.text)
+    setMerged({
+      ...merged,
+      taken: merged.taken + merge.taken.filter((each) => each.path === path).length,
+      conflicts: merge.conflicts.filter((each) => merged.conflicts.some((open) => open.path === each.path)),
+    })
+  }
+
   const throwAway = (draft: Draft) => {
     dropDraft(localStorage, owner, draft.slot)
     setOffered((drafts) => drafts.filter((other) => other.slot !== draft.slot))
@@ -129,6 +177,10 @@ export const useSpecDraft = (document: SpecDocument, owner: DraftOwner) => {
     save: () => saveOnto(base),
     saveOver: () => saveOnto(conflict ?? base),
     takeTheirs,
+    mergeBoth,
+    merged,
+    takeTheirsAt,
+    endMerge: () => setMerged(null),
     takeUp,
     throwAway,
   }

@@ -7,6 +7,10 @@ import { paths } from '#config/paths.ts'
 import { capital } from '#lib/format.ts'
 import { citationWords } from '#lib/sized-project.ts'
 
+import { CodeExample } from './code-example.tsx'
+import { KeyboardList } from './keyboard-list.tsx'
+import { SpecReference } from './spec-reference.tsx'
+
 const layers = ['syntax', 'spec', 'engineering'] as const
 
 const Codes = ({ reference, here }: { readonly reference: Reference; readonly here: string }) => (
@@ -40,6 +44,7 @@ const Codes = ({ reference, here }: { readonly reference: Reference; readonly he
                   <p className="text-read">
                     <Prose text={code.fix} />
                   </p>
+                  <CodeExample code={id} />
                 </dd>
               </div>
             ))}
@@ -113,6 +118,8 @@ const Methods = ({ reference }: { readonly reference: Reference }) => (
 )
 
 const sections = [
+  { id: 'spec', title: 'Spec' },
+  { id: 'keyboard', title: 'Keyboard' },
   { id: 'findings', title: 'Findings' },
   { id: 'methods', title: 'Methods' },
   { id: 'assumptions', title: 'Assumptions' },
@@ -131,6 +138,14 @@ export const ReferenceSections = ({ reference, here }: { readonly reference: Ref
       <Link to={paths.verification()}>Verification</Link>
       <a href="/schema/coldfill-1.json">JSON Schema of the spec</a>
     </nav>
+    <section id="spec" tabIndex={-1} className="scroll-mt-4">
+      <SectionHeading note="Every key, with an example for each kind of vessel">Spec</SectionHeading>
+      <SpecReference vocabulary={reference.vocabulary} />
+    </section>
+    <section id="keyboard" tabIndex={-1} className="scroll-mt-4">
+      <SectionHeading note="In the spec editor; on a Mac, Cmd for Ctrl">Keyboard</SectionHeading>
+      <KeyboardList />
+    </section>
     <section id="findings" tabIndex={-1} className="scroll-mt-4">
       <SectionHeading note="Accept a warning in the text: # coldfill: accept CODE because …">Findings</SectionHeading>
       <Codes reference={reference} here={here} />

@@ -1,55 +1,127 @@
-import type { Range, SpecModel } from '@coldfill/spec'
+import { outlineOf, type OutlineItem, type Range } from '@coldfill/spec'
+import { useMemo, useState } from 'react'
+import { SeverityMark } from '#components/ui/severity-mark.tsx'
+import { plural } from '#lib/format.ts'
+import type { Finding } from '#lib/sized-project.ts'
 import type { MarginEntry } from '../margin-lines.ts'
+import { badgesOf, type Badge } from '../outline-badges.ts'
 
 interface Props {
-  readonly model: SpecModel | null
+  readonly text: string
+  readonly findings: readonly Finding[]
   readonly entries: readonly MarginEntry[]
   readonly stale: boolean
   readonly onJump: (range: Range) => void
 }
 
-/** Systems and vessels of the text, each with its size; a way through a long spec. */
-export const Outline = ({ model, entries, stale, onJump }: Props) => (
-  <nav aria-label="Outline" className="h-full overflow-y-auto border-r border-hair py-2">
-    {model?.systems.map((system) => (
-      <div key={system.path} className="pb-2">
-        <button
-          type="button"
-          onClick={() => onJump(system.range)}
-          className="block w-full px-3 py-0.5 text-left hover:bg-steel-wash"
-        >
-          <span className="font-mono text-cell font-semibold">{system.id}</span>
-          {system.title ? <span className="block truncate text-cell text-pencil">{system.title.value}</span> : null}
-        </button>
-        <ul>
-          {system.vessels.map((vessel) => {
-            const entry = entries.find((one) => one.mark === vessel.mark)
-            return (
-              <li key={vessel.path}>
-                <button
-                  type="button"
-                  onClick={() => onJump(vessel.range)}
-                  className="flex w-full items-baseline justify-between gap-2 py-[3px] pr-3 pl-6 text-left hover:bg-steel-wash"
-                >
-                  <span className="font-mono text-cell whitespace-nowrap">
-                    {vessel.mark}
-                    {entry?.was ? (
-                      <span className="ml-1 font-sans text-redline" title={`${entry.was} in the last issue`}>
-                        △
-                      </span>
-                    ) : null}
-                  </span>
-                  <span
-                    className={`figures truncate text-cell ${entry?.sized === false ? 'text-fault' : 'text-pencil'} ${stale ? 'opacity-60' : ''}`}
-                  >
-                    {entry?.size}
-                  </span>
-                </button>
-              </li>
-            )
-          })}
-        </ul>
-      </div>
-    )) ?? <p className="px-3 text-cell text-pencil">No outline while the text cannot be read.</p>}
-  </nav>
+type Filter = 'all' | 'findings' | 'changed'
+
+const Badges = ({ badge }: { readonly badge: Badge | undefined }) =>
+  badge ? (
+    <span className="inline-flex shrink-0 items-center gap-0.5" title={plural(badge.count, 'finding')}>
+      <SeverityMark severity={badge.severity} />
+      {badge.count > 1 ? <span className="figures text-cell">{badge.count}</span> : null}
+    </span>
+  ) : null
+
+interface ItemProps {
+  readonly item: OutlineItem
+  readonly badge: Badge | undefined
+  readonly entry: MarginEntry | undefined
+  readonly stale: boolean
+  readonly onJump: (range: Range) => void
+}
+
+const insets = { building: 'pl-3', fluid: 'pl-3', system: 'pl-3', vessel: 'pl-6' } as const
+
+const Item = ({ item, badge, entry, stale, onJump }: ItemProps) => (
+  <button
+    type="button"
+    onClick={() => onJump(item.range)}
+    className={`block w-full py-[3px] pr-3 text-left hover:bg-steel-wash ${insets[item.sort]}`}
+  >
+    <span className="flex items-baseline justify-between gap-2">
+      <span className={`font-mono text-cell break-words ${item.sort === 'vessel' ? '' : 'font-semibold'}`}>
+        {item.name || item.detail}
+        {entry?.was ? (
+          <span className="ml-1 font-sans text-redline" title={`${entry.was} in the last issue`}>
+            △
+          </span>
+        ) : null}
+      </span>
+      <span className="flex min-w-0 items-center gap-1.5">
+        {entry ? (
+          <span
+            className={`figures truncate text-cell ${entry.sized ? 'text-pencil' : 'text-fault'} ${stale ? 'opacity-60' : ''}`}
+          >
+            {entry.size}
+          </span>
+        ) : null}
+        <Badges badge={badge} />
+      </span>
+    </span>
+    {item.sort !== 'vessel' && item.name !== '' && item.detail !== '' ? (
+      <span className="block truncate text-cell text-pencil">{item.detail}</span>
+    ) : null}
+  </button>
 )
+
+const flat = (item: OutlineItem): readonly OutlineItem[] => [item, ...item.children.flatMap(flat)]
+
+/** The building with its fluids, systems and vessels, each with its size and its findings; a way through a long spec. */
+export const Outline = ({ text, findings, entries, stale, onJump }: Props) => {
+  const [filter, setFilter] = useState<Filter>('all')
+  const read = useMemo(() => outlineOf(text), [text])
+  // While nothing can be read the outline stays as it was.
+  const [outline, setOutline] = useState(read)
+  if (read && read !== outline) setOutline(read)
+  const badges = useMemo(() => (outline ? badgesOf(outline, findings) : new Map<string, Badge>()), [outline, findings])
+  if (!outline)
+    return (
+      <nav aria-label="Outline" className="h-full border-r border-hair py-2">
+        <p className="px-3 text-cell text-pencil">No outline while the text cannot be read.</p>
+      </nav>
+    )
+  const entryOf = (item: OutlineItem) =>
+    item.sort === 'vessel' ? entries.find((entry) => entry.line === item.range.start.line) : undefined
+  const items = flat(outline)
+  const holds = (item: OutlineItem): boolean =>
+    filter === 'all' ||
+    (filter === 'findings' ? badges.has(item.path) : Boolean(entryOf(item)?.was)) ||
+    item.children.some(holds)
+  const shown = items.filter((item) => (item === outline && filter === 'all') || (item !== outline && holds(item)))
+  const filters = [
+    { id: 'all' as const, label: 'All' },
+    { id: 'findings' as const, label: 'Findings' },
+    { id: 'changed' as const, label: 'Changed' },
+  ]
+  return (
+    <nav aria-label="Outline" className="flex h-full flex-col border-r border-hair">
+      <div role="group" aria-label="Show" className="flex shrink-0 border-b border-hair">
+        {filters.map(({ id, label }) => (
+          <button
+            key={id}
+            type="button"
+            aria-pressed={filter === id}
+            onClick={() => setFilter(id)}
+            className={`h-7 flex-1 text-cell ${filter === id ? 'border-b-[3px] border-b-steel font-semibold' : 'text-pencil hover:text-ink'}`}
+          >
+            {label}
+          </button>
+        ))}
+      </div>
+      <ul className="min-h-0 flex-1 overflow-y-auto py-1">
+        {shown.length === 0 ? (
+          <li className="px-3 text-cell text-pencil">
+            {filter === 'changed' ? 'Nothing differs from the last issue.' : 'No finding.'}
+          </li>
+        ) : null}
+        {shown.map((item) => (
+          <li key={item.path}>
+            <Item item={item} badge={badges.get(item.path)} entry={entryOf(item)} stale={stale} onJump={onJump} />
+          </li>
+        ))}
+      </ul>
+    </nav>
+  )
+}

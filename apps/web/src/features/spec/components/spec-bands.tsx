@@ -1,6 +1,8 @@
 import { Band } from '#components/ui/band.tsx'
 import { Button } from '#components/ui/button.tsx'
+import { useState } from 'react'
 import { clock } from '#lib/format.ts'
+import { MergeBand } from './merge-band.tsx'
 import type { useSpecDraft } from '../use-spec-draft.ts'
 
 interface Props {
@@ -11,6 +13,7 @@ interface Props {
 /** Says that somebody saved meanwhile, and offers texts that were typed here and never saved. Nothing is taken or lost unasked. */
 export const SpecBands = ({ draft, onCompare }: Props) => {
   const { conflict, offered, base } = draft
+  const [unmergeable, setUnmergeable] = useState(false)
   return (
     <>
       {conflict ? (
@@ -20,6 +23,13 @@ export const SpecBands = ({ draft, onCompare }: Props) => {
           title={`${conflict.savedBy.name} saved version ${conflict.version} at ${clock(conflict.savedAt)}, while you were at version ${base.version}.`}
           actions={
             <>
+              <Button
+                look="main"
+                why={unmergeable ? 'One of the texts cannot be read, so only their lines can be compared.' : null}
+                onClick={() => setUnmergeable(!draft.mergeBoth())}
+              >
+                Merge both
+              </Button>
               <Button onClick={() => onCompare({ title: `Saved version ${conflict.version}`, text: conflict.text })}>
                 Compare both
               </Button>
@@ -30,9 +40,11 @@ export const SpecBands = ({ draft, onCompare }: Props) => {
             </>
           }
         >
-          Your text is in the editor and kept on this device. Taking the other one keeps yours as a draft.
+          Your text is in the editor and kept on this device. Merging puts in what they changed elsewhere and asks where
+          both changed the same; taking the other one keeps yours as a draft.
         </Band>
       ) : null}
+      <MergeBand draft={draft} />
       {offered.map((one) => (
         <Band
           key={one.slot}

@@ -8,8 +8,13 @@ import CodeMirror from '@uiw/react-codemirror'
 import { useCallback, useEffect, useImperativeHandle, useMemo, useState, type Ref } from 'react'
 import type { Range, Vocabulary } from '@coldfill/spec'
 import type { Finding } from '#lib/sized-project.ts'
+import { actionMenu, knowFindings } from '../editor/action-menu.ts'
 import { applyFix, findingGutter, offsetOf, showFindings } from '../editor/finding-marks.ts'
-import { languageHelp } from '../editor/language-help.ts'
+import { folding } from '../editor/folding.ts'
+import { formatCommand, formatText } from '../editor/format-command.ts'
+import { closePanel, helpPanel } from '../editor/help-panel.ts'
+import { languageHelp, showComputed, type Computed } from '../editor/language-help.ts'
+import { nameCommands } from '../editor/name-commands.ts'
 import { resultMargin, showResults } from '../editor/result-margin.ts'
 import { editorTheme } from '../editor/theme.ts'
 import type { MarginEntry } from '../margin-lines.ts'
@@ -17,6 +22,7 @@ import type { MarginEntry } from '../margin-lines.ts'
 export interface SpecEditorHandle {
   readonly jumpTo: (range: Range) => void
   readonly fix: (fix: Finding['fixes'][number]) => void
+  readonly format: () => void
 }
 
 interface Props {
@@ -29,6 +35,8 @@ interface Props {
   readonly findings: readonly Finding[]
   readonly entries: readonly MarginEntry[]
   readonly stale: boolean
+  /** What the last sizing made of a path; for the hover. */
+  readonly computed: Computed
   /** Zero-based line of the cursor. Must stay the same function. */
   readonly onLine: (line: number) => void
   /** Leads to the whole calculation of a vessel. Must stay the same function. */
@@ -46,7 +54,10 @@ const always: Extension = [
       { key: 'Mod-f', run: openSearchPanel },
     ]),
   ),
-  keymap.of([indentWithTab]),
+  helpPanel,
+  folding,
+  formatCommand,
+  keymap.of([{ key: 'Escape', run: closePanel }, indentWithTab]),
   EditorView.lineWrapping,
   EditorView.contentAttributes.of({
     'aria-label': 'Spec text. Press Escape, then Tab, to leave the editor.',
@@ -67,6 +78,7 @@ export const SpecEditor = ({
   findings,
   entries,
   stale,
+  computed,
   onLine,
   onTrace,
 }: Props) => {
@@ -86,6 +98,7 @@ export const SpecEditor = ({
     () => ({
       jumpTo,
       fix: (fix) => view && applyFix(view, fix),
+      format: () => view && formatText(view),
     }),
     [jumpTo, view],
   )
@@ -95,7 +108,7 @@ export const SpecEditor = ({
       always,
       resultMargin(onTrace),
       EditorState.readOnly.of(readOnly),
-      vocabulary ? languageHelp(vocabulary) : [],
+      vocabulary ? [languageHelp(vocabulary), nameCommands(vocabulary), actionMenu(vocabulary)] : [],
     ],
     [readOnly, vocabulary, onTrace],
   )
@@ -107,8 +120,13 @@ export const SpecEditor = ({
   )
 
   useEffect(() => {
-    if (view) view.dispatch(showFindings(view.state, findings))
+    if (!view) return
+    view.dispatch(showFindings(view.state, findings))
+    view.dispatch(knowFindings(findings))
   }, [view, findings])
+  useEffect(() => {
+    if (view) view.dispatch(showComputed(computed, stale))
+  }, [view, computed, stale])
   useEffect(() => {
     if (view) view.dispatch(showResults(view.state, entries, stale))
   }, [view, entries, stale])

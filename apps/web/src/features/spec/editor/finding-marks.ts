@@ -9,7 +9,7 @@ import {
   type TransactionSpec,
 } from '@codemirror/state'
 import { gutter, GutterMarker, type EditorView } from '@codemirror/view'
-import type { Position } from '@coldfill/spec'
+import type { Position, TextEdit } from '@coldfill/spec'
 import type { Finding } from '#lib/sized-project.ts'
 
 /** Offset of a position; one outside the text is brought to its ends. */
@@ -101,14 +101,22 @@ export const findingGutter: Extension = [
   }),
 ]
 
-const applyFix = (view: EditorView, fix: Finding['fixes'][number]) => {
-  view.dispatch({
-    changes: fix.edits.map((edit) => ({
+/** Makes the edits in one step to undo. A place that is still to be filled in is selected, so that typing fills it. */
+const applyFix = (view: EditorView, fix: { readonly edits: readonly TextEdit[] }) => {
+  const changes = view.state.changes(
+    fix.edits.map((edit) => ({
       from: offsetOf(view.state.doc, edit.range.start),
       to: offsetOf(view.state.doc, edit.range.end),
       insert: edit.text,
     })),
+  )
+  const [first] = fix.edits
+  const open = first?.text.indexOf('…') ?? -1
+  const anchor = first && open >= 0 ? changes.mapPos(offsetOf(view.state.doc, first.range.start), -1) + open : null
+  view.dispatch({
+    changes,
     userEvent: 'input.fix',
+    ...(anchor === null ? {} : { selection: { anchor, head: anchor + 1 }, scrollIntoView: true }),
   })
   view.focus()
 }
