@@ -1,6 +1,7 @@
 import { readFile } from 'node:fs/promises'
 import { fileURLToPath } from 'node:url'
 import { initWasm, Resvg } from '@resvg/resvg-wasm'
+import { indexedPng } from './indexed-png.ts'
 import { unpackWoff } from './unpack-woff.ts'
 
 const fontFile = (subset: string, weight: number): URL =>
@@ -29,7 +30,7 @@ export const pngRenderer = async (): Promise<(svg: string, width: number) => Uin
     try {
       const image = drawing.render()
       try {
-        return image.asPng()
+        return indexedPng(image.pixels, image.width, image.height)
       } finally {
         image.free()
       }

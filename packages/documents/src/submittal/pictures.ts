@@ -21,8 +21,8 @@ export interface Pictures {
   readonly acceptance: ReadonlyMap<VesselResult, Picture>
 }
 
-/** Pixels across of the dots, about 100 to the inch of paper: only programs that cannot draw show them. */
-const DOTS = 560
+/** Pixels across of the dots, some 190 to the inch of paper. */
+const DOTS = 1080
 
 export const drawPictures = async (result: ProjectResult, { units }: DocumentOptions): Promise<Pictures> => {
   const pngOf = await pngRenderer()
