@@ -1,3 +1,4 @@
+import type { Worker } from 'node:worker_threads'
 import type { DocumentOptions } from '@coldfill/documents'
 import type { ProjectResult } from '@coldfill/sizing'
 import { startWorker } from '../workers/start-worker.ts'
@@ -14,14 +15,31 @@ export interface WrittenFile {
 }
 
 /** `stage` is a place in MAKING_STAGES. */
-export type DocumentProgress = { readonly stage: number } | { readonly files: readonly WrittenFile[] }
+export type DocumentProgress =
+  { readonly stage: number } | { readonly files: readonly WrittenFile[] } | { readonly problem: string }
 
 const LIMIT_MS = 120_000
 const MEBIBYTES = 1_536
 
+/** A thread that has loaded the document libraries and waits for the next order; loading takes longer than writing. */
+let idle: Worker | null = null
+
+const startWriter = (): Worker => {
+  const worker = startWorker(new URL('../workers/documents.worker.ts', import.meta.url), {
+    limits: { maxOldGenerationSizeMb: MEBIBYTES },
+  })
+  // A thread that fails or dies while it waits must not end the process, and is not handed out again.
+  worker.on('error', () => undefined)
+  worker.on('exit', () => {
+    if (idle === worker) idle = null
+  })
+  return worker
+}
+
 /**
- * Writes the schedule and the submittal in a thread of its own: a fresh one each time, since the same content must give the same bytes
- * and the document library counts its bookmarks through the life of a thread.
+ * Writes the schedule and the submittal in a thread of its own, so that the server goes on answering. The thread stays for the next
+ * order; one that failed, took too long or was stopped is ended, and the next order gets a new one. The same content gives the same
+ * bytes whatever the thread has written before.
  */
 export const writeDocuments = (
   order: DocumentOrder,
@@ -29,26 +47,34 @@ export const writeDocuments = (
   signal: AbortSignal,
 ): Promise<readonly WrittenFile[]> =>
   new Promise((resolve, reject) => {
-    const worker = startWorker(new URL('../workers/documents.worker.ts', import.meta.url), {
-      data: order,
-      limits: { maxOldGenerationSizeMb: MEBIBYTES },
-    })
-    const stop = (act: () => void): void => {
+    const worker = idle ?? startWriter()
+    idle = null
+    // A thread that works keeps the process; one that waits does not.
+    worker.ref()
+    const stop = (act: () => void, keep: boolean): void => {
       clearTimeout(timer)
       signal.removeEventListener('abort', abort)
+      worker.off('message', progressed)
+      worker.off('error', fail)
+      worker.off('exit', ended)
+      if (keep && !idle) {
+        idle = worker
+        worker.unref()
+      } else void worker.terminate()
       act()
-      void worker.terminate()
     }
-    const timer = setTimeout(
-      () => stop(() => reject(new Error(`writing the files took longer than ${LIMIT_MS / 1000} s`))),
-      LIMIT_MS,
-    )
-    const abort = (): void => stop(() => reject(new Error('the server is closing')))
+    const fail = (error: Error): void => stop(() => reject(error), false)
+    const timer = setTimeout(() => fail(new Error(`writing the files took longer than ${LIMIT_MS / 1000} s`)), LIMIT_MS)
+    const abort = (): void => fail(new Error('the server is closing'))
     signal.addEventListener('abort', abort)
-    worker.on('message', (progress: DocumentProgress) => {
-      if ('files' in progress) stop(() => resolve(progress.files))
+    const progressed = (progress: DocumentProgress): void => {
+      if ('files' in progress) stop(() => resolve(progress.files), true)
+      else if ('problem' in progress) fail(new Error(progress.problem))
       else onStage(progress.stage)
-    })
-    worker.on('error', (error: Error) => stop(() => reject(error)))
-    worker.on('exit', () => stop(() => reject(new Error('the thread that writes the files ended early'))))
+    }
+    const ended = (): void => fail(new Error('the thread that writes the files ended early'))
+    worker.on('message', progressed)
+    worker.on('error', fail)
+    worker.on('exit', ended)
+    worker.postMessage(order)
   })
