@@ -25,5 +25,4 @@ export {
   type ScheduleTable,
 } from './schedules/schedule-table.ts'
 export { maxCatalogueBytes, readCatalogueFile } from './catalogue/read-catalogue-file.ts'
-export { acceptanceDrawing } from './drawings/acceptance-drawing.ts'
-export { pressureDrawing } from './drawings/pressure-drawing.ts'
+export { acceptanceDrawing, pressureDrawing } from './drawings/index.ts'
