@@ -2,7 +2,8 @@ import type { CatalogueReading } from '@coldfill/sizing'
 import { AppError } from '../errors.ts'
 import { startWorker } from '../workers/start-worker.ts'
 
-const LIMIT_MS = 20_000
+const START_LIMIT_MS = 60_000
+const READ_LIMIT_MS = 15_000
 const MEBIBYTES = 512
 
 const unreadable = (): AppError =>
@@ -29,8 +30,15 @@ export const readUpload = (bytes: Uint8Array): Promise<CatalogueReading> =>
       void worker.terminate()
     }
     const fail = (): void => stop(() => reject(unreadable()))
-    const timer = setTimeout(fail, LIMIT_MS)
-    worker.on('message', (reading: CatalogueReading) => stop(() => resolve(reading)))
+    let timer = setTimeout(fail, START_LIMIT_MS)
+    worker.on('message', (message: CatalogueReading | 'ready') => {
+      if (message !== 'ready') {
+        stop(() => resolve(message))
+        return
+      }
+      clearTimeout(timer)
+      timer = setTimeout(fail, READ_LIMIT_MS)
+    })
     worker.on('error', fail)
     worker.on('exit', fail)
   })
