@@ -31,7 +31,7 @@ it('broken YAML has a finding with its line, and keeps the last results', async 
   const text = 'coldfill: 1\nproject: { number: "FC-241\nsystems:\n'
   await overwriteSpec(page, text)
   await findings()
-    .getByText(/^Line [234]/u)
+    .getByText(/^Line [234]\b/u)
     .first()
     .waitFor()
   await picture(page, '40-broken')
