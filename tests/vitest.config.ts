@@ -11,7 +11,13 @@ export default defineConfig({
     projects: [
       project(
         'unit',
-        ['packages/*/src/**/*.test.ts', 'apps/cli/src/**/*.test.ts', 'tests/*.test.ts', 'tests/golden/**/*.test.ts', 'tests/language-server/**/*.test.ts'],
+        [
+          'packages/*/src/**/*.test.ts',
+          'apps/cli/src/**/*.test.ts',
+          'tests/*.test.ts',
+          'tests/golden/**/*.test.ts',
+          'tests/language-server/**/*.test.ts',
+        ],
         {
           // Generous: a machine may be busy. No test measures time by its limit.
           testTimeout: 120_000,

@@ -10,7 +10,7 @@ let catalogue: Awaited<ReturnType<typeof readCatalogueFile>>['rows']
 
 beforeAll(async () => {
   const read = await readCatalogueFile(readFileSync(new URL('../../examples/catalogue/vessels.csv', import.meta.url)))
-  expect(read.problems).toEqual([])
+  if (read.problems.length > 0) throw new Error(read.problems.map(({ message }) => message).join('\n'))
   catalogue = read.rows
 })
 
