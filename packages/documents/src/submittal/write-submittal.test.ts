@@ -337,6 +337,33 @@ describe('the submittal', () => {
     expect(written.get('word/document.xml')).not.toContain('\u0007')
   })
 
+  it('takes what people wrote in a review as text too', async () => {
+    const odd = '<w:p/> & "x" \u0007\ud800 ]]>'
+    const reviewed = reviewedOptions('US')
+    const written = partsOf(
+      await writeSubmittal(project, {
+        ...reviewed,
+        titleBlock: { ...reviewed.titleBlock, office: odd },
+        dispositions: [{ reviewer: odd, outcome: odd, reason: odd, date: '2026-11-20' }],
+        redlines: (reviewed.redlines ?? []).map((redline) => ({
+          ...redline,
+          quoted: odd,
+          anchor: { type: 'row', mark: odd } as const,
+          messages: redline.messages.map((message) => ({ ...message, text: odd })),
+        })),
+        comparison: {
+          revision: odd,
+          changed: [{ system: odd, mark: odd, key: odd, name: odd, kind: odd, was: odd, now: null }],
+        },
+        override: { reason: odd, by: odd, date: '2026-12-01' },
+      }),
+    )
+    const document = written.get('word/document.xml') ?? ''
+    expect(document).not.toContain('\u0007')
+    expect(document).not.toContain('<w:p/> &')
+    expect(document.split('&lt;w:p/&gt; &amp; ').length).toBeGreaterThan(12)
+  })
+
   it('writes a project without vessels', async () => {
     const empty = { ...project, vessels: [], systems: [], assumptions: [], findings: [], sources: {} }
     const written = partsOf(await writeSubmittal(empty, documentOptions('US'))).get('word/document.xml') ?? ''

@@ -159,7 +159,8 @@ export const writeReadings = (
     const found = vessels.get(`${vessel.system}/${vessel.mark}`)
     for (const key of READABLE) {
       const value = vessel.results[key]
-      if (!value || value.kind !== 'gauge pressure') continue
+      // A number that is not finite becomes null where a result has been stored as JSON.
+      if (value?.kind !== 'gauge pressure' || !Number.isFinite(value.value)) continue
       const number = displayNumber(value.value, value.kind, options.units)
       const format = significantFormat(number, 3)
       const address = found?.cells.get(value.entry)
