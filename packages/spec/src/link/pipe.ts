@@ -44,12 +44,24 @@ const neighbours = (sizes: Sizes, written: string): string[] => {
   return [...below, ...above]
 }
 
+const spelled = new WeakMap<Sizes, ReadonlyMap<string, string>>()
+
+/** Sizes of a family by every way in which they may be written; of two that share one the first. */
+const bySpelling = (sizes: Sizes): ReadonlyMap<string, string> => {
+  const known = spelled.get(sizes)
+  if (known) return known
+  const made = new Map<string, string>()
+  for (const { size, spellings } of sizes)
+    for (const each of [size, ...spellings].map(plainSize)) if (!made.has(each)) made.set(each, size)
+  spelled.set(sizes, made)
+  return made
+}
+
 /** The size as the family names it. Undefined where the family does not have it. */
 export const linkPipeSize = (context: Context, at: At, family: string, written: string): string | undefined => {
   const sizes = context.vocabulary.pipes[family] ?? []
-  const typed = plainSize(written)
-  const found = sizes.find(({ size, spellings }) => [size, ...spellings].some((each) => plainSize(each) === typed))
-  if (found) return found.size
+  const found = bySpelling(sizes).get(plainSize(written))
+  if (found !== undefined) return found
   const near = neighbours(sizes, written)
   context.report.add('CF-S041', at, {
     message: `\`${family}\` has no size \`${written}\`.`,

@@ -15,6 +15,7 @@ import type { At } from '../report.ts'
 import { wrongChoice } from './choice.ts'
 import { type Block, type Context, entriesOf, type Entry } from './context.ts'
 import { asScalar, missingKey, unknownKey, type UnknownKey } from './keys.ts'
+import { readKnownQuantity } from './known-quantity.ts'
 import { expectText } from './shape.ts'
 
 const PROBLEM_CODES: Readonly<Record<Exclude<QuantityProblem['reason'], 'empty'>, FindingCode>> = {
@@ -66,7 +67,7 @@ const readQuantity = (
   at: At,
   text: string,
 ): FieldValue<QuantityField> | undefined => {
-  const reading = parseQuantity(text, field.kinds)
+  const reading = readKnownQuantity(text, field.kinds)
   if (!reading.ok) {
     reportQuantity(context, at, usualProblem(field, text) ?? reading.problem, field.example)
     return undefined
