@@ -29,6 +29,7 @@ export const continueThread = async (
       .where(and(eq(redlines.projectId, project.id), eq(redlines.number, number)))
     if (!row) throw notFound()
     requireRedline(access, row, ACT[message.did])
+    const facts = await projectFacts(tx, project)
     const [counted] = await tx
       .select({ count: count() })
       .from(redlineMessages)
@@ -42,15 +43,17 @@ export const continueThread = async (
       writtenAt: now,
     })
     if (message.did === 'closed')
-      await tx.update(redlines).set({ state: 'closed', closedBy: principal.userId }).where(eq(redlines.id, row.id))
+      await tx
+        .update(redlines)
+        .set({ state: 'closed', closedBy: principal.userId, closedOn: facts.revisions[0]?.id ?? row.revisionId })
+        .where(eq(redlines.id, row.id))
     if (message.did === 'reopened')
-      await tx.update(redlines).set({ state: 'open', closedBy: null }).where(eq(redlines.id, row.id))
+      await tx.update(redlines).set({ state: 'open', closedBy: null, closedOn: null }).where(eq(redlines.id, row.id))
     await recordEvent(tx, principal, now, {
       action: ACTION[message.did],
       project: project.number,
       detail: `Redline ${number}`,
     })
-    const facts = await projectFacts(tx, project)
     const label = facts.revisions.find((revision) => revision.id === row.revisionId)?.label ?? ''
     // The consultant's words go to the author of the redline, the reviewer's to the consultants.
     const to = facts.members.filter(

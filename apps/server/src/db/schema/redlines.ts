@@ -22,6 +22,8 @@ export const redlines = pgTable(
     state: text('state', { enum: ['pending', 'open', 'closed'] }).notNull(),
     createdAt: instant('created_at').notNull(),
     closedBy: uuid('closed_by'),
+    /** Newest revision when it was closed: it stands on that one still, and no longer on later ones. */
+    closedOn: uuid('closed_on'),
   },
   (t) => [
     primaryKey({ name: 'redlines_pk', columns: [t.id] }),
@@ -31,6 +33,7 @@ export const redlines = pgTable(
     ),
     foreignKey({ name: 'redlines_revision_fk', columns: [t.revisionId], foreignColumns: [revisions.id] }),
     foreignKey({ name: 'redlines_author_fk', columns: [t.authorId], foreignColumns: [users.id] }),
+    foreignKey({ name: 'redlines_closed_on_fk', columns: [t.closedOn], foreignColumns: [revisions.id] }),
     foreignKey({ name: 'redlines_closed_by_fk', columns: [t.closedBy], foreignColumns: [users.id] }),
   ],
 )

@@ -163,11 +163,16 @@ describe('in the next revision, a redline', () => {
     expect(assumption).toMatchObject({ anchorState: 'pinned' })
   })
 
-  it('stays behind where it is closed, and is found there', async () => {
+  it('stands on the revision it is closed on and those before, and no longer on later ones', async () => {
     const open = await list(team.reviewer)
     const number = open[0]?.number ?? 0
     await team.reviewer.post(`${team.at}/redlines/${number}/close`).send({}).expect(200)
-    expect((await list(team.reviewer)).map((redline) => redline.number)).not.toContain(number)
-    expect((await list(team.reviewer, '?rev=-')).map((redline) => redline.number)).toContain(number)
+    const numbers = async (rev?: string) => (await list(team.reviewer, rev)).map((redline) => redline.number)
+    expect(await numbers()).toContain(number)
+    expect(await numbers('?rev=-')).toContain(number)
+    await team.save(loopSpec({ marks: ['ET-1'] }).replace('static-height: 20 ft', 'static-height: 26 ft'))
+    await team.issue()
+    expect(await numbers()).not.toContain(number)
+    expect(await numbers('?rev=A')).toContain(number)
   })
 })

@@ -39,10 +39,11 @@ const presentThreads = async (
   if (!viewed) return []
   const { rows, messages } = await visibleThreads(deps.db, access.project.id, access.principal.userId, number)
   const sequence = new Map(facts.revisions.map((revision) => [revision.id, revision.sequence]))
-  // A redline is not shown on a revision that is older than it; a closed one stays behind on the revision it was written on.
-  const shown = rows.filter(({ revisionId, state }) => {
+  // A redline is shown from the revision it was written on; a closed one up to the revision on which it was closed.
+  const shown = rows.filter(({ revisionId, state, closedOn }) => {
     const written = sequence.get(revisionId) ?? 0
-    return number !== undefined || written === viewed.sequence || (written < viewed.sequence && state !== 'closed')
+    const last = state === 'closed' ? (sequence.get(closedOn ?? revisionId) ?? written) : Infinity
+    return number !== undefined || (written <= viewed.sequence && viewed.sequence <= last)
   })
   const contents = new Map<string, Frozen>()
   for (const id of new Set([viewed.id, ...shown.map(({ revisionId }) => revisionId)]))

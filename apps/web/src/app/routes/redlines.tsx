@@ -98,7 +98,7 @@ export function Component() {
                 <p className="text-read">{filter === 'waiting' ? 'Nothing waits on you.' : 'No redline here.'}</p>
                 {project.revisions.length > 1 && (filter === 'closed' || filter === 'all') ? (
                   <p className="mt-1 text-pencil">
-                    A closed redline stays with the revision it was written on: choose that under Content.
+                    A closed redline stays with the revisions up to the one it was closed on: choose one under Content.
                   </p>
                 ) : null}
                 {project.waitingOn.map(({ who, what }) => (
@@ -121,7 +121,7 @@ export function Component() {
                     <p className="text-pencil">
                       {chosen === null
                         ? 'Choose a redline to read it.'
-                        : `Redline ${chosen} is not among these. A closed one stays with the revision it was written on.`}
+                        : `Redline ${chosen} is not among these. A closed one stays with the revisions up to the one it was closed on.`}
                     </p>
                   )}
                 </div>

@@ -1,0 +1,2 @@
+ALTER TABLE "redlines" ADD COLUMN "closed_on" uuid;--> statement-breakpoint
+ALTER TABLE "redlines" ADD CONSTRAINT "redlines_closed_on_fk" FOREIGN KEY ("closed_on") REFERENCES "public"."revisions"("id") ON DELETE no action ON UPDATE no action;
