@@ -154,6 +154,23 @@ const checkGlycol = (context: VesselContext): void => {
   }
 }
 
+/** What is left at the pump suction when the pump runs, where the vessel stands at its discharge and the fill is given. */
+const checkSuction = (context: VesselContext, results: Results): void => {
+  const { pressure } = context.system
+  const head = pressure['pump-head']
+  const fill = results['fill-pressure']?.value
+  if (pressure['vessel-connection']?.value !== 'pump discharge' || !pressure.fill || !head || fill === undefined) return
+  const drop = head.value.kind === 'length' ? densityWhenFilled(context) * GRAVITY * head.value.value : head.value.value
+  const suction = fill - drop
+  if (suction >= 0) return
+  report(context, 'CF-E057', {
+    message: `With ${context.vessel.mark} at the pump discharge, the suction falls by ${show(context, 'pressure difference', drop)} to ${show(context, 'gauge pressure', suction)} when the pump runs.`,
+    hint: 'Connect the vessel at the pump suction, or raise the fill pressure by the pump head.',
+    at: pressure['vessel-connection'],
+    related: [{ message: 'The pump head is given here.', path: head.path, range: head.range }],
+  })
+}
+
 /** Pressures, temperatures and fluid that a reviewing engineer checks at an expansion tank. */
 export const checkHydronic = (
   context: VesselContext,
@@ -167,6 +184,7 @@ export const checkHydronic = (
   checkRelief(context, atmosphere)
   checkTemperatures(context, construction, results['water-reserve'] !== undefined)
   checkGlycol(context)
+  checkSuction(context, results)
   const connection = system.pressure['vessel-connection']
   if (connection?.value === 'pump discharge') {
     report(context, 'CF-E043', {

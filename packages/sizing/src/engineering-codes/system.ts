@@ -58,6 +58,14 @@ export const systemCodes = {
     'Set the relief valve to 150 psi or the rating of the tank.',
     `IPC 504.4, UPC 608.4 (${memory}). ${local}`,
   ),
+  'CF-E057': code(
+    'error',
+    'Pump suction below atmosphere',
+    'The vessel is connected at the pump discharge, and the fill pressure given outright does not cover the pump head.',
+    'The connection keeps its pressure, so the suction falls by the whole pump head: the pump cavitates and air is drawn in.',
+    'Connect the vessel at the pump suction, or raise the fill pressure by the pump head.',
+    'ASHRAE Handbook, HVAC Systems and Equipment, point of no pressure change.',
+  ),
   'CF-E060': code(
     'warning',
     'The fluid may freeze',
