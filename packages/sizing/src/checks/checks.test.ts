@@ -193,6 +193,15 @@ const cases: readonly Case[] = [
     domestic('{ supply: 50 psi, maximum: 100 psi, relief-valve: 150 psi }', { codes: upc }),
   ],
   ['CF-E056', 'systems.D.pressure.relief-valve', domestic('{ supply: 50 psi, relief-valve: 160 psi }')],
+  // Derived for the handbook's point of no pressure change: fill 15 psig, 46.2 ft of head (20 psi), suction -5 psig.
+  [
+    'CF-E057',
+    'systems.S.pressure.vessel-connection',
+    hydronic({
+      pressure:
+        '{ static-height: 20 ft, fill: 15 psi, relief-valve: 50 psi, pump-head: 46.2 ft, vessel-connection: pump discharge }',
+    }),
+  ],
   [
     'CF-E060',
     'systems.S.temperatures.low',
