@@ -188,6 +188,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
         <CompareTexts left={compared} right={{ title: 'Text in the editor', text }} onClose={() => setCompared(null)} />
       ) : (
         <Tray
+          text={settled}
           findings={findings}
           reasons={reference.data?.findingCodes ?? NO_REASONS}
           entries={entries}

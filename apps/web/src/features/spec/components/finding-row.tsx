@@ -1,4 +1,5 @@
-import { useState, type FormEvent } from 'react'
+import { changedLines } from '@coldfill/spec'
+import { useMemo, useState, type FormEvent } from 'react'
 import { Link } from 'react-router-dom'
 import { Button } from '#components/ui/button.tsx'
 import { TextField } from '#components/ui/field.tsx'
@@ -8,6 +9,8 @@ import { paths } from '#config/paths.ts'
 import type { Finding } from '#lib/sized-project.ts'
 
 interface Props {
+  /** The text that the finding is about, to show what a fix would change. */
+  readonly text: string
   readonly finding: Finding
   /** Why the code matters, from the reference. */
   readonly why: string | undefined
@@ -52,9 +55,16 @@ const Accept = ({
   )
 }
 
+/** The lines that a fix takes out and puts in, in words. */
+const changeWords = (text: string, fix: Finding['fixes'][number]): string =>
+  changedLines(text, fix.edits)
+    .flatMap(({ was, now }) => [...was.map((line) => `− ${line.trim()}`), ...now.map((line) => `+ ${line.trim()}`)])
+    .join('\n')
+
 /** A finding in words: what, why, how to mend it, and the way to its place. */
-export const FindingRow = ({ finding, why, readOnly, chosen, onJump, onFix, onAccept }: Props) => {
+export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix, onAccept }: Props) => {
   const [accepting, setAccepting] = useState(false)
+  const titles = useMemo(() => new Map(finding.fixes.map((fix) => [fix, changeWords(text, fix)])), [finding, text])
   return (
     <li className={`flex gap-2.5 border-b border-hair px-3 py-1.5 ${chosen ? 'bg-steel-wash' : ''}`}>
       <span className="pt-0.5">
@@ -90,7 +100,7 @@ export const FindingRow = ({ finding, why, readOnly, chosen, onJump, onFix, onAc
         {readOnly || accepting || finding.accepted !== undefined ? null : (
           <div className="flex flex-wrap gap-2 empty:hidden">
             {finding.fixes.map((fix) => (
-              <Button key={fix.title} small className="mt-1" onClick={() => onFix(fix)}>
+              <Button key={fix.title} small className="mt-1" title={titles.get(fix)} onClick={() => onFix(fix)}>
                 {fix.title}
               </Button>
             ))}

@@ -7,6 +7,7 @@ import type { MarginEntry } from '../margin-lines.ts'
 import { FindingRow } from './finding-row.tsx'
 
 interface Props {
+  readonly text: string
   readonly findings: readonly Finding[]
   readonly reasons: Readonly<Record<string, { readonly why: string }>>
   readonly entries: readonly MarginEntry[]
@@ -27,7 +28,19 @@ const counted = (findings: readonly Finding[]) =>
   }))
 
 /** Under the editor: findings with why and fix, and the sized results in words. */
-export const Tray = ({ findings, reasons, entries, stale, readOnly, line, status, onJump, onFix, onAccept }: Props) => {
+export const Tray = ({
+  text,
+  findings,
+  reasons,
+  entries,
+  stale,
+  readOnly,
+  line,
+  status,
+  onJump,
+  onFix,
+  onAccept,
+}: Props) => {
   const [tab, setTab] = useState<'findings' | 'results' | null>('findings')
   const tabs = [
     { id: 'findings' as const, label: `Findings ${findings.length}` },
@@ -83,6 +96,7 @@ export const Tray = ({ findings, reasons, entries, stale, readOnly, line, status
                 {findings.map((finding) => (
                   <FindingRow
                     key={`${finding.code} ${finding.path} ${finding.range.start.line} ${finding.range.start.character} ${finding.message}`}
+                    text={text}
                     finding={finding}
                     why={reasons[finding.code]?.why}
                     readOnly={readOnly}
