@@ -1,4 +1,5 @@
-import type { DocumentOptions, RevisionEntry } from '@coldfill/documents'
+import { OUTCOME_LABELS } from '@coldfill/contract'
+import type { DispositionEntry, DocumentOptions, RevisionEntry } from '@coldfill/documents'
 import type { ProjectResult } from '@coldfill/sizing'
 import type { MakingRow, ProjectFacts, RevisionRow } from '../review/project-facts.ts'
 import { isAccepting, standingDispositions } from '../review/standing.ts'
@@ -37,12 +38,23 @@ const revisionBlock = (facts: ProjectFacts, revision: RevisionRow, making: Makin
   return entries
 }
 
+/** The reviewers' last words on this content, in the words of the office. */
+const dispositionsOf = (facts: ProjectFacts, revision: RevisionRow): DispositionEntry[] =>
+  standingDispositions(facts, revision).map(({ row, stale }) => ({
+    reviewer: facts.people.get(row.reviewerId)?.name ?? '',
+    outcome: OUTCOME_LABELS[row.outcome],
+    reason: row.reason,
+    date: day(row.setAt),
+    stale,
+  }))
+
 export const documentOptions = (
   facts: ProjectFacts,
   office: string,
   revision: RevisionRow,
   making: MakingRow,
   result: ProjectResult,
+  comparison: DocumentOptions['comparison'],
 ): DocumentOptions => {
   const forConstruction = making.set === 'construction'
   const accepting = standingDispositions(facts, revision).filter(({ row, stale }) => !stale && isAccepting(row))
@@ -63,6 +75,11 @@ export const documentOptions = (
       status: forConstruction ? CONSTRUCTION_STATUS : REVIEW_STATUS,
     },
     revisions: revisionBlock(facts, revision, making),
+    ...(comparison ? { comparison } : {}),
+    ...(forConstruction ? { dispositions: dispositionsOf(facts, revision) } : {}),
+    ...(forConstruction && making.overrideReason !== null
+      ? { override: { reason: making.overrideReason, by: approved ?? '', date: day(making.askedAt) } }
+      : {}),
     contentHash: revision.contentHash,
   }
 }

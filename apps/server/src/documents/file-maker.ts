@@ -7,6 +7,7 @@ import { describeError } from '../describe-error.ts'
 import type { Log } from '../log.ts'
 import type { Postman } from '../mail/postman.ts'
 import { createRounds, type Rounds } from '../rounds.ts'
+import { changedResults } from '../review/changed-results.ts'
 import { frozenContent } from '../review/frozen.ts'
 import { type MakingRow, projectFacts } from '../review/project-facts.ts'
 import { documentOptions } from './document-options.ts'
@@ -54,10 +55,15 @@ export const createFileMaker = ({
     const revision = facts.revisions.find((row) => row.id === making.revisionId)
     if (!revision) return
     const { result } = await frozenContent(db, revision.id)
+    const before = facts.revisions.find((row) => row.sequence === revision.sequence - 1)
+    const comparison = before && {
+      revision: before.label,
+      changed: changedResults((await frozenContent(db, before.id)).result, result),
+    }
     // Stage notes are written one after the other and before the files are stored.
     let noted: Promise<void> = Promise.resolve()
     const files = await writeDocuments(
-      { result, options: documentOptions(facts, found.office, revision, making, result) },
+      { result, options: documentOptions(facts, found.office, revision, making, result, comparison) },
       (stage) => {
         noted = noted.then(() => note(making, { stage }))
       },
