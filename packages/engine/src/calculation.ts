@@ -43,7 +43,7 @@ export class Calculation {
   readonly mark: string
   readonly functions: Readonly<Record<string, FormulaFunction>>
   private readonly numbers: Record<string, number> = {}
-  private readonly byId = new Map<string, TraceEntry>()
+  private readonly ids = new Set<string>()
   private readonly bySymbol = new Map<string, TraceEntry>()
   private readonly parts: { title: string; entries: TraceEntry[] }[] = []
 
@@ -88,14 +88,14 @@ export class Calculation {
     if (!part) throw new Error(`${this.mark}: no section is open`)
     part.entries.push(entry)
     this.bySymbol.set(entry.symbol, entry)
-    this.byId.set(entry.id, entry)
+    this.ids.add(entry.id)
     this.numbers[entry.symbol] = entry.value
   }
 
   private idFor(name: string): string {
     const base = `${this.mark}/${hyphenated(name)}`
     let id = base
-    for (let n = 2; this.byId.has(id); n += 1) id = `${base}-${n}`
+    for (let n = 2; this.ids.has(id); n += 1) id = `${base}-${n}`
     return id
   }
 

@@ -33,7 +33,8 @@ const numberOf = (assumption: Assumption, text: string): AssumedNumber | null =>
 export class AssumptionRegister {
   private readonly overrides: ReadonlyMap<string, SpecModel['assumptions'][number]>
   private readonly uses = new Map<string, Use>()
-  private readonly byVessel = new Map<string, Set<string>>()
+  /** Vessels are sized one after the other; what the present one leaned on. */
+  private present = { vessel: '', ids: new Set<string>() }
 
   constructor(overrides: SpecModel['assumptions']) {
     this.overrides = new Map(overrides.map((override) => [override.id, override]))
@@ -53,9 +54,8 @@ export class AssumptionRegister {
       this.uses.set(id, use)
     }
     use.usedBy.add(vessel)
-    const ids = this.byVessel.get(vessel)
-    if (ids) ids.add(id)
-    else this.byVessel.set(vessel, new Set([id]))
+    if (this.present.vessel !== vessel) this.present = { vessel, ids: new Set() }
+    this.present.ids.add(id)
     return use
   }
 
@@ -84,8 +84,10 @@ export class AssumptionRegister {
 
   /** Ids that a vessel leaned on, in order of number. */
   usedBy(vessel: string): readonly string[] {
-    const ids = this.byVessel.get(vessel)
-    return ids ? [...this.uses.keys()].filter((id) => ids.has(id)) : []
+    const { present } = this
+    return [...this.uses]
+      .filter(([id, use]) => (present.vessel === vessel ? present.ids.has(id) : use.usedBy.has(vessel)))
+      .map(([id]) => id)
   }
 
   list(): readonly UsedAssumption[] {
