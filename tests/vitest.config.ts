@@ -27,6 +27,8 @@ export default defineConfig({
       project('server', ['apps/server/src/**/*.test.ts'], { testTimeout: 180_000, hookTimeout: 180_000 }),
       project('web', ['apps/web/src/**/*.test.ts']),
       project('browser', ['tests/e2e/**/*.test.ts'], {
+        // A browser on a busy machine takes more than the second that is usual for code.
+        expect: { poll: { timeout: 15_000 } },
         testTimeout: 300_000,
         hookTimeout: 180_000,
         fileParallelism: false,
