@@ -9,6 +9,7 @@ import { contentsCases } from './cases/contents.ts'
 import { domesticCases } from './cases/domestic.ts'
 import { europeanCases } from './cases/hydronic-european.ts'
 import { hydronicCases } from './cases/hydronic.ts'
+import { ruleCases } from './cases/rules.ts'
 import { vesselCases } from './cases/vessels.ts'
 import { waterCases } from './cases/water.ts'
 
@@ -45,6 +46,7 @@ export const verificationCases: readonly VerificationCase[] = [
   ...vesselCases,
   ...waterCases,
   ...contentsCases,
+  ...ruleCases,
 ]
 
 const readPrinted = (text: string, kind: Kind): { readonly value: number; readonly unit: Unit } => {
