@@ -7,7 +7,8 @@ interface Use {
   readonly assumption: Assumption
   readonly value: string
   readonly override: SpecModel['assumptions'][number] | undefined
-  readonly usedBy: Set<string>
+  /** In order; a vessel's uses come one after the other. */
+  readonly usedBy: string[]
   /** Read once from the text of the value; undefined until asked for. */
   number?: AssumedNumber | undefined
 }
@@ -50,10 +51,10 @@ export class AssumptionRegister {
       if (override && assumption.kind === 'words' && !assumption.choices?.includes(override.value.value))
         override = undefined
       if (override && assumption.kind !== 'words' && !numberOf(assumption, override.value.value)) override = undefined
-      use = { assumption, override, value: override?.value.value ?? assumption.value, usedBy: new Set() }
+      use = { assumption, override, value: override?.value.value ?? assumption.value, usedBy: [] }
       this.uses.set(id, use)
     }
-    use.usedBy.add(vessel)
+    if (use.usedBy.at(-1) !== vessel) use.usedBy.push(vessel)
     if (this.present.vessel !== vessel) this.present = { vessel, ids: new Set() }
     this.present.ids.add(id)
     return use
@@ -82,12 +83,10 @@ export class AssumptionRegister {
     return this.use(id, vessel).value
   }
 
-  /** Ids that a vessel leaned on, in order of number. */
+  /** Ids that the vessel sized last leaned on, in order of number. */
   usedBy(vessel: string): readonly string[] {
     const { present } = this
-    return [...this.uses]
-      .filter(([id, use]) => (present.vessel === vessel ? present.ids.has(id) : use.usedBy.has(vessel)))
-      .map(([id]) => id)
+    return present.vessel === vessel ? [...this.uses.keys()].filter((id) => present.ids.has(id)) : []
   }
 
   list(): readonly UsedAssumption[] {
@@ -103,7 +102,7 @@ export class AssumptionRegister {
         source,
         because,
         path: override?.path ?? assumption.overriddenBy,
-        usedBy: [...usedBy],
+        usedBy,
       }
       return override ? { ...used, reason: override.reason.value } : used
     })
