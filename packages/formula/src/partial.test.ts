@@ -33,12 +33,12 @@ describe('partial derivatives', () => {
         randomValues,
         (text, values) => {
           const tree = formulaTree(text)
-          for (const symbol of symbolsIn(tree)) {
+          const apart = symbolsIn(tree).filter((symbol) => {
             const forward = differentiate(tree, functions)(values, { [symbol]: 1 }).derivative
             const own = partial(tree, symbol, functions)?.(values) ?? 0
-            if (Number.isFinite(forward))
-              expect(Math.abs(own - forward)).toBeLessThanOrEqual(1e-9 * Math.abs(forward) + 1e-300)
-          }
+            return Number.isFinite(forward) && !(Math.abs(own - forward) <= 1e-9 * Math.abs(forward) + 1e-300)
+          })
+          expect(apart).toEqual([])
         },
       ),
     )
