@@ -43,12 +43,16 @@ export class Calculation {
   readonly mark: string
   readonly functions: Readonly<Record<string, FormulaFunction>>
   private readonly numbers: Record<string, number> = {}
-  private readonly ids = new Set<string>()
+  /** `ET-1/`, before every id; joined to names that are worked out once, so that an id costs little. */
+  private readonly prefix: string
+  /** Ids without the prefix. */
+  private readonly names = new Set<string>()
   private readonly bySymbol = new Map<string, TraceEntry>()
   private readonly parts: { title: string; entries: TraceEntry[] }[] = []
 
   constructor(mark: string, functions: Readonly<Record<string, FormulaFunction>>) {
     this.mark = mark
+    this.prefix = `${mark}/`
     this.functions = functions
   }
 
@@ -88,21 +92,26 @@ export class Calculation {
     if (!part) throw new Error(`${this.mark}: no section is open`)
     part.entries.push(entry)
     this.bySymbol.set(entry.symbol, entry)
-    this.ids.add(entry.id)
     this.numbers[entry.symbol] = entry.value
   }
 
   private idFor(name: string): string {
-    const base = `${this.mark}/${hyphenated(name)}`
-    let id = base
-    for (let n = 2; this.ids.has(id); n += 1) id = `${base}-${n}`
-    return id
+    const base = hyphenated(name)
+    let own = base
+    for (let n = 2; this.names.has(own); n += 1) own = `${base}-${n}`
+    this.names.add(own)
+    return this.prefix + own
   }
 
   input(symbol: string, kind: Kind, name: string, given: GivenValue): void {
     const { value, origin, authored } = given
-    const entry = { entry: 'input', id: this.idFor(name), symbol, name, kind, value, origin } as const
-    this.put(authored === undefined ? entry : { ...entry, authored })
+    const id = this.idFor(name)
+    // Two literals, for a spread would give each entry a hidden class of its own.
+    this.put(
+      authored === undefined
+        ? { entry: 'input', id, symbol, name, kind, value, origin }
+        : { entry: 'input', id, symbol, name, kind, value, origin, authored },
+    )
   }
 
   /**

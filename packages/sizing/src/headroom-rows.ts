@@ -1,9 +1,20 @@
-import { limitOf, type Method, sensitivities, type TraceInput } from '@coldfill/engine'
+import { limitOf, type Method, sensitivities, type TraceEntry, type TraceInput, type TraceSection } from '@coldfill/engine'
 import type { HeadroomRow, SelectedVessel } from './result.ts'
 import type { VesselContext } from './vessel-context.ts'
 
 /** Constants of the material and published dimensions, which nobody moves. */
 const isFixed = (input: TraceInput): boolean => input.symbol.startsWith('alpha') || input.origin.from === 'table'
+
+/** Everything up to the symbol, in order. */
+const chainTo = (answer: string, trace: readonly TraceSection[]): readonly TraceEntry[] => {
+  const chain: TraceEntry[] = []
+  for (const { entries } of trace)
+    for (const entry of entries) {
+      chain.push(entry)
+      if (entry.symbol === answer) return chain
+    }
+  return chain
+}
 
 /**
  * How the required volume answers to each input, and where the chosen vessel stops being enough: by volume, or by the water
@@ -17,9 +28,7 @@ export const headroomRows = (
   const answer = method.results['required-volume']
   const { calculation } = context
   if (answer === undefined || !calculation.has(answer)) return []
-  const entries = calculation.trace.flatMap((section) => section.entries)
-  const upTo = entries.findIndex((entry) => entry.symbol === answer)
-  const chain = entries.slice(0, upTo + 1)
+  const chain = chainTo(answer, calculation.trace)
   const slopes = sensitivities(chain, calculation.functions, answer, calculation.values)
   const expansion = method.results['expansion-volume']
   const reserve = method.results['water-reserve']
@@ -30,13 +39,14 @@ export const headroomRows = (
     const acceptance = selected.acceptance === undefined ? Infinity : selected.acceptance * selected.quantity
     return required <= selected.volume * selected.quantity && takenUp <= acceptance
   }
-  return chain
-    .filter((entry): entry is TraceInput => entry.entry === 'input' && !isFixed(entry))
-    .flatMap((input) => {
-      const sensitivity = slopes[input.symbol]
-      if (sensitivity === undefined || sensitivity === 0 || !Number.isFinite(sensitivity)) return []
-      const limit = selected ? limitOf(chain, calculation.functions, input, sensitivity > 0 ? 1 : -1, isEnough) : null
-      const { id: entry, symbol, name, kind, value } = input
-      return [{ entry, symbol, name, kind, value, sensitivity, limit }]
-    })
+  const rows: HeadroomRow[] = []
+  for (const input of chain) {
+    if (input.entry !== 'input' || isFixed(input)) continue
+    const { id: entry, symbol, name, kind, value } = input
+    const sensitivity = slopes[symbol]
+    if (sensitivity === undefined || sensitivity === 0 || !Number.isFinite(sensitivity)) continue
+    const limit = selected ? limitOf(chain, calculation.functions, input, sensitivity > 0 ? 1 : -1, isEnough) : null
+    rows.push({ entry, symbol, name, kind, value, sensitivity, limit })
+  }
+  return rows
 }

@@ -94,10 +94,10 @@ export const sizeProject = (
     const usable = 'fluid' in choice
     if (!usable && choice.finding) findings.push(choice.finding)
     const fluid = usable ? choice.fluid : water.fluid
-    const sound = system.sound && usable
+    const sizable = usable ? system : { ...system, sound: false }
     const start = vessels.length
     for (const vessel of system.vessels) {
-      const sized = sizeVessel({ spec, system: { ...system, sound }, vessel, fluid, register, atmosphere, catalogue })
+      const sized = sizeVessel({ spec, system: sizable, vessel, fluid, register, atmosphere, catalogue })
       vessels.push(sized.result)
       findings.push(...sized.findings)
     }

@@ -6,6 +6,7 @@ import {
   type Method,
   methodNames,
   type RunOutcome,
+  type TraceSection,
 } from '@coldfill/engine'
 import { formatQuantity } from '@coldfill/units'
 import type { Finding, SpecModel, SystemModel, VesselModel } from '@coldfill/spec'
@@ -106,26 +107,36 @@ const run = (context: VesselContext, method: Method, atmosphere: number): Outcom
   return obstacle(context, context.calculation.run(method, given)) ?? sized
 }
 
-const resultsOf = (context: VesselContext, method: Method): Record<string, ResultValue> => {
+const addResults = (context: VesselContext, method: Method, results: Record<string, ResultValue>): void => {
   const { calculation } = context
-  const results: Record<string, ResultValue> = {}
   for (const [name, symbol] of Object.entries(method.results)) {
     if (!calculation.has(symbol)) continue
     const entry = calculation.entry(symbol)
     results[name] = { kind: entry.kind, value: entry.value, name: entry.name, entry: entry.id }
   }
-  return results
 }
 
-const shareEqually = (context: VesselContext, method: Method, quantity: number): Record<string, ResultValue> => {
+const shareEqually = (
+  context: VesselContext,
+  method: Method,
+  quantity: number,
+  results: Record<string, ResultValue>,
+): void => {
   const answer = method.results['required-volume']
-  if (quantity <= 1 || answer === undefined) return {}
+  if (quantity <= 1 || answer === undefined) return
   const shares = equalShares(answer)
   context.calculation.section('Vessel')
   context.calculation.run(shares, {
     N_v: { value: quantity, origin: { from: 'spec', path: `${context.vessel.path}.quantity` } },
   })
-  return resultsOf(context, shares)
+  addResults(context, shares, results)
+}
+
+/** The sections that have entries. Copied, for an array that grew keeps room for more, and there are many. */
+const keptTrace = (calculation: Calculation): readonly TraceSection[] => {
+  const kept: TraceSection[] = []
+  for (const { title, entries } of calculation.trace) if (entries.length > 0) kept.push({ title, entries: entries.slice() })
+  return kept
 }
 
 export interface SizingInput {
@@ -158,7 +169,31 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
   }
   const choice = chooseMethod(context)
   const quantity = vessel.fields.quantity?.value ?? 1
-  const base = {
+  let outcome: Outcome
+  const results: Record<string, ResultValue> = {}
+  let selected: SelectedVessel | null = null
+  let headroom: readonly HeadroomRow[] = []
+  if (!vessel.sound || !system.sound) {
+    const whose = vessel.sound ? 'its system' : 'its inputs'
+    outcome = { status: 'blocked', reason: `An error in ${whose} has to be mended first; see the findings.` }
+  } else if (!choice.method) {
+    const message = `${vessel.mark}: the method "${choice.name}" has no form for this ${choice.construction ?? 'vessel'}.`
+    report(context, 'CF-E004', { message, hint: `Choose one of: ${methodNames(vessel.kind).join(', ')}.` })
+    outcome = { status: 'blocked', reason: message }
+  } else {
+    checkUnusedKeys(context, choice.method)
+    outcome = run(context, choice.method, atmosphere)
+    if (outcome.status === 'sized') {
+      addResults(context, choice.method, results)
+      shareEqually(context, choice.method, quantity, results)
+      selected = selectVessel(context, input.catalogue, results, choice.construction, atmosphere)
+      Object.assign(results, checkVessel(context, choice.method, results, choice.construction, atmosphere))
+      headroom = headroomRows(context, choice.method, selected)
+      if (selected)
+        Object.assign(results, checkBack(context, choice.method, selected), weighVessel(context, selected))
+    }
+  }
+  const result: VesselResult = {
     system: system.id,
     mark: vessel.mark,
     path: vessel.path,
@@ -175,38 +210,12 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     solution: { base: fluid.base, massFraction: fluid.massFraction },
     location: vessel.fields.location?.value ?? '',
     notes: vessel.fields.note ? [vessel.fields.note.value] : [],
-  }
-  let outcome: Outcome
-  let results: Record<string, ResultValue> = {}
-  let selected: SelectedVessel | null = null
-  let headroom: readonly HeadroomRow[] = []
-  if (!vessel.sound || !system.sound) {
-    const whose = vessel.sound ? 'its system' : 'its inputs'
-    outcome = { status: 'blocked', reason: `An error in ${whose} has to be mended first; see the findings.` }
-  } else if (!choice.method) {
-    const message = `${vessel.mark}: the method "${choice.name}" has no form for this ${choice.construction ?? 'vessel'}.`
-    report(context, 'CF-E004', { message, hint: `Choose one of: ${methodNames(vessel.kind).join(', ')}.` })
-    outcome = { status: 'blocked', reason: message }
-  } else {
-    checkUnusedKeys(context, choice.method)
-    outcome = run(context, choice.method, atmosphere)
-    if (outcome.status === 'sized') {
-      results = { ...resultsOf(context, choice.method), ...shareEqually(context, choice.method, quantity) }
-      selected = selectVessel(context, input.catalogue, results, choice.construction, atmosphere)
-      results = { ...results, ...checkVessel(context, choice.method, results, choice.construction, atmosphere) }
-      headroom = headroomRows(context, choice.method, selected)
-      if (selected)
-        results = { ...results, ...checkBack(context, choice.method, selected), ...weighVessel(context, selected) }
-    }
-  }
-  const result: VesselResult = {
-    ...base,
     status: outcome.status,
     ...(outcome.reason === undefined ? {} : { reason: outcome.reason }),
     results,
     selected,
     headroom,
-    trace: context.calculation.trace.filter((section) => section.entries.length > 0),
+    trace: keptTrace(context.calculation),
     assumptions: register.usedBy(reference),
   }
   return { result, findings: context.findings }

@@ -24,8 +24,8 @@ export interface VesselContext {
 /** A value written in the spec as an input of a calculation. */
 export const fromSpec = (located: Located<Quantity>): GivenValue => {
   const { value, authored } = located.value
-  const given = { value, origin: { from: 'spec', path: located.path } } as const
-  return authored === undefined ? given : { ...given, authored }
+  const origin = { from: 'spec', path: located.path } as const
+  return authored === undefined ? { value, origin } : { value, origin, authored }
 }
 
 /** A plain number written in the spec. */
