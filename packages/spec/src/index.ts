@@ -1,4 +1,5 @@
 export * from './finding.ts'
+export * from './model/demand.ts'
 export * from './model/field.ts'
 export * from './model/project.ts'
 export * from './model/spec-model.ts'

@@ -1,4 +1,4 @@
-import type { VesselModel } from '../model/spec-model.ts'
+import type { FluidModel, VesselModel } from '../model/spec-model.ts'
 import { placeholder } from '../model/block.ts'
 import { pressureFields, temperatureFields } from '../model/system.ts'
 import { type Need, type VesselKindDefinition, vesselKinds } from '../model/vessel.ts'
@@ -21,10 +21,16 @@ const valueOf = (vessel: WrittenVessel, key: string): string => {
   return entry?.value?.node === 'text' ? entry.value.text.trim() : ''
 }
 
-const applies = (vessel: WrittenVessel, { only, unless, liftedBy = [] }: Need): boolean =>
-  (!only || only.is.includes(valueOf(vessel, only.key))) &&
-  (!unless || !unless.is.includes(valueOf(vessel, unless.key))) &&
-  liftedBy.every((key) => entryOf(vessel.block, key) === undefined)
+const applies = (vessel: WrittenVessel, glycol: boolean, need: Need): boolean => {
+  const { only, unless, liftedBy = [], askedBy = [] } = need
+  return (
+    (!only || only.is.includes(valueOf(vessel, only.key))) &&
+    (!unless || !unless.is.includes(valueOf(vessel, unless.key))) &&
+    liftedBy.every((key) => entryOf(vessel.block, key) === undefined) &&
+    askedBy.every((key) => entryOf(vessel.block, key) !== undefined) &&
+    (!need.glycol || glycol)
+  )
+}
 
 /**
  * Where a key is due. Null where it is written, or where a part of its path was not understood and has its own finding.
@@ -77,12 +83,18 @@ interface Gap {
 }
 
 /** Says once for each input that is missing which vessels cannot be sized without it. */
-export const checkNeeds = (context: Context, system: Block, vessels: readonly WrittenVessel[]): void => {
+export const checkNeeds = (
+  context: Context,
+  system: Block,
+  vessels: readonly WrittenVessel[],
+  fluid: FluidModel | null | undefined,
+): void => {
+  const glycol = fluid != null && fluid.base !== 'water'
   const gaps = new Map<string, Gap>()
   for (const vessel of vessels) {
     const { needs, fields }: VesselKindDefinition = vesselKinds[vessel.model.kind]
     for (const need of needs) {
-      if (!applies(vessel, need)) continue
+      if (!applies(vessel, glycol, need)) continue
       const found = need.keys.map((key) =>
         key.startsWith(OF_VESSEL)
           ? lacking(context, vessel.block, key.slice(OF_VESSEL.length))

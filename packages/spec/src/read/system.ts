@@ -147,7 +147,7 @@ export const readSystem = (context: Context, entry: Entry, fluids: Fluids): Syst
   if (demandEntry && service && !DOMESTIC.includes(service.value)) unused(context, demandEntry, service.value, [])
   const contents = readContents(context, entryOf(block, 'contents'))
   const vessels = readVessels(context, entryOf(block, 'vessels'), service?.value)
-  checkNeeds(context, block, vessels)
+  checkNeeds(context, block, vessels, fluid)
   return {
     id: entry.key,
     path: block.path,

@@ -27,7 +27,10 @@ const isDomestic = (service: Service): boolean => service.startsWith('domestic')
 const valueIn = (example: string, key: string): string =>
   new RegExp(`(?:^|[{,]\\s*)${key}: ([^,}]+?)\\s*(?:,|\\})`, 'u').exec(example)?.[1] ?? ''
 
-const applies = (example: string, { only, unless, liftedBy = [] }: Need): boolean =>
+/** The examples are filled with water. */
+const applies = (example: string, { only, unless, liftedBy = [], askedBy = [], glycol }: Need): boolean =>
+  !glycol &&
+  askedBy.every((key) => valueIn(example, key) !== '') &&
   (!only || only.is.includes(valueIn(example, only.key))) &&
   (!unless || !unless.is.includes(valueIn(example, unless.key))) &&
   liftedBy.every((key) => valueIn(example, key) === '')

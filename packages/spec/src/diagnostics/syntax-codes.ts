@@ -1,0 +1,151 @@
+import { type Diagnostic, define, syntax } from './diagnostic.ts'
+
+/** Mistakes in the YAML, before anything is read of it. */
+export const syntaxCodes = {
+  'CF-Y001': syntax(
+    'Text that does not belong',
+    'Something stands where YAML expects a new key, a comma or the end of a block.',
+    'The rest of the block cannot be told apart from it.',
+    'Put each key on a line of its own as `key: value`. A text that holds quotation marks or brackets goes in quotes.',
+  ),
+  'CF-Y002': syntax(
+    'Bracket or quotation mark left open',
+    'A bracket, brace or quotation mark opens and does not close.',
+    'Everything behind it would belong to it.',
+    'Close it where it ends, or take it out.',
+  ),
+  'CF-Y003': syntax(
+    'Colon missing behind a key',
+    'A line inside a block is no `key: value`.',
+    'Without the colon a line is a piece of text.',
+    'Write a colon and a space behind the key.',
+  ),
+  'CF-Y004': syntax(
+    'Wrong indentation',
+    'A line begins in a column in which no block is open.',
+    'Indentation says which block a key belongs to.',
+    'Begin the keys of one block in the same column, two spaces further in than the key above them.',
+  ),
+  'CF-Y005': syntax(
+    'Colon inside a text',
+    'A value holds a colon and a space, or two keys stand on one line.',
+    'A colon with a space behind it always ends a key.',
+    'Put the text in quotes, or the second key on its own line.',
+  ),
+  'CF-Y006': syntax(
+    'Anchor or alias',
+    'The text uses `&name` or `*name`.',
+    'Redlines and comparisons point to the place where a value is written, so each value is written where it holds.',
+    'Write the value out. A text that begins with `&` or `*` goes in quotes.',
+  ),
+  'CF-Y007': syntax(
+    'Tab in the indentation',
+    'A line is indented with a tab.',
+    'YAML takes only spaces, because tabs have no agreed width.',
+    'Use two spaces for each level.',
+  ),
+  'CF-Y008': syntax(
+    'Tag',
+    'A value carries a tag such as `!!str`.',
+    'A spec needs no types: numbers, texts and choices are told apart by their keys.',
+    'Take the tag out. A text that begins with `!` goes in quotes.',
+  ),
+  'CF-Y009': syntax(
+    'Directive',
+    'A line begins with `%`, as in `%YAML 1.1`.',
+    'It would change how `no`, `1:30` and other words are read. A spec is always YAML 1.2.',
+    'Take the line out.',
+  ),
+  'CF-Y010': syntax(
+    'Several documents',
+    'A line `---` begins a second document.',
+    'A file holds the spec of one project.',
+    'Put the second spec into a file of its own.',
+  ),
+  'CF-Y011': syntax(
+    'Merge key',
+    'The key `<<` asks to take keys over from elsewhere.',
+    'A spec says each value where it holds, so that a redline can point to it.',
+    'Write the keys out.',
+  ),
+  'CF-Y012': syntax(
+    'Nested too deep',
+    'Maps and lists lie inside each other more than 64 levels deep.',
+    'A spec needs eight levels at most; deeper text is a slip or an attack.',
+    'Take out the brackets, braces or dashes that are not needed.',
+  ),
+  'CF-Y013': syntax(
+    'Too many keys and values',
+    'The text has more than 20,000 keys and values.',
+    'Larger texts would slow down everyone who works on the project.',
+    'Split the project into several specs.',
+  ),
+  'CF-Y014': syntax(
+    'Key that is no word',
+    'A key is a map or a list, or is written with `?`.',
+    'Keys are words of the spec or marks from the drawings.',
+    'Write a plain word or mark, a colon and a value.',
+  ),
+  'CF-Y015': syntax(
+    'Text with a reserved beginning',
+    'A text begins with `@`, a backtick, `%` or another character that YAML keeps for itself.',
+    'Such a text is read only in quotes.',
+    'Put the text in quotes.',
+  ),
+  'CF-Y016': syntax(
+    'Control character',
+    'The text holds an invisible control character.',
+    'It cannot be printed and mostly comes from copying.',
+    'Delete it.',
+  ),
+  'CF-Y017': syntax(
+    'Unknown escape in double quotes',
+    'A backslash in double quotes is followed by a letter that means nothing.',
+    'In double quotes a backslash begins a special character.',
+    'Use single quotes, or write the backslash twice.',
+  ),
+  'CF-Y018': syntax(
+    'Key written twice',
+    'The same key stands twice in one block.',
+    'Only one of the two values can hold.',
+    'Take one out, or rename it.',
+  ),
+  'CF-Y019': syntax(
+    'Space missing behind a colon',
+    'A key and its value are written together, as in `fill:50 °F`.',
+    'YAML reads them as one text.',
+    'Write a space behind the colon.',
+  ),
+  'CF-Y020': syntax(
+    'Comma missing in braces',
+    'Two keys in braces are not parted by a comma.',
+    'Without it the second key belongs to the text of the first.',
+    'Write `{ first: value, second: value }`.',
+  ),
+  'CF-Y021': syntax(
+    'Text too long',
+    'The text has more than a million characters.',
+    'A spec of a large project has less than a tenth of that.',
+    'Split the project into several specs.',
+  ),
+  'CF-Y022': syntax(
+    'Empty spec',
+    'Nothing is written, or comments only.',
+    'There is nothing to read.',
+    'Begin with `coldfill: 1`.',
+  ),
+  'CF-Y023': syntax(
+    'Not a block of keys',
+    'The text is a list or a single text.',
+    'A spec is a block of keys: `coldfill`, `project`, `systems` and others.',
+    'Begin with `coldfill: 1` and put `project:` and `systems:` below it.',
+  ),
+  'CF-Y024': define(
+    'syntax',
+    'note',
+    'Comma in a text in braces',
+    'A text in braces holds a comma and is not in quotes. It is read as one text.',
+    'Other programs that read YAML end the text at the comma.',
+    'Put the text in quotes.',
+  ),
+} as const satisfies Record<string, Diagnostic>
