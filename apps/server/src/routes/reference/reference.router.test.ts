@@ -29,3 +29,16 @@ it('gives the schema of the spec to anybody, from any site', async () => {
   expect(JSON.parse(res.text)).toMatchObject({ $schema: expect.stringContaining('json-schema.org') as unknown })
   await t.anonymous().get('/schema/coldfill-9.json').expect(404)
 })
+
+it('gives the schema under a versioned address that is its own id, with a tag, and says when nothing changed', async () => {
+  const res = await t.anonymous().get('/schema/coldfill-1.json').expect(200)
+  expect(res.headers['content-type']).toMatch(/^application\/schema\+json/u)
+  expect(new URL((JSON.parse(res.text) as { readonly $id: string }).$id).pathname).toBe('/schema/coldfill-1.json')
+  const tag = res.headers['etag'] ?? ''
+  expect(tag).toMatch(/^(?:W\/)?".+"$/u)
+  const again = await t.anonymous().get('/schema/coldfill-1.json').set('If-None-Match', tag).expect(304)
+  expect(again.text).toBe('')
+  // Without it a page elsewhere is refused the second answer, though nothing changed.
+  expect(again.headers['access-control-allow-origin']).toBe('*')
+  await t.anonymous().get('/schema/coldfill-1.json').set('If-None-Match', '"another"').expect(200)
+})
