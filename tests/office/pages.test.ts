@@ -1,5 +1,5 @@
 import { readFileSync } from 'node:fs'
-import { officePages, writeReviewCopy, writeSubmittal } from '@coldfill/documents'
+import { officePages, openOffice, printSubmittal, writeReviewCopy, writeSubmittal } from '@coldfill/documents'
 import { documentOptions, reviewedOptions } from '@coldfill/documents/testing'
 import { sizeSpec } from '@coldfill/sizing'
 import { strFromU8, unzipSync } from 'fflate'
@@ -31,6 +31,21 @@ it.skipIf(!hasOffice)(`the contents list has the pages that the file is printed 
   expect(entries.length).toBeGreaterThan(8)
   const printed = new Map(outline(convert('submittal.docx', bytes, 'pdf')))
   expect(entries).toEqual(entries.map(([title = '']) => [title, String(printed.get(oneSpaced(title)))]))
+})
+
+it.skipIf(!hasOffice)(`the PDF is a print of the document, the same each time${leftOut}`, async () => {
+  const text = readFileSync(new URL('../../examples/alder-court/spec.yaml', import.meta.url), 'utf8')
+  const office = await openOffice()
+  const printed = () =>
+    printSubmittal(sizeSpec(text), documentOptions('SI'), (docx) => office?.print(docx) ?? Promise.reject(new Error()))
+  const first = await printed()
+  expect([first.noPages, first.noPdf]).toEqual([null, null])
+  // The same headings on the same pages as the document itself, laid out once more.
+  expect(outline(first.pdf ?? new Uint8Array())).toEqual(outline(convert('submittal.docx', first.docx, 'pdf')))
+  expect(outline(first.pdf ?? new Uint8Array()).length).toBeGreaterThan(8)
+  const second = await printed()
+  expect(Buffer.from(second.docx).equals(first.docx)).toBe(true)
+  expect(Buffer.from(second.pdf ?? new Uint8Array()).equals(first.pdf ?? new Uint8Array())).toBe(true)
 })
 
 it.skipIf(!hasOffice)(`a review copy opens with every redline and answer as a comment${leftOut}`, async () => {

@@ -10,6 +10,7 @@ describe('the name of a file', () => {
   it('says project, revision and kind', () => {
     expect(fileName(project, 'B', 'schedule')).toBe('FC-241-rev-B-schedule.xlsx')
     expect(fileName(project, '', 'submittal')).toBe('FC-241-submittal.docx')
+    expect(fileName(project, '', 'pdf')).toBe('FC-241-submittal.pdf')
   })
 
   it('holds nothing that a file system, a header or an address could read otherwise', () => {

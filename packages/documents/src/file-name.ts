@@ -1,8 +1,13 @@
 import type { ProjectResult } from '@coldfill/sizing'
 
-export type DocumentKind = 'schedule' | 'submittal' | 'review-copy'
+export type DocumentKind = 'schedule' | 'submittal' | 'pdf' | 'review-copy'
 
-const EXTENSION: Record<DocumentKind, string> = { schedule: 'xlsx', submittal: 'docx', 'review-copy': 'docx' }
+const ENDING: Record<DocumentKind, string> = {
+  schedule: 'schedule.xlsx',
+  submittal: 'submittal.docx',
+  pdf: 'submittal.pdf',
+  'review-copy': 'review-copy.docx',
+}
 
 /** Letters, digits and single hyphens only: safe in every file system, header and address. */
 const plain = (text: string): string =>
@@ -17,5 +22,5 @@ const plain = (text: string): string =>
 export const fileName = (result: ProjectResult, revision: string, kind: DocumentKind): string => {
   const project = plain(result.project.number) || 'project'
   const letter = plain(revision)
-  return [project, ...(letter ? ['rev', letter] : []), kind].join('-') + `.${EXTENSION[kind]}`
+  return [project, ...(letter ? ['rev', letter] : []), ENDING[kind]].join('-')
 }

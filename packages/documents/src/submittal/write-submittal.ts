@@ -112,6 +112,8 @@ export interface SubmittalSurroundings {
    * without it, or where it fails or leaves one out, the list has links and no numbers, for a guess could be wrong.
    */
   readonly findPages?: PageFinder | null
+  /** Told why the numbers were left out although there is a finder. */
+  readonly onNoPages?: (why: string) => void
 }
 
 /** Archive with the pages in the lists, or null where not all of them were found. */
@@ -120,6 +122,7 @@ const withFoundPages = async (
   options: DocumentOptions,
   pictures: Pictures,
   findPages: PageFinder,
+  onNoPages: (why: string) => void,
 ): Promise<Uint8Array | null> => {
   const bytes = await packed(documentOf(result, options, pictures, true))
   const settle = settled(dateOf(options.titleBlock))
@@ -131,7 +134,8 @@ const withFoundPages = async (
   try {
     // Two digits are what most numbers will take, so that the lists break as they will in the end.
     pages = await findPages(archive(() => '00'))
-  } catch {
+  } catch (error) {
+    onNoPages(error instanceof Error ? error.message : String(error))
     return null
   }
   let missing = false
@@ -140,6 +144,7 @@ const withFoundPages = async (
     missing ||= page === undefined
     return String(page ?? '')
   })
+  if (missing) onNoPages('The page of a heading was not found.')
   return missing ? null : found
 }
 
@@ -147,10 +152,10 @@ const withFoundPages = async (
 export const writeSubmittal = async (
   result: ProjectResult,
   options: DocumentOptions,
-  { findPages }: SubmittalSurroundings = {},
+  { findPages, onNoPages = () => undefined }: SubmittalSurroundings = {},
 ): Promise<Uint8Array> => {
   const pictures = await drawPictures(result, options)
-  const numbered = findPages ? await withFoundPages(result, options, pictures, findPages) : null
+  const numbered = findPages ? await withFoundPages(result, options, pictures, findPages, onNoPages) : null
   return (
     numbered ??
     fixedArchive(await packed(documentOf(result, options, pictures, false)), settled(dateOf(options.titleBlock)))
