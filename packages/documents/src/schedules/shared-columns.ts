@@ -17,7 +17,8 @@ export const serves = words('serves', 'Serves', 17, ({ vessel, system }) => vess
 export const location = optional(words('location', 'Location', 14, ({ vessel }) => vessel.location))
 export const fluid = words('fluid', 'Fluid', 16, ({ vessel }) => sentenceCase(vessel.fluid))
 export const construction = words('construction', 'Type', 10, ({ vessel }) => sentenceCase(vessel.construction ?? ''))
-export const count = quantity('quantity', 'Qty', 5.5, 'count', ({ vessel }) => vessel.quantity)
+/** A number of vessels is an input where there are several; a single vessel has no step that its number goes into. */
+export const count = inputNumber('quantity', 'Qty', 5.5, 'count', ['N_v'], ({ vessel }) => vessel.quantity)
 export const method = words('method', 'Method', 10, ({ vessel }) => methodWords(vessel.method))
 export const assumptions = words('assumptions', 'Assumptions', 13, ({ vessel, result }) =>
   numbersOf(vessel.assumptions, result),

@@ -204,7 +204,7 @@ export const writeCalculation = (
         { text: sentenceCase(fluidRow.name) },
         { formula: fluidRow.formula, result: fluidRow.value, format: significantFormat(fluidRow.value, 8) },
         { text: fluidRow.unit },
-        { text: `for ${fluidRow.of}` },
+        { text: `at ${fluidRow.at}` },
         { text: fluidRow.source },
       ])
     })

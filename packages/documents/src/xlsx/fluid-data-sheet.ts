@@ -1,4 +1,11 @@
-import { glycols, if97Region1, if97Region1Reducing, if97Region4, type PolynomialTable } from '@coldfill/engine'
+import {
+  glycols,
+  if97Region1,
+  if97Region1Reducing,
+  if97Region4,
+  vapourDensity,
+  type PolynomialTable,
+} from '@coldfill/engine'
 import type { ProjectResult } from '@coldfill/sizing'
 import type { Workbook, Worksheet } from 'exceljs'
 import type { DocumentOptions } from '../document-options.ts'
@@ -22,6 +29,15 @@ export interface WaterCells {
   readonly tau: string
 }
 
+/** Addresses of the equation for the density of saturated steam. */
+export interface SteamCells {
+  readonly n: string
+  /** Exponents in sixths. */
+  readonly sixths: string
+  readonly temperature: string
+  readonly density: string
+}
+
 /** Addresses of one polynomial in strength (per cent by mass) and temperature (°C). */
 export interface PolynomialCells {
   readonly i: string
@@ -33,6 +49,8 @@ export interface PolynomialCells {
 
 export interface FluidCells {
   readonly water: WaterCells
+  /** Only where a calculation asks for steam. */
+  readonly steam: SteamCells | null
   readonly glycols: ReadonlyMap<
     GlycolBase,
     { readonly density: PolynomialCells; readonly specificHeat: PolynomialCells }
@@ -135,6 +153,24 @@ const writeWater = (blocks: Blocks): WaterCells => {
   }
 }
 
+const writeSteam = (blocks: Blocks): SteamCells => {
+  const { criticalTemperature, criticalDensity, terms } = vapourDensity
+  blocks.row += 1
+  blocks.title('Saturated steam')
+  blocks.source(
+    'IAPWS SR1-86(1992), equation 3: density = critical density · exp(sum of n · (1 - T / critical)^(k / 6))',
+  )
+  blocks.head(['Constant', '', '', 'Value'])
+  const temperature = blocks.at('D', blocks.put('critical temperature, K', null, null, criticalTemperature))
+  const density = blocks.at('D', blocks.put('critical density, kg/m³', null, null, criticalDensity))
+  blocks.row += 1
+  blocks.head(['Term', '', 'k', 'n'])
+  const first = blocks.row
+  terms.forEach(([n, sixths], index) => blocks.put(String(index + 1), null, sixths, n))
+  const last = blocks.row - 1
+  return { n: blocks.range('D', first, last), sixths: blocks.range('C', first, last), temperature, density }
+}
+
 const writePolynomial = (blocks: Blocks, property: string, { base, terms }: PolynomialTable): PolynomialCells => {
   blocks.row += 1
   blocks.head([property, 'i', 'j', 'c'])
@@ -158,7 +194,7 @@ export const writeFluidData = (
   name: string,
   project: ProjectResult['project'],
   options: DocumentOptions,
-  bases: readonly GlycolBase[],
+  { bases, steam }: { readonly bases: readonly GlycolBase[]; readonly steam: boolean },
 ): FluidCells => {
   const sheet = addSheet(workbook, name, project, options, { orientation: 'portrait', widths: WIDTHS })
   const at = writeTitle(
@@ -169,6 +205,7 @@ export const writeFluidData = (
   )
   const blocks = new Blocks(sheet, at)
   const water = writeWater(blocks)
+  const steamCells = steam ? writeSteam(blocks) : null
   const written = bases.map((base) => {
     blocks.row += 1
     blocks.title(`Aqueous ${base}`)
@@ -180,5 +217,5 @@ export const writeFluidData = (
     return [base, { density, specificHeat }] as const
   })
   sheet.pageSetup.printArea = `A1:D${blocks.row}`
-  return { water, glycols: new Map(written) }
+  return { water, steam: steamCells, glycols: new Map(written) }
 }

@@ -14,6 +14,7 @@ import { writeCover, type ContentsEntry } from './cover-sheet.ts'
 import { writeFindings } from './findings-sheet.ts'
 import { writeFluidData } from './fluid-data-sheet.ts'
 import { cellText } from './plain-text.ts'
+import { asksForSteam } from './property-laws.ts'
 import { writeReadings } from './readings-sheet.ts'
 import { writeScheduleSheet, type VesselCells } from './schedule-sheet.ts'
 import { SharedInputs } from './shared-inputs.ts'
@@ -80,7 +81,8 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
       ),
     ),
   ]
-  const fluidCells = writeFluidData(workbook, fluidData, project, options, bases)
+  const steam = calculations.some(({ vessel }) => asksForSteam(vessel))
+  const fluidCells = writeFluidData(workbook, fluidData, project, options, { bases, steam })
   const inputs = new SharedInputs()
   const vessels = new Map<string, VesselCells>()
   const palette = new Palette()

@@ -11,6 +11,8 @@ export type { PolynomialTable } from './polynomial.ts'
 export { inValidity } from './fluid.ts'
 export {
   enthalpy,
+  if97Least,
+  if97Region1Most,
   saturationPressure,
   saturationSlope,
   saturationTemperature,
@@ -20,6 +22,7 @@ export { steamFunctions, vapourDensityAt, type SteamFunctionName } from './steam
 export { water } from './water.ts'
 export { if97Region1, if97Region1Reducing } from '../tables/iapws-r7-97.region-1.ts'
 export { if97Region4 } from '../tables/iapws-r7-97.region-4.ts'
+export { vapourDensity } from '../tables/iapws-sr1-86.vapour-density.ts'
 
 /** Data of the glycols by base, for whoever shows or recomputes them. */
 export const glycols = { 'ethylene glycol': ethyleneGlycol, 'propylene glycol': propyleneGlycol } as const
