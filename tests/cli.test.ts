@@ -1,5 +1,5 @@
 import { spawn } from 'node:child_process'
-import { mkdirSync, mkdtempSync, readdirSync, rmSync, writeFileSync } from 'node:fs'
+import { existsSync, mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
@@ -8,6 +8,7 @@ import { unzipSync } from 'fflate'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { et1 } from './golden/fernhollow.by-hand.ts'
 import { exampleText } from './golden/examples.ts'
+import { hasOffice, leftOut } from './office/office.ts'
 
 const root = fileURLToPath(new URL('..', import.meta.url))
 const clinic = 'examples/fernhollow/spec.yaml'
@@ -19,9 +20,9 @@ interface Run {
   readonly err: string
 }
 
-const start = (command: string, args: readonly string[], cwd: string): Promise<Run> =>
+const start = (command: string, args: readonly string[], cwd: string, settings: object = {}): Promise<Run> =>
   new Promise((done, fail) => {
-    const environment = { ...process.env }
+    const environment: NodeJS.ProcessEnv = { ...process.env, ...settings }
     delete environment['INIT_CWD']
     const child = spawn(command, args, { cwd, env: environment })
     const out: Buffer[] = []
@@ -37,6 +38,10 @@ const start = (command: string, args: readonly string[], cwd: string): Promise<R
 /** The command without npm around it, which costs half a second a run. */
 const coldfill = (...args: string[]): Promise<Run> =>
   start(process.execPath, ['--import', 'tsx', 'apps/cli/src/main.ts', ...args], root)
+
+/** The command with another LibreOffice than none; '' is the one of this machine. */
+const withOffice = (office: string, ...args: string[]): Promise<Run> =>
+  start(process.execPath, ['--import', 'tsx', 'apps/cli/src/main.ts', ...args], root, { COLDFILL_OFFICE: office })
 
 const throughNpm = (...args: string[]): Promise<Run> =>
   start('npm', ['run', '--silent', 'coldfill', '--', ...args], root)
@@ -329,6 +334,7 @@ describe('documents', () => {
       expect(status).toBe(0)
       expect(out).toBe('')
     }
+    expect(runs[1].err).toContain('has no page numbers. LibreOffice is not used (COLDFILL_OFFICE=none).')
     const book = new ExcelJS.Workbook()
     await book.xlsx.readFile(schedule)
     const values = book.worksheets.flatMap((sheet) => {
@@ -340,11 +346,32 @@ describe('documents', () => {
     })
     expect(values).toContain('ET-1')
     expect(values.some((value) => typeof value === 'number' && Math.abs(value / et1.required - 1) < 1e-4)).toBe(true)
-    const { readFileSync } = await import('node:fs')
     const parts = unzipSync(new Uint8Array(readFileSync(submittal)))
     const text = new TextDecoder().decode(parts['word/document.xml'])
     expect(text).toContain('TET-1')
     expect(text).toContain('70.5')
+  })
+
+  it('says why there is no PDF, and writes the document all the same', async () => {
+    const [docx, pdf] = [join(folder, 'alone.docx'), join(folder, 'alone.pdf')]
+    const run = await withOffice(join(folder, 'no-such-command'), 'submittal', clinic, '--out', docx, '--pdf', pdf)
+    expect(run.status).toBe(73)
+    expect(run.err).toContain('alone.pdf cannot be written. LibreOffice is not installed.')
+    expect([existsSync(docx), existsSync(pdf)]).toEqual([true, false])
+    expect((await coldfill('submittal', clinic, '--out', docx, '--pdf', docx)).status).toBe(64)
+    expect((await coldfill('schedule', clinic, '--out', join(folder, 'a.xlsx'), '--pdf', pdf)).status).toBe(64)
+  })
+
+  it.skipIf(!hasOffice)(`writes a submittal with page numbers and a print of it${leftOut}`, async () => {
+    const [docx, pdf] = [join(folder, 'paged.docx'), join(folder, 'paged.pdf')]
+    const run = await withOffice('', 'submittal', clinic, '--out', docx, '--pdf', pdf)
+    expect(run).toMatchObject({ status: 0, out: '' })
+    expect(run.err).not.toContain('page numbers')
+    const xml = new TextDecoder().decode(unzipSync(new Uint8Array(readFileSync(docx)))['word/document.xml'])
+    const [entry = ''] = xml.match(/<w:p>(?:(?!<\/w:p>).)*w:val="TOC1".*?<\/w:p>/s) ?? []
+    // The summary stands on the page of the contents list, behind the cover, or on the next.
+    expect(entry).toMatch(/<w:t [^>]*>[23]<\/w:t>/)
+    expect(readFileSync(pdf).subarray(0, 5).toString()).toBe('%PDF-')
   })
 })
 

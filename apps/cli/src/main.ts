@@ -8,8 +8,8 @@ const verbs: Readonly<Record<string, () => Promise<Verb>>> = {
   format: async () => (await import('./commands/format.ts')).format,
   compare: async () => (await import('./commands/compare.ts')).compare,
   size: async () => (await import('./commands/size.ts')).size,
-  schedule: async () => (await import('./commands/write-document.ts')).schedule,
-  submittal: async () => (await import('./commands/write-document.ts')).submittal,
+  schedule: async () => (await import('./commands/schedule.ts')).schedule,
+  submittal: async () => (await import('./commands/submittal.ts')).submittal,
   fluid: async () => (await import('./commands/fluid.ts')).fluid,
   schema: async () => (await import('./commands/schema.ts')).schema,
   explain: async () => (await import('./commands/explain.ts')).explain,
@@ -23,7 +23,8 @@ const usage = `coldfill VERB …
   compare OLD NEW                what differs in the specs and in the sized vessels
   format FILE [--write]          tidies indentation and spacing; prints, or writes the file
   schedule FILE --out FILE.xlsx  writes the equipment schedule
-  submittal FILE --out FILE.docx writes the Word submittal
+  submittal FILE --out FILE.docx [--pdf FILE.pdf]
+                                 writes the Word submittal, and a print of it
   fluid --fluid "propylene glycol 40 % mass" --temperature "20 °C" [--pressure "3 bar abs"]
   schema                         the JSON Schema of the spec
   explain CODE                   what a finding means and how to mend it
@@ -33,6 +34,8 @@ const usage = `coldfill VERB …
 
 Exit status: 0 no error finding, 1 findings at or above --fail-on, 64 usage, 65 unreadable YAML or unknown spec version,
 66 no such file, 70 internal, 73 cannot write.
+
+Page numbers and the PDF of a submittal come from LibreOffice: COLDFILL_OFFICE names its command (soffice), or is none.
 `
 
 /** Runs the command and returns its exit status. Standard output has data only. */

@@ -10,6 +10,7 @@ export interface Options {
   readonly format: ReportFormat
   readonly failOn: Severity
   readonly out?: string
+  readonly pdf?: string
   readonly catalogue?: string
   readonly units?: UnitSystem
   readonly fluid?: string
@@ -23,6 +24,7 @@ const known = {
   format: { type: 'string', default: 'text' },
   'fail-on': { type: 'string', default: 'error' },
   out: { type: 'string', short: 'o' },
+  pdf: { type: 'string' },
   catalogue: { type: 'string' },
   units: { type: 'string' },
   fluid: { type: 'string' },
@@ -85,6 +87,7 @@ export const readOptions = (
     fix: values.fix,
     failOn: oneOf('fail-on', values['fail-on'], ['error', 'warning', 'note']),
     ...(values.out === undefined ? {} : { out: values.out }),
+    ...(values.pdf === undefined ? {} : { pdf: values.pdf }),
     ...(values.catalogue === undefined ? {} : { catalogue: values.catalogue }),
     ...(values.units === undefined ? {} : { units: oneOf('units', values.units.toUpperCase(), ['US', 'SI']) }),
     ...(values.fluid === undefined ? {} : { fluid: values.fluid }),

@@ -13,7 +13,7 @@ export {
 export { writeSchedule } from './xlsx/write-schedule.ts'
 export { writeReviewCopy, writeSubmittal, type SubmittalSurroundings } from './submittal/write-submittal.ts'
 export { printSubmittal, type PrintedSubmittal, type PrintStage } from './submittal/print-submittal.ts'
-export { officePages } from './pages/office-pages.ts'
+export { officePages, pagesBy } from './pages/office-pages.ts'
 export { type Office, OfficeFailure, openOffice } from './pages/office.ts'
 export type { PageFinder } from './pages/page-tokens.ts'
 export { fileName, type DocumentKind } from './file-name.ts'

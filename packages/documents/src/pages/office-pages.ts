@@ -1,6 +1,12 @@
-import { openOffice } from './office.ts'
+import { type Office, openOffice } from './office.ts'
 import type { PageFinder } from './page-tokens.ts'
 import { pdfDestinations } from './pdf-destinations.ts'
+
+/** Finds page numbers by printing. */
+export const pagesBy =
+  (office: Office): PageFinder =>
+  async (docx) =>
+    pdfDestinations(await office.print(docx))
 
 /**
  * Finds page numbers with the LibreOffice of this machine; null where `command` is not installed. `timeout` in ms bounds
@@ -8,5 +14,5 @@ import { pdfDestinations } from './pdf-destinations.ts'
  */
 export const officePages = async (command = 'soffice', timeout = 90_000): Promise<PageFinder | null> => {
   const office = await openOffice(command, timeout)
-  return office && (async (docx) => pdfDestinations(await office.print(docx)))
+  return office && pagesBy(office)
 }
