@@ -98,6 +98,11 @@ const straight = best(30, () => {
   for (const job of straightJobs) sum += straightTank(job)
 })
 const engine = best(15, () => sizeProject(thousand))
+// The best of many single runs is one in which no garbage was collected; a run of 10,000 never gets by without. So both
+// pay for their own: ten runs of 1,000 in succession against one of 10,000.
+const engineInARow = best(6, () => {
+  for (let n = 0; n < 10; n += 1) sizeProject(thousand)
+})
 const engineTen = best(6, () => sizeProject(tenThousand))
 
 const heap = () => {
@@ -116,7 +121,11 @@ const rows: readonly (readonly [string, string, boolean])[] = [
     `${(engine / straight).toFixed(1)} × (${straight.toFixed(2)} ms)`,
     engine < 25 * straight,
   ],
-  ['10,000 within 11 times of 1,000', `${(engineTen / engine).toFixed(1)} ×`, engineTen < 11 * engine],
+  [
+    '10,000 within 11 times of 1,000 (the mean of ten in succession)',
+    `${((10 * engineTen) / engineInARow).toFixed(1)} ×`,
+    10 * engineTen < 11 * engineInARow,
+  ],
   [
     'memory flat over 20 more runs (needs --expose-gc)',
     `${(after - before).toFixed(1)} MB`,

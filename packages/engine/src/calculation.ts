@@ -42,12 +42,11 @@ const hyphenated = (name: string): string => {
 export class Calculation {
   readonly mark: string
   readonly functions: Readonly<Record<string, FormulaFunction>>
-  private readonly numbers: Record<string, number> = {}
+  private readonly numbers = Object.create(null) as Record<string, number>
   /** `ET-1/`, before every id; joined to names that are worked out once, so that an id costs little. */
   private readonly prefix: string
   /** Ids without the prefix. */
   private readonly names = new Set<string>()
-  private readonly bySymbol = new Map<string, TraceEntry>()
   private readonly parts: { title: string; entries: TraceEntry[] }[] = []
 
   constructor(mark: string, functions: Readonly<Record<string, FormulaFunction>>) {
@@ -57,7 +56,7 @@ export class Calculation {
   }
 
   has(symbol: string): boolean {
-    return this.bySymbol.has(symbol)
+    return this.numbers[symbol] !== undefined
   }
 
   /** Value in SI units. An unknown symbol throws. */
@@ -68,9 +67,9 @@ export class Calculation {
   }
 
   entry(symbol: string): TraceEntry {
-    const entry = this.bySymbol.get(symbol)
-    if (!entry) throw new Error(`${this.mark}: no symbol ${symbol} in the calculation yet`)
-    return entry
+    // Few are asked for; an index of all would cost each vessel more than the search.
+    for (const { entries } of this.parts) for (const entry of entries) if (entry.symbol === symbol) return entry
+    throw new Error(`${this.mark}: no symbol ${symbol} in the calculation yet`)
   }
 
   get values(): Readonly<Record<string, number>> {
@@ -87,11 +86,10 @@ export class Calculation {
   }
 
   private put(entry: TraceEntry): void {
-    if (this.bySymbol.has(entry.symbol)) throw new Error(`${this.mark}: symbol ${entry.symbol} is given twice`)
+    if (this.has(entry.symbol)) throw new Error(`${this.mark}: symbol ${entry.symbol} is given twice`)
     const part = this.parts.at(-1)
     if (!part) throw new Error(`${this.mark}: no section is open`)
     part.entries.push(entry)
-    this.bySymbol.set(entry.symbol, entry)
     this.numbers[entry.symbol] = entry.value
   }
 

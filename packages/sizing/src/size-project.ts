@@ -54,22 +54,22 @@ const chooseFluid = (model: FluidModel | null | undefined): FluidChoice => {
   }
 }
 
-const citedSources = (vessels: readonly VesselResult[], assumptions: ProjectResult['assumptions']) => {
-  const cited = new Set<string>(assumptions.map((assumption) => assumption.source.source))
-  for (const vessel of vessels)
-    for (const section of vessel.trace)
-      for (const entry of section.entries) {
-        if (entry.entry === 'step') cited.add(entry.source.source)
-        else if (entry.origin.from === 'table') cited.add(entry.origin.citation.source)
-      }
-  return Object.fromEntries(
+const noteCited = (vessel: VesselResult, cited: Set<string>): void => {
+  for (const section of vessel.trace)
+    for (const entry of section.entries) {
+      if (entry.entry === 'step') cited.add(entry.source.source)
+      else if (entry.origin.from === 'table') cited.add(entry.origin.citation.source)
+    }
+}
+
+const titlesOf = (cited: ReadonlySet<string>): ProjectResult['sources'] =>
+  Object.fromEntries(
     [...cited].sort().map((id) => {
       const source = sources[id]
       if (!source) throw new Error(`a result cites ${id}, which is not among the sources`)
       return [id, { title: source.title, edition: source.edition, publisher: source.publisher }]
     }),
   )
-}
 
 /**
  * Sizes every vessel of a spec that has been read. `read` are the findings of reading it; the result has them with those
@@ -87,6 +87,7 @@ export const sizeProject = (
   const findings: Finding[] = [...read]
   const vessels: VesselResult[] = []
   const systems: SystemResult[] = []
+  const cited = new Set<string>()
   const water = chooseFluid(undefined)
   if (!('fluid' in water)) throw new Error('water is always there')
   for (const system of spec.systems) {
@@ -99,12 +100,14 @@ export const sizeProject = (
     for (const vessel of system.vessels) {
       const sized = sizeVessel({ spec, system: sizable, vessel, fluid, register, atmosphere, catalogue })
       vessels.push(sized.result)
+      noteCited(sized.result, cited)
       findings.push(...sized.findings)
     }
     findings.push(...checkSystem(spec, system, atmosphere))
     systems.push(systemResult(system, fluid, vessels.slice(start), atmosphere))
   }
   const assumptions = register.list()
+  for (const { source } of assumptions) cited.add(source.source)
   return {
     engine: engineVersion,
     spec: 1,
@@ -114,6 +117,6 @@ export const sizeProject = (
     vessels,
     assumptions,
     findings: inReadingOrder(acceptFindings(findings, acceptances)),
-    sources: citedSources(vessels, assumptions),
+    sources: titlesOf(cited),
   }
 }
