@@ -4,6 +4,10 @@ import type { UnitSystem } from '@coldfill/units'
 /** Fields of the title block. `date` is an ISO date; it also dates the file, so that the same content gives the same bytes. */
 export interface TitleBlock {
   readonly office: string
+  /** Address and contact of the office, line by line. */
+  readonly lines?: readonly string[]
+  /** Captions of the three people in the words of the office; Prepared, Checked, Approved where not said. */
+  readonly captions?: { readonly prepared: string; readonly checked: string; readonly approved: string }
   readonly preparedBy?: string
   readonly checkedBy?: string
   readonly approvedBy?: string
@@ -96,9 +100,21 @@ export interface DocumentOptions {
   readonly logo?: Logo
   /** Cases of the verification manual, run. */
   readonly verification?: ReturnType<typeof verificationRows>
+  /** Version of the engine that ran them; that of the result where not said. */
+  readonly verifiedWith?: string
   /** Letter for US and A4 for SI where not said. */
   readonly paper?: 'Letter' | 'A4'
 }
+
+/** The people of the title block under their captions, also those that stay blank for a pen. */
+export const peopleOf = ({
+  captions,
+  ...titleBlock
+}: TitleBlock): readonly (readonly [caption: string, name: string])[] => [
+  [captions?.prepared ?? 'Prepared', titleBlock.preparedBy ?? ''],
+  [captions?.checked ?? 'Checked', titleBlock.checkedBy ?? ''],
+  [captions?.approved ?? 'Approved', titleBlock.approvedBy ?? ''],
+]
 
 export const CONSTRUCTION_STATUS = 'Issued for construction'
 

@@ -1,5 +1,5 @@
 import { ImageRun, Paragraph, type FileChild } from 'docx'
-import { revisionWords, type DocumentOptions, type Logo } from '../document-options.ts'
+import { peopleOf, revisionWords, type DocumentOptions, type Logo } from '../document-options.ts'
 import { paragraph } from '../docx/paragraph.ts'
 import { plainText } from '../docx/plain-text.ts'
 import { STYLE } from '../docx/styles.ts'
@@ -61,7 +61,9 @@ export const cover: Section = ({ result, options, width }) => {
   const { titleBlock, revisions, contentHash } = options
   const sections = Object.entries(project.specSections).map(([kind, section]) => `${section} (${kind})`)
   const codes = Object.entries(project.codes).map(([kind, code]) => `${code} (${kind})`)
-  const fields: [string, string][] = [
+  const people = peopleOf(titleBlock)
+  const address = titleBlock.lines?.join(' · ') ?? ''
+  const fields: (readonly [string, string])[] = [
     ['Project', `${project.number}, ${project.title}`],
     ['Client', project.client],
     ['Location', project.location],
@@ -69,9 +71,8 @@ export const cover: Section = ({ result, options, width }) => {
     ['Spec sections', sections.join(', ')],
     ['Adopted codes', codes.join(', ')],
     ['Office', titleBlock.office],
-    ['Prepared', titleBlock.preparedBy ?? ''],
-    ['Checked', titleBlock.checkedBy ?? ''],
-    ['Approved', titleBlock.approvedBy ?? ''],
+    ['Address', address],
+    ...people,
     ['Date of issue', titleBlock.date.slice(0, 10)],
     ['Revision', revisionWords(titleBlock.revision)],
     ['Status', titleBlock.status],
@@ -79,7 +80,7 @@ export const cover: Section = ({ result, options, width }) => {
     ['Sized with', `Coldfill engine ${result.engine}, spec version ${result.spec}`],
     ...(contentHash === undefined ? [] : [['Content hash (SHA-256)', contentHash] as [string, string]]),
   ]
-  const kept = fields.filter(([label, value]) => value !== '' || ['Prepared', 'Checked', 'Approved'].includes(label))
+  const kept = fields.filter((field) => field[1] !== '' || people.includes(field))
   return [
     ...(options.logo ? [logoParagraph(options.logo, titleBlock.office)] : []),
     paragraph('SUBMITTAL', STYLE.zone),

@@ -1,6 +1,6 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import type { Workbook } from 'exceljs'
-import { revisionWords, type DocumentOptions } from '../document-options.ts'
+import { peopleOf, revisionWords, type DocumentOptions } from '../document-options.ts'
 import { OCHRE, PENCIL } from '../look.ts'
 import { cautions } from '../words/cautions.ts'
 import { gaugeRemark } from '../words/pressure-words.ts'
@@ -14,6 +14,16 @@ export interface ContentsEntry {
 }
 
 const WIDTHS = [24, 16, 60, 22]
+
+/** The library gives a picture a number for a name; a reader who cannot see it needs words. */
+export const withLogoWords = (xml: string, { titleBlock }: DocumentOptions): string =>
+  xml.replace(/(<xdr:cNvPr id="\d+" name=")[^"]*"/, (_, head: string) => {
+    const words = `Logo of ${titleBlock.office}`.replace(/[<>&"]/g, (sign) => `&#${sign.charCodeAt(0)};`)
+    return `${head}Logo" descr="${words}"`
+  })
+
+/** Most room for a logo, in pixels of 96 to the inch: the last column, beside title and subtitle. */
+const [LOGO_WIDTH, LOGO_HEIGHT] = [150, 58]
 
 /** Title block, revision block, contents, legend and cautions: the first sheet of the workbook. */
 export const writeCover = (
@@ -57,6 +67,16 @@ export const writeCover = (
     at += 1
   }
 
+  if (options.logo) {
+    const { data, type, width, height } = options.logo
+    const scale = Math.min(LOGO_WIDTH / width, LOGO_HEIGHT / height)
+    const buffer = Buffer.from(data)
+    sheet.addImage(workbook.addImage({ buffer: buffer as never, extension: type === 'png' ? 'png' : 'jpeg' }), {
+      tl: { col: WIDTHS.length - 1, row: 0 },
+      ext: { width: Math.round(width * scale), height: Math.round(height * scale) },
+      editAs: 'absolute',
+    })
+  }
   const title = sheet.getCell(at, 1)
   putCell(title, { text: project.title })
   title.font = font(20, { bold: true })
@@ -74,16 +94,17 @@ export const writeCover = (
   heading('TITLE BLOCK')
   const sections = Object.entries(project.specSections).map(([kind, section]) => `${section} (${kind})`)
   const codes = Object.entries(project.codes).map(([kind, code]) => `${code} (${kind})`)
-  const fields: [string, string][] = [
+  const people = peopleOf(titleBlock)
+  const address = titleBlock.lines?.join(' · ') ?? ''
+  const fields: (readonly [string, string])[] = [
     ['Project number', project.number],
     ['Client', project.client],
     ['Location', project.location],
     ['Spec sections', sections.join(', ')],
     ['Adopted codes', codes.join(', ')],
     ['Office', titleBlock.office],
-    ['Prepared', titleBlock.preparedBy ?? ''],
-    ['Checked', titleBlock.checkedBy ?? ''],
-    ['Approved', titleBlock.approvedBy ?? ''],
+    ...(address === '' ? [] : [['Address', address] as const]),
+    ...people,
     ['Date of issue', titleBlock.date.slice(0, 10)],
     ['Revision', revisionWords(titleBlock.revision)],
     ['Status', titleBlock.status],

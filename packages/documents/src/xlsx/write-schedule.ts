@@ -10,7 +10,7 @@ import { writeAssumptions } from './assumptions-sheet.ts'
 import { writeCalculation, type WrittenCalculation } from './calculation-sheet.ts'
 import { namedCells, withNames } from './cell-names.ts'
 import { writeChanges } from './changes-sheet.ts'
-import { writeCover, type ContentsEntry } from './cover-sheet.ts'
+import { withLogoWords, writeCover, type ContentsEntry } from './cover-sheet.ts'
 import { writeFindings } from './findings-sheet.ts'
 import { writeFluidData } from './fluid-data-sheet.ts'
 import { cellText } from './plain-text.ts'
@@ -122,6 +122,7 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   const numbers = samplePart === undefined ? new Map<string, string>() : paletteNumbers(partText(bytes, samplePart))
   return fixedArchive(bytes, (part, xml) => {
     if (part === 'xl/workbook.xml') return withNames(xml, cellNames)
+    if (part.startsWith('xl/drawings/drawing')) return withLogoWords(xml, options)
     const name = partOf.get(part) ?? ''
     const calculation = written.get(name)
     if (!calculation) return xml
