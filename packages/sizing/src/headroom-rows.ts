@@ -1,4 +1,11 @@
-import { limitOf, type Method, sensitivities, type TraceEntry, type TraceInput, type TraceSection } from '@coldfill/engine'
+import {
+  limitOf,
+  type Method,
+  sensitivities,
+  type TraceEntry,
+  type TraceInput,
+  type TraceSection,
+} from '@coldfill/engine'
 import type { HeadroomRow, SelectedVessel } from './result.ts'
 import type { VesselContext } from './vessel-context.ts'
 

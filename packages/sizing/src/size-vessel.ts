@@ -135,7 +135,8 @@ const shareEqually = (
 /** The sections that have entries. Copied, for an array that grew keeps room for more, and there are many. */
 const keptTrace = (calculation: Calculation): readonly TraceSection[] => {
   const kept: TraceSection[] = []
-  for (const { title, entries } of calculation.trace) if (entries.length > 0) kept.push({ title, entries: entries.slice() })
+  for (const { title, entries } of calculation.trace)
+    if (entries.length > 0) kept.push({ title, entries: entries.slice() })
   return kept
 }
 
@@ -189,8 +190,7 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
       selected = selectVessel(context, input.catalogue, results, choice.construction, atmosphere)
       Object.assign(results, checkVessel(context, choice.method, results, choice.construction, atmosphere))
       headroom = headroomRows(context, choice.method, selected)
-      if (selected)
-        Object.assign(results, checkBack(context, choice.method, selected), weighVessel(context, selected))
+      if (selected) Object.assign(results, checkBack(context, choice.method, selected), weighVessel(context, selected))
     }
   }
   const result: VesselResult = {
