@@ -13,6 +13,7 @@ const parts = [
   'packages/formula/src',
   'packages/spec/src',
   'packages/contract/src',
+  'packages/presentation/src',
   'pnpm-lock.yaml',
 ]
 

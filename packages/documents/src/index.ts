@@ -27,4 +27,3 @@ export {
   type ScheduleTable,
 } from './schedules/schedule-table.ts'
 export { maxCatalogueBytes, readCatalogueFile } from './catalogue/read-catalogue-file.ts'
-export { acceptanceDrawing, pressureDrawing } from './drawings/index.ts'

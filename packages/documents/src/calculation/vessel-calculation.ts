@@ -2,7 +2,7 @@ import { formulaTree, inUnits, type FormulaFunction, type Scope, type Tree } fro
 import type { ProjectResult } from '@coldfill/sizing'
 import { unitLabel, type Kind, type UnitSystem } from '@coldfill/units'
 import { citationWords, originWords } from '../words/source-words.ts'
-import { displayNumber } from './display-number.ts'
+import { displayNumber } from '@coldfill/presentation'
 
 type Vessel = ProjectResult['vessels'][number]
 type TraceEntry = Vessel['trace'][number]['entries'][number]

@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest'
-import { drawing, text } from '../drawings/svg.ts'
+import { PAPER, svgText } from '@coldfill/presentation'
 import { pngRenderer } from './png-of-svg.ts'
 
 const size = (png: Uint8Array) => {
@@ -10,7 +10,16 @@ const size = (png: Uint8Array) => {
 it('draws an SVG with its letters, in the size asked for and in the same bytes each time', async () => {
   const png = await pngRenderer()
   const picture = (words: string) =>
-    drawing({ width: 200, height: 100 }, 'Title', 'Words', [text(20, 50, words, { 'font-weight': 600 })]).svg
+    svgText(
+      {
+        title: 'Title',
+        words: 'Words',
+        width: 200,
+        height: 100,
+        shapes: [{ name: 'text', attributes: { x: 20, y: 50, fontWeight: 600 }, text: words }],
+      },
+      PAPER,
+    )
   const drawn = png(picture('Cold 22 psig'), 400)
   expect(size(drawn)).toEqual([400, 200])
   expect(Buffer.from(png(picture('Cold 22 psig'), 400)).equals(Buffer.from(drawn))).toBe(true)

@@ -16,7 +16,7 @@ import { equationParagraph, equationThenText, paragraph, runningText, stepParagr
 import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
 import { basisWords } from '../words/basis-words.ts'
-import { valueText } from '../calculation/value-text.ts'
+import { valueText } from '@coldfill/presentation'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import { chosenVessel } from './chosen-vessel.ts'

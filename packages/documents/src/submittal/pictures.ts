@@ -1,17 +1,16 @@
+import { drawAcceptance, drawPressures, ON_PAPER, PAPER, svgText, type Drawing } from '@coldfill/presentation'
 import type { ProjectResult, SystemResult, VesselResult } from '@coldfill/sizing'
 import { ImageRun, Paragraph, type FileChild } from 'docx'
 import type { DocumentOptions } from '../document-options.ts'
 import type { Captions } from '../docx/captions.ts'
 import { plainText } from '../docx/plain-text.ts'
 import { STYLE } from '../docx/styles.ts'
-import { drawAcceptance } from '../drawings/acceptance-drawing.ts'
-import { drawPressures } from '../drawings/pressure-drawing.ts'
-import type { Drawing } from '../drawings/svg.ts'
 import { pngRenderer } from '../raster/png-of-svg.ts'
 
 /** A drawing, and the same as dots for programs that do not draw. */
 export interface Picture {
   readonly drawing: Drawing
+  readonly svg: string
   readonly png: Uint8Array
 }
 
@@ -30,12 +29,14 @@ export const drawPictures = async (result: ProjectResult, { units }: DocumentOpt
     new Map(
       things.flatMap((thing) => {
         const drawing = draw(thing)
-        return drawing ? [[thing, { drawing, png: pngOf(drawing.svg, DOTS) }] as const] : []
+        if (!drawing) return []
+        const svg = svgText(drawing, PAPER)
+        return [[thing, { drawing, svg, png: pngOf(svg, DOTS) }] as const]
       }),
     )
   return {
-    pressures: pictures(result.systems, (system) => drawPressures(system, units, result.vessels)),
-    acceptance: pictures(result.vessels, (vessel) => drawAcceptance(vessel, units)),
+    pressures: pictures(result.systems, (system) => drawPressures(system, units, ON_PAPER, result.vessels)),
+    acceptance: pictures(result.vessels, (vessel) => drawAcceptance(vessel, units, ON_PAPER)),
   }
 }
 
@@ -43,8 +44,13 @@ export const drawPictures = async (result: ProjectResult, { units }: DocumentOpt
 const ACROSS = 540
 
 /** A picture in the line, under its caption. */
-export const figure = ({ drawing, png }: Picture, caption: string, captions: Captions, key?: string): FileChild[] => {
-  const { svg, title, words, width, height } = drawing
+export const figure = (
+  { drawing, svg, png }: Picture,
+  caption: string,
+  captions: Captions,
+  key?: string,
+): FileChild[] => {
+  const { title, words, width, height } = drawing
   return [
     captions.figure(caption, key),
     new Paragraph({

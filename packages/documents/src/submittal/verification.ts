@@ -1,4 +1,4 @@
-import { numberText } from '../calculation/value-text.ts'
+import { numberText } from '@coldfill/presentation'
 import { leadIn } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import type { Section } from './section.ts'
@@ -16,11 +16,14 @@ const percent = (deviation: number | null): string => {
 export const verification: Section = ({ result, options, headings, captions, width }) => {
   const { verification: rows } = options
   if (rows === undefined || rows.length === 0) return []
+  const { verifiedWith = result.engine } = options
+  const ranBy =
+    verifiedWith === result.engine
+      ? `the engine of this submittal (${result.engine})`
+      : `engine ${verifiedWith}; this submittal was sized by engine ${result.engine}`
   return [
     headings.heading('Verification', 1),
-    leadIn(
-      `Cases with a known answer, run by the engine of this submittal (${result.engine}). Deviation is computed over expected less one.`,
-    ),
+    leadIn(`Cases with a known answer, run by ${ranBy}. Deviation is computed over expected less one.`),
     captions.next('Verification'),
     table({
       title: 'Verification',

@@ -1,6 +1,5 @@
 import { isKind, unitLabel, type UnitSystem } from '@coldfill/units'
-import { displayNumber } from '../calculation/display-number.ts'
-import { numberText } from '../calculation/value-text.ts'
+import { displayNumber, numberText } from '@coldfill/presentation'
 import { revisionWords, type ChangedEntry } from '../document-options.ts'
 import { sentenceCase } from './vessel-words.ts'
 

@@ -1,7 +1,7 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import { unitLabel } from '@coldfill/units'
 import type { DataValidation, Style, Workbook, Worksheet } from 'exceljs'
-import { displayNumber } from '../calculation/display-number.ts'
+import { displayNumber } from '@coldfill/presentation'
 import type { DocumentOptions } from '../document-options.ts'
 import { RULE } from '../look.ts'
 import { sentenceCase } from '../words/vessel-words.ts'

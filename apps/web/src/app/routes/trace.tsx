@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query'
 import type { Project, ProjectResult } from '@coldfill/contract'
+import { drawAcceptance, drawPressures, ON_PAPER } from '@coldfill/presentation'
 import { formatQuantity, type UnitSystem } from '@coldfill/units'
 import { useEffect, useMemo } from 'react'
 import { Link, useLocation, useNavigate, useParams } from 'react-router-dom'
@@ -14,8 +15,8 @@ import { ContentBand } from '#features/results/components/content-band.tsx'
 import { RevisionSwitch } from '#features/results/components/revision-switch.tsx'
 import { UnitsSwitch } from '#features/results/components/units-switch.tsx'
 import { ChosenVessel } from '#features/schedule/components/chosen-vessel.tsx'
+import { DrawingFigure } from '#features/schedule/components/drawing-figure.tsx'
 import { HeadroomTable } from '#features/schedule/components/headroom-table.tsx'
-import { PressureDrawing } from '#features/schedule/components/pressure-drawing.tsx'
 import { WholeTrace } from '#features/schedule/components/whole-trace.tsx'
 import { capital } from '#lib/format.ts'
 import { requireParam, useProjectNumber } from '#lib/route-params.ts'
@@ -80,10 +81,12 @@ const Page = ({
   }, [hash])
   const system = result.systems.find((one) => one.id === vessel.system)
   const hasDrawing = (system?.pressures.length ?? 0) > 0
+  const hasGas = drawAcceptance(vessel, units, ON_PAPER) !== null
   const parts = [
     { id: 'calculation', name: 'Calculation', shown: vessel.trace.length > 0 },
     { id: 'chosen', name: 'Chosen vessel', shown: vessel.status === 'sized' },
     { id: 'headroom', name: 'Headroom', shown: vessel.headroom.length > 0 },
+    { id: 'acceptance', name: 'Water in the vessel', shown: hasGas },
     { id: 'pressures', name: 'Pressures', shown: hasDrawing },
   ].filter(({ shown }) => shown)
   return (
@@ -131,11 +134,29 @@ const Page = ({
           <HeadroomTable vessel={vessel} units={units} />
         </section>
       ) : null}
+      {hasGas ? (
+        <section id="acceptance" tabIndex={-1} className="scroll-mt-4 break-inside-avoid outline-none">
+          <SectionHeading
+            note={vessel.selected ? 'the chosen vessel and the least that would do' : 'the least vessel that would do'}
+          >
+            Water in the vessel
+          </SectionHeading>
+          <div className="border-t-2 border-ink pt-3">
+            <DrawingFigure
+              draw={(look) => drawAcceptance(vessel, units, look)}
+              name={`${vessel.system}-${vessel.mark}-water-in-the-vessel`}
+            />
+          </div>
+        </section>
+      ) : null}
       {system && hasDrawing ? (
         <section id="pressures" tabIndex={-1} className="scroll-mt-4 break-inside-avoid outline-none">
           <SectionHeading note={`${system.title} filled with ${system.fluid}, pump off`}>Pressures</SectionHeading>
           <div className="border-t-2 border-ink pt-3">
-            <PressureDrawing system={system} units={units} />
+            <DrawingFigure
+              draw={(look) => drawPressures(system, units, look, result.vessels)}
+              name={`${system.id}-pressures`}
+            />
           </div>
         </section>
       ) : null}

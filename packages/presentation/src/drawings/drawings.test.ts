@@ -1,12 +1,13 @@
 import type { SystemResult } from '@coldfill/sizing'
-import { water } from '@coldfill/engine'
 import { describe, expect, it } from 'vitest'
-import { clinicProject, si } from '../testing/index.ts'
-import { drawAcceptance, waterInVessel } from './acceptance-drawing.ts'
-import { drawPressures, pressureDrawing } from './pressure-drawing.ts'
+import { waterInVessel } from './charged-vessel.ts'
+import { drawPressures } from './pressure-drawing.ts'
 import { scaleOver } from './scale.ts'
+import { ON_PAPER, PAPER, wordsWidth } from './shape.ts'
+import { svgText } from './svg-text.ts'
 
-const project = clinicProject(water.functions)
+const PSI = 6894.757293168361
+const FOOT = 0.3048
 
 const heating: SystemResult = {
   id: 'HWS',
@@ -15,15 +16,15 @@ const heating: SystemResult = {
   service: 'heating water',
   fluid: 'water',
   pressures: [
-    { label: 'ET-1', height: 0, cold: si('22 psi', 'gauge pressure'), hot: si('40 psi', 'gauge pressure') },
+    { label: 'ET-1', height: 0, cold: 22 * PSI, hot: 40 * PSI },
     {
       label: 'Highest point',
-      height: si('40 ft', 'length'),
-      cold: si('5 psi', 'gauge pressure'),
-      hot: si('23 psi', 'gauge pressure'),
+      height: 40 * FOOT,
+      cold: 5 * PSI,
+      hot: 23 * PSI,
     },
   ],
-  relief: { set: si('50 psi', 'gauge pressure'), height: 0 },
+  relief: { set: 50 * PSI, height: 0 },
 }
 
 const circles = (svg: string): { x: number; y: number; fill: string }[] =>
@@ -45,8 +46,8 @@ const wellFormed = (svg: string): boolean => {
 }
 
 describe('the drawing of pressure against height', () => {
-  const drawn = drawPressures(heating, 'US')
-  const svg = drawn?.svg ?? ''
+  const drawn = drawPressures(heating, 'US', ON_PAPER)
+  const svg = drawn ? svgText(drawn, PAPER) : ''
 
   it('puts cold and hot where their numbers are', () => {
     const [coldLow, coldTop, hotLow, hotTop] = circles(svg)
@@ -74,54 +75,40 @@ describe('the drawing of pressure against height', () => {
     expect(wellFormed(svg)).toBe(true)
   })
 
-  it('says a rating that is far off and draws one that is near', () => {
-    const vessel = project.vessels.find((each) => each.selected !== null)
-    if (!vessel?.selected) throw new Error('the clinic has a chosen vessel')
-    const rated = (psi: number) =>
-      pressureDrawing(heating, 'US', [
-        {
-          ...vessel,
-          mark: 'ET-1',
-          system: 'HWS',
-          selected: { ...vessel.selected!, maxPressure: si(`${psi} psi`, 'gauge pressure') },
-        },
-      ]) ?? ''
-    expect(rated(75)).toContain('stroke-dasharray="2 4"')
-    expect(rated(300)).not.toContain('stroke-dasharray="2 4"')
-    expect(rated(300)).toContain('ET-1 rated 300, off the scale')
+  it('is none where no vessel holds the pressure', () => {
+    expect(drawPressures({ ...heating, pressures: [] }, 'US', ON_PAPER)).toBeNull()
   })
 
-  it('is none where no vessel holds the pressure', () => {
-    expect(drawPressures({ ...heating, pressures: [] }, 'US')).toBeNull()
+  it('marks the atmosphere where a gauge reads below it, and nowhere else', () => {
+    const [low, top] = heating.pressures
+    if (!low || !top) throw new Error('the system has two points')
+    const drawn = drawPressures({ ...heating, pressures: [low, { ...top, cold: -3 * PSI }] }, 'US', ON_PAPER)
+    expect(drawn?.shapes.some(({ text }) => text === 'Atmosphere')).toBe(true)
+    expect(svg).not.toContain('Atmosphere')
+  })
+
+  it('keeps everything inside, however narrow it is, and takes its colours from the palette', () => {
+    const theme = { ink: 'v(ink)', pencil: 'v(pencil)', hair: 'v(hair)', steel: 'v(steel)', ground: 'v(ground)' }
+    for (const width of [300, 340, 480, 720]) {
+      const narrow = drawPressures(heating, 'US', { palette: theme, width })
+      expect(narrow?.width).toBe(width)
+      for (const { name, attributes, text = '' } of narrow?.shapes ?? []) {
+        expect(JSON.stringify(attributes)).not.toContain('#')
+        if (name !== 'text') continue
+        const [x, room] = [Number(attributes['x']), wordsWidth(text)]
+        const anchor = attributes['textAnchor'] ?? 'start'
+        const left = anchor === 'start' ? x : anchor === 'end' ? x - room : x - room / 2
+        expect({ text, inside: left >= -1 && left + room <= width + 1 }).toEqual({ text, inside: true })
+      }
+    }
   })
 })
 
-describe('the drawing of water in a vessel against pressure', () => {
+describe('water in a vessel', () => {
   it('follows the law of Boyle and Mariotte', () => {
     // By hand: gas at 14.7 psia above a charge of 12 psig in 100 gal, pressed to 30 psig: 100 · (1 − 26.7 / 44.7) = 40.27 gal.
     expect(waterInVessel(100, { charge: 12, atmosphere: 14.7 }, 30)).toBeCloseTo(40.27, 2)
     expect(waterInVessel(100, { charge: 12, atmosphere: 14.7 }, 5)).toBe(0)
-  })
-
-  it('has the expansion of the engine between cold and hot of the required vessel', () => {
-    // The engine sizes by ASHRAE's equation; the drawing goes by the gas alone. They have to agree.
-    const vessel = project.vessels[0]
-    if (!vessel) throw new Error('the clinic has vessels')
-    const bare = { ...vessel, selected: null, results: { ...vessel.results } }
-    delete (bare.results as Record<string, unknown>)['final-pressure']
-    const words = drawAcceptance(bare, 'US')?.words ?? ''
-    const [, cold = '', hot = ''] = /with ([\d.]+) gal of water, hot .* with ([\d.]+) gal of water/.exec(words) ?? []
-    const expansion = (vessel.results['expansion-volume']?.value ?? 0) / si('1 gal', 'volume')
-    expect(Math.abs(Number(hot) - Number(cold) - expansion)).toBeLessThan(0.005 * expansion)
-  })
-
-  it('is well formed, marks cold and hot, and is none for a vessel without a size', () => {
-    const [vessel] = project.vessels.filter((each) => each.status === 'sized')
-    if (!vessel) throw new Error('the clinic has a sized vessel')
-    const svg = drawAcceptance(vessel, 'SI')?.svg ?? ''
-    expect(wellFormed(svg)).toBe(true)
-    expect(circles(svg)).toHaveLength(2)
-    expect(drawAcceptance({ ...vessel, status: 'infeasible' }, 'SI')).toBeNull()
   })
 })
 

@@ -1,0 +1,6 @@
+export { displayNumber } from './display-number.ts'
+export { numberText, valueText } from './value-text.ts'
+export { drawAcceptance } from './drawings/acceptance-drawing.ts'
+export { drawPressures } from './drawings/pressure-drawing.ts'
+export { ON_PAPER, PAPER, type Drawing, type DrawingLook, type Palette, type Shape } from './drawings/shape.ts'
+export { svgText } from './drawings/svg-text.ts'
