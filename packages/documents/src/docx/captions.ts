@@ -1,6 +1,7 @@
 import { Paragraph, type ParagraphChild } from 'docx'
 import { asParagraphChildren, bookmarked, fieldRuns, textRun } from './field.ts'
 import { plainText } from './plain-text.ts'
+import { STYLE } from './styles.ts'
 
 type Label = 'Table' | 'Figure'
 
@@ -15,7 +16,7 @@ export interface CaptionEntry {
 const [CAPTION_IDS, REFERENCE_IDS] = [200_000, 300_000]
 
 /**
- * Numbers the tables and figures of a document; a caption stands above what it names. Words elsewhere refer to one by
+ * Numbers the tables and figures of a document; a caption stands above a table and below a figure. Words elsewhere refer to one by
  * the key it was captioned under, also before it.
  */
 export class Captions {
@@ -58,7 +59,7 @@ export class Captions {
     const numbered = [textRun(`${label} `), ...fieldRuns(`SEQ ${label} \\* ARABIC`, String(number))]
     if (key !== undefined) this.#names.set(key, `${label} ${number}`)
     return new Paragraph({
-      style: 'Caption',
+      style: label === 'Table' ? 'Caption' : STYLE.figureCaption,
       children: asParagraphChildren(
         bookmarked(anchor, id, [
           ...(key === undefined ? numbered : bookmarked(this.#anchor(key), id + REFERENCE_IDS, numbered)),

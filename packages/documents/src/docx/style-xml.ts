@@ -19,7 +19,8 @@ export interface StyleDefinition {
   readonly left?: number
   readonly hanging?: number
   readonly align?: 'left' | 'right' | 'center'
-  readonly keepNext?: true
+  /** False takes off what the style it is based on has. */
+  readonly keepNext?: boolean
   readonly keepLines?: true
   readonly outline?: number
   readonly top?: Pen
@@ -43,7 +44,7 @@ const paragraphProperties = (s: StyleDefinition): string => {
     s.line === undefined ? '' : ` w:line="${s.line}" w:lineRule="auto"`,
   ].join('')
   return [
-    s.keepNext ? '<w:keepNext/>' : '',
+    s.keepNext === undefined ? '' : s.keepNext ? '<w:keepNext/>' : '<w:keepNext w:val="0"/>',
     s.keepLines ? '<w:keepLines/>' : '',
     borders ? `<w:pBdr>${borders}</w:pBdr>` : '',
     spacing ? `<w:spacing${spacing}/>` : '',

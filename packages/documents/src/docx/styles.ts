@@ -23,6 +23,7 @@ export const STYLE = {
   draft: 'DraftWarning',
   note: 'KeyedNote',
   figure: 'Figure',
+  figureCaption: 'FigureCaption',
   caution: 'Caution',
 } as const
 
@@ -165,7 +166,17 @@ const DEFINITIONS: readonly StyleDefinition[] = [
   },
   // The sentences belong together: none is left alone on the next page.
   { id: STYLE.caution, name: 'Caution', custom: true, keepNext: true, keepLines: true },
-  { id: STYLE.figure, name: 'Figure', custom: true, before: 0, after: 160 },
+  // The caption of a table stands above it, that of a figure below: each is kept with what it names.
+  { id: STYLE.figure, name: 'Figure', custom: true, before: 160, after: 40, keepNext: true },
+  {
+    id: STYLE.figureCaption,
+    name: 'Figure Caption',
+    custom: true,
+    basedOn: 'Caption',
+    before: 0,
+    after: 220,
+    keepNext: false,
+  },
   { id: STYLE.note, name: 'Keyed Note', custom: true, size: 16, left: 360, hanging: 360, before: 0, after: 30 },
 ]
 

@@ -43,7 +43,7 @@ export const drawPictures = async (result: ProjectResult, { units }: DocumentOpt
 /** Pixels of the page, 96 to the inch. */
 const ACROSS = 540
 
-/** A picture in the line, under its caption. */
+/** A picture in the line, and its caption under it on the same page. */
 export const figure = (
   { drawing, svg, png }: Picture,
   caption: string,
@@ -52,7 +52,6 @@ export const figure = (
 ): FileChild[] => {
   const { title, words, width, height } = drawing
   return [
-    captions.figure(caption, key),
     new Paragraph({
       style: STYLE.figure,
       children: [
@@ -65,5 +64,6 @@ export const figure = (
         }),
       ],
     }),
+    captions.figure(caption, key),
   ]
 }

@@ -53,18 +53,33 @@ describe('the submittal', () => {
   it('lists its headings in a contents field that is complete, clean and asks for no update', () => {
     const listed = [...paragraphs(document, 'TOC1'), ...paragraphs(document, 'TOC2')].sort()
     expect(listed).toEqual([...paragraphs(document, 'Heading1'), ...paragraphs(document, 'Heading2')].sort())
-    const captioned = (label: string) => paragraphs(document, 'Caption').filter((text) => text.startsWith(label))
-    expect(paragraphs(document, 'TableofFigures')).toEqual([...captioned('Table '), ...captioned('Figure ')])
+    const captions = [...paragraphs(document, 'Caption'), ...paragraphs(document, 'FigureCaption')]
+    expect(captions.filter((text) => text.startsWith('Figure ')).length).toBeGreaterThan(0)
+    expect(paragraphs(document, 'TableofFigures')).toEqual(captions)
     for (const xml of parts.values()) {
       expect(xml).not.toContain('updateFields')
       expect(xml).not.toMatch(/w:dirty=/)
     }
     const anchors = [...document.matchAll(/w:anchor="([^"]+)"/g)].map(([, anchor]) => anchor)
-    expect(anchors.length).toBe(listed.length + paragraphs(document, 'Caption').length)
+    expect(anchors.length).toBe(listed.length + captions.length)
     for (const anchor of anchors) expect(document).toContain(`w:name="${anchor}"`)
     // Each field is begun, separated and ended.
     const marks = (type: string) => document.split(`w:fldCharType="${type}"`).length
     expect([marks('separate'), marks('end')]).toEqual([marks('begin'), marks('begin')])
+  })
+
+  it('has the caption of a table above it and that of a figure below, each kept with what it names', () => {
+    const blocks = document.match(/<w:p>.*?<\/w:p>|<w:tbl>.*?<\/w:tbl>/gs) ?? []
+    const is = (block: string | undefined, style: string) => block?.includes(`<w:pStyle w:val="${style}"/>`) === true
+    const figures = blocks.flatMap((block, index) => (block.includes('<w:drawing>') ? [index] : []))
+    expect(figures.length).toBe(paragraphs(document, 'FigureCaption').length)
+    for (const index of figures) expect(is(blocks[index + 1], 'FigureCaption')).toBe(true)
+    for (const [index, block] of blocks.entries())
+      if (is(block, 'Caption')) expect(blocks[index + 1]).toMatch(/^<w:tbl>/)
+    const styles = parts.get('word/styles.xml') ?? ''
+    const style = (id: string) => all(styles, 'style').find((xml) => xml.includes(`w:styleId="${id}"`)) ?? ''
+    for (const id of ['Figure', 'Caption']) expect(style(id)).toContain('<w:keepNext/>')
+    expect(style('FigureCaption')).toContain('<w:keepNext w:val="0"/>')
   })
 
   it('has no page numbers in its lists unless somebody says them', () => {
