@@ -122,6 +122,8 @@ export interface Method {
   readonly assumes?: readonly string[]
   /** Method run with the chosen vessel to find what becomes of the pressures. */
   readonly checkBack?: string
+  /** Product standard of the vessels that the method is written for; findings about limits and conformity follow it. */
+  readonly product?: 'EN 13831'
   /** Plain sentence for the basis of the submittal: what the method does and what it leaves out. */
   readonly basis: string
   readonly examples: readonly WorkedExample[]

@@ -188,7 +188,7 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
       addResults(context, choice.method, results)
       shareEqually(context, choice.method, quantity, results)
       selected = selectVessel(context, input.catalogue, results, choice.construction, atmosphere)
-      Object.assign(results, checkVessel(context, choice.method, results, choice.construction, atmosphere))
+      Object.assign(results, checkVessel(context, choice.method, results, choice.construction, selected, atmosphere))
       headroom = headroomRows(context, choice.method, selected)
       if (selected) Object.assign(results, checkBack(context, choice.method, selected), weighVessel(context, selected))
     }

@@ -5,6 +5,8 @@ import { engineeringCodes, type EngineeringCode } from '../engineering-codes.ts'
 
 const PSI = 6894.757293168361
 const SIXTY_C = 333.15
+/** 250 °F */
+const BOILER_CODE_HOTTEST = (250 + 459.67) / 1.8
 const CLOSED_LOOPS: ReadonlySet<string> = new Set(hydronicServices)
 const EXPANSION_KINDS: ReadonlySet<string> = new Set(['expansion tank', 'solar expansion tank', 'drain-back tank'])
 
@@ -23,6 +25,7 @@ export const checkSystem = (_spec: SpecModel, system: SystemModel, atmosphere: n
   }
   const service = system.service?.value
   const { pressure, temperatures, vessels } = system
+  const relief = pressure['relief-valve']
   const domestic = service === 'domestic hot water' || service === 'domestic cold water'
   if (domestic) {
     const { supply, regulator } = pressure
@@ -79,7 +82,6 @@ export const checkSystem = (_spec: SpecModel, system: SystemModel, atmosphere: n
     }
   }
   if (domestic) {
-    const relief = pressure['relief-valve']
     if (relief && service === 'domestic hot water' && gaugeFromSpec(relief, atmosphere).value > 150.001 * PSI) {
       report(
         'CF-E056',
@@ -88,6 +90,18 @@ export const checkSystem = (_spec: SpecModel, system: SystemModel, atmosphere: n
         'Set it to 150 psi or the rating of the tank, whichever is lower.',
       )
     }
+  }
+  const { high } = temperatures
+  const hot = high && high.value.value > BOILER_CODE_HOTTEST + 0.01 ? high : undefined
+  const tight = relief && gaugeFromSpec(relief, atmosphere).value > 160.001 * PSI ? relief : undefined
+  const beyond = hot ?? tight
+  if (beyond && (service === 'heating water' || service === 'dual temperature water')) {
+    report(
+      'CF-E058',
+      beyond,
+      `${beyond.value.authored ?? 'This'} is above the ${hot ? '250 °F' : '160 psi'} to which the heating boiler code reaches.`,
+      'Confirm the construction code and the ratings of boiler, piping and vessel.',
+    )
   }
   if (system.fluid && system.fluid.base !== 'water') {
     report('CF-E061', system.fluid, glycolMakeUp, 'Schedule a feeder, or say how the loop is made up.')

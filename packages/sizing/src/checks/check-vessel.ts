@@ -1,10 +1,11 @@
 import type { Method } from '@coldfill/engine'
-import type { ResultValue } from '../result.ts'
+import type { ResultValue, SelectedVessel } from '../result.ts'
 import { report, type VesselContext } from '../vessel-context.ts'
 import { checkCodeMinimum } from './code-minimum.ts'
 import { checkDomestic } from './domestic.ts'
 import { glycolUpperVolume } from './glycol-uncertainty.ts'
 import { checkHydronic } from './hydronic.ts'
+import { sayCategory } from './pressure-directive.ts'
 import { stampReasons } from './stamp.ts'
 
 const checkStamp = (
@@ -30,12 +31,14 @@ export const checkVessel = (
   method: Method,
   results: Readonly<Record<string, ResultValue>>,
   construction: string | undefined,
+  selected: SelectedVessel | null,
   atmosphere: number,
 ): Record<string, ResultValue> => {
   checkStamp(context, results, atmosphere)
+  sayCategory(context, method, results, selected, atmosphere)
   const { kind } = context.vessel
   if (kind === 'expansion tank') {
-    checkHydronic(context, results, construction, atmosphere)
+    checkHydronic(context, method, results, construction, atmosphere)
     return {
       ...checkCodeMinimum(context, method, results, construction),
       ...glycolUpperVolume(context, method),

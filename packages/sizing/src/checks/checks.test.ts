@@ -169,6 +169,22 @@ const cases: readonly Case[] = [
     hydronic({ pressure: '{ static-height: 12 m, fill: 0.5 bar, relief-valve: 3 bar }' }),
   ],
   ['CF-E047', 'systems.S.vessels.ET', hydronic({ high: '80 °C', vessel: ', method: en 12828' })],
+  [
+    'CF-E047',
+    'systems.S.vessels.ET',
+    hydronic({ high: '242 °F', pressure: '{ static-height: 8 m, top-margin: 25 psi, relief-valve: 100 psi }' }),
+  ],
+  ['CF-E037', 'systems.S.vessels.ET', hydronic({ vessel: ', method: en 12828' })],
+  [
+    'CF-E058',
+    'systems.S.temperatures.high',
+    hydronic({ high: '260 °F', pressure: '{ static-height: 8 m, top-margin: 40 psi, relief-valve: 120 psi }' }),
+  ],
+  [
+    'CF-E058',
+    'systems.S.pressure.relief-valve',
+    hydronic({ pressure: '{ static-height: 8 m, relief-valve: 170 psi }' }),
+  ],
   ['CF-E048', 'systems.S.vessels.ET', hydronic({ pressure: '{ static-height: 15 m, relief-valve: 4 bar }' })],
   ['CF-E049', 'systems.S.pressure.maximum', hydronic({ pressure: '{ static-height: 8 m, maximum: 2.5 bar }' })],
   [

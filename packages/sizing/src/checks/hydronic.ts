@@ -1,4 +1,4 @@
-import { ashraeExpansionCheck, saturationPressure } from '@coldfill/engine'
+import { ashraeExpansionCheck, type Method, saturationPressure } from '@coldfill/engine'
 import { formatQuantity, type Kind } from '@coldfill/units'
 import { gaugeFromSpec } from '../calculate-sections.ts'
 import type { ResultValue } from '../result.ts'
@@ -9,7 +9,10 @@ const GRAVITY = 9.80665
 const BOILING = 373.15
 /** 30 °C: warmer than any chilled supply, cooler than a plant room in a shutdown. */
 const WARM = 303.15
+/** 70 °C, EN 13831 (from memory). */
 const MEMBRANE = 343.15
+/** 240 °F, common practice, no source. */
+const USUAL_RATING = (240 + 459.67) / 1.8
 
 type Results = Readonly<Record<string, ResultValue>>
 
@@ -113,7 +116,7 @@ const checkRelief = (context: VesselContext, atmosphere: number): void => {
   })
 }
 
-const checkTemperatures = (context: VesselContext, construction: string | undefined, european: boolean): void => {
+const checkTemperatures = (context: VesselContext, method: Method, construction: string | undefined): void => {
   const { system, vessel } = context
   const { high } = system.temperatures
   const service = system.service?.value
@@ -125,9 +128,11 @@ const checkTemperatures = (context: VesselContext, construction: string | undefi
     })
   }
   const membrane = construction === 'diaphragm' || construction === 'bladder'
-  if (european && membrane && high && high.value.value > MEMBRANE + 0.01) {
+  const european = method.product === 'EN 13831'
+  if (membrane && high && high.value.value > (european ? MEMBRANE : USUAL_RATING) + 0.01) {
+    const limit = european ? 'the 70 °C that membranes stand for long' : 'the 240 °F at which usual ratings end'
     report(context, 'CF-E047', {
-      message: `${vessel.mark}: ${high.value.authored ?? 'the highest temperature'} is above the 70 °C that membranes stand for long.`,
+      message: `${vessel.mark}: ${high.value.authored ?? 'the highest temperature'} is above ${limit}.`,
       hint: 'Connect it in the return or with an intermediate vessel, or check the rating.',
     })
   }
@@ -174,6 +179,7 @@ const checkSuction = (context: VesselContext, results: Results): void => {
 /** Pressures, temperatures and fluid that a reviewing engineer checks at an expansion tank. */
 export const checkHydronic = (
   context: VesselContext,
+  method: Method,
   results: Results,
   construction: string | undefined,
   atmosphere: number,
@@ -182,7 +188,7 @@ export const checkHydronic = (
   checkCharge(context, results, atmosphere)
   checkTop(context, results, atmosphere)
   checkRelief(context, atmosphere)
-  checkTemperatures(context, construction, results['water-reserve'] !== undefined)
+  checkTemperatures(context, method, construction)
   checkGlycol(context)
   checkSuction(context, results)
   const connection = system.pressure['vessel-connection']

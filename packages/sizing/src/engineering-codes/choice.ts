@@ -58,4 +58,12 @@ export const choiceCodes = {
     'Write `stamp: yes`, and schedule the rating.',
     `ASME BPVC VIII-1 U-1(c)(2) and HLW-101.2 (${memory}). ${local}`,
   ),
+  'CF-E037': code(
+    'note',
+    'Conformity category of the vessel',
+    'Pressure times volume of a vessel made to EN 13831 decides its category under the pressure equipment directive.',
+    'The category decides who assesses the vessel and what papers come with it; some places ask for inspections above a limit.',
+    'Schedule the category, and ask for the declaration of conformity.',
+    `Directive 2014/68/EU, Article 4 and Annex II, vessels for gases of group 2 (${memory}). ${local}`,
+  ),
 } as const satisfies Record<string, EngineeringCodeHelp>

@@ -60,11 +60,11 @@ export const pressureCodes = {
   ),
   'CF-E047': code(
     'note',
-    'Membrane hotter than 70 °C',
-    'The water is hotter than the 70 °C that a membrane stands for long.',
+    'Membrane hotter than usual ratings',
+    'The water is hotter than a membrane stands for long: 70 °C by EN 13831; usual ratings elsewhere end at 240 °F.',
     'Membranes age fast in hot water.',
     'Connect the vessel in the return or with an intermediate vessel, or check the rating of the chosen one.',
-    'EN 13831 (from memory; verify against the adopted edition).',
+    'EN 13831 (from memory; verify against the adopted edition); 240 °F is common practice, no source.',
   ),
   'CF-E048': code(
     'note',

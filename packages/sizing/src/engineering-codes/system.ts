@@ -66,6 +66,14 @@ export const systemCodes = {
     'Connect the vessel at the pump suction, or raise the fill pressure by the pump head.',
     'ASHRAE Handbook, HVAC Systems and Equipment, point of no pressure change.',
   ),
+  'CF-E058': code(
+    'note',
+    'Outside the heating boiler code',
+    'The loop is hotter than 250 °F, or its relief valve is set above 160 psi.',
+    'Hot-water boilers, and piping and vessels with them, then fall under the rules for power boilers and high-temperature water.',
+    'Confirm the construction code and the ratings with the authority having jurisdiction.',
+    `ASME BPVC IV, scope (${memory}). ${local}`,
+  ),
   'CF-E060': code(
     'warning',
     'The fluid may freeze',

@@ -11,6 +11,7 @@ const build = (construction: 'diaphragm' | 'bladder') =>
     revision: 1,
     title: `Expansion vessel, ${construction}, BS 7074`,
     vessel: { kind: 'expansion tank', method: 'bs 7074', when: { construction: [construction] } },
+    product: 'EN 13831',
     sections: ['contents', 'british pressures'],
     inputs: {
       V_s: given('volume', 'system volume'),

@@ -21,6 +21,7 @@ export const din4807 = defineMethod({
   revision: 1,
   title: 'Expansion vessel with membrane, DIN 4807-2',
   vessel: { kind: 'expansion tank', method: 'din 4807', when: { construction: ['diaphragm', 'bladder'] } },
+  product: 'EN 13831',
   sections,
   inputs,
   steps: {

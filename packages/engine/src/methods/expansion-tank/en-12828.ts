@@ -25,6 +25,7 @@ export const en12828Water = defineMethod({
   revision: 1,
   title: 'Expansion vessel with membrane, EN 12828',
   vessel: { kind: 'expansion tank', method: 'en 12828', when },
+  product: 'EN 13831',
   sections,
   inputs,
   steps: {
@@ -96,6 +97,7 @@ export const en12828Glycol = defineMethod({
   id: 'expansion-tank.en-12828.glycol',
   title: 'Expansion vessel with membrane, EN 12828, glycol solution',
   vessel: { kind: 'expansion tank', method: 'en 12828', when: { ...when, glycol: true } },
+  product: 'EN 13831',
   inputs: { ...inputs, t_l: keyed('temperature', 'lowest water temperature', 'temperatures', 'low') },
   steps: {
     v_l: step('specific volume', 'specific volume, cold', 'v_sat(t_l)', annexD),

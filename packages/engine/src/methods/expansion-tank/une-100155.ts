@@ -32,6 +32,7 @@ export const une100155Water = defineMethod({
   revision: 1,
   title: 'Closed expansion vessel, UNE 100155',
   vessel: { kind: 'expansion tank', method: 'une 100155', when },
+  product: 'EN 13831',
   sections: ['contents', 'handbook pressures'],
   inputs,
   steps: { C_e: step('ratio', 'expansion coefficient', coefficient, clause9), ...rest },
@@ -99,6 +100,7 @@ export const une100155Glycol = defineMethod({
   id: 'expansion-tank.une-100155.glycol',
   title: 'Closed expansion vessel, UNE 100155, glycol solution',
   vessel: { kind: 'expansion tank', method: 'une 100155', when: { ...when, glycol: true } },
+  product: 'EN 13831',
   inputs: {
     ...inputs,
     G: { kind: 'ratio', name: 'glycol by volume', from: { at: 'fluid', property: 'volume fraction' } },

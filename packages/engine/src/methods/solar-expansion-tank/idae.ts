@@ -26,6 +26,7 @@ const build = (written: boolean, examples: readonly WorkedExample[]): Method =>
       method: 'idae',
       ...(written ? { when: { written: ['precharge'] } } : {}),
     },
+    product: 'EN 13831',
     sections: ['site', 'contents', 'handbook pressures'],
     inputs: {
       V_s: given('volume', 'system volume'),

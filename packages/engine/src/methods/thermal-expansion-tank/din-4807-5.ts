@@ -10,6 +10,7 @@ export const din4807Part5Vessel = defineMethod({
   revision: 1,
   title: 'Vessel with membrane for drinking water, DIN 4807-5',
   vessel: { kind: 'thermal expansion tank', method: 'din 4807-5' },
+  product: 'EN 13831',
   sections: ['contents', 'incoming pressure'],
   inputs: {
     V_s: given('volume', 'system volume'),
