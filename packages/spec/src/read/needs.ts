@@ -95,6 +95,7 @@ export const checkNeeds = (
     const { needs, fields }: VesselKindDefinition = vesselKinds[vessel.model.kind]
     for (const need of needs) {
       if (!applies(vessel, glycol, need)) continue
+      if (need.sparedBy?.every((key) => lacking(context, system, key) === null)) continue
       const found = need.keys.map((key) =>
         key.startsWith(OF_VESSEL)
           ? lacking(context, vessel.block, key.slice(OF_VESSEL.length))

@@ -16,6 +16,8 @@ export interface Need {
   readonly liftedBy?: readonly string[]
   /** Keys of the vessel that ask for the method of this need together, where none is named. */
   readonly askedBy?: readonly string[]
+  /** Keys of the system that together make this input needless. */
+  readonly sparedBy?: readonly string[]
   /** Holds only where the system is filled with glycol. */
   readonly glycol?: true
 }

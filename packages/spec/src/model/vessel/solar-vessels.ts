@@ -32,7 +32,12 @@ export const solarExpansionTank = {
   },
   needs: [
     { keys: ['contents'], to: 'to know how much fluid expands' },
-    { keys: ['temperatures.low', 'temperatures.fill'], to: 'to know how cold the fluid gets' },
+    {
+      keys: ['temperatures.low', 'temperatures.fill'],
+      to: 'to know how cold the fluid gets',
+      // The growth of the fluid is a part of its volume here; temperatures only weigh the column of liquid.
+      sparedBy: ['pressure.fill', 'pressure.maximum'],
+    },
     { keys: ['pressure.static-height', 'pressure.fill'], to: 'to know the fill pressure' },
     { keys: ['pressure.relief-valve', 'pressure.maximum'], to: 'to know the highest pressure allowed' },
   ],
