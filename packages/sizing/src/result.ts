@@ -118,6 +118,8 @@ export interface PressurePoint {
   readonly height: number
   readonly cold: number
   readonly hot: number
+  /** Where a pump is given: the lowest on its suction side when cold, or the highest on its discharge side when hot. */
+  readonly running?: number
 }
 
 export interface SystemResult {
@@ -129,6 +131,8 @@ export interface SystemResult {
   readonly pressures: readonly PressurePoint[]
   /** Relief set pressure, gauge Pa, and height of the valve above the vessel, m. */
   readonly relief: { readonly set: number; readonly height: number } | null
+  /** Head in Pa, and the side whose pressure moves by it when the pump runs; the vessel keeps the other. */
+  readonly pump?: { readonly head: number; readonly moves: 'suction side' | 'discharge side' }
 }
 
 export interface ProjectHeader {

@@ -10,10 +10,9 @@ import {
 import { formatQuantity, type Kind } from '@coldfill/units'
 import { gaugeFromSpec } from './calculate-sections.ts'
 import { stampReasons } from './checks/stamp.ts'
+import { column, densityAsFilled } from './pressure-model.ts'
 import type { ResultValue, SelectedVessel } from './result.ts'
 import { report, type VesselContext } from './vessel-context.ts'
-
-const GRAVITY = 9.80665
 
 const show = (context: VesselContext, kind: Kind, value: number): string =>
   formatQuantity({ kind, value }, context.spec.project.units?.value ?? 'US')
@@ -28,9 +27,8 @@ const pressureToStand = (
   const set = pressure['relief-valve']
   const highest = results['maximum-pressure']?.value ?? 0
   if (!set) return highest
-  const lift = pressure['relief-height']?.value.value ?? 0
-  const rho = context.calculation.has('rho_f') ? context.calculation.value('rho_f') : 1000
-  return Math.max(highest, gaugeFromSpec(set, atmosphere).value + rho * GRAVITY * lift)
+  const lift = column(densityAsFilled(context.system, context.fluid), pressure['relief-height']?.value.value ?? 0)
+  return Math.max(highest, gaugeFromSpec(set, atmosphere).value + lift)
 }
 
 const requirementOf = (

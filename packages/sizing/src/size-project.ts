@@ -96,15 +96,16 @@ export const sizeProject = (
     if (!usable && choice.finding) findings.push(choice.finding)
     const fluid = usable ? choice.fluid : water.fluid
     const sizable = usable ? system : { ...system, sound: false }
-    const start = vessels.length
+    let held: Parameters<typeof systemResult>[2] = null
     for (const vessel of system.vessels) {
       const sized = sizeVessel({ spec, system: sizable, vessel, fluid, register, atmosphere, catalogue })
       vessels.push(sized.result)
       noteCited(sized.result, cited)
+      if (sized.pressures) held ??= { mark: vessel.mark, model: sized.pressures }
       findings.push(...sized.findings)
     }
     findings.push(...checkSystem(spec, system, atmosphere))
-    systems.push(systemResult(system, fluid, vessels.slice(start), atmosphere))
+    systems.push(systemResult(system, fluid, held, atmosphere))
   }
   const assumptions = register.list()
   for (const { source } of assumptions) cited.add(source.source)

@@ -17,6 +17,7 @@ import { runSection } from './calculate-sections.ts'
 import { checkUnusedKeys } from './checks/unused-keys.ts'
 import { checkVessel } from './checks/check-vessel.ts'
 import { headroomRows } from './headroom-rows.ts'
+import { type PressureModel, pressureModel } from './pressure-model.ts'
 import type { HeadroomRow, ResultValue, SelectedVessel, VesselResult, VesselStatus } from './result.ts'
 import { checkBack, selectVessel, weighVessel } from './select-vessel.ts'
 import { report, type VesselContext } from './vessel-context.ts'
@@ -152,8 +153,15 @@ export interface SizingInput {
   readonly catalogue?: readonly CatalogueRow[] | undefined
 }
 
+export interface SizedVessel {
+  readonly result: VesselResult
+  readonly findings: readonly Finding[]
+  /** Null where the vessel holds no system under pressure, or has no size. */
+  readonly pressures: PressureModel | null
+}
+
 /** Sizes one vessel. An infeasible or blocked vessel is a result with its reason; findings come beside it. */
-export const sizeVessel = (input: SizingInput): { result: VesselResult; findings: readonly Finding[] } => {
+export const sizeVessel = (input: SizingInput): SizedVessel => {
   const { spec, system, vessel, fluid, register, atmosphere } = input
   const reference = `${system.id}/${vessel.mark}`
   const context: VesselContext = {
@@ -218,5 +226,5 @@ export const sizeVessel = (input: SizingInput): { result: VesselResult; findings
     trace: keptTrace(context.calculation),
     assumptions: register.usedBy(reference),
   }
-  return { result, findings: context.findings }
+  return { result, findings: context.findings, pressures: pressureModel(context, results, atmosphere) }
 }

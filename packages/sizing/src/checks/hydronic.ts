@@ -1,11 +1,11 @@
 import { ashraeExpansionCheck, type Method, saturationPressure } from '@coldfill/engine'
 import { formatQuantity, type Kind } from '@coldfill/units'
 import { gaugeFromSpec } from '../calculate-sections.ts'
+import { column, pressureAt, type PressureModel, pressureModel, pressureWhenRunning } from '../pressure-model.ts'
 import type { ResultValue } from '../result.ts'
 import { report, type VesselContext } from '../vessel-context.ts'
 
 export const PSI = 6894.757293168361
-const GRAVITY = 9.80665
 const BOILING = 373.15
 /** 30 °C: warmer than any chilled supply, cooler than a plant room in a shutdown. */
 const WARM = 303.15
@@ -45,27 +45,15 @@ const checkCharge = (context: VesselContext, results: Results, atmosphere: numbe
   }
 }
 
-/** Pressure at the highest point when cold, gauge Pa; undefined where the height is not known. */
-const topPressure = (context: VesselContext, results: Results): number | undefined => {
-  const { system, calculation } = context
-  const fill = results['fill-pressure']?.value
-  const height = system.pressure['static-height']?.value.value
-  if (fill === undefined || height === undefined) return undefined
-  const rho = calculation.has('rho_f') ? calculation.value('rho_f') : densityWhenFilled(context)
-  const head = calculation.has('dp_p') ? calculation.value('dp_p') : 0
-  return fill - head - rho * GRAVITY * height
-}
-
-const densityWhenFilled = (context: VesselContext): number => {
-  const { fill, low } = context.system.temperatures
-  const at = fill ?? low
-  return at ? context.fluid.density(at.value.value) : 1000
-}
-
-const checkTop = (context: VesselContext, results: Results, atmosphere: number): void => {
+const checkTop = (context: VesselContext, model: PressureModel): void => {
   const { pressure, temperatures } = context.system
-  const top = topPressure(context, results)
-  if (top === undefined) return
+  const { atmosphere } = model
+  const height = pressure['static-height']?.value.value
+  if (height === undefined) return
+  // A fill pressure that the program chose covers the head of a pump before the vessel; one given outright is checked by itself.
+  const covered = !pressure.fill && model.pump?.moves === 'suction side'
+  const lowest = covered ? pressureWhenRunning(model, 'cold', height) : null
+  const top = (lowest ?? pressureAt(model, 'cold', height)) - atmosphere
   const margin = pressure['top-margin']
   if (top < -1) {
     report(context, 'CF-E046', {
@@ -91,7 +79,8 @@ const checkTop = (context: VesselContext, results: Results, atmosphere: number):
   })
 }
 
-const checkRelief = (context: VesselContext, atmosphere: number): void => {
+const checkRelief = (context: VesselContext, model: PressureModel): void => {
+  const { atmosphere } = model
   const { pressure } = context.system
   const { maximum } = pressure
   const relief = pressure['relief-valve']
@@ -106,7 +95,7 @@ const checkRelief = (context: VesselContext, atmosphere: number): void => {
   }
   const set = gaugeFromSpec(relief, atmosphere).value
   const given = gaugeFromSpec(maximum, atmosphere).value
-  const lift = densityWhenFilled(context) * GRAVITY * (pressure['relief-height']?.value.value ?? 0)
+  const lift = column(model.density, pressure['relief-height']?.value.value ?? 0)
   if (given <= 0.9 * set + lift + 1) return
   report(context, 'CF-E044', {
     message: `The maximum of ${show(context, 'gauge pressure', given)} is above 0.9 of the relief valve setting of ${show(context, 'gauge pressure', set)}.`,
@@ -160,16 +149,21 @@ const checkGlycol = (context: VesselContext): void => {
 }
 
 /** What is left at the pump suction when the pump runs, where the vessel stands at its discharge and the fill is given. */
-const checkSuction = (context: VesselContext, results: Results): void => {
+const checkSuction = (context: VesselContext, model: PressureModel): void => {
   const { pressure } = context.system
   const head = pressure['pump-head']
-  const fill = results['fill-pressure']?.value
-  if (pressure['vessel-connection']?.value !== 'pump discharge' || !pressure.fill || !head || fill === undefined) return
-  const drop = head.value.kind === 'length' ? densityWhenFilled(context) * GRAVITY * head.value.value : head.value.value
-  const suction = fill - drop
-  if (suction >= 0) return
+  if (model.pump?.moves !== 'suction side' || !pressure.fill || !head) return
+  const below = (height: number): number => (pressureWhenRunning(model, 'cold', height) ?? Infinity) - model.atmosphere
+  const suction = below(0)
+  const top = below(pressure['static-height']?.value.value ?? 0)
+  if (Math.min(suction, top) >= 0) return
+  const where =
+    suction < 0
+      ? `the suction falls by ${show(context, 'pressure difference', model.pump.head)} to ${show(context, 'gauge pressure', suction)}`
+      : `the highest point, where it lies on the suction side, falls to as little as ${show(context, 'gauge pressure', top)}`
   report(context, 'CF-E057', {
-    message: `With ${context.vessel.mark} at the pump discharge, the suction falls by ${show(context, 'pressure difference', drop)} to ${show(context, 'gauge pressure', suction)} when the pump runs.`,
+    ...(suction < 0 ? {} : { severity: 'warning' as const }),
+    message: `With ${context.vessel.mark} at the pump discharge, ${where} when the pump runs.`,
     hint: 'Connect the vessel at the pump suction, or raise the fill pressure by the pump head.',
     at: pressure['vessel-connection'],
     related: [{ message: 'The pump head is given here.', path: head.path, range: head.range }],
@@ -185,12 +179,15 @@ export const checkHydronic = (
   atmosphere: number,
 ): void => {
   const { system, vessel } = context
+  const model = pressureModel(context, results, atmosphere)
   checkCharge(context, results, atmosphere)
-  checkTop(context, results, atmosphere)
-  checkRelief(context, atmosphere)
+  if (model) {
+    checkTop(context, model)
+    checkRelief(context, model)
+    checkSuction(context, model)
+  }
   checkTemperatures(context, method, construction)
   checkGlycol(context)
-  checkSuction(context, results)
   const connection = system.pressure['vessel-connection']
   if (connection?.value === 'pump discharge') {
     report(context, 'CF-E043', {
