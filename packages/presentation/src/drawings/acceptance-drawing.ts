@@ -43,7 +43,7 @@ export const drawAcceptance = (vessel: VesselResult, units: UnitSystem, look: Dr
     required: `Required ${said(amount(required))}`,
     limit: limit === undefined ? '' : `Acceptance ${said(limit)}`,
   }
-  const frame = frameOf(look.width, HEIGHT, { names: Object.values(names) })
+  const frame = frameOf(look.width, HEIGHT, { names: Object.values(names), rows: 1 })
   const across = scaleOver([Math.min(0, pressure(charge)), pressure(end)], frame.left, frame.right, marksAcross(frame))
   const up = scaleOver(
     [0, held(Math.max(volume, required), end), ...(limit === undefined ? [] : [limit])],

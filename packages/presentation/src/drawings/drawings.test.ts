@@ -46,6 +46,27 @@ const wellFormed = (svg: string): boolean => {
 }
 
 describe('the drawing of pressure against height', () => {
+  it('draws the side of the pump that moves by its head, and says which', () => {
+    const running = drawPressures(
+      {
+        ...heating,
+        pressures: heating.pressures.map((point) => ({ ...point, running: point.hot + 9 * PSI })),
+        pump: { head: 9 * PSI, moves: 'discharge side' },
+      },
+      'US',
+      ON_PAPER,
+    )
+    expect(running?.words).toContain(
+      'With the pump on, its discharge side, hot and at its most: 49 psig at ET-1, 32 psig at Highest point.',
+    )
+    const dots = running ? circles(svgText(running, PAPER)) : []
+    const [pumpLow, pumpTop, coldLow, , hotLow, hotTop] = dots
+    // 9 psi is half of the 18 psi between cold and hot.
+    const eighteen = (hotLow?.x ?? 0) - (coldLow?.x ?? 0)
+    expect(((pumpLow?.x ?? 0) - (hotLow?.x ?? 0)) / eighteen).toBeCloseTo(0.5, 2)
+    expect((pumpTop?.x ?? 0) - (hotTop?.x ?? 0)).toBeCloseTo((pumpLow?.x ?? 0) - (hotLow?.x ?? 0), 1)
+  })
+
   const drawn = drawPressures(heating, 'US', ON_PAPER)
   const svg = drawn ? svgText(drawn, PAPER) : ''
 

@@ -11,6 +11,9 @@ export interface Frame {
   readonly width: number
 }
 
+/** Where the title of the axis at the left stands. */
+const TITLE = 18
+
 /** Least width at which a drawing can be read. */
 const LEAST = 300
 
@@ -18,7 +21,16 @@ const LEAST = 300
 export const frameOf = (
   width: number,
   height: number,
-  { names, left = 64 }: { readonly names: readonly string[]; readonly left?: number },
+  {
+    names,
+    rows,
+    left = 64,
+  }: {
+    readonly names: readonly string[]
+    /** Rows of settings that are named above the field. */
+    readonly rows: number
+    readonly left?: number
+  },
 ): Frame => {
   const across = Math.max(LEAST, width)
   const room = Math.min(across * 0.34, Math.max(84, ...names.map((name) => wordsWidth(name) + 14)))
@@ -26,7 +38,8 @@ export const frameOf = (
   return {
     left: isNarrow ? Math.min(left, 44) : left,
     right: across - (isNarrow ? room : Math.max(room, 120)),
-    top: 62,
+    // The title of the axis stands above the rows.
+    top: 32 + 16 * rows,
     bottom: height - 48,
     width: across,
   }
@@ -70,7 +83,7 @@ export const leftAxis = (
   ...scale.ticks.map((tick) =>
     text(left - 8, scale.at(tick) + 4, numberText(tick), { textAnchor: 'end', fill: pencil }),
   ),
-  text(left > 44 ? 12 : 4, top - 44, title, { fill: ink, fontWeight: 600 }),
+  text(left > 44 ? 12 : 4, TITLE, title, { fill: ink, fontWeight: 600 }),
 ]
 
 /** An upright line at a setting, dashed in its own way, with its name above it; `row` lifts the name over another. */

@@ -4,7 +4,19 @@ import { displayNumber } from '../display-number.ts'
 import { numberText } from '../value-text.ts'
 import { bottomAxis, dot, frameOf, leftAxis, marksAcross, setting, sideLabels, type Frame } from './frame.ts'
 import { scaleOver, type Scale } from './scale.ts'
-import { line, PEN, pointsOf, shape, text, wordsWidth, type Drawing, type DrawingLook, type Shape } from './shape.ts'
+import {
+  halo,
+  line,
+  type Palette,
+  PEN,
+  pointsOf,
+  shape,
+  text,
+  wordsWidth,
+  type Drawing,
+  type DrawingLook,
+  type Shape,
+} from './shape.ts'
 
 const said = (value: number): string => numberText(Number(value.toPrecision(3)))
 
@@ -20,7 +32,13 @@ interface Point {
   readonly height: number
   readonly cold: number
   readonly hot: number
+  /** While the pump runs; null where there is none. */
+  readonly running: number | null
 }
+
+/** The state that counts: the lowest pressure is that of the cold suction side, the highest that of the hot discharge side. */
+const runningState = (moves: 'suction side' | 'discharge side'): string =>
+  moves === 'suction side' ? 'cold and at its least' : 'hot and at its most'
 
 interface Field {
   readonly frame: Frame
@@ -34,11 +52,20 @@ interface Field {
  * A value beside its dot. A line falls to the right from its highest point, so there the value stands left of it, elsewhere
  * below to the right; where all is at one height, below.
  */
-const reading = (x: number, y: number, words: string, isTop: boolean, tall: boolean, fill: string): Shape => {
-  if (!tall) return text(x, y + 22, words, { textAnchor: 'middle', fill })
+const reading = (
+  x: number,
+  y: number,
+  words: string,
+  isTop: boolean,
+  tall: boolean,
+  fill: string,
+  palette: Palette,
+): Shape => {
+  const ink = { fill, ...halo(palette) }
+  if (!tall) return text(x, y + 22, words, { textAnchor: 'middle', ...ink })
   return isTop
-    ? text(x - 11, y + 4, words, { textAnchor: 'end', fill })
-    : text(x + 8, y + 17, words, { textAnchor: 'start', fill })
+    ? text(x - 11, y + 4, words, { textAnchor: 'end', ...ink })
+    : text(x + 8, y + 17, words, { textAnchor: 'start', ...ink })
 }
 
 const lineOf = (
@@ -67,7 +94,7 @@ const lineOf = (
       const words = said(point[which])
       // A value at the left edge has no room left of its dot.
       const isLeft = point === top && x - 11 - wordsWidth(words) >= frame.left
-      return [dot(x, y, colour, which === 'hot', palette), reading(x, y, words, isLeft, tall, palette.ink)]
+      return [dot(x, y, colour, which === 'hot', palette), reading(x, y, words, isLeft, tall, palette.ink, palette)]
     }),
     ...(top
       ? [
@@ -75,9 +102,48 @@ const lineOf = (
             textAnchor: 'middle',
             fill: colour,
             fontWeight: 600,
+            ...halo(palette),
           }),
         ]
       : []),
+  ]
+}
+
+/** The side of the pump that moves, while it runs: a fine line, read at its ends. */
+const runningLine = (
+  points: readonly Point[],
+  { across, up, tall, frame }: Field,
+  { palette }: DrawingLook,
+): Shape[] => {
+  const placed = points.flatMap(({ running, height }) =>
+    running === null ? [] : [{ x: across.at(running), y: up.at(height), words: said(running) }],
+  )
+  const [first] = placed
+  const last = placed.at(-1)
+  if (!first || !last) return []
+  const ends = first === last ? [first] : [first, last]
+  return [
+    ...(placed.length > 1
+      ? [
+          shape('polyline', {
+            points: pointsOf(placed.map(({ x, y }) => [x, y] as const)),
+            fill: 'none',
+            stroke: palette.pencil,
+            strokeWidth: PEN.medium,
+            strokeDasharray: '2 4',
+          }),
+        ]
+      : []),
+    ...ends.flatMap(({ x, y, words }) => {
+      const isLeft = tall && last !== first && y === last.y && x - 11 - wordsWidth(words) >= frame.left
+      return [dot(x, y, palette.pencil, true, palette), reading(x, y, words, isLeft, tall, palette.pencil, palette)]
+    }),
+    text(last.x, last.y - 12, 'Pump on', {
+      textAnchor: 'middle',
+      fill: palette.pencil,
+      fontWeight: 600,
+      ...halo(palette),
+    }),
   ]
 }
 
@@ -86,8 +152,8 @@ const valve = (x: number, y: number, fill: string): Shape =>
   shape('path', { d: `M${x.toFixed(2)} ${(y - 7).toFixed(2)}l6 7l-6 7l-6 -7z`, fill })
 
 /**
- * Pressure against height of a system, cold and hot, with its relief valve and the rating of its chosen vessel. Null where no
- * vessel holds the pressure.
+ * Pressure against height of a system, cold and hot, and on the side of the pump that moves while it runs, with the relief
+ * valve and the rating of the chosen vessel. Null where no vessel holds the pressure.
  */
 export const drawPressures = (
   system: SystemResult,
@@ -100,11 +166,12 @@ export const drawPressures = (
   const pressure = (value: number) => displayNumber(value, 'gauge pressure', units)
   const unit = unitLabel('gauge pressure', units)
   const points = system.pressures
-    .map(({ label, height, cold, hot }) => ({
+    .map(({ label, height, cold, hot, running }) => ({
       label,
       height: displayNumber(height, 'length', units),
       cold: pressure(cold),
       hot: pressure(hot),
+      running: running === undefined ? null : pressure(running),
     }))
     .sort((a, b) => a.height - b.height)
   const relief = system.relief && {
@@ -119,9 +186,14 @@ export const drawPressures = (
   const height = tall ? 320 : 190
   const frame = frameOf(look.width, height, {
     names: points.map((point) => point.label),
+    rows: rating ? 2 : 1,
     ...(tall ? {} : { left: 24 }),
   })
-  const shown = [0, ...points.flatMap((point) => [point.cold, point.hot]), ...(relief ? [relief.set] : [])]
+  const shown = [
+    0,
+    ...points.flatMap(({ cold, hot, running }) => [cold, hot, ...(running === null ? [] : [running])]),
+    ...(relief ? [relief.set] : []),
+  ]
   // A rating far above everything else would press the rest together: then it is said and not drawn.
   const far = rating !== undefined && rating.pressure > 1.8 * Math.max(...shown)
   const across = scaleOver(
@@ -135,10 +207,14 @@ export const drawPressures = (
     : { ...scaleOver([-1, 1], frame.bottom, frame.top, 2), ticks: [] }
   const field: Field = { frame, across, up, tall }
 
-  const way = (key: 'cold' | 'hot') => points.map((point) => `${said(point[key])} ${unit} at ${point.label}`).join(', ')
+  const way = (key: 'cold' | 'hot' | 'running') =>
+    points.map((point) => `${said(point[key] ?? 0)} ${unit} at ${point.label}`).join(', ')
   const words = [
     `Cold ${way('cold')}.`,
     `Hot ${way('hot')}.`,
+    ...(system.pump
+      ? [`With the pump on, its ${system.pump.moves}, ${runningState(system.pump.moves)}: ${way('running')}.`]
+      : []),
     ...(relief ? [`Relief valve set at ${said(relief.set)} ${unit}.`] : []),
     ...(rating ? [`${rating.mark} is rated ${said(rating.pressure)} ${unit}.`] : []),
   ].join(' ')
@@ -180,6 +256,7 @@ export const drawPressures = (
           }),
         ]
       : []),
+    ...runningLine(points, field, look),
     ...lineOf('cold', points, field, look),
     ...lineOf('hot', points, field, look),
     ...(relief ? [valve(across.at(relief.set), up.at(relief.height), palette.ink)] : []),

@@ -44,6 +44,14 @@ export const text = (x: number, y: number, words: string, attributes: Attributes
   text: words,
 })
 
+/** Keeps words readable where a line runs behind them. */
+export const halo = ({ ground }: Palette): Attributes => ({
+  stroke: ground,
+  strokeWidth: 4,
+  strokeLinejoin: 'round',
+  paintOrder: 'stroke',
+})
+
 export const line = (x1: number, y1: number, x2: number, y2: number, attributes: Attributes): Shape => ({
   name: 'line',
   attributes: { x1, y1, x2, y2, ...attributes },

@@ -218,6 +218,12 @@ const cases: readonly Case[] = [
         '{ static-height: 20 ft, fill: 15 psi, relief-valve: 50 psi, pump-head: 46.2 ft, vessel-connection: pump discharge }',
     }),
   ],
+  // 0.9 of 30 psig and 20 psi of head on the discharge side.
+  [
+    'CF-E059',
+    'systems.S.pressure.pump-head',
+    hydronic({ pressure: '{ static-height: 20 ft, relief-valve: 30 psi, pump-head: 46.2 ft }' }),
+  ],
   [
     'CF-E060',
     'systems.S.temperatures.low',

@@ -170,6 +170,24 @@ const checkSuction = (context: VesselContext, model: PressureModel): void => {
   })
 }
 
+/** What a relief valve would stand at on the discharge side while the pump runs, where the vessel stands at its suction. */
+const checkDischarge = (context: VesselContext, model: PressureModel): void => {
+  const { pressure } = context.system
+  const relief = pressure['relief-valve']
+  const head = pressure['pump-head']
+  if (model.pump?.moves !== 'discharge side' || !relief || !head) return
+  const height = pressure['relief-height']?.value.value ?? 0
+  const highest = (pressureWhenRunning(model, 'hot', height) ?? 0) - model.atmosphere
+  const set = gaugeFromSpec(relief, model.atmosphere).value
+  if (highest <= set) return
+  report(context, 'CF-E059', {
+    message: `Hot and with the pump on, the discharge side reaches ${show(context, 'gauge pressure', highest)} at the height of the relief valve, which is set to ${show(context, 'gauge pressure', set)}.`,
+    hint: 'Make sure that the relief valve stands on the suction side, with the vessel.',
+    at: head,
+    related: [{ message: 'The relief valve is set here.', path: relief.path, range: relief.range }],
+  })
+}
+
 /** Pressures, temperatures and fluid that a reviewing engineer checks at an expansion tank. */
 export const checkHydronic = (
   context: VesselContext,
@@ -185,6 +203,7 @@ export const checkHydronic = (
     checkTop(context, model)
     checkRelief(context, model)
     checkSuction(context, model)
+    checkDischarge(context, model)
   }
   checkTemperatures(context, method, construction)
   checkGlycol(context)

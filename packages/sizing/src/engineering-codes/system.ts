@@ -74,6 +74,14 @@ export const systemCodes = {
     'Confirm the construction code and the ratings with the authority having jurisdiction.',
     `ASME BPVC IV, scope (${memory}). ${local}`,
   ),
+  'CF-E059': code(
+    'note',
+    'Relief valve on the discharge side of the pump',
+    'Hot and with the pump on, the discharge side would reach the setting of the relief valve.',
+    'The pump head stands on top of the pressure of the vessel there; a relief valve on that side would open in normal operation.',
+    'Place the relief valve between the vessel and the pump suction, or size with a lower highest pressure or a higher setting.',
+    'ASHRAE Handbook, HVAC Systems and Equipment, point of no pressure change.',
+  ),
   'CF-E060': code(
     'warning',
     'The fluid may freeze',
