@@ -17,6 +17,7 @@ import { cellText } from './plain-text.ts'
 import { asksForSteam } from './property-laws.ts'
 import { writeReadings } from './readings-sheet.ts'
 import { writeScheduleSheet, type VesselCells } from './schedule-sheet.ts'
+import { withFontsInOrder, withoutEditAs } from './schema-order.ts'
 import { SharedInputs } from './shared-inputs.ts'
 import { Palette, paletteNumbers, withRows } from './sheet-xml.ts'
 import { SheetNames } from './sheet-names.ts'
@@ -122,7 +123,8 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   const numbers = samplePart === undefined ? new Map<string, string>() : paletteNumbers(partText(bytes, samplePart))
   return fixedArchive(bytes, (part, xml) => {
     if (part === 'xl/workbook.xml') return withNames(xml, cellNames)
-    if (part.startsWith('xl/drawings/drawing')) return withLogoWords(xml, options)
+    if (part === 'xl/styles.xml') return withFontsInOrder(xml)
+    if (part.startsWith('xl/drawings/drawing')) return withoutEditAs(withLogoWords(xml, options))
     const name = partOf.get(part) ?? ''
     const calculation = written.get(name)
     if (!calculation) return xml
