@@ -18,7 +18,15 @@ interface Job {
   readonly fluid: string
 }
 
-const methods = ['ashrae', 'en 12828', 'din 4807', 'une 100155', 'bs 7074'] as const
+const gasCharged = ['ashrae', 'en 12828', 'din 4807', 'une 100155', 'bs 7074', 'code minimum']
+
+/** Each method with the constructions that it has a form for. */
+const forms: readonly (readonly [method: string, construction: string])[] = [
+  ...gasCharged.flatMap((method) => [[method, 'bladder'] as const, [method, 'diaphragm'] as const]),
+  ['ashrae', 'plain steel'],
+  ['ashrae', 'open'],
+  ['code minimum', 'plain steel'],
+]
 
 /** Litres, °C, bar and metres, or the same job in US units; every number is written with all its digits. */
 const spec = (job: Job, system: 'SI' | 'US' = 'SI'): string => {
@@ -43,15 +51,13 @@ systems:
 `
 }
 
-const job: fc.Arbitrary<Job> = fc.record({
+const conditions = fc.record({
   volume: fc.double({ min: 50, max: 50_000, noNaN: true }),
   low: fc.double({ min: 5, max: 30, noNaN: true }),
   high: fc.double({ min: 45, max: 98, noNaN: true }),
   fill: fc.double({ min: 0.8, max: 2, noNaN: true }),
   relief: fc.double({ min: 3.2, max: 8, noNaN: true }),
   elevation: fc.double({ min: 0, max: 3000, noNaN: true }),
-  method: fc.constantFrom(...methods),
-  construction: fc.constantFrom('bladder', 'diaphragm'),
   fluid: fc.constantFrom(
     'water',
     '{ base: propylene glycol, strength: 30 % vol }',
@@ -59,27 +65,35 @@ const job: fc.Arbitrary<Job> = fc.record({
   ),
 })
 
+const job: fc.Arbitrary<Job> = fc
+  .tuple(conditions, fc.constantFrom(...forms))
+  .map(([made, [method, construction]]) => ({ ...made, method, construction }))
+
 const required = (text: string): number => {
   const [vessel] = sizeSpec(text).vessels
   return vessel?.results['required-volume']?.value ?? Number.NaN
 }
 
-const runs = { numRuns: 150 }
+const runs = { numRuns: 250 }
 
 /** Rounding of the chain of steps, far below any size step. */
 const SLACK = 1e-11
 
-const larger = (change: (job: Job) => Job) =>
+const larger = (change: (job: Job) => Job) => {
+  let compared = 0
   fc.assert(
     fc.property(job, (made) => {
       const before = required(spec(made))
       const after = required(spec(change(made)))
-      // A change may leave no room at all; it then has no size, which is not a smaller one.
-      if (Number.isNaN(after)) return
+      // A change may leave no room at all, and the code minimum has no size for lukewarm water; no size is not a smaller one.
+      if (Number.isNaN(before) || Number.isNaN(after)) return
+      compared += 1
       expect(after).toBeGreaterThanOrEqual(before * (1 - SLACK))
     }),
     runs,
   )
+  expect(compared).toBeGreaterThan(runs.numRuns * 0.8)
+}
 
 describe('laws of any expansion tank', () => {
   it('more water never gives a smaller tank', () => larger((j) => ({ ...j, volume: j.volume * 1.07 })))
