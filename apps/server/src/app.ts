@@ -16,10 +16,12 @@ import { projectsRouter } from './routes/projects/projects.router.ts'
 import { redlinesRouter } from './routes/redlines/redlines.router.ts'
 import { referenceRouter, schemaRouter } from './routes/reference/reference.router.ts'
 import { resultsRouter } from './routes/results/results.router.ts'
+import { reviewCopyRouter } from './routes/review-copy/review-copy.router.ts'
 import { revisionsRouter } from './routes/revisions/revisions.router.ts'
 import { sessionRouter } from './routes/session/session.router.ts'
 import { sizingRouter } from './routes/sizing/sizing.router.ts'
 import { specRouter } from './routes/spec/spec.router.ts'
+import { titleBlockRouter } from './routes/title-block/title-block.router.ts'
 import { verificationRouter } from './routes/verification/verification.router.ts'
 import { webApp } from './web-app.ts'
 
@@ -33,6 +35,7 @@ const projectRouter = (deps: Deps): Router => {
     .use(requireProject(deps))
     .use('/handover', handoverRouter(deps))
     .use('/revisions', revisionsRouter(deps))
+    .use('/revisions', inside(reviewCopyRouter(deps)))
     .use('/spec', inside(specRouter(deps)))
     .use('/sizing', inside(sizingRouter(deps)))
     .use('/results', inside(resultsRouter(deps)))
@@ -52,6 +55,7 @@ const api = (deps: Deps): Router =>
     // From here on nothing is answered, and no body read, for one who is not signed in.
     .use(requireUser(deps))
     .use('/office/catalogue', catalogueRouter(deps))
+    .use('/office/title-block', titleBlockRouter(deps))
     .use(json({ limit: BODY_LIMIT }))
     .use('/reference', referenceRouter())
     .use('/verification', verificationRouter())

@@ -3,6 +3,7 @@ import type { Clock } from './clock.ts'
 import type { Database } from './db/client.ts'
 import type { Deps } from './deps.ts'
 import { createFileMaker } from './documents/file-maker.ts'
+import { createPrinter } from './documents/printer.ts'
 import type { Log } from './log.ts'
 import { type Carrier, createPostman } from './mail/postman.ts'
 import { createPasswords, type Passwords } from './sign-in/passwords.ts'
@@ -20,6 +21,8 @@ export interface Settings {
   readonly carrier: Carrier | null
   readonly address: () => string
   readonly trustProxy?: number
+  /** Command that starts LibreOffice, or `none`. */
+  readonly office: string
   readonly passwords?: Passwords
   readonly sizing?: SizingService
   readonly webFolder?: string
@@ -39,7 +42,7 @@ export const createDeps = (settings: Settings): Deps => {
     passwords: settings.passwords ?? createPasswords(),
     tokens: createSessionTokens(settings.sessionSecret, clock),
     sizing: settings.sizing ?? createSizingService(),
-    fileMaker: createFileMaker({ db, log, clock, postman, address }),
+    fileMaker: createFileMaker({ db, log, clock, postman, address, printer: createPrinter(settings.office, log) }),
     webFolder: settings.webFolder ?? inRepository('apps/web/dist'),
     examplesFolder: settings.examplesFolder ?? inRepository('examples'),
     trustProxy: settings.trustProxy ?? 0,

@@ -6,6 +6,7 @@ it('has a value for everything that is not set', () => {
     PORT: 4173,
     HOST: '127.0.0.1',
     COLDFILL_DATA: './data',
+    COLDFILL_OFFICE: 'soffice',
     MAIL_FROM: 'coldfill@localhost.example',
     TRUST_PROXY: 0,
   })

@@ -11,6 +11,8 @@ const Env = z.object({
   MAIL_FROM: z.email().default('coldfill@localhost.example'),
   /** Address that mails link to; what the server listens on where not given. */
   PUBLIC_URL: z.url({ protocol: /^https?$/ }).optional(),
+  /** Command that starts LibreOffice, which finds page numbers and prints; `none` works without. */
+  COLDFILL_OFFICE: z.string().min(1).default('soffice'),
   SESSION_SECRET: z.string().min(32, 'must have at least 32 characters').optional(),
   /** Number of proxies in front of the server whose X-Forwarded-For is believed. */
   TRUST_PROXY: z.coerce.number().int().min(0).max(5).default(0),

@@ -70,6 +70,7 @@ export const startServer = async (env: Env, log: Log): Promise<RunningServer> =>
       carrier: env.SMTP_URL === undefined ? null : smtpCarrier(env.SMTP_URL, env.MAIL_FROM),
       address: () => address,
       trustProxy: env.TRUST_PROXY,
+      office: env.COLDFILL_OFFICE,
     })
     undo.push(() => closeDeps(deps))
     const firstRun = await addDemoOffice(deps)

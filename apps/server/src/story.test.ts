@@ -91,7 +91,7 @@ it('the consultant issues for review: the content is frozen and both files are m
     .post(`${at}/revisions`)
     .send({ purpose: 'review', note: 'Relief at 45 psi' })
     .expect(201)
-  expect(issued.body).toMatchObject({ label: '', state: 'in review', files: [], making: { set: 'review', of: 4 } })
+  expect(issued.body).toMatchObject({ label: '', state: 'in review', files: [], making: { set: 'review', of: 6 } })
   await t.settle()
   first = await get<Revision>(consultant, `${at}/revisions/-`)
   expect(t.errors).toEqual([])

@@ -22,6 +22,8 @@ export const Handover = z.object({
       issuedAt: z.string(),
       issuedBy: Person,
       files: z.array(RevisionFile),
+      /** Why there is no PDF among them; null where there is one. */
+      noPdf: z.string().nullable(),
       contentHash: z.string(),
       settings: z.array(
         z.object({

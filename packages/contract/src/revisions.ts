@@ -26,7 +26,8 @@ export const OUTCOME_LABELS: Readonly<Record<Outcome, string>> = {
 
 export const RevisionFile = z.object({
   name: z.string(),
-  kind: z.enum(['schedule', 'submittal']),
+  /** `pdf` is a print of the submittal. */
+  kind: z.enum(['schedule', 'submittal', 'pdf']),
   /** Which making: the files as they went to review, or with the construction status on their pages. */
   set: z.enum(['review', 'construction']),
   size: z.number().int(),
@@ -35,6 +36,27 @@ export const RevisionFile = z.object({
   href: z.string(),
 })
 export type RevisionFile = z.infer<typeof RevisionFile>
+
+/** What the documents of an issue are made with. */
+export const FileContents = z.object({
+  units: z.enum(['US', 'SI']),
+  /** The submittal has an appendix of redlines with their answers. */
+  redlines: z.boolean(),
+  /** The submittal has the verification manual as an appendix. */
+  verification: z.boolean(),
+})
+export type FileContents = z.infer<typeof FileContents>
+
+/** A set of files as it was made. */
+export const FileSet = z.object({
+  set: z.enum(['review', 'construction']),
+  contents: FileContents,
+  /** Why the contents list of the submittal has no page numbers; null where it has them. */
+  noPages: z.string().nullable(),
+  /** Why there is no PDF; null where there is one. */
+  noPdf: z.string().nullable(),
+})
+export type FileSet = z.infer<typeof FileSet>
 
 export const Disposition = z.object({
   reviewer: Person,
@@ -74,6 +96,7 @@ export const Revision = z.object({
   contentHash: z.string(),
   engine: z.string(),
   files: z.array(RevisionFile),
+  sets: z.array(FileSet),
   /** Not null while files are being made: ask again after a moment. A construction issue takes effect when it is done. */
   making: Making.nullable(),
   dispositions: z.array(Disposition),
@@ -87,8 +110,16 @@ export type Revision = z.infer<typeof Revision>
 const note = z.string().trim().max(2000)
 const reason = z.string().trim().min(1, 'Give a reason.').max(2000)
 
+/** What is left out has the units of the spec, and no appendix. */
+const ContentsChoice = FileContents.partial().strict()
+export type ContentsChoice = z.infer<typeof ContentsChoice>
+
 /** POST /api/projects/:project/revisions */
-export const IssueForReviewRequest = z.strictObject({ purpose: z.literal('review'), note: note.default('') })
+export const IssueForReviewRequest = z.strictObject({
+  purpose: z.literal('review'),
+  note: note.default(''),
+  contents: ContentsChoice.default({}),
+})
 export type IssueForReviewRequest = z.input<typeof IssueForReviewRequest>
 
 /** POST …/revisions/:rev/reviews */
@@ -101,7 +132,11 @@ export const ReviewRequest = z
 export type ReviewRequest = z.input<typeof ReviewRequest>
 
 /** POST …/revisions/:rev/construction */
-export const IssueForConstructionRequest = z.strictObject({ override: z.strictObject({ reason }).optional() })
+export const IssueForConstructionRequest = z.strictObject({
+  override: z.strictObject({ reason }).optional(),
+  /** What is left out is as in the files for review. */
+  contents: ContentsChoice.default({}),
+})
 export type IssueForConstructionRequest = z.input<typeof IssueForConstructionRequest>
 
 /** POST …/revisions/:rev/withdraw */

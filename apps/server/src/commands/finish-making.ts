@@ -1,8 +1,8 @@
 import { and, eq, isNotNull, isNull, ne } from 'drizzle-orm'
 import type { Database, Tx } from '../db/client.ts'
-import { makings, offices, projects, revisionFiles, revisions } from '../db/schema/index.ts'
+import { fileSets, makings, offices, projects, revisionFiles, revisions } from '../db/schema/index.ts'
 import { withTx } from '../db/with-tx.ts'
-import type { WrittenFile } from '../documents/write-documents.ts'
+import type { Written, WrittenFile } from '../documents/write-documents.ts'
 import { issuedForConstruction, reviewAsked } from '../mail/project-mails.ts'
 import { queueMail } from '../mail/queue-mail.ts'
 import { sha256 } from '../review/content-hash.ts'
@@ -21,9 +21,16 @@ import { recordEvent } from './record-event.ts'
 const nameIn = (set: MakingRow['set'], name: string): string =>
   set === 'construction' ? name.replace(/(\.[a-z]+)$/, '-for-construction$1') : name
 
+const kindOf = ({ kind }: WrittenFile): Exclude<WrittenFile['kind'], 'review-copy'> => {
+  if (kind === 'review-copy') throw new Error('A review copy is no file of an issue.')
+  return kind
+}
+
 interface Finish {
   readonly making: MakingRow
-  readonly files: readonly WrittenFile[]
+  /** Those that the documents were written in. */
+  readonly units: 'US' | 'SI'
+  readonly written: Written
   readonly address: string
   readonly now: Date
 }
@@ -34,8 +41,8 @@ interface Finish {
  */
 export const finishMaking = (db: Database, finish: Finish): Promise<void> => {
   // Hashed before the transaction begins: everybody waits for that.
-  const hashed = finish.files.map((file) => ({ ...file, sha256: sha256(file.content) }))
-  const { making, now } = finish
+  const { making, units, written, now } = finish
+  const hashed = written.files.map((file) => ({ ...file, kind: kindOf(file), sha256: sha256(file.content) }))
   return withTx(db, async (tx) => {
     const [row] = await tx
       .delete(makings)
@@ -71,6 +78,13 @@ export const finishMaking = (db: Database, finish: Finish): Promise<void> => {
         madeAt: now,
       })),
     )
+    const { noPages, noPdf } = written
+    const { withRedlines, withVerification, titleBlockId } = row
+    const made = { units, withRedlines, withVerification, titleBlockId, noPages, noPdf, madeAt: now }
+    await tx
+      .insert(fileSets)
+      .values({ revisionId: making.revisionId, set: making.set, ...made })
+      .onConflictDoUpdate({ target: [fileSets.revisionId, fileSets.set], set: made })
     if (making.set === 'construction') await putInForce(tx, facts, revision, row, found.office, finish)
     else await askForReview(tx, facts, revision, found.office, finish)
   })

@@ -1,5 +1,5 @@
 import { and, eq, isNotNull } from 'drizzle-orm'
-import { revisionTitle } from '@coldfill/contract'
+import { type ContentsChoice, revisionTitle } from '@coldfill/contract'
 import type { Deps } from '../deps.ts'
 import { makings } from '../db/schema/index.ts'
 import { withTx } from '../db/with-tx.ts'
@@ -10,6 +10,7 @@ import { frozenContent } from '../review/frozen.ts'
 import { constructionGates, holding, overridable } from '../review/gates.ts'
 import { projectFacts, type RevisionRow } from '../review/project-facts.ts'
 import { newestRevision } from '../review/standing.ts'
+import { titleBlockInForce } from '../title-block/stored-title-block.ts'
 import { gatesFailed } from './issue-for-review.ts'
 import { recordEvent } from './record-event.ts'
 
@@ -23,6 +24,7 @@ export const issueForConstruction = async (
   access: ProjectAccess,
   revision: RevisionRow,
   overrideReason: string | null,
+  contents: ContentsChoice,
 ): Promise<void> => {
   const frozen = await frozenContent(deps.db, revision.id)
   const now = deps.clock()
@@ -45,6 +47,7 @@ export const issueForConstruction = async (
     if (open.length > 0 && overrideReason === null) throw gatesFailed(gates, open)
     // Only an override of something is one.
     const reason = open.length > 0 ? overrideReason : null
+    const reviewed = facts.fileSets.find((row) => row.revisionId === revision.id && row.set === 'review')
     await tx
       .delete(makings)
       .where(and(eq(makings.revisionId, revision.id), eq(makings.set, 'construction'), isNotNull(makings.problem)))
@@ -54,6 +57,10 @@ export const issueForConstruction = async (
       askedBy: access.principal.userId,
       askedAt: now,
       overrideReason: reason,
+      units: contents.units ?? reviewed?.units ?? null,
+      withRedlines: contents.redlines ?? reviewed?.withRedlines ?? false,
+      withVerification: contents.verification ?? reviewed?.withVerification ?? false,
+      titleBlockId: await titleBlockInForce(tx, access.project.officeId),
     })
     if (reason !== null)
       await recordEvent(tx, access.principal, now, {

@@ -1,5 +1,5 @@
 import { and, eq, isNull, sql } from 'drizzle-orm'
-import { type Gate, revisionTitle } from '@coldfill/contract'
+import { type ContentsChoice, type Gate, revisionTitle } from '@coldfill/contract'
 import type { Deps } from '../deps.ts'
 import { makings, revisions, specs } from '../db/schema/index.ts'
 import { withTx } from '../db/with-tx.ts'
@@ -9,6 +9,7 @@ import { projectPermissions, requirePermission } from '../policies/project-permi
 import { holding, reviewGates } from '../review/gates.ts'
 import { projectFacts } from '../review/project-facts.ts'
 import { revisionLetter } from '../review/revision-letter.ts'
+import { titleBlockInForce } from '../title-block/stored-title-block.ts'
 import { workingCopy } from '../review/working-copy.ts'
 import { recordEvent } from './record-event.ts'
 
@@ -28,7 +29,12 @@ export const gatesFailed = (gates: readonly Gate[], failing: readonly Gate[]): A
  * Freezes the working copy as the next revision and asks for its files. Returns the id of the revision.
  * @throws {AppError} 403, 422 gates_failed
  */
-export const issueForReview = async (deps: Deps, access: ProjectAccess, note: string): Promise<string> => {
+export const issueForReview = async (
+  deps: Deps,
+  access: ProjectAccess,
+  note: string,
+  contents: ContentsChoice,
+): Promise<string> => {
   // Sized before the transaction: sizing is slow, and the text is compared by version inside.
   const working = await workingCopy(deps.db, deps.sizing, access.project)
   const now = deps.clock()
@@ -81,9 +87,16 @@ export const issueForReview = async (deps: Deps, access: ProjectAccess, note: st
       })
       .returning({ id: revisions.id })
     if (!revision) throw new Error('The revision was not written.')
-    await tx
-      .insert(makings)
-      .values({ revisionId: revision.id, set: 'review', askedBy: access.principal.userId, askedAt: now })
+    await tx.insert(makings).values({
+      revisionId: revision.id,
+      set: 'review',
+      askedBy: access.principal.userId,
+      askedAt: now,
+      units: contents.units ?? null,
+      withRedlines: contents.redlines ?? false,
+      withVerification: contents.verification ?? false,
+      titleBlockId: await titleBlockInForce(tx, access.project.officeId),
+    })
     await recordEvent(tx, access.principal, now, {
       action: 'issued for review',
       project: access.project.number,

@@ -41,7 +41,7 @@ export const sendReview = async (
       )
     const published = await tx
       .update(redlines)
-      .set({ state: 'open' })
+      .set({ state: 'open', publishedAt: now })
       .where(
         and(eq(redlines.projectId, project.id), eq(redlines.authorId, principal.userId), eq(redlines.state, 'pending')),
       )

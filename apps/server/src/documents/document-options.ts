@@ -1,8 +1,9 @@
 import { OUTCOME_LABELS } from '@coldfill/contract'
-import type { DispositionEntry, DocumentOptions, RevisionEntry } from '@coldfill/documents'
+import type { DispositionEntry, DocumentOptions, RedlineEntry, RevisionEntry } from '@coldfill/documents'
 import type { ProjectResult } from '@coldfill/sizing'
 import type { MakingRow, ProjectFacts, RevisionRow } from '../review/project-facts.ts'
 import { isAccepting, standingDispositions } from '../review/standing.ts'
+import type { StoredTitleBlock } from '../title-block/stored-title-block.ts'
 
 /** The words by which @coldfill/documents leaves out the draft warning. Its code runs in a thread and is not loaded here. */
 export const CONSTRUCTION_STATUS = 'Issued for construction'
@@ -14,15 +15,15 @@ const constructionPurpose = (override: string | null): string =>
   override === null ? CONSTRUCTION_STATUS : `${CONSTRUCTION_STATUS}. Gates overridden: ${override}`
 
 /** The revision block as it stands when these files are made, newest first. */
-const revisionBlock = (facts: ProjectFacts, revision: RevisionRow, making: MakingRow): RevisionEntry[] => {
+const revisionBlock = (facts: ProjectFacts, revision: RevisionRow, order: Order): RevisionEntry[] => {
   const name = (id: string | null): string => (id === null ? '' : (facts.people.get(id)?.name ?? ''))
   const entries: RevisionEntry[] = []
-  if (making.set === 'construction')
+  if (order.set === 'construction')
     entries.push({
       revision: revision.label,
-      date: day(making.askedAt),
-      purpose: constructionPurpose(making.overrideReason),
-      by: name(making.askedBy),
+      date: day(order.askedAt),
+      purpose: constructionPurpose(order.overrideReason),
+      by: name(order.askedBy),
     })
   for (const row of facts.revisions) {
     if (row.sequence > revision.sequence) continue
@@ -48,37 +49,60 @@ const dispositionsOf = (facts: ProjectFacts, revision: RevisionRow): Disposition
     stale,
   }))
 
+/** What the files are asked for with. */
+export type Order = Pick<
+  MakingRow,
+  'set' | 'askedAt' | 'askedBy' | 'overrideReason' | 'units' | 'withRedlines' | 'withVerification' | 'titleBlockId'
+>
+
+/** Parts of a document that are read from the store. */
+export interface Enclosed {
+  readonly comparison: DocumentOptions['comparison']
+  /** Null where the order asks for none. */
+  readonly redlines: readonly RedlineEntry[] | null
+  /** The office's title block of the order; null where it has none of its own. */
+  readonly titleBlock: StoredTitleBlock | null
+}
+
+const ofOffice = (stored: StoredTitleBlock | null, office: string) => ({
+  office: stored?.name ?? office,
+  ...(stored ? { lines: stored.lines, captions: stored.captions } : {}),
+})
+
 export const documentOptions = (
   facts: ProjectFacts,
   office: string,
   revision: RevisionRow,
-  making: MakingRow,
+  order: Order,
   result: ProjectResult,
-  comparison: DocumentOptions['comparison'],
+  { comparison, redlines, titleBlock }: Enclosed,
 ): DocumentOptions => {
-  const forConstruction = making.set === 'construction'
+  const forConstruction = order.set === 'construction'
   const accepting = standingDispositions(facts, revision).filter(({ row, stale }) => !stale && isAccepting(row))
   const reviewers = accepting
     .map(({ row }) => facts.people.get(row.reviewerId)?.name ?? '')
     .filter((name) => name !== '')
   const prepared = facts.people.get(revision.issuedBy)?.name
-  const approved = facts.people.get(making.askedBy)?.name
+  const approved = facts.people.get(order.askedBy)?.name
   return {
-    units: result.project.units,
+    units: order.units ?? result.project.units,
     titleBlock: {
-      office,
+      ...ofOffice(titleBlock, office),
       ...(prepared === undefined ? {} : { preparedBy: prepared }),
       ...(forConstruction && reviewers.length > 0 ? { checkedBy: reviewers.join(', ') } : {}),
       ...(forConstruction && approved !== undefined ? { approvedBy: approved } : {}),
-      date: day(forConstruction ? making.askedAt : revision.issuedAt),
+      date: day(forConstruction ? order.askedAt : revision.issuedAt),
       revision: revision.label,
       status: forConstruction ? CONSTRUCTION_STATUS : REVIEW_STATUS,
     },
-    revisions: revisionBlock(facts, revision, making),
+    revisions: revisionBlock(facts, revision, order),
     ...(comparison ? { comparison } : {}),
+    ...(redlines ? { redlines } : {}),
+    ...(titleBlock?.logo ? { logo: titleBlock.logo } : {}),
+    ...(titleBlock && titleBlock.paper !== 'by units' ? { paper: titleBlock.paper } : {}),
     ...(forConstruction ? { dispositions: dispositionsOf(facts, revision) } : {}),
-    ...(forConstruction && making.overrideReason !== null
-      ? { override: { reason: making.overrideReason, by: approved ?? '', date: day(making.askedAt) } }
+    ...(forConstruction && order.overrideReason !== null
+      ? { override: { reason: order.overrideReason, by: approved ?? '', date: day(order.askedAt) } }
       : {}),
     contentHash: revision.contentHash,
   }

@@ -1,105 +1,87 @@
-import { and, asc, eq, isNull } from 'drizzle-orm'
-import { finishMaking } from '../commands/finish-making.ts'
-import type { Clock } from '../clock.ts'
-import type { Database } from '../db/client.ts'
-import { makings, offices, projects, revisions } from '../db/schema/index.ts'
+import { and, asc, isNull } from 'drizzle-orm'
+import { makings, reviewCopies } from '../db/schema/index.ts'
 import { describeError } from '../describe-error.ts'
 import type { Log } from '../log.ts'
 import type { Postman } from '../mail/postman.ts'
 import { createRounds, type Rounds } from '../rounds.ts'
-import { changedResults } from '../review/changed-results.ts'
-import { frozenContent } from '../review/frozen.ts'
-import { type MakingRow, projectFacts } from '../review/project-facts.ts'
-import { documentOptions } from './document-options.ts'
-import { writeDocuments } from './write-documents.ts'
+import { makeFiles, type Maker, noteMaking } from './make-files.ts'
+import { makeReviewCopy, noteReviewCopy } from './make-review-copy.ts'
 
-/** A making that has begun this often and never came to an end is not begun again by itself. */
+/** Work that has begun this often and never came to an end is not begun again by itself. */
 const MOST_ATTEMPTS = 3
 
-/** Goes through the makings that wait when it is woken; their stages are in the database. */
+/** Goes through the work that waits when it is woken; its stages are in the database. */
 export type FileMaker = Rounds
 
+interface Job {
+  readonly name: string
+  readonly attempts: number
+  note(values: { attempts?: number; problem?: string; stage?: number }): Promise<void>
+  do(signal: AbortSignal): Promise<void>
+}
+
 /**
- * Makes the files of issued revisions, one revision after the other, from rows of the table `makings`. The row goes away in the
- * transaction that stores the files, so that after a stop the work is found again and done from its beginning; it has no effect before.
+ * Makes the files of issued revisions, and review copies, one after the other, from rows of the tables `makings` and `review_copies`.
+ * A row goes away, or gets its content, in the statement that stores the files, so that after a stop the work is found again and done
+ * from its beginning; it has no effect before.
  */
 export const createFileMaker = ({
-  db,
-  clock,
   log,
   postman,
-  address,
-}: {
-  db: Database
-  clock: Clock
-  log: Log
-  postman: Postman
-  address: () => string
-}): FileMaker => {
+  ...maker
+}: Maker & { readonly log: Log; readonly postman: Postman }): FileMaker => {
+  const { db } = maker
   const closing = new AbortController()
 
-  const keyOf = (making: MakingRow) => and(eq(makings.revisionId, making.revisionId), eq(makings.set, making.set))
-  const note = async (making: MakingRow, values: Partial<MakingRow>): Promise<void> => {
-    await db.update(makings).set(values).where(keyOf(making))
-  }
-
-  const make = async (making: MakingRow): Promise<void> => {
-    const [found] = await db
-      .select({ project: projects, office: offices.name })
-      .from(revisions)
-      .innerJoin(projects, eq(projects.id, revisions.projectId))
-      .innerJoin(offices, eq(offices.id, projects.officeId))
-      .where(eq(revisions.id, making.revisionId))
-    if (!found) return
-    const facts = await projectFacts(db, found.project)
-    const revision = facts.revisions.find((row) => row.id === making.revisionId)
-    if (!revision) return
-    const { result } = await frozenContent(db, revision.id)
-    const before = facts.revisions.find((row) => row.sequence === revision.sequence - 1)
-    const comparison = before && {
-      revision: before.label,
-      changed: changedResults((await frozenContent(db, before.id)).result, result),
-    }
-    // Stage notes are written one after the other and before the files are stored.
-    let noted: Promise<void> = Promise.resolve()
-    const files = await writeDocuments(
-      { result, options: documentOptions(facts, found.office, revision, making, result, comparison) },
-      (stage) => {
-        noted = noted.then(() => note(making, { stage }))
-      },
-      closing.signal,
-    )
-    await noted
-    await note(making, { stage: 3 })
-    await finishMaking(db, { making, files, address: address(), now: clock() })
-    postman.wake()
-  }
-
-  const attempt = async (making: MakingRow): Promise<void> => {
-    if (making.attempts >= MOST_ATTEMPTS) {
-      await note(making, { problem: 'Making the files stopped several times before it was done.' })
+  const attempt = async (job: Job): Promise<void> => {
+    if (job.attempts >= MOST_ATTEMPTS) {
+      await job.note({ problem: 'Making the files stopped several times before it was done.' })
       return
     }
-    await note(making, { attempts: making.attempts + 1, stage: 0 })
+    await job.note({ attempts: job.attempts + 1, stage: 0 })
     try {
-      await make(making)
+      await job.do(closing.signal)
     } catch (error) {
       if (closing.signal.aborted) {
         // Not the fault of the work: it has all its attempts at the next start.
-        await note(making, { attempts: making.attempts })
+        await job.note({ attempts: job.attempts })
         return
       }
-      const reason = describeError(error)
-      log.error(`files of revision ${making.revisionId}: ${reason}`)
-      await note(making, { problem: 'The files could not be made. Try again; the revision itself is kept.' })
+      log.error(`${job.name}: ${describeError(error)}`)
+      await job.note({ problem: 'The files could not be made. Try again; the revision itself is kept.' })
     }
   }
 
+  const waitingFiles = async (): Promise<Job[]> => {
+    const rows = await db.select().from(makings).where(isNull(makings.problem)).orderBy(asc(makings.askedAt))
+    return rows.map((making) => ({
+      name: `files of revision ${making.revisionId}`,
+      attempts: making.attempts,
+      note: (values) => noteMaking(db, making, values),
+      do: async (signal) => {
+        await makeFiles(maker, making, signal)
+        postman.wake()
+      },
+    }))
+  }
+  const waitingCopies = async (): Promise<Job[]> => {
+    const rows = await db
+      .select()
+      .from(reviewCopies)
+      .where(and(isNull(reviewCopies.problem), isNull(reviewCopies.sha256)))
+      .orderBy(asc(reviewCopies.askedAt))
+    return rows.map((copy) => ({
+      name: `review copy of revision ${copy.revisionId}`,
+      attempts: copy.attempts,
+      note: ({ stage: _, ...values }) => noteReviewCopy(db, copy, values),
+      do: (signal) => makeReviewCopy(maker, copy, signal),
+    }))
+  }
+
   const rounds = createRounds('files', log, async (closed) => {
-    const waiting = await db.select().from(makings).where(isNull(makings.problem)).orderBy(asc(makings.askedAt))
-    for (const making of waiting) {
+    for (const job of [...(await waitingFiles()), ...(await waitingCopies())]) {
       if (closed()) return
-      await attempt(making)
+      await attempt(job)
     }
   })
 

@@ -3,6 +3,7 @@ import { and, asc, desc, eq, getTableColumns, inArray } from 'drizzle-orm'
 import type { Reader } from '../db/client.ts'
 import {
   dispositions,
+  fileSets,
   makings,
   members,
   projects,
@@ -16,6 +17,7 @@ import {
 export type ProjectRow = typeof projects.$inferSelect
 export type DispositionRow = typeof dispositions.$inferSelect
 export type MakingRow = typeof makings.$inferSelect
+export type FileSetRow = typeof fileSets.$inferSelect
 
 const { specText: _specText, resultJson: _resultJson, ...lightColumns } = getTableColumns(revisions)
 /** A revision without its frozen text and result, which are large. */
@@ -56,6 +58,7 @@ export interface ProjectFacts {
   /** Newest first. */
   readonly revisions: readonly RevisionRow[]
   readonly files: readonly FileRow[]
+  readonly fileSets: readonly FileSetRow[]
   /** Oldest first. */
   readonly dispositions: readonly DispositionRow[]
   readonly makings: readonly MakingRow[]
@@ -90,6 +93,7 @@ export const projectFacts = async (db: Reader, project: ProjectRow): Promise<Pro
           .from(dispositions)
           .where(inArray(dispositions.revisionId, ids))
           .orderBy(asc(dispositions.setAt))
+  const fileSetRows = ids.length === 0 ? [] : await db.select().from(fileSets).where(inArray(fileSets.revisionId, ids))
   const makingRows = ids.length === 0 ? [] : await db.select().from(makings).where(inArray(makings.revisionId, ids))
   const threads = await db
     .selectDistinctOn([redlineMessages.redlineId], {
@@ -99,7 +103,7 @@ export const projectFacts = async (db: Reader, project: ProjectRow): Promise<Pro
     })
     .from(redlineMessages)
     .innerJoin(redlines, eq(redlines.id, redlineMessages.redlineId))
-    .where(and(eq(redlines.projectId, project.id), eq(redlines.state, 'open')))
+    .where(and(eq(redlines.projectId, project.id), eq(redlines.state, 'open'), eq(redlines.officeOnly, false)))
     .orderBy(redlineMessages.redlineId, desc(redlineMessages.position))
   const named = new Set([
     ...revisionRows.flatMap((row) => [row.issuedBy, row.constructionBy, row.withdrawnBy]),
@@ -115,6 +119,7 @@ export const projectFacts = async (db: Reader, project: ProjectRow): Promise<Pro
     members: memberRows.toSorted((a, b) => a.name.localeCompare(b.name, 'en')),
     revisions: revisionRows.toReversed(),
     files: files.toSorted((a, b) => a.name.localeCompare(b.name, 'en')),
+    fileSets: fileSetRows,
     dispositions: dispositionRows,
     makings: makingRows,
     openThreads: threads.map(({ authorId, mustAnswer, lastAuthor }) => ({

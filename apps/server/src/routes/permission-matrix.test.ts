@@ -66,6 +66,10 @@ const MATRIX: readonly Row[] = [
   row('revisions post /:rev/construction', '/projects/T-1/revisions/-/construction', 404, 403, 'in', 403),
   row('revisions post /:rev/withdraw', '/projects/T-1/revisions/-/withdraw', 404, 403, 'in', 'in'),
   row('revisions get /:rev/files/:name', '/projects/T-1/revisions/-/files/FILE', 404, 'in', 'in', 'in'),
+  // Before the row that asks for another, which takes its place.
+  row('review-copy get /:rev/review-copy/file', '/projects/T-1/revisions/-/review-copy/file', 404, 'in', 'in', 'in'),
+  row('review-copy get /:rev/review-copy', '/projects/T-1/revisions/-/review-copy', 404, 'in', 'in', 'in'),
+  row('review-copy post /:rev/review-copy', '/projects/T-1/revisions/-/review-copy', 404, 'in', 'in', 'in'),
   row('handover get /', '/projects/T-1/handover', 'in', 'in', 'in', 'in'),
   row('office get /outbox', '/office/outbox', 404, 404, 404, 'in'),
   row('office post /outbox/:id/resend', '/office/outbox/MAIL/resend', 404, 404, 404, 'in'),
@@ -73,11 +77,17 @@ const MATRIX: readonly Row[] = [
   row('office get /audit', '/office/audit', 404, 404, 404, 'in'),
   row('catalogue get /', '/office/catalogue', 404, 404, 404, 'in'),
   row('catalogue get /example', '/office/catalogue/example', 404, 404, 404, 'in'),
+  row('title-block get /', '/office/title-block', 404, 404, 404, 'in'),
+  row('title-block put /', '/office/title-block', 404, 404, 404, 'in'),
+  row('title-block put /logo', '/office/title-block/logo', 404, 404, 404, 'in'),
   row('catalogue put /', '/office/catalogue', 404, 404, 404, 'in'),
 ]
 /** Open to all, or tested by itself because it ends the session of whoever asks, or because there is nothing to take away here. */
 const ELSEWHERE = new Set([
   'catalogue delete /',
+  // There is no logo here to look at or to take away: title-block.router.test.ts.
+  'title-block get /logo',
+  'title-block delete /logo',
   'health get /',
   'session post /',
   'session delete /',
@@ -137,6 +147,8 @@ beforeAll(async () => {
     .post('/api/projects/T-1/revisions/-/reviews')
     .send({ outcome: 'information', contentHash: revision.contentHash })
     .expect(201)
+  await t.settle()
+  await agents.reviewer.post('/api/projects/T-1/revisions/-/review-copy').expect(202)
   await t.settle()
   const outbox = await agents.administrator.get('/api/office/outbox').expect(200)
   mail = (outbox.body as { mails: { id: string }[] }).mails[0]?.id ?? ''

@@ -31,7 +31,7 @@ const quickPasswords = () => createPasswords({ memoryCost: 8, timeCost: 1, paral
 /** The whole application on a database in memory, with a clock of its own. */
 export const createTestApp = async (
   settings: Partial<
-    Pick<Settings, 'sizing' | 'carrier' | 'webFolder' | 'examplesFolder' | 'passwords' | 'trustProxy'>
+    Pick<Settings, 'sizing' | 'carrier' | 'webFolder' | 'examplesFolder' | 'passwords' | 'trustProxy' | 'office'>
   > = {},
 ): Promise<TestApp> => {
   const client = await migratedDatabase()
@@ -44,6 +44,8 @@ export const createTestApp = async (
     log: { info: () => undefined, error: (text) => errors.push(text) },
     sessionSecret: 'the secret of a test, which is long enough',
     carrier: null,
+    // Tests that look at pages put in the one of this machine.
+    office: 'none',
     address: () => 'http://coldfill.test',
     passwords: quickPasswords(),
     ...settings,

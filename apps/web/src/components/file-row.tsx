@@ -2,7 +2,11 @@ import type { RevisionFile } from '@coldfill/contract'
 import { buttonClass } from '#components/ui/button.tsx'
 import { fileSize } from '#lib/format.ts'
 
-const kinds = { schedule: 'Equipment schedule, workbook', submittal: 'Submittal, document' }
+const kinds = {
+  schedule: 'Equipment schedule, workbook',
+  submittal: 'Submittal, document',
+  pdf: 'Submittal, print of the document',
+}
 
 /** A file of a revision: what it is, size, fingerprint, and the way to get it. */
 export const FileRow = ({ file }: { readonly file: RevisionFile }) => (

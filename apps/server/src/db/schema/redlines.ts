@@ -18,9 +18,13 @@ export const redlines = pgTable(
     quoted: text('quoted').notNull(),
     proposedValue: text('proposed_value'),
     mustAnswer: boolean('must_answer').notNull(),
+    /** Seen by the consultants and the administrator alone, and in no document. Fixed when it is written. */
+    officeOnly: boolean('office_only').notNull().default(false),
     authorId: uuid('author_id').notNull(),
     state: text('state', { enum: ['pending', 'open', 'closed'] }).notNull(),
     createdAt: instant('created_at').notNull(),
+    /** When it left its author's hands; null while it is pending. */
+    publishedAt: instant('published_at'),
     closedBy: uuid('closed_by'),
     /** Newest revision when it was closed: it stands on that one still, and no longer on later ones. */
     closedOn: uuid('closed_on'),

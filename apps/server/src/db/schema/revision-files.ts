@@ -10,7 +10,7 @@ export const revisionFiles = pgTable(
     revisionId: uuid('revision_id').notNull(),
     /** The files as they went to review, or with the construction status on their pages. */
     set: text('set', { enum: ['review', 'construction'] }).notNull(),
-    kind: text('kind', { enum: ['schedule', 'submittal'] }).notNull(),
+    kind: text('kind', { enum: ['schedule', 'submittal', 'pdf'] }).notNull(),
     name: text('name').notNull(),
     size: integer('size').notNull(),
     sha256: text('sha256').notNull(),

@@ -61,6 +61,8 @@ export const presentHandover = (
             files: facts.files
               .filter((file) => file.revisionId === current.id && file.set === 'construction')
               .map((file) => presentFile(facts.project.number, current, file)),
+            noPdf:
+              facts.fileSets.find((row) => row.revisionId === current.id && row.set === 'construction')?.noPdf ?? null,
             contentHash: current.contentHash,
             settings: settings(result),
           }

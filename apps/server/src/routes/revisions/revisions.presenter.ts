@@ -1,6 +1,13 @@
-import { type Making, type Person, type Revision, type RevisionFile, revisionSegment } from '@coldfill/contract'
+import {
+  type FileSet,
+  type Making,
+  type Person,
+  type Revision,
+  type RevisionFile,
+  revisionSegment,
+} from '@coldfill/contract'
 import { MAKING_STAGES } from '../../documents/making-stages.ts'
-import type { FileRow, MakingRow, ProjectFacts, RevisionRow } from '../../review/project-facts.ts'
+import type { FileRow, FileSetRow, MakingRow, ProjectFacts, RevisionRow } from '../../review/project-facts.ts'
 import { revisionState, standingDispositions } from '../../review/standing.ts'
 
 const presentPerson = (facts: ProjectFacts, id: string): Person => {
@@ -15,6 +22,13 @@ export const presentFile = (project: string, revision: RevisionRow, file: FileRo
   size: file.size,
   sha256: file.sha256,
   href: `/api/projects/${project}/revisions/${revisionSegment(revision.label)}/files/${encodeURIComponent(file.name)}`,
+})
+
+const presentFileSet = (row: FileSetRow): FileSet => ({
+  set: row.set,
+  contents: { units: row.units, redlines: row.withRedlines, verification: row.withVerification },
+  noPages: row.noPages,
+  noPdf: row.noPdf,
 })
 
 const presentMaking = (making: MakingRow): Making => ({
@@ -41,6 +55,7 @@ export const presentRevision = (facts: ProjectFacts, revision: RevisionRow): Rev
     files: facts.files
       .filter((file) => file.revisionId === revision.id)
       .map((file) => presentFile(facts.project.number, revision, file)),
+    sets: facts.fileSets.filter((row) => row.revisionId === revision.id).map(presentFileSet),
     making: making ? presentMaking(making) : null,
     dispositions: standingDispositions(facts, revision).map(({ row, required, stale }) => ({
       reviewer: presentPerson(facts, row.reviewerId),

@@ -45,8 +45,8 @@ export const revisionsRouter = (deps: Deps): Router => {
   router.post('/', async (req, res) => {
     const access = accessIn(res)
     requirePermission(projectPermissions(access, await projectFacts(deps.db, access.project)).issueForReview)
-    const { note } = parseBody(IssueForReviewRequest, req)
-    res.status(201).json(await present(access, await issueForReview(deps, access, note)))
+    const { note, contents } = parseBody(IssueForReviewRequest, req)
+    res.status(201).json(await present(access, await issueForReview(deps, access, note, contents)))
   })
   router.get<'/:rev', Named>('/:rev', async (req, res) => {
     const { access, revision } = await revisionOf(res, req.params.rev)
@@ -67,8 +67,8 @@ export const revisionsRouter = (deps: Deps): Router => {
   router.post<'/:rev/construction', Named>('/:rev/construction', async (req, res) => {
     const { access, revision } = await revisionOf(res, req.params.rev)
     if (!is(access, 'consultant')) throw notAllowed('Only a consultant of the project issues for construction.')
-    const { override } = parseBody(IssueForConstructionRequest, req)
-    await issueForConstruction(deps, access, revision, override?.reason ?? null)
+    const { override, contents } = parseBody(IssueForConstructionRequest, req)
+    await issueForConstruction(deps, access, revision, override?.reason ?? null, contents)
     res.status(202).json(await present(access, revision.id))
   })
   router.post<'/:rev/withdraw', Named>('/:rev/withdraw', async (req, res) => {

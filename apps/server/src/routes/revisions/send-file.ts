@@ -13,7 +13,43 @@ import { storedFile } from './revisions.queries.ts'
 const TYPES = {
   schedule: 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet',
   submittal: 'application/vnd.openxmlformats-officedocument.wordprocessingml.document',
+  pdf: 'application/pdf',
 } as const
+
+interface Stored {
+  readonly kind: keyof typeof TYPES
+  readonly name: string
+  readonly sha256: string
+  readonly content: Uint8Array
+}
+
+/**
+ * Sends bytes from the store after checking that they are still the ones that were stored; `record` writes it down before.
+ * @throws {AppError} 500 file_damaged
+ */
+export const sendStored = async (
+  res: Response,
+  { kind, name, sha256: stored, content }: Stored,
+  record: () => Promise<void>,
+): Promise<void> => {
+  if (sha256(content) !== stored)
+    throw new AppError(
+      500,
+      'file_damaged',
+      'The stored file is damaged',
+      'Its bytes are no longer the ones that were issued, so it is not handed out. Tell the administrator.',
+    )
+  await record()
+  res
+    .set({
+      ETag: `"${stored}"`,
+      'Cache-Control': 'private, no-cache',
+      'Content-Type': TYPES[kind],
+      // The name is made of letters, digits, dots and hyphens (file-name.ts of the documents), so it needs no escape.
+      'Content-Disposition': `attachment; filename="${name}"`,
+    })
+    .send(Buffer.from(content))
+}
 
 /**
  * Sends a stored file after checking that its bytes are still the ones that were issued.
@@ -31,25 +67,11 @@ export const sendFile = async (
   if (!file) throw notFound()
   if (seesHandoverOnly(access) && (file.set !== 'construction' || constructionRevision(facts)?.id !== revision.id))
     throw notFound()
-  if (sha256(file.content) !== file.sha256)
-    throw new AppError(
-      500,
-      'file_damaged',
-      'The stored file is damaged',
-      'Its bytes are no longer the ones that were issued, so it is not handed out. Tell the administrator.',
-    )
-  await recordEvent(deps.db, access.principal, deps.clock(), {
-    action: 'file downloaded',
-    project: access.project.number,
-    detail: file.name,
-  })
-  res
-    .set({
-      ETag: `"${file.sha256}"`,
-      'Cache-Control': 'private, no-cache',
-      'Content-Type': TYPES[file.kind],
-      // The name is made of letters, digits, dots and hyphens (file-name.ts of the documents), so it needs no escape.
-      'Content-Disposition': `attachment; filename="${file.name}"`,
-    })
-    .send(Buffer.from(file.content))
+  await sendStored(res, file, () =>
+    recordEvent(deps.db, access.principal, deps.clock(), {
+      action: 'file downloaded',
+      project: access.project.number,
+      detail: file.name,
+    }),
+  )
 }
