@@ -42,8 +42,10 @@ export const printSubmittal = async (
       },
     })
 
-  onStage('pages')
-  let docx = await write(async (laidOut) => pdfDestinations(await print(laidOut)))
+  let docx = await write(async (laidOut) => {
+    onStage('pages')
+    return pdfDestinations(await print(laidOut))
+  })
   // Where it could not be laid out there is no use in trying again.
   if (pages === null) return { docx, pdf: null, noPages, noPdf: noPages }
   onStage('pdf')
