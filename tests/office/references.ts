@@ -170,8 +170,11 @@ const inTable = (
       .filter(([, , at]) => at === row)
       .map(([, column = '', , index]) => [columnNumber(column), stringAt(Number(index))]),
   )
-  return columns.flatMap((name, index) => {
-    const head = heads.get(columnNumber(first) + index)
-    return head === name ? [] : [`${part}: the column ${name} has the head ${String(head)} on ${sheetName}`]
-  })
+  return [
+    ...repeated(columns.map((name) => name.toLowerCase())).map((name) => `${part} has two columns ${name}`),
+    ...columns.flatMap((name, index) => {
+      const head = heads.get(columnNumber(first) + index)
+      return head === name ? [] : [`${part}: the column ${name} has the head ${String(head)} on ${sheetName}`]
+    }),
+  ]
 }

@@ -92,6 +92,7 @@ describe('a broken file is caught', () => {
     ['xl/worksheets/sheet1.xml', / s="\d+"/, ' s="9999"', 'the look 9999'],
     ['xl/worksheets/sheet1.xml', /t="s"([^>]*)><v>\d+/, 't="s"$1><v>99999', 'the text 99999'],
     ['xl/tables/table1.xml', /(<tableColumn [^>]*name=")[^"]*/, '$1Another', 'the column Another'],
+    ['xl/tables/table1.xml', /(name=")(?:Serves)(")/, '$1Mark$2', 'has two columns mark'],
     ['xl/tables/table1.xml', /(<table [^>]*ref="A\d+:)[A-Z]+/, '$1ZZ', 'columns on A to ZZ'],
   ])('by what leads nowhere: %s, %s', async (part, from, to, said) => {
     const bytes = changed(await writeSchedule(result, options), part, from, to)

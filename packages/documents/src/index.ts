@@ -25,5 +25,5 @@ export {
   type ScheduleColumn,
   type ScheduleRow,
   type ScheduleTable,
-} from './schedules/schedule-table.ts'
+} from '@coldfill/presentation'
 export { maxCatalogueBytes, readCatalogueFile } from './catalogue/read-catalogue-file.ts'

@@ -9,7 +9,7 @@ import {
 } from 'docx'
 import type { RedlineAnchor, RedlineEntry } from '../document-options.ts'
 import { redlineAsks } from '../words/redline-words.ts'
-import { sentenceCase } from '../words/vessel-words.ts'
+import { sentenceCase } from '@coldfill/presentation'
 import { plainText } from './plain-text.ts'
 
 interface Thread {

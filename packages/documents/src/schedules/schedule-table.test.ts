@@ -1,7 +1,8 @@
 import { water } from '@coldfill/engine'
+import { sizeSpec } from '@coldfill/sizing'
 import { describe, expect, it } from 'vitest'
-import { clinicProject } from '../testing/index.ts'
-import { headerText, scheduleKinds, scheduleTable } from './schedule-table.ts'
+import { clinicProject, everyVessel } from '../testing/index.ts'
+import { headerText, scheduleKinds, scheduleTable } from '@coldfill/presentation'
 
 const project = clinicProject(water.functions)
 const row = (kind: string, mark: string, units: 'US' | 'SI' = 'US') =>
@@ -72,5 +73,24 @@ describe('a schedule', () => {
   it('is plain data: nothing is lost on the way through JSON', () => {
     const table = scheduleTable(project, 'expansion tank', 'US')
     expect(JSON.parse(JSON.stringify(table))).toEqual(table)
+  })
+
+  it('has headings that are told apart in every kind, in both units', () => {
+    const every = sizeSpec(everyVessel)
+    for (const units of ['US', 'SI'] as const)
+      for (const kind of scheduleKinds(every)) {
+        const headings = scheduleTable(every, kind, units).columns.map(headerText)
+        expect({ kind, twice: headings.filter((heading, at) => headings.indexOf(heading) !== at) }).toEqual({
+          kind,
+          twice: [],
+        })
+      }
+  })
+
+  it('says what a vessel of a kind without columns of its own is sized from', () => {
+    const every = sizeSpec(everyVessel)
+    const row = scheduleTable(every, 'pressure tank', 'US').rows.find(({ mark }) => mark === 'PT-5')
+    // As typed: 50 gpm and six starts an hour.
+    expect([row?.cells['pump-flow']?.text, row?.cells['starts-per-hour']?.text]).toEqual(['50', '6'])
   })
 })

@@ -1,7 +1,6 @@
-import type { ProjectResult } from '@coldfill/sizing'
+import type { ProjectResult, VesselResult } from '@coldfill/sizing'
 import type { UnitSystem } from '@coldfill/units'
-import type { VesselResult } from './schedule.ts'
-import { scheduleKinds, scheduleTable } from './schedule-table.ts'
+import { scheduleKinds, scheduleTable } from '@coldfill/presentation'
 
 /** Says a number of a vessel in the digits of its schedule, with the unit behind it, so that no two pages round it differently. */
 export const scheduleWords = (

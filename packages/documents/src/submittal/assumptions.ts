@@ -1,7 +1,7 @@
 import { leadIn, paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import { citationWords } from '../words/source-words.ts'
-import { sentenceCase } from '../words/vessel-words.ts'
+import { sentenceCase } from '@coldfill/presentation'
 import type { Section } from './section.ts'
 
 /** The numbered register of every default that the results lean on, and of what replaced one. */

@@ -16,9 +16,8 @@ import { equationParagraph, equationThenText, paragraph, runningText, stepParagr
 import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
 import { basisWords } from '../words/basis-words.ts'
-import { valueText } from '@coldfill/presentation'
+import { sentenceCase, statusWords, valueText } from '@coldfill/presentation'
 import { gaugeRemark } from '../words/pressure-words.ts'
-import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import { chosenVessel } from './chosen-vessel.ts'
 import { figure } from './pictures.ts'
 import { pressureKey } from './pressures.ts'
@@ -126,8 +125,8 @@ const vesselLines = (vessel: Vessel, context: SubmittalContext, first: boolean):
       '.',
     ]),
     paragraph(answer(vessel, context), STYLE.answer),
-    ...(vessel.status === 'sized' ? chosenVessel(vessel, context) : []),
     ...(picture ? figure(picture, `${vessel.mark}, water in the vessel against pressure`, captions) : []),
+    ...(vessel.status === 'sized' ? chosenVessel(vessel, context) : []),
     ...findings.map((finding) =>
       paragraph(`${sentenceCase(finding.severity)} ${finding.code}: ${finding.message} ${finding.hint}`, STYLE.remark),
     ),

@@ -2,11 +2,10 @@ import { layoutSymbol } from '@coldfill/formula'
 import type { ProjectResult } from '@coldfill/sizing'
 import { unitLabel, type Kind, type UnitSystem } from '@coldfill/units'
 import type { FileChild } from 'docx'
-import { displayNumber, numberText, valueText } from '@coldfill/presentation'
+import { displayNumber, numberText, sentenceCase, valueText } from '@coldfill/presentation'
 import { paragraph } from '../docx/paragraph.ts'
 import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
-import { sentenceCase } from '../words/vessel-words.ts'
 import type { SubmittalContext } from './section.ts'
 
 type Vessel = ProjectResult['vessels'][number]

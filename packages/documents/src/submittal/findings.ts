@@ -1,7 +1,7 @@
 import { paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import { pathWords } from '../words/path-words.ts'
-import { sentenceCase } from '../words/vessel-words.ts'
+import { sentenceCase } from '@coldfill/presentation'
 import type { Section } from './section.ts'
 
 /** Open findings, and warnings that a person accepted with a reason. */

@@ -1,7 +1,7 @@
 import { paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import { anchorWords, messageHead, redlineAsks, stateWords } from '../words/redline-words.ts'
-import { sentenceCase } from '../words/vessel-words.ts'
+import { sentenceCase } from '@coldfill/presentation'
 import type { Section } from './section.ts'
 
 /** What reviewers wrote and what was answered, one row a redline. */

@@ -4,7 +4,7 @@ import { STYLE } from '../docx/styles.ts'
 import { stackedParts } from '../docx/stacked-tables.ts'
 import type { ReviewComments } from '../docx/review-comments.ts'
 import { table } from '../docx/table.ts'
-import { headerText, scheduleKinds, scheduleTable, type ScheduleTable } from '../schedules/schedule-table.ts'
+import { headerText, scheduleKinds, scheduleTable, type ScheduleTable } from '@coldfill/presentation'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import type { Section, SubmittalContext } from './section.ts'
 
@@ -22,6 +22,13 @@ const commentsOn = (schedule: ScheduleTable, comments: ReviewComments, row: numb
   })
 }
 
+/** The longest name of a method that is not broken in its column, in characters. */
+const WHOLE_METHOD = 12
+
+/** Words of a cell as the page has them: `EN 12828` stays on one line. */
+const cellWords = (key: string, text: string): string =>
+  key === 'method' && text.length <= WHOLE_METHOD ? text.replaceAll(' ', '\u00A0') : text
+
 /** The schedule as one table, or where the page is too narrow for it as tables under each other that repeat the mark. */
 const scheduleTables = (
   schedule: ScheduleTable,
@@ -32,7 +39,9 @@ const scheduleTables = (
     width: column.width,
     align: column.align,
   }))
-  const rows = schedule.rows.map((row) => schedule.columns.map((column) => row.cells[column.key]?.text ?? ''))
+  const rows = schedule.rows.map((row) =>
+    schedule.columns.map((column) => cellWords(column.key, row.cells[column.key]?.text ?? '')),
+  )
   const chosen = schedule.columns.findIndex((column) => column.part === 'selection')
   const parts = stackedParts(columns, rows, width, chosen > 0 ? [chosen] : [])
   return parts.flatMap((part, index) => {

@@ -1,7 +1,6 @@
 import { runningText } from '../docx/paragraph.ts'
-import { scheduleKinds } from '../schedules/schedule-table.ts'
+import { scheduleKinds, sentenceCase, statusWords } from '@coldfill/presentation'
 import { table } from '../docx/table.ts'
-import { sentenceCase, statusWords } from '../words/vessel-words.ts'
 import { scheduleKey } from './schedules.ts'
 import type { Section } from './section.ts'
 

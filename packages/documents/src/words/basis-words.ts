@@ -1,6 +1,6 @@
 import { methods } from '@coldfill/engine'
 import type { ProjectResult } from '@coldfill/sizing'
-import { numbersOf, sentenceCase } from './vessel-words.ts'
+import { numbersOf, sentenceCase } from '@coldfill/presentation'
 
 /** The basis of one vessel in whole sentences: what it is, by which method it is sized, and what that method takes for granted. */
 export const basisWords = (vessel: ProjectResult['vessels'][number], result: ProjectResult): string[] => {

@@ -1,7 +1,6 @@
 import { isKind, unitLabel, type UnitSystem } from '@coldfill/units'
-import { displayNumber, numberText } from '@coldfill/presentation'
+import { displayNumber, numberText, sentenceCase } from '@coldfill/presentation'
 import { revisionWords, type ChangedEntry } from '../document-options.ts'
-import { sentenceCase } from './vessel-words.ts'
 
 /** Shown digits of a result that changed. */
 const DIGITS = 4

@@ -1,7 +1,7 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import type { RedlineAnchor, RedlineEntry } from '../document-options.ts'
 import { pathWords } from './path-words.ts'
-import { sentenceCase } from './vessel-words.ts'
+import { sentenceCase } from '@coldfill/presentation'
 
 /** Where a redline stands, as a reader finds it: `ET-1, precharge`, `assumption A3`. */
 export const anchorWords = (anchor: RedlineAnchor, result: ProjectResult): string => {

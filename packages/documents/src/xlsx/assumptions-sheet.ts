@@ -2,7 +2,7 @@ import type { ProjectResult } from '@coldfill/sizing'
 import type { Workbook } from 'exceljs'
 import type { DocumentOptions } from '../document-options.ts'
 import { citationWords } from '../words/source-words.ts'
-import { sentenceCase } from '../words/vessel-words.ts'
+import { sentenceCase } from '@coldfill/presentation'
 import { addSheet, writeTitle } from './sheet.ts'
 import { setPrintArea, writeTable } from './text-table.ts'
 

@@ -3,7 +3,7 @@ import { layout, symbolsIn, toPlainText, formulaTree } from '@coldfill/formula'
 import { sizeSpec } from '@coldfill/sizing'
 import ExcelJS from 'exceljs'
 import { describe, expect, it } from 'vitest'
-import { scheduleKinds, scheduleTable } from '../schedules/schedule-table.ts'
+import { scheduleKinds, scheduleTable } from '@coldfill/presentation'
 import { documentOptions, everyVessel } from '../testing/index.ts'
 import { writeSchedule } from './write-schedule.ts'
 

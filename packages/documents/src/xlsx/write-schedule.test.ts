@@ -3,7 +3,7 @@ import { displayUnit, fromSi } from '@coldfill/units'
 import ExcelJS from 'exceljs'
 import { strFromU8, unzipSync } from 'fflate'
 import { beforeAll, describe, expect, it } from 'vitest'
-import { headerText, scheduleTable } from '../schedules/schedule-table.ts'
+import { headerText, scheduleTable } from '@coldfill/presentation'
 import { clinicProject, documentOptions, reviewedOptions } from '../testing/index.ts'
 import { writeSchedule } from './write-schedule.ts'
 

@@ -49,21 +49,21 @@ interface Field {
 }
 
 /**
- * A value beside its dot. A line falls to the right from its highest point, so there the value stands left of it, elsewhere
- * below to the right; where all is at one height, below.
+ * A value beside its dot. A line falls to the right, so a value stands left of it, and that of the lowest point below to the
+ * right; where all is at one height, below.
  */
 const reading = (
   x: number,
   y: number,
   words: string,
-  isTop: boolean,
+  isLeft: boolean,
   tall: boolean,
   fill: string,
   palette: Palette,
 ): Shape => {
   const ink = { fill, ...halo(palette) }
   if (!tall) return text(x, y + 22, words, { textAnchor: 'middle', ...ink })
-  return isTop
+  return isLeft
     ? text(x - 11, y + 4, words, { textAnchor: 'end', ...ink })
     : text(x + 8, y + 17, words, { textAnchor: 'start', ...ink })
 }
@@ -93,7 +93,7 @@ const lineOf = (
       const [x, y] = place(point)
       const words = said(point[which])
       // A value at the left edge has no room left of its dot.
-      const isLeft = point === top && x - 11 - wordsWidth(words) >= frame.left
+      const isLeft = point !== points[0] && x - 11 - wordsWidth(words) >= frame.left
       return [dot(x, y, colour, which === 'hot', palette), reading(x, y, words, isLeft, tall, palette.ink, palette)]
     }),
     ...(top

@@ -1,7 +1,6 @@
 import type { ProjectResult } from '@coldfill/contract'
 import { describe, expect, it } from 'vitest'
-import { numberRanges } from './column-definitions.ts'
-import { decimalsFor, schedules } from './schedule-table.ts'
+import { schedules } from './schedule-table.ts'
 
 type Vessel = ProjectResult['vessels'][number]
 
@@ -112,26 +111,34 @@ describe('the schedule on screen', () => {
     expect(schedules(result, 'US')[0]?.columns.map((column) => column.key)).toContain('required-volume')
     expect(schedules(result, 'US')[0]?.title).toBe('Buffer tanks')
   })
-})
 
-describe('decimals of a column', () => {
-  it.each([
-    [[1, 250], 0],
-    [[], 0],
-    [[12.02], 1],
-    [[0.0305, 4], 4],
-    [[1e-7], 5],
-  ])('for %j is %d', (numbers, decimals) => {
-    expect(decimalsFor(numbers)).toBe(decimals)
-  })
-})
-
-describe('numbers of assumptions in a row', () => {
-  it.each([
-    [[3, 1, 2, 5], 'A1–A3, A5'],
-    [[1, 2], 'A1, A2'],
-    [[], ''],
-  ])('of %j are %s', (numbers, words) => {
-    expect(numberRanges(numbers)).toBe(words)
+  it('has the columns of the files but those that the page of the vessel shows, the chosen vessel behind its volume', () => {
+    const selected = {
+      maker: 'M',
+      model: 'X',
+      quantity: 1,
+      volume: 0.1,
+      acceptance: 0.05,
+      maxPressure: 1e6,
+      maxTemperature: 380,
+      stamped: true,
+    } as NonNullable<Vessel['selected']>
+    const [table] = schedules(project([vessel('ET-1', { selected, location: 'Roof' })]), 'US')
+    const keys = table?.columns.map(({ key }) => key) ?? []
+    expect(keys).not.toContain('mark')
+    expect(keys).not.toContain('location')
+    expect(keys).not.toContain('rated-pressure')
+    expect(keys.slice(keys.indexOf('required-volume'))).toEqual([
+      'required-volume',
+      'selected-vessel',
+      'selected-volume',
+      'fill-pressure',
+      'precharge',
+      'maximum-pressure',
+      'relief-set',
+      'method',
+      'assumptions',
+      'notes',
+    ])
   })
 })

@@ -1,4 +1,4 @@
-import { defineSchedule, inputNumber, optional, resultNumber } from './schedule.ts'
+import { defineSchedule, filesOnly, inputNumber, optional, resultNumber } from './schedule.ts'
 import * as shared from './shared-columns.ts'
 
 export const thermalExpansionTanks = defineSchedule({
@@ -16,7 +16,7 @@ export const thermalExpansionTanks = defineSchedule({
     inputNumber('storage-temperature', 'Storage temp.', 8, 'temperature', ['t_h']),
     resultNumber('expansion-volume', 'Expansion volume', 10, 'volume'),
     resultNumber('required-volume', 'Required volume', 9, 'volume'),
-    optional(resultNumber('required-volume-each', 'Required, each', 9, 'volume')),
+    filesOnly(optional(resultNumber('required-volume-each', 'Required, each', 9, 'volume'))),
     resultNumber('fill-pressure', 'Fill pressure', 9, 'gauge pressure'),
     resultNumber('precharge', 'Precharge', 10, 'gauge pressure'),
     resultNumber('maximum-pressure', 'Maximum pressure', 10, 'gauge pressure'),

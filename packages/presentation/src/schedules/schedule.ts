@@ -21,6 +21,8 @@ interface ColumnBase {
   readonly optional?: true
   /** What the chosen vessel is; every other column says what the vessel has to do and how that was found. */
   readonly part?: 'selection'
+  /** The screen has it on the page of the vessel, and no column for it. */
+  readonly filesOnly?: true
 }
 
 /** A column as data: words, a number of the vessel's results, or a number found elsewhere in the project. */
@@ -96,6 +98,11 @@ export const quantity = (
 ): ScheduleColumnDefinition => ({ shows: 'quantity', key, heading, width, kind, number })
 
 export const optional = (column: ScheduleColumnDefinition): ScheduleColumnDefinition => ({ ...column, optional: true })
+
+export const filesOnly = (column: ScheduleColumnDefinition): ScheduleColumnDefinition => ({
+  ...column,
+  filesOnly: true,
+})
 
 export const ofSelection = (column: ScheduleColumnDefinition): ScheduleColumnDefinition => ({
   ...column,

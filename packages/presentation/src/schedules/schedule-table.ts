@@ -1,6 +1,6 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import { displayUnit, fromSi, unitLabel, type UnitSystem } from '@coldfill/units'
-import { sentenceCase } from '../words/vessel-words.ts'
+import { sentenceCase } from '../vessel-words.ts'
 import { decimalsFor, fixedText } from './column-decimals.ts'
 import { expansionTanks } from './expansion-tanks.ts'
 import { KeyedNotes } from './keyed-notes.ts'
@@ -20,6 +20,10 @@ export interface ScheduleColumn {
   readonly decimals: number | null
   /** What the chosen vessel is; every other column says what the vessel has to do and how that was found. */
   readonly part?: 'selection'
+  /** Shows a result of the vessel, whose name is its key. */
+  readonly isResult: boolean
+  /** The screen has it on the page of the vessel, and no column for it. */
+  readonly filesOnly?: true
 }
 
 export interface ScheduleCell {
@@ -103,17 +107,21 @@ export const scheduleTable = (result: ProjectResult, kind: string, units: UnitSy
     }))
 
   const columns: ScheduleColumn[] = [
-    { key: 'mark', heading: 'Mark', unit: '', align: 'left', width: 9, decimals: null },
+    { key: 'mark', heading: 'Mark', unit: '', align: 'left', width: 9, decimals: null, isResult: false },
   ]
   const cells = contexts.map(({ vessel }): Record<string, ScheduleCell> => ({ mark: words(vessel.mark) }))
 
   for (const column of definition.columns) {
     const { key, heading, width } = column
-    const part = column.part === undefined ? {} : { part: column.part }
+    const marks = {
+      isResult: column.shows === 'result',
+      ...(column.part === undefined ? {} : { part: column.part }),
+      ...(column.filesOnly === undefined ? {} : { filesOnly: column.filesOnly }),
+    }
     if (column.shows === 'words') {
       const texts = contexts.map((context) => column.words(context))
       if (column.optional && texts.every((text) => text === '')) continue
-      columns.push({ key, heading, unit: '', align: column.align ?? 'left', width, decimals: null, ...part })
+      columns.push({ key, heading, unit: '', align: column.align ?? 'left', width, decimals: null, ...marks })
       texts.forEach((text, row) => {
         const cell = cells[row]
         if (cell) cell[key] = words(text || '—')
@@ -126,14 +134,14 @@ export const scheduleTable = (result: ProjectResult, kind: string, units: UnitSy
     })
     if (column.optional && numbers.every((found) => found === null)) continue
     const decimals = decimalsFor(numbers.flatMap((found) => (found ? [found.value] : [])))
-    columns.push({ key, heading, unit: unitLabel(column.kind, units), align: 'right', width, decimals, ...part })
+    columns.push({ key, heading, unit: unitLabel(column.kind, units), align: 'right', width, decimals, ...marks })
     contexts.forEach(({ vessel }, row) => {
       const [cell, found] = [cells[row], numbers[row]]
       if (cell) cell[key] = found ? { text: fixedText(found.value, decimals), ...found } : missing(vessel, column)
     })
   }
 
-  columns.push({ key: 'notes', heading: 'Notes', unit: '', align: 'left', width: 7, decimals: null })
+  columns.push({ key: 'notes', heading: 'Notes', unit: '', align: 'left', width: 7, decimals: null, isResult: false })
   contexts.forEach(({ vessel }, row) => {
     const texts = [
       ...(vessel.reason && vessel.status !== 'sized' ? [sentenceCase(vessel.reason)] : []),

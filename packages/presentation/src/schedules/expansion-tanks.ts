@@ -1,4 +1,4 @@
-import { defineSchedule, inputNumber, optional, resultNumber } from './schedule.ts'
+import { defineSchedule, filesOnly, inputNumber, optional, resultNumber } from './schedule.ts'
 import * as shared from './shared-columns.ts'
 
 export const expansionTanks = defineSchedule({
@@ -17,9 +17,9 @@ export const expansionTanks = defineSchedule({
     inputNumber('high-temperature', 'Highest temp.', 8, 'temperature', ['t_h']),
     resultNumber('expansion-volume', 'Expansion volume', 10, 'volume'),
     resultNumber('required-volume', 'Required volume', 9, 'volume'),
-    optional(resultNumber('required-volume-each', 'Required, each', 9, 'volume')),
-    optional(resultNumber('code-minimum-volume', 'Code minimum', 9, 'volume')),
-    optional(resultNumber('water-reserve', 'Water reserve', 9, 'volume')),
+    filesOnly(optional(resultNumber('required-volume-each', 'Required, each', 9, 'volume'))),
+    filesOnly(optional(resultNumber('code-minimum-volume', 'Code minimum', 9, 'volume'))),
+    filesOnly(optional(resultNumber('water-reserve', 'Water reserve', 9, 'volume'))),
     resultNumber('fill-pressure', 'Fill pressure', 9, 'gauge pressure'),
     resultNumber('precharge', 'Precharge', 10, 'gauge pressure'),
     resultNumber('maximum-pressure', 'Maximum pressure', 10, 'gauge pressure'),

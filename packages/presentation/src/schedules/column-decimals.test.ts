@@ -9,6 +9,8 @@ describe('decimals of a column', () => {
     { values: [50, 180, 40.00000000000001], decimals: 0 },
     { values: [0, 0.5], decimals: 3 },
     { values: [], decimals: 0 },
+    { values: [0.0305, 4], decimals: 4 },
+    { values: [1e-7], decimals: 5 },
   ])('give $values $decimals', ({ values, decimals }) => {
     expect(decimalsFor(values)).toBe(decimals)
   })

@@ -1,6 +1,7 @@
-import { methodWords, numbersOf, sentenceCase } from '../words/vessel-words.ts'
+import { methodWords, numbersOf, sentenceCase } from '../vessel-words.ts'
 import type { Kind } from '@coldfill/units'
 import {
+  filesOnly,
   inputNumber,
   ofSelection,
   optional,
@@ -14,7 +15,7 @@ type Selected = NonNullable<VesselResult['selected']>
 
 /** Columns that every schedule has in the same words and place. */
 export const serves = words('serves', 'Serves', 17, ({ vessel, system }) => vessel.serves || (system?.title ?? ''))
-export const location = optional(words('location', 'Location', 14, ({ vessel }) => vessel.location))
+export const location = filesOnly(optional(words('location', 'Location', 14, ({ vessel }) => vessel.location)))
 export const fluid = words('fluid', 'Fluid', 16, ({ vessel }) => sentenceCase(vessel.fluid))
 export const construction = words('construction', 'Type', 10, ({ vessel }) => sentenceCase(vessel.construction ?? ''))
 /** A number of vessels is an input where there are several; a single vessel has no step that its number goes into. */
@@ -51,13 +52,15 @@ export const selection: readonly ScheduleColumnDefinition[] = [
     ({ quantity: many, maker, model }) => `${many > 1 ? `${many} × ` : ''}${maker} ${model}`,
   ),
   chosenNumber('selected-volume', 'Selected volume', 9, 'volume', ({ volume }) => volume),
-  chosenNumber('selected-acceptance', 'Acceptance', 11, 'volume', ({ acceptance }) => acceptance),
-  chosenNumber('rated-pressure', 'Rated pressure', 9, 'gauge pressure', ({ maxPressure }) => maxPressure),
-  chosenNumber('rated-temperature', 'Rated temp.', 8, 'temperature', ({ maxTemperature }) => maxTemperature),
-  chosenWords('stamped', 'Stamp', 7, ({ stamped }) => (stamped ? 'Yes' : 'No')),
-  chosenWords('connection', 'Connection', 12, ({ connection }) => connection ?? ''),
-  chosenWords('mounting', 'Mounting', 10, ({ mounting }) => sentenceCase(mounting ?? '')),
-  chosenNumber('diameter', 'Diameter', 9, 'diameter', ({ diameter }) => diameter),
-  chosenNumber('height', 'Height', 8, 'diameter', ({ height }) => height),
-  chosenNumber('weight-empty', 'Weight empty', 8, 'mass', ({ weightEmpty }) => weightEmpty),
+  ...[
+    chosenNumber('selected-acceptance', 'Acceptance', 11, 'volume', ({ acceptance }) => acceptance),
+    chosenNumber('rated-pressure', 'Rated pressure', 9, 'gauge pressure', ({ maxPressure }) => maxPressure),
+    chosenNumber('rated-temperature', 'Rated temp.', 8, 'temperature', ({ maxTemperature }) => maxTemperature),
+    chosenWords('stamped', 'Stamp', 7, ({ stamped }) => (stamped ? 'Yes' : 'No')),
+    chosenWords('connection', 'Connection', 12, ({ connection }) => connection ?? ''),
+    chosenWords('mounting', 'Mounting', 10, ({ mounting }) => sentenceCase(mounting ?? '')),
+    chosenNumber('diameter', 'Diameter', 9, 'diameter', ({ diameter }) => diameter),
+    chosenNumber('height', 'Height', 8, 'diameter', ({ height }) => height),
+    chosenNumber('weight-empty', 'Weight empty', 8, 'mass', ({ weightEmpty }) => weightEmpty),
+  ].map(filesOnly),
 ]
