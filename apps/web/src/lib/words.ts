@@ -21,3 +21,22 @@ export const outcomeTone = (outcome: Outcome): 'good' | 'held' | 'plain' =>
 
 /** A revision inside a sentence: "the first issue", "Rev B". */
 export const revisionPhrase = (label: string): string => (label === '' ? 'the first issue' : `Rev ${label}`)
+
+/** What a set of files lacks, and why; null where it lacks nothing. */
+export const missingWords = ({
+  noPages,
+  noPdf,
+}: {
+  readonly noPages: string | null
+  readonly noPdf: string | null
+}): string | null => {
+  const pages = 'The contents list of the submittal has no page numbers'
+  if (noPages !== null && noPages === noPdf)
+    return `There is no PDF, and the contents list of the submittal has no page numbers. ${noPdf}`
+  return (
+    [
+      ...(noPdf === null ? [] : [`There is no PDF. ${noPdf}`]),
+      ...(noPages === null ? [] : [`${pages}. ${noPages}`]),
+    ].join(' ') || null
+  )
+}

@@ -5,6 +5,7 @@ import { ConstructionIssue } from '#features/issue/components/construction-issue
 import { ReviewIssue } from '#features/issue/components/review-issue.tsx'
 import { RevisionEntry } from '#features/issue/components/revision-entry.tsx'
 import { useProject } from '#features/projects/api/projects.ts'
+import { ReviewCopy } from '#features/review-copy/components/review-copy.tsx'
 import { refreshProject } from '#lib/refresh.ts'
 import { useProjectNumber } from '#lib/route-params.ts'
 
@@ -36,7 +37,14 @@ export function Component() {
             <p className="border-t-2 border-ink pt-2 text-pencil">Nothing is issued yet.</p>
           ) : null}
           {project.revisions.map((revision) => (
-            <RevisionEntry key={revision.id} project={project} revision={revision} />
+            <RevisionEntry key={revision.id} project={project} revision={revision}>
+              {revision.id === newest?.id && revision.files.length > 0 ? (
+                <div className="mt-4">
+                  <h4 className="mb-1 font-semibold">Review copy</h4>
+                  <ReviewCopy project={number} label={revision.label} />
+                </div>
+              ) : null}
+            </RevisionEntry>
           ))}
         </section>
       </div>

@@ -6,6 +6,7 @@ import { AuditTrailTable } from '#features/office/components/audit-trail.tsx'
 import { Catalogue } from '#features/office/components/catalogue.tsx'
 import { OutboxList } from '#features/office/components/outbox.tsx'
 import { PeopleTable } from '#features/office/components/people.tsx'
+import { TitleBlockPart } from '#features/office/components/title-block.tsx'
 import { sessionQuery } from '#features/session/api/session.ts'
 import { ApiError } from '#lib/api-error.ts'
 import { queryClient } from '#lib/query-client.ts'
@@ -23,6 +24,7 @@ const parts: readonly { readonly id: string; readonly name: string; readonly Par
   { id: 'outbox', name: 'Outbox', Part: OutboxList },
   { id: 'people', name: 'People', Part: PeopleTable },
   { id: 'catalogue', name: 'Catalogue', Part: Catalogue },
+  { id: 'title-block', name: 'Title block', Part: TitleBlockPart },
   { id: 'audit', name: 'Audit trail', Part: AuditTrailTable },
 ]
 
@@ -31,7 +33,11 @@ export function Component() {
   const here = parts.find((part) => part.id === get('part')) ?? parts[0]
   return (
     <Sheet title="Office" tab={`Office ${here?.name ?? ''}`}>
-      <div role="tablist" aria-label="Parts of the office" className="mb-5 flex gap-1 border-b-2 border-ink">
+      <div
+        role="tablist"
+        aria-label="Parts of the office"
+        className="mb-5 flex gap-1 overflow-x-auto border-b-2 border-ink"
+      >
         {parts.map(({ id, name }) => (
           <button
             key={id}
@@ -40,7 +46,7 @@ export function Component() {
             aria-selected={id === here?.id}
             aria-controls="office-part"
             onClick={() => change({ part: id })}
-            className={`h-9 px-3 ${id === here?.id ? 'border-b-[3px] border-b-steel font-semibold' : 'text-pencil hover:text-ink'}`}
+            className={`h-9 shrink-0 px-3 ${id === here?.id ? 'border-b-[3px] border-b-steel font-semibold' : 'text-pencil hover:text-ink'}`}
           >
             {name}
           </button>

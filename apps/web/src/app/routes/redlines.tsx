@@ -12,6 +12,7 @@ import { RedlineList } from '#features/redlines/components/redline-list.tsx'
 import { RedlineThread } from '#features/redlines/components/redline-thread.tsx'
 import { SendReview } from '#features/redlines/components/send-review.tsx'
 import { isFilter, passes } from '#features/redlines/filters.ts'
+import { ReviewCopy } from '#features/review-copy/components/review-copy.tsx'
 import { RevisionSwitch } from '#features/results/components/revision-switch.tsx'
 import { useProjectNumber } from '#lib/route-params.ts'
 import { revisionPhrase } from '#lib/words.ts'
@@ -127,6 +128,12 @@ export function Component() {
                 </div>
               </div>
             )}
+            {looked ? (
+              <section>
+                <SectionHeading>Review copy</SectionHeading>
+                <ReviewCopy key={looked.id} project={number} label={looked.label} />
+              </section>
+            ) : null}
           </div>
         )}
       </Loaded>

@@ -91,6 +91,7 @@ export const HandoverFiles = ({ handover, units }: { readonly handover: Handover
                 <FileRow key={file.name} file={file} />
               ))}
             </ul>
+            {current.noPdf ? <p className="mt-2 text-cell text-pencil">There is no PDF. {current.noPdf}</p> : null}
           </section>
           <section>
             <SectionHeading note="Gauge pressures, at the vessel connection, cold">

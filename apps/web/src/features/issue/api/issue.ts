@@ -1,4 +1,4 @@
-import { GateList, Revision, revisionSegment } from '@coldfill/contract'
+import { GateList, Revision, revisionSegment, type ContentsChoice } from '@coldfill/contract'
 import { queryOptions } from '@tanstack/react-query'
 import { api, projectApi } from '#lib/api-client.ts'
 import { refreshProject } from '#lib/refresh.ts'
@@ -20,13 +20,22 @@ const after = async (project: string, work: Promise<Revision>): Promise<Revision
 const revision = (project: string, label: string, rest: string) =>
   projectApi(project, `/revisions/${revisionSegment(label)}${rest}`)
 
-export const issueForReview = (project: string, note: string) =>
-  after(project, api.post(projectApi(project, '/revisions'), { purpose: 'review', note }, Revision))
+export const issueForReview = (project: string, note: string, contents: ContentsChoice) =>
+  after(project, api.post(projectApi(project, '/revisions'), { purpose: 'review', note, contents }, Revision))
 
-export const issueForConstruction = (project: string, label: string, override: string | null) =>
+export const issueForConstruction = (
+  project: string,
+  label: string,
+  override: string | null,
+  contents: ContentsChoice,
+) =>
   after(
     project,
-    api.post(revision(project, label, '/construction'), override ? { override: { reason: override } } : {}, Revision),
+    api.post(
+      revision(project, label, '/construction'),
+      { contents, ...(override ? { override: { reason: override } } : {}) },
+      Revision,
+    ),
   )
 
 export const withdraw = (project: string, label: string, reason: string) =>

@@ -1,4 +1,4 @@
-import { type Project, type Revision } from '@coldfill/contract'
+import type { ContentsChoice, Project, Revision } from '@coldfill/contract'
 import { useQuery } from '@tanstack/react-query'
 import { useState, type FormEvent } from 'react'
 import { Failure } from '#components/failure.tsx'
@@ -9,6 +9,7 @@ import { SectionHeading } from '#components/ui/heading.tsx'
 import { revisionPhrase } from '#lib/words.ts'
 import { useAction } from '#lib/use-action.ts'
 import { gatesQuery, issueForConstruction } from '../api/issue.ts'
+import { ContentsPicker } from './contents-picker.tsx'
 import { GateTable } from './gate-table.tsx'
 
 /** Hands the newest revision to the contractor, once every gate is clear or overridden with a reason. */
@@ -22,6 +23,9 @@ export const ConstructionIssue = ({
   const gates = useQuery(gatesQuery(project.number, 'construction'))
   const { busy, error, run } = useAction()
   const [reason, setReason] = useState('')
+  const reviewed = revision.sets.find(({ set }) => set === 'review')?.contents
+  const [chosen, setChosen] = useState<ContentsChoice | null>(null)
+  const contents = chosen ?? reviewed ?? {}
   const { issueForConstruction: permission } = project.permissions
   const held = gates.data?.filter((gate) => gate.state === 'hold') ?? []
   const overridable = gates.data?.filter((gate) => gate.state === 'overridable') ?? []
@@ -37,7 +41,7 @@ export const ConstructionIssue = ({
     event.preventDefault()
     if (
       await run(() =>
-        issueForConstruction(project.number, revision.label, overridable.length > 0 ? reason.trim() : null),
+        issueForConstruction(project.number, revision.label, overridable.length > 0 ? reason.trim() : null, contents),
       )
     )
       setReason('')
@@ -62,6 +66,12 @@ export const ConstructionIssue = ({
             maxLength={2000}
           />
         ) : null}
+        <ContentsPicker
+          of="files for construction"
+          contents={contents}
+          onChange={setChosen}
+          hint="As in the files that were reviewed, until you choose otherwise. The contractor reads all that stands in them."
+        />
         <div>
           <Button type="submit" look="main" busy={busy} why={why} showWhy>
             Issue for construction

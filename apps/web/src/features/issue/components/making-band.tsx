@@ -37,7 +37,7 @@ export const MakingBand = ({ project, revision }: { readonly project: string; re
     >
       <p>{making.name}. You may leave this sheet; the files are made all the same.</p>
       <progress
-        className="mt-1 h-2 w-60 max-w-full accent-steel"
+        className="mt-1 h-2 w-60 max-w-full appearance-none border border-rule bg-sheet [&::-moz-progress-bar]:bg-steel [&::-webkit-progress-bar]:bg-sheet [&::-webkit-progress-value]:bg-steel"
         max={making.of}
         value={making.stage}
         aria-label="Stages done"

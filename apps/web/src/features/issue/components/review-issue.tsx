@@ -1,4 +1,4 @@
-import { type Project } from '@coldfill/contract'
+import type { ContentsChoice, Project } from '@coldfill/contract'
 import { useQuery } from '@tanstack/react-query'
 import { useState, type FormEvent } from 'react'
 import { Failure } from '#components/failure.tsx'
@@ -9,6 +9,7 @@ import { SectionHeading } from '#components/ui/heading.tsx'
 import { revisionPhrase } from '#lib/words.ts'
 import { useAction } from '#lib/use-action.ts'
 import { gatesQuery, issueForReview } from '../api/issue.ts'
+import { ContentsPicker } from './contents-picker.tsx'
 import { GateTable } from './gate-table.tsx'
 
 /** Freezes the working copy as the next revision and sends it to the reviewers. */
@@ -16,6 +17,7 @@ export const ReviewIssue = ({ project }: { readonly project: Project }) => {
   const gates = useQuery(gatesQuery(project.number, 'review'))
   const { busy, error, run } = useAction()
   const [note, setNote] = useState('')
+  const [contents, setContents] = useState<ContentsChoice>({})
   const { issueForReview: permission } = project.permissions
   const held = gates.data?.filter((gate) => gate.state !== 'pass') ?? []
   const why = permission.allowed
@@ -26,7 +28,7 @@ export const ReviewIssue = ({ project }: { readonly project: Project }) => {
 
   const onSubmit = async (event: FormEvent) => {
     event.preventDefault()
-    if (await run(() => issueForReview(project.number, note))) setNote('')
+    if (await run(() => issueForReview(project.number, note, contents))) setNote('')
   }
   return (
     <section className="flex flex-col">
@@ -43,6 +45,12 @@ export const ReviewIssue = ({ project }: { readonly project: Project }) => {
           onChange={(event) => setNote(event.target.value)}
           rows={2}
           maxLength={2000}
+        />
+        <ContentsPicker
+          of="files for review"
+          contents={contents}
+          onChange={setContents}
+          hint="Issued files keep what was chosen. Pending redlines are never among them."
         />
         <div>
           <Button type="submit" look="main" busy={busy} why={why} showWhy>

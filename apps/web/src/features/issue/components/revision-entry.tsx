@@ -1,7 +1,6 @@
 import { revisionTitle, type Project, type Revision } from '@coldfill/contract'
-import { useState, type FormEvent } from 'react'
+import { useState, type FormEvent, type ReactNode } from 'react'
 import { Failure } from '#components/failure.tsx'
-import { FileRow } from '#components/file-row.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { TextArea } from '#components/ui/field.tsx'
 import { RevisionTriangle } from '#components/ui/review-marks.tsx'
@@ -9,6 +8,7 @@ import { StateWord } from '#components/ui/state-word.tsx'
 import { clock, day } from '#lib/format.ts'
 import { useAction } from '#lib/use-action.ts'
 import { withdraw } from '../api/issue.ts'
+import { FileSet } from './file-set.tsx'
 import { MakingBand } from './making-band.tsx'
 
 const Withdraw = ({ project, revision }: { readonly project: Project; readonly revision: Revision }) => {
@@ -56,7 +56,15 @@ const Withdraw = ({ project, revision }: { readonly project: Project; readonly r
 }
 
 /** One revision with its files. Files of the latest making stand first. */
-export const RevisionEntry = ({ project, revision }: { readonly project: Project; readonly revision: Revision }) => {
+export const RevisionEntry = ({
+  project,
+  revision,
+  children,
+}: {
+  readonly project: Project
+  readonly revision: Revision
+  readonly children?: ReactNode
+}) => {
   const sets = (['construction', 'review'] as const).flatMap((set) => {
     const files = revision.files.filter((file) => file.set === set)
     return files.length > 0 ? [{ set, files }] : []
@@ -99,17 +107,9 @@ export const RevisionEntry = ({ project, revision }: { readonly project: Project
         </div>
       ) : null}
       {sets.map(({ set, files }) => (
-        <div key={set} className="mt-3">
-          <h4 className="border-b border-ink pb-1 font-semibold">
-            {set === 'construction' ? 'Files for construction' : 'Files for review'}
-          </h4>
-          <ul>
-            {files.map((file) => (
-              <FileRow key={`${set} ${file.name}`} file={file} />
-            ))}
-          </ul>
-        </div>
+        <FileSet key={set} set={set} files={files} made={revision.sets.find((made) => made.set === set)} />
       ))}
+      {children}
     </article>
   )
 }

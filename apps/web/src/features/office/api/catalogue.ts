@@ -2,6 +2,7 @@ import { OfficeCatalogue, type PutCatalogueRequest } from '@coldfill/contract'
 import { queryOptions } from '@tanstack/react-query'
 import { api } from '#lib/api-client.ts'
 import { queryClient } from '#lib/query-client.ts'
+import { base64 } from './base64.ts'
 
 const address = '/api/office/catalogue'
 export const exampleCatalogueAddress = `${address}/example`
@@ -15,14 +16,6 @@ export const catalogueQuery = queryOptions({
 const refreshAll = async (): Promise<void> => {
   await queryClient.invalidateQueries({ queryKey: ['office'] })
   await queryClient.invalidateQueries({ queryKey: ['projects'] })
-}
-
-const base64 = async (file: File): Promise<string> => {
-  const bytes = new Uint8Array(await file.arrayBuffer())
-  let text = ''
-  const piece = 32_768
-  for (let at = 0; at < bytes.length; at += piece) text += String.fromCharCode(...bytes.subarray(at, at + piece))
-  return btoa(text)
 }
 
 export const uploadCatalogue = async (file: File): Promise<void> => {
