@@ -23,13 +23,24 @@ const exited = (child: ChildProcess): Promise<number | null> =>
     ? Promise.resolve(child.exitCode)
     : new Promise((done) => child.once('exit', (status) => done(status)))
 
-/** Starts the real server on a free port and a new data folder, with the demo offices, and waits until it answers. */
-export const serve = async (): Promise<Served> => {
+/**
+ * Starts the real server on a free port and a new data folder, with the demo offices, and waits until it answers. `settings` stand
+ * before those of the tests, by which it works without LibreOffice.
+ */
+export const serve = async (settings: Readonly<Record<string, string>> = {}): Promise<Served> => {
   if (!existsSync(join(root, 'apps/web/dist/index.html'))) throw new Error('The client is not built: npm run build.')
   const folder = await mkdtemp(join(tmpdir(), 'coldfill-e2e-'))
   const child = spawn(process.execPath, ['--import', 'tsx', 'apps/server/src/main.ts'], {
     cwd: root,
-    env: { ...process.env, PORT: '0', COLDFILL_DATA: folder, SMTP_URL: '', PUBLIC_URL: '', SESSION_SECRET: '' },
+    env: {
+      ...process.env,
+      PORT: '0',
+      COLDFILL_DATA: folder,
+      SMTP_URL: '',
+      PUBLIC_URL: '',
+      SESSION_SECRET: '',
+      ...settings,
+    },
     stdio: ['ignore', 'pipe', 'pipe'],
   })
   let said = ''

@@ -44,6 +44,9 @@ it('the second save is refused where the first tab saved meanwhile, and its text
   expect(version).toBe(2)
   expect(text).toContain('relief-valve: 60 psi')
   expect(text).not.toContain('static-height: 43 ft')
+  // A save that was refused sets both texts beside each other.
+  const close = second.page.getByRole('region', { name: 'Compare' }).getByRole('button', { name: 'Close', exact: true })
+  if (await close.isVisible()) await close.click()
   expect(await typedText(second.page)).toContain('static-height: 43 ft')
 })
 
@@ -53,6 +56,8 @@ it('taking the other text keeps the own one on the device, and gives it back', a
   await page.getByText('A text that was not saved is kept on this device').waitFor()
   expect(await typedText(second.page)).toContain('relief-valve: 60 psi')
   await page.getByRole('button', { name: 'Take it up' }).click()
+  // It was begun on version 1, so that version 2 is not forgotten.
+  await page.getByText(/saved version 2 at .*, while you were at version 1/u).waitFor()
   const mine = await typedText(second.page)
   expect(mine).toContain('static-height: 43 ft')
   expect(mine).toContain('relief-valve: 50 psi')
@@ -69,7 +74,14 @@ it('a text that was never saved outlives a reload', async () => {
 
 it('saving over the other text is asked for, and then takes effect', async () => {
   const { page } = second
-  await saveSpec(page)
+  await page.getByRole('button', { name: 'Save', exact: true }).click()
+  const compare = page.getByRole('region', { name: 'Compare' })
+  await compare.getByText('Saved version 2').first().waitFor()
+  await page.getByRole('button', { name: 'Save mine over it' }).click()
+  await page.getByText(/^Saved .*, version 3$/u).waitFor()
+  await compare.waitFor({ state: 'detached' })
+  // The server has the newest text alone, so that the one saved over is kept here.
+  await page.getByText('Version 2, which you saved over, is kept on this device.').waitFor()
   const { text, version } = await onServer()
   expect(version).toBe(3)
   expect(text).toContain('static-height: 43 ft')

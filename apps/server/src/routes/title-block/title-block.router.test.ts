@@ -30,10 +30,14 @@ const png = (width: number, height: number): Buffer => {
   head.writeUInt32BE(width, 0)
   head.writeUInt32BE(height, 4)
   head[8] = 8
+  // Each row begins with its filter: none.
+  const row = Buffer.alloc(width + 1, 0x80)
+  row[0] = 0
+  const rows = Buffer.concat(Array.from({ length: height }, () => row))
   return Buffer.concat([
     Buffer.from([0x89, 0x50, 0x4e, 0x47, 0x0d, 0x0a, 0x1a, 0x0a]),
     chunk('IHDR', head),
-    chunk('IDAT', deflateSync(Buffer.alloc((width + 1) * height, 0x80))),
+    chunk('IDAT', deflateSync(rows)),
     chunk('IEND', Buffer.alloc(0)),
   ])
 }
