@@ -220,6 +220,14 @@ describe.concurrent('exit statuses', () => {
     }
   })
 
+  it('0 for help, asked for alone or after a verb', async () => {
+    for (const args of [['--help'], ['size', '--help'], ['submittal', '-h'], ['help']]) {
+      const { status, out, err } = await coldfill(...args)
+      expect([status, err], args.join(' ')).toEqual([0, ''])
+      expect(out).toContain('Exit status: 0 no error finding')
+    }
+  })
+
   it('65 for text that is no YAML and for a spec of another version', async () => {
     const [broken, other] = await Promise.all([
       coldfill('size', put('broken.yaml', 'coldfill: 1\nproject: { number: "T-1\n'), '--format', 'json'),

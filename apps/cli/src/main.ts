@@ -19,7 +19,7 @@ const verbs: Readonly<Record<string, () => Promise<Verb>>> = {
 const usage = `coldfill VERB …
 
   check FILE [--fix]             findings only; --fix mends errors whose mending leaves nothing to choose
-  size FILE [--catalogue FILE]   sizes every vessel
+  size FILE                      sizes every vessel
   compare OLD NEW                what differs in the specs and in the sized vessels
   format FILE [--write]          tidies indentation and spacing; prints, or writes the file
   schedule FILE --out FILE.xlsx  writes the equipment schedule
@@ -31,6 +31,8 @@ const usage = `coldfill VERB …
   verify                         every published case: expected, computed, deviation
 
   --format text|json|github|sarif   --fail-on error|warning|note   --units US|SI
+  --catalogue FILE.csv|FILE.xlsx    chooses vessels from it: check, size, compare, schedule and submittal
+  --help                            this page, after any verb
 
 Exit status: 0 no error finding, 1 findings at or above --fail-on, 64 usage, 65 unreadable YAML or unknown spec version,
 66 no such file, 70 internal, 73 cannot write.
@@ -41,7 +43,8 @@ Page numbers and the PDF of a submittal come from LibreOffice: COLDFILL_OFFICE n
 /** Runs the command and returns its exit status. Standard output has data only. */
 export const main = async (argv: readonly string[]): Promise<number> => {
   const [verb, ...args] = argv
-  if (verb === '--help' || verb === '-h' || verb === 'help') {
+  const asksHelp = (arg: string | undefined): boolean => arg === '--help' || arg === '-h'
+  if (verb === 'help' || asksHelp(verb) || args.some(asksHelp)) {
     process.stdout.write(usage)
     return exitStatus.ok
   }
