@@ -49,6 +49,8 @@ export const Permissions = z.object({
   editSpec: Permission,
   seeWorkingCopy: Permission,
   redline: Permission,
+  /** A thread that only the consultants and the administrator of the office see. */
+  officeRedline: Permission,
   reply: Permission,
   dispose: Permission,
   issueForReview: Permission,

@@ -41,6 +41,8 @@ export const Redline = z.object({
   /** A pending redline is seen by its author alone until the review is sent. */
   state: z.enum(['pending', 'open', 'closed']),
   mustAnswer: z.boolean(),
+  /** Seen by the consultants and the administrator alone, and in no document. */
+  officeOnly: z.boolean(),
   proposedValue: z.string().nullable(),
   waitingOn: z.enum(['consultant', 'reviewer']).nullable(),
   waitingOnYou: z.boolean(),
@@ -72,6 +74,8 @@ export const CreateRedlineRequest = z.strictObject({
   text,
   mustAnswer: z.boolean().default(false),
   proposedValue: z.string().trim().max(200).nullable().default(null),
+  /** Fixed from then on. It is open at once, for it is part of no review. */
+  officeOnly: z.boolean().default(false),
 })
 export type CreateRedlineRequest = z.input<typeof CreateRedlineRequest>
 

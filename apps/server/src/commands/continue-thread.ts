@@ -55,11 +55,11 @@ export const continueThread = async (
       detail: `Redline ${number}`,
     })
     const label = facts.revisions.find((revision) => revision.id === row.revisionId)?.label ?? ''
-    // The consultant's words go to the author of the redline, the reviewer's to the consultants.
+    // The consultant's words go to the author of the redline, the reviewer's and those for the office to the consultants.
     const to = facts.members.filter(
       (member) =>
         member.id !== principal.userId &&
-        (is(access, 'reviewer') ? member.roles.includes('consultant') : member.id === row.authorId),
+        (row.officeOnly || is(access, 'reviewer') ? member.roles.includes('consultant') : member.id === row.authorId),
     )
     await queueMail(
       tx,

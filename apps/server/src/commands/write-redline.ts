@@ -18,10 +18,12 @@ interface NewRedline {
   readonly text: string
   readonly mustAnswer: boolean
   readonly proposedValue: string | null
+  readonly officeOnly: boolean
 }
 
 /**
- * Writes a pending redline on the newest revision, seen by its author alone. Returns its number.
+ * Writes a redline on the newest revision. It is pending, seen by its author alone, until the review is sent; one for the office only
+ * is open at once. Returns its number.
  * @throws {AppError} 403; 422 no_such_place with the keys that are there
  */
 export const writeRedline = async (
@@ -30,7 +32,8 @@ export const writeRedline = async (
   facts: ProjectFacts,
   redline: NewRedline,
 ): Promise<number> => {
-  requirePermission(projectPermissions(access, facts).redline)
+  const permissions = projectPermissions(access, facts)
+  requirePermission(redline.officeOnly ? permissions.officeRedline : permissions.redline)
   const revision = newestRevision(facts)
   if (!revision) throw notFound()
   const content = await frozenContent(deps.db, revision.id)
@@ -65,10 +68,13 @@ export const writeRedline = async (
         anchor: redline.anchor,
         quoted: redline.quoted === '' ? reading.shown : redline.quoted,
         proposedValue: redline.proposedValue === '' ? null : redline.proposedValue,
-        mustAnswer: redline.mustAnswer,
+        // It is for nobody's issue to wait for.
+        mustAnswer: redline.mustAnswer && !redline.officeOnly,
+        officeOnly: redline.officeOnly,
         authorId: access.principal.userId,
-        state: 'pending',
+        state: redline.officeOnly ? 'open' : 'pending',
         createdAt: now,
+        publishedAt: redline.officeOnly ? now : null,
       })
       .returning({ id: redlines.id })
     if (!row) throw new Error('The redline was not written.')

@@ -32,6 +32,10 @@ export const projectPermissions = (access: ProjectAccess, facts: ProjectFacts): 
       !newest && NOTHING_ISSUED,
       state === 'issued for construction' && `${title} is issued for construction. Redline the next revision.`,
     ),
+    officeRedline: unless(
+      !consultant && 'Only a consultant of the project writes for the office only.',
+      !newest && NOTHING_ISSUED,
+    ),
     reply: unless(!consultant && !reviewer && 'Only a consultant or a reviewer of the project replies.'),
     dispose: unless(
       !reviewer && 'Only a reviewer of the project sets a disposition.',

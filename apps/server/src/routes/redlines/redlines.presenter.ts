@@ -18,7 +18,8 @@ export const presentRedline = (
   const now = readCarriedAnchor(row.anchor, contents.contentOf(contents.viewed.id))
   const then = readAnchor(row.anchor, contents.contentOf(row.revisionId))
   const last = messages.at(-1)
-  const turn = row.state === 'open' && last ? turnAfter(facts.members, last.author.id) : null
+  // One for the office has no two sides.
+  const turn = row.state === 'open' && !row.officeOnly && last ? turnAfter(facts.members, last.author.id) : null
   const author = messages[0]?.author ?? { id: row.authorId, name: 'A former member', initials: '–' }
   const closing = messages.findLast((message) => message.did === 'closed')
   return {
@@ -32,6 +33,7 @@ export const presentRedline = (
     createdAt: row.createdAt.toISOString(),
     state: row.state,
     mustAnswer: row.mustAnswer,
+    officeOnly: row.officeOnly,
     proposedValue: row.proposedValue,
     waitingOn: turn,
     waitingOnYou:

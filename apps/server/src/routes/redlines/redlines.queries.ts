@@ -1,6 +1,8 @@
-import { and, asc, eq, inArray, ne, or } from 'drizzle-orm'
+import { and, asc, eq, inArray } from 'drizzle-orm'
 import type { Reader } from '../../db/client.ts'
 import { redlineMessages, redlines, users } from '../../db/schema/index.ts'
+import type { ProjectAccess } from '../../policies/project-access.ts'
+import { seesRedline } from '../../policies/redlines.ts'
 
 export type RedlineRow = typeof redlines.$inferSelect
 
@@ -12,32 +14,24 @@ export interface MessageRow {
   readonly writtenAt: Date
 }
 
-/** Threads with their messages in order. The pending ones of others are never among them. */
+/** Threads with their messages in order. Those that the person may not know of are never among them. */
 export interface Threads {
   readonly rows: readonly RedlineRow[]
   readonly messages: ReadonlyMap<string, readonly MessageRow[]>
 }
 
-export const visibleThreads = async (
-  db: Reader,
-  projectId: string,
-  userId: string,
-  number?: number,
-): Promise<Threads> => {
-  const rows = await db
+export const visibleThreads = async (db: Reader, access: ProjectAccess, number?: number): Promise<Threads> => {
+  const found = await db
     .select()
     .from(redlines)
     .where(
-      and(
-        eq(redlines.projectId, projectId),
-        or(ne(redlines.state, 'pending'), eq(redlines.authorId, userId)),
-        ...(number === undefined ? [] : [eq(redlines.number, number)]),
-      ),
+      and(eq(redlines.projectId, access.project.id), ...(number === undefined ? [] : [eq(redlines.number, number)])),
     )
     .orderBy(asc(redlines.number))
+  const rows = found.filter((row) => seesRedline(access, row))
   const messages = new Map<string, MessageRow[]>(rows.map((row) => [row.id, []]))
   if (rows.length > 0) {
-    const found = await db
+    const written = await db
       .select({
         redlineId: redlineMessages.redlineId,
         author: { id: users.id, name: users.name, initials: users.initials },
@@ -54,7 +48,7 @@ export const visibleThreads = async (
         ),
       )
       .orderBy(asc(redlineMessages.position))
-    for (const message of found) messages.get(message.redlineId)?.push(message)
+    for (const message of written) messages.get(message.redlineId)?.push(message)
   }
   return { rows, messages }
 }

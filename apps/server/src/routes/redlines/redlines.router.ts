@@ -37,7 +37,7 @@ const presentThreads = async (
   const facts = await projectFacts(deps.db, access.project)
   const viewed = rev === undefined ? facts.revisions[0] : findRevision(facts, rev)
   if (!viewed) return []
-  const { rows, messages } = await visibleThreads(deps.db, access.project.id, access.principal.userId, number)
+  const { rows, messages } = await visibleThreads(deps.db, access, number)
   const sequence = new Map(facts.revisions.map((revision) => [revision.id, revision.sequence]))
   // A redline is shown from the revision it was written on; a closed one up to the revision on which it was closed.
   const shown = rows.filter(({ revisionId, state, closedOn }) => {
@@ -71,7 +71,9 @@ export const redlinesRouter = (deps: Deps): Router => {
     .post('/', async (req, res) => {
       const access = accessIn(res)
       const facts = await projectFacts(deps.db, access.project)
-      requirePermission(projectPermissions(access, facts).redline)
+      const { redline, officeRedline } = projectPermissions(access, facts)
+      // One who may write neither is told so, whatever the body says.
+      if (!officeRedline.allowed) requirePermission(redline)
       const number = await writeRedline(deps, access, facts, parseBody(CreateRedlineRequest, req))
       res.status(201).json(await presentOne(deps, access, number))
     })

@@ -37,7 +37,7 @@ export function Component() {
   const used = results.data?.result.assumptions ?? []
   const chosen = used.find((assumption) => assumption.id === chosenId) ?? null
   const accepted = (results.data?.result.findings ?? []).filter((finding) => finding.accepted !== undefined)
-  const { redline } = project.permissions
+  const { redline, officeRedline } = project.permissions
   const loaded = results.data !== undefined
 
   useEffect(() => {
@@ -63,6 +63,7 @@ export function Component() {
                 project={number}
                 anchor={{ type: 'assumption', assumption: chosen.id }}
                 quoted={chosen.value}
+                permissions={project.permissions}
                 onDone={() => setComposing(false)}
               />
             ) : (
@@ -80,11 +81,11 @@ export function Component() {
                   </p>
                 ) : null}
                 <Button
-                  why={redline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')}
+                  why={redline.allowed || officeRedline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')}
                   showWhy
                   onClick={() => setComposing(true)}
                 >
-                  Start a redline
+                  {redline.allowed || !officeRedline.allowed ? 'Start a redline' : 'Start a redline for the office'}
                 </Button>
               </>
             )}

@@ -56,7 +56,7 @@ export const ScheduleMargin = (props: Props) => {
     const found = row.vessel.results[of.column]
     return found ? shownValue(found, units) : ''
   }
-  const { redline } = project.permissions
+  const { redline, officeRedline } = project.permissions
   const here = redlines.filter((one) => one.state !== 'closed' && placeOf(one.anchor) === placeOf(anchor))
 
   return (
@@ -67,6 +67,7 @@ export const ScheduleMargin = (props: Props) => {
           project={project.number}
           anchor={composing}
           quoted={quoted(composing)}
+          permissions={project.permissions}
           onDone={onComposed}
         />
       ) : (
@@ -93,11 +94,11 @@ export const ScheduleMargin = (props: Props) => {
           </Link>
           <div className="border-t-2 border-ink pt-3">
             <Button
-              why={redline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')}
+              why={redline.allowed || officeRedline.allowed ? null : (redline.why ?? 'Reviewers write redlines.')}
               showWhy
               onClick={onCompose}
             >
-              Start a redline
+              {redline.allowed || !officeRedline.allowed ? 'Start a redline' : 'Start a redline for the office'}
             </Button>
           </div>
         </>

@@ -65,7 +65,8 @@ export function Component() {
   const startRedline = (to: Row, key: string) => {
     choose(to, key)
     marginOpen.set(true)
-    if (project.permissions.redline.allowed) setComposing(anchorOf(to, key))
+    const { redline, officeRedline } = project.permissions
+    if (redline.allowed || officeRedline.allowed) setComposing(anchorOf(to, key))
   }
   const toCell = () => {
     requestAnimationFrame(() => document.querySelector<HTMLElement>('[role="grid"] [aria-selected="true"]')?.focus())

@@ -13,6 +13,7 @@ const redline = (number: number, more: Partial<Redline> = {}): Redline => ({
   createdAt: '2026-11-01T10:00:00Z',
   state: 'open',
   mustAnswer: false,
+  officeOnly: false,
   proposedValue: null,
   waitingOn: 'consultant',
   waitingOnYou: false,

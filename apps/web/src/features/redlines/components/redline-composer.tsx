@@ -1,4 +1,4 @@
-import type { Anchor } from '@coldfill/contract'
+import type { Anchor, Permissions } from '@coldfill/contract'
 import { useEffect, useRef, useState, type FormEvent } from 'react'
 import { Failure } from '#components/failure.tsx'
 import { Button } from '#components/ui/button.tsx'
@@ -13,13 +13,16 @@ interface Props {
   readonly anchor: Anchor
   /** The value as it is seen, with its unit. */
   readonly quoted: string
+  readonly permissions: Pick<Permissions, 'redline' | 'officeRedline'>
   readonly onDone: () => void
 }
 
-/** Writes a redline on a cell, a row or an assumption. It stays pending until the review is sent. */
-export const RedlineComposer = ({ project, anchor, quoted, onDone }: Props) => {
+/** Writes a redline on a cell, a row or an assumption. It stays pending until the review is sent; one for the office is open at once. */
+export const RedlineComposer = ({ project, anchor, quoted, permissions, onDone }: Props) => {
   const { busy, error, run } = useAction()
   const [text, setText] = useState('')
+  const mayChoose = permissions.redline.allowed && permissions.officeRedline.allowed
+  const [office, setOffice] = useState(!permissions.redline.allowed)
   const form = useRef<HTMLFormElement>(null)
   useEffect(() => form.current?.querySelector('textarea')?.focus(), [])
 
@@ -31,6 +34,7 @@ export const RedlineComposer = ({ project, anchor, quoted, onDone }: Props) => {
         quoted,
         text,
         mustAnswer: data.get('must') === 'on',
+        officeOnly: office,
         proposedValue: proposed === '' ? null : proposed,
       }),
     )
@@ -68,10 +72,19 @@ export const RedlineComposer = ({ project, anchor, quoted, onDone }: Props) => {
       {anchor.type === 'row' ? null : (
         <TextField label="Proposed value" name="proposed" hint="With its unit, where you propose one" />
       )}
-      <CheckField label="Must be answered before issue for construction" name="must" />
+      {mayChoose ? (
+        <CheckField label="Office only" checked={office} onChange={(event) => setOffice(event.target.checked)} />
+      ) : null}
+      {office ? (
+        <p className="text-cell text-pencil">
+          Office only: the consultants and the administrator read it, nobody else, and no document has it.
+        </p>
+      ) : (
+        <CheckField label="Must be answered before issue for construction" name="must" />
+      )}
       <div className="flex flex-wrap gap-2">
         <Button type="submit" look="main" busy={busy} why={text.trim() === '' ? 'Write what is to be answered.' : null}>
-          Add to pending
+          {office ? 'Write for the office' : 'Add to pending'}
         </Button>
         <Button onClick={onDone}>Cancel</Button>
       </div>

@@ -33,6 +33,7 @@ export const RedlineList = ({ redlines, chosen, onChoose }: Props) => (
                 ? ` · waiting on ${redline.waitingOnYou ? 'you' : `the ${redline.waitingOn}`}`
                 : ''}
               {redline.mustAnswer ? ' · must answer' : ''}
+              {redline.officeOnly ? ' · office only' : ''}
             </span>
           </span>
         </button>

@@ -127,6 +127,9 @@ export const RedlineThread = ({ project, redline, rev, showPlace = true }: Props
               {anchorWords(redline.anchor)}
             </Link>
           ) : null}
+          {redline.officeOnly ? (
+            <span className="border border-rule px-1 text-cell font-medium">office only</span>
+          ) : null}
           {redline.mustAnswer ? (
             <span className="border border-redline px-1 text-cell font-medium text-redline">must answer</span>
           ) : null}
