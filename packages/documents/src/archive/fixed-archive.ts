@@ -6,7 +6,7 @@ const EPOCH = new Date(1980, 0, 1)
 const FIRST = '[Content_Types].xml'
 
 /** Little is gained beyond, and it takes twice as long. */
-const LEVEL = 4
+const LEVEL = 2
 
 const encoder = new TextEncoder()
 const decoder = new TextDecoder('utf-8', { ignoreBOM: true })

@@ -41,19 +41,27 @@ const indexed = (rgba: Uint8Array, width: number, height: number, bits: number):
   const lines = new Uint8Array((width + 1) * height)
   const cut = 8 - bits
   let count = 0
-  for (let pixel = 0; pixel < width * height; pixel += 1) {
-    const [r = 0, g = 0, b = 0] = [rgba[4 * pixel], rgba[4 * pixel + 1], rgba[4 * pixel + 2]]
-    const key = ((r >> cut) << (2 * bits)) | ((g >> cut) << bits) | (b >> cut)
-    let place = places[key] ?? -1
-    if (place < 0) {
-      if (count === COLOURS) return null
-      // The first colour that is met stands for all that are cut to the same: white is white and ink is ink.
-      palette.set([r, g, b], 3 * count)
-      place = count
-      places[key] = count
-      count += 1
+  let [before, place] = [-1, 0]
+  for (let y = 0, at = 0; y < height; y += 1) {
+    const line = y * (width + 1) + 1
+    for (let x = 0; x < width; x += 1, at += 4) {
+      const [r, g, b] = [rgba[at] ?? 0, rgba[at + 1] ?? 0, rgba[at + 2] ?? 0]
+      const key = ((r >> cut) << (2 * bits)) | ((g >> cut) << bits) | (b >> cut)
+      // A drawing is mostly ground: a pixel is like the one before it.
+      if (key !== before) {
+        before = key
+        place = places[key] ?? -1
+        if (place < 0) {
+          if (count === COLOURS) return null
+          // The first colour that is met stands for all that are cut to the same: white is white and ink is ink.
+          palette.set([r, g, b], 3 * count)
+          place = count
+          places[key] = count
+          count += 1
+        }
+      }
+      lines[line + x] = place
     }
-    lines[Math.floor(pixel / width) * (width + 1) + 1 + (pixel % width)] = place
   }
   return { palette: palette.subarray(0, 3 * count), lines }
 }

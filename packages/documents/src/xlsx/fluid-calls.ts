@@ -63,6 +63,7 @@ const shownIn = (cell: string, { factor, offset }: Unit): string => {
  */
 export class FluidCalls {
   readonly rows: CallRow[] = []
+  #values: Readonly<Record<string, number>> | undefined
   readonly #blocks = new Map<string, Block>()
   readonly #laws: ReadonlyMap<string, PropertyLaw>
   readonly #units: UnitSystem
@@ -139,9 +140,9 @@ export class FluidCalls {
   /** Value of an argument in display units. */
   #shown(tree: Tree): number {
     const { scope, sections } = this.#calculation
-    const values = Object.fromEntries(
+    this.#values ??= Object.fromEntries(
       sections.flatMap((section) => section.lines.map((line) => [line.symbol, line.value])),
     )
-    return compile(tree, functionsInUnits(scope.functions, this.#units))(values)
+    return compile(tree, functionsInUnits(scope.functions, this.#units))(this.#values)
   }
 }

@@ -102,6 +102,7 @@ class Blocks {
     putCell(first, { text: label })
     first.font = font(9)
     first.border = ROW_BORDERS
+    first.alignment = wrapped('left')
     numbers.forEach((number, index) => {
       const cell = this.sheet.getCell(row, 2 + index)
       if (number !== null) putCell(cell, { number, format: 'General' })

@@ -151,7 +151,7 @@ const Page = ({
       ) : null}
       {system && hasDrawing ? (
         <section id="pressures" tabIndex={-1} className="scroll-mt-4 break-inside-avoid outline-none">
-          <SectionHeading note={`${system.title} filled with ${system.fluid}, pump off`}>Pressures</SectionHeading>
+          <SectionHeading note={`${system.title} filled with ${system.fluid}`}>Pressures</SectionHeading>
           <div className="border-t-2 border-ink pt-3">
             <DrawingFigure
               draw={(look) => drawPressures(system, units, look, result.vessels)}
