@@ -130,7 +130,7 @@ it('what was chosen is saved, and what was kept for the choice goes', async () =
   await page.getByRole('button', { name: 'Save', exact: true }).click()
   await page.getByText(/^Saved .*, version 3$/u).waitFor()
   await page.getByText('from before the merge').waitFor({ state: 'detached' })
-  expect(await typedText(page)).toMatch(/^# settled\n/u)
+  expect(await typedText(page)).toContain('# settled')
 })
 
 it('a phone shows one text with the lines of the other between', async () => {

@@ -23,6 +23,7 @@ export const router = createBrowserRouter([
           { path: 'spec', lazy: () => import('./routes/spec.tsx') },
           { path: 'schedule', lazy: () => import('./routes/schedule.tsx') },
           { path: 'trace/:mark', lazy: () => import('./routes/trace.tsx') },
+          { path: 'compare', lazy: () => import('./routes/compare.tsx') },
           { path: 'basis', lazy: () => import('./routes/basis.tsx') },
           { path: 'redlines', lazy: () => import('./routes/redlines.tsx') },
           { path: 'issue', lazy: () => import('./routes/issue.tsx') },

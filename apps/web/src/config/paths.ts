@@ -8,6 +8,7 @@ export const paths = {
   spec: (number: string) => `${project(number)}/spec`,
   schedule: (number: string) => `${project(number)}/schedule`,
   trace: (number: string, mark: string) => `${project(number)}/trace/${encodeURIComponent(mark)}`,
+  compare: (number: string) => `${project(number)}/compare`,
   basis: (number: string) => `${project(number)}/basis`,
   redlines: (number: string) => `${project(number)}/redlines`,
   issue: (number: string) => `${project(number)}/issue`,

@@ -89,6 +89,15 @@ describe('changes in the same place', () => {
     expect(merge).toMatchObject({ ok: true, conflicts: [], text: change(HIGH, TITLE) })
   })
 
+  it('are taken one by one, and what I put back elsewhere stays as I want it', () => {
+    const mine = change(['high: 180 °F', 'high: 170 °F'])
+    const theirs = change(HIGH, TITLE)
+    const merge = mergeSpecs(baseSpec, mine, theirs, (path) =>
+      path === 'systems.HWS.temperatures.high' ? 'theirs' : 'mine',
+    )
+    expect(merge).toMatchObject({ ok: true, conflicts: [], text: change(HIGH) })
+  })
+
   it('are none where both did the same', () => {
     const { text, taken, conflicts } = merged(change(HIGH), change(HIGH, GONE))
     expect([taken.length, conflicts.length]).toEqual([1, 0])

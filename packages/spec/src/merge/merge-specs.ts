@@ -100,13 +100,14 @@ const put = (mine: string, difference: Difference, { base, theirs }: Sides): str
 
 /**
  * Three-way merge by path: my text keeps its comments and its spacing, and gets every change that they made since the base and
- * that does not touch a change of mine. `choose` decides a conflict; my text stands where it does not say `theirs`.
+ * that does not touch a change of mine. `choose` may say otherwise: my text stands where it does not say `theirs`.
  */
 export const mergeSpecs = (
   base: string,
   mine: string,
   theirs: string,
-  choose: (path: string) => 'mine' | 'theirs' = () => 'mine',
+  choose: (path: string, touchesMine: boolean) => 'mine' | 'theirs' = (_, touchesMine) =>
+    touchesMine ? 'mine' : 'theirs',
 ): Merge => {
   const trees = { base: parseSpec(base).tree, mine: parseSpec(mine).tree, theirs: parseSpec(theirs).tree }
   if (!trees.base) return { ok: false, unreadable: 'base' }
@@ -137,10 +138,11 @@ export const mergeSpecs = (
       mine: meets[0] ? valueOf(meets[0].difference.now) : valueOf(was),
       theirs: valueOf(now),
     }
-    const wanted = meets.length === 0 || choose(change.path) === 'theirs'
+    const wanted = choose(change.path, meets.length > 0) === 'theirs'
     const after = wanted ? put(text, difference, sides) : null
-    if (after === null) conflicts.push(change)
-    else {
+    if (after === null) {
+      if (wanted || meets.length > 0) conflicts.push(change)
+    } else {
       text = after
       taken.push(change)
     }

@@ -1,70 +1,65 @@
-import { revisionSegment, type Project, type Reference, type SpecDocument } from '@coldfill/contract'
+import type { Project, Reference, SpecDocument } from '@coldfill/contract'
 import { acceptFix, pathRange, readSpec, type Range } from '@coldfill/spec'
-import { useQuery, type UseQueryResult } from '@tanstack/react-query'
+import type { UseQueryResult } from '@tanstack/react-query'
 import { useCallback, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
 import { useNavigate } from 'react-router-dom'
 import { Failure } from '#components/failure.tsx'
 import { Sheet } from '#components/layouts/sheet.tsx'
 import { Band } from '#components/ui/band.tsx'
-import { Button } from '#components/ui/button.tsx'
 import { paths, withQuery } from '#config/paths.ts'
-import { resultsQuery } from '#features/results/api/results.ts'
+import { RevisionSwitch } from '#features/results/components/revision-switch.tsx'
 import { UnitsSwitch } from '#features/results/components/units-switch.tsx'
-import { CompareTexts } from '#features/spec/components/compare-texts.tsx'
-import { Outline } from '#features/spec/components/outline.tsx'
-import { SpecEditor, type SpecEditorHandle } from '#features/spec/components/spec-editor.tsx'
+import { otherText, type CompareWith } from '#features/spec/compare-with.ts'
+import { OutlineDrawer } from '#features/spec/components/outline-drawer.tsx'
 import { SpecBands } from '#features/spec/components/spec-bands.tsx'
+import { SpecEditor, type SpecEditorHandle } from '#features/spec/components/spec-editor.tsx'
 import { Tray } from '#features/spec/components/tray.tsx'
 import { computedValues } from '#features/spec/computed-values.ts'
 import { marginEntries } from '#features/spec/margin-lines.ts'
 import { mergeFindings } from '#features/spec/merge-findings.ts'
 import { keptWords, sizedWords } from '#features/spec/status-words.ts'
 import { useSettled } from '#features/spec/use-settled.ts'
-import { useSizing } from '#features/spec/use-sizing.ts'
 import { useSpecDraft } from '#features/spec/use-spec-draft.ts'
 import { messageOf } from '#lib/api-error.ts'
 import { clock } from '#lib/format.ts'
-import { revisionPhrase } from '#lib/words.ts'
 import { useAddress, useUnits } from '#lib/search-params.ts'
+import { revisionPhrase } from '#lib/words.ts'
+import { SpecActions } from './spec-actions.tsx'
+import { SpecCompare } from './spec-compare.tsx'
+import { useSpecResults } from './use-spec-results.ts'
 
 interface Props {
   readonly project: Project
   readonly user: string
   readonly document: SpecDocument
+  /** Which frozen revision this is; null for the working copy, or for what the server chooses. */
+  readonly rev: string | null
   readonly reference: UseQueryResult<Reference>
 }
 
 const NO_REASONS = {}
 const lineRange = (line: number): Range => ({ start: { line, character: 0 }, end: { line, character: 0 } })
 
-export const SpecSheet = ({ project, user, document, reference }: Props) => {
+export const SpecSheet = ({ project, user, document, rev, reference }: Props) => {
   const { number } = project
   const owner = useMemo(() => ({ user, project: number }), [user, number])
   const draft = useSpecDraft(document, owner)
   const { text, change, base, dirty } = draft
-  const readOnly = document.readOnly !== null
+  const locked = document.readOnly?.reason ?? null
+  const readOnly = locked !== null
   const { get } = useAddress()
   const navigate = useNavigate()
   const toTrace = useCallback((address: string) => void navigate(address), [navigate])
   const editor = useRef<SpecEditorHandle>(null)
+  const jumpTo = useCallback((range: Range) => editor.current?.jumpTo(range), [])
   const [line, setLine] = useState<number | null>(null)
-  const [compared, setCompared] = useState<{ readonly title: string; readonly text: string } | null>(null)
+  const [outline, setOutline] = useState(false)
 
-  // Sized as typed where this person may edit; else as the server has it.
-  const typed = useSizing(number, text, !readOnly)
-  const saved = useQuery({ ...resultsQuery(number, null), enabled: readOnly })
-  const newest = project.revisions[0]
-  const issued = useQuery({
-    ...resultsQuery(number, newest ? revisionSegment(newest.label) : null),
-    enabled: newest !== undefined && !readOnly,
-  })
-  const savedAnswer = useMemo(
-    () => (saved.data ? { result: saved.data.result, text: document.text, at: document.savedAt } : null),
-    [saved.data, document],
-  )
-  const latest = readOnly ? savedAnswer : typed.latest
-  const good = readOnly ? savedAnswer : typed.good
-  const stale = good === null || good.text !== text
+  const [wanted, setCompared] = useState<CompareWith | null>(null)
+  // What it stood beside may have gone: a draft that was thrown away, a conflict that is settled.
+  const compared = wanted !== null && otherText(wanted, draft) !== null ? wanted : null
+
+  const { latest, good, stale, error, issued, newest } = useSpecResults(project, document, rev, text)
   const { units, setUnits } = useUnits(good?.result.project.units)
 
   const settled = useSettled(text)
@@ -79,18 +74,22 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
   if (reading?.model && reading.model !== model) setModel(reading.model)
   const entries = useMemo(
     () =>
-      marginEntries(model, good?.result ?? null, issued.data?.result ?? null, units, (system, mark) =>
-        withQuery(paths.trace(number, mark), { system, units: units.toLowerCase() }),
+      marginEntries(model, good?.result ?? null, issued, units, (system, mark) =>
+        withQuery(paths.trace(number, mark), { system, rev, units: units.toLowerCase() }),
       ),
-    [model, good, issued.data, units, number],
+    [model, good, issued, units, number, rev],
   )
-
   const computed = useCallback((path: string) => computedValues(good?.result ?? null, path, units), [good, units])
+  const shown = useMemo(() => ({ findings, entries, stale, computed }), [findings, entries, stale, computed])
 
+  const save = async () => {
+    const outcome = await draft.save()
+    if (outcome === 'conflict') setCompared({ with: 'theirs' })
+  }
   const onKey = useEffectEvent((event: KeyboardEvent) => {
     if (event.key.toLowerCase() !== 's' || !(event.ctrlKey || event.metaKey)) return
     event.preventDefault()
-    if (!readOnly && dirty && !draft.saving) void draft.save()
+    if (!readOnly && dirty && !draft.saving) void save()
   })
   useEffect(() => {
     const listen = (event: KeyboardEvent) => onKey(event)
@@ -107,7 +106,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
     const range = wantedLine > 0 ? lineRange(wantedLine - 1) : wantedPath ? pathRange(settled, wantedPath) : null
     if (!range) return
     gone.current = true
-    setTimeout(() => editor.current?.jumpTo(range), 60)
+    setTimeout(() => jumpTo(range), 60)
   })
 
   const status = sizedWords({
@@ -115,7 +114,7 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
     goodText: good?.text ?? null,
     goodAt: good ? clock(good.at) : '',
     latestText: latest?.text ?? null,
-    failure: typed.error === null ? null : messageOf(typed.error),
+    failure: error === null ? null : messageOf(error),
   })
 
   return (
@@ -127,66 +126,73 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
           <span className="w-full text-cell text-pencil desk:w-auto" role="status">
             {keptWords({ ...draft, readOnly, savedAt: clock(base.savedAt), version: base.version })}
           </span>
-          <UnitsSwitch units={units} onChoose={setUnits} />
-          <Button
-            why={dirty ? null : 'Nothing differs from the saved text.'}
-            aria-pressed={compared !== null}
-            onClick={() => setCompared(compared ? null : { title: `Saved version ${base.version}`, text: base.text })}
-          >
-            Compare
-          </Button>
-          <Button why={readOnly ? document.readOnly?.reason : null} onClick={() => editor.current?.format()}>
-            Format
-          </Button>
-          <Button
-            look="main"
-            busy={draft.saving}
-            why={readOnly ? document.readOnly?.reason : dirty ? null : 'Everything is saved.'}
-            onClick={() => void draft.save()}
-          >
-            Save
-          </Button>
+          {/* A phone needs the room for the texts. */}
+          <span className={`flex flex-wrap gap-2 ${compared ? 'max-desk:hidden' : ''}`}>
+            {project.revisions.length > 0 ? <RevisionSwitch project={project} /> : null}
+            <UnitsSwitch units={units} onChoose={setUnits} />
+          </span>
+          <SpecActions
+            locked={locked}
+            dirty={dirty}
+            saving={draft.saving}
+            comparing={compared !== null}
+            outline={outline}
+            onOutline={() => setOutline(!outline)}
+            onCompare={() =>
+              setCompared(compared ? null : { with: (draft.conflict ?? draft.merged) ? 'theirs' : 'saved' })
+            }
+            onFormat={() => editor.current?.format()}
+            onSave={() => void save()}
+          />
         </>
       }
       bands={
         <>
-          {document.readOnly ? <Band title="Read only.">{document.readOnly.reason}</Band> : null}
+          {locked === null ? null : <Band title="Read only.">{locked}</Band>}
           <Failure error={draft.error} />
-          <SpecBands draft={draft} onCompare={setCompared} />
+          {readOnly ? null : <SpecBands draft={draft} compared={compared} onCompare={setCompared} />}
         </>
       }
     >
-      <div className="flex min-h-0 flex-1 border-t-2 border-ink">
-        <div className="hidden w-52 shrink-0 zones:block">
-          <Outline
-            text={settled}
-            findings={findings}
-            entries={entries}
-            stale={stale}
-            onJump={(range) => editor.current?.jumpTo(range)}
-          />
-        </div>
+      {compared ? (
+        <SpecCompare
+          project={project}
+          draft={draft}
+          compared={compared}
+          onCompare={setCompared}
+          readOnly={readOnly}
+          findings={findings}
+          good={good}
+          units={units}
+        />
+      ) : null}
+      {/* The editor stays while a comparison covers it, with its cursor, folds and history. */}
+      <div className={`min-h-0 flex-1 flex-col border-t-2 border-ink desk:flex-row ${compared ? 'hidden' : 'flex'}`}>
+        <OutlineDrawer
+          open={outline}
+          onClose={() => setOutline(false)}
+          text={settled}
+          findings={findings}
+          entries={entries}
+          stale={stale}
+          onJump={jumpTo}
+        />
         <div className="relative min-h-0 min-w-0 flex-1">
           <div className="absolute inset-0">
             <SpecEditor
               ref={editor}
-              text={text}
+              pushed={draft.pushed}
               onChange={change}
               readOnly={readOnly}
               vocabulary={vocabulary}
-              findings={findings}
-              entries={entries}
-              stale={stale}
-              computed={computed}
+              shown={shown}
               onLine={setLine}
               onTrace={toTrace}
             />
           </div>
         </div>
       </div>
-      {compared ? (
-        <CompareTexts left={compared} right={{ title: 'Text in the editor', text }} onClose={() => setCompared(null)} />
-      ) : (
+      {compared ? null : (
         <Tray
           text={settled}
           findings={findings}
@@ -198,11 +204,11 @@ export const SpecSheet = ({ project, user, document, reference }: Props) => {
           status={
             <>
               {status}
-              {newest && issued.data ? ` · △ differs from ${revisionPhrase(newest.label)}` : ''}
+              {newest && issued ? ` · △ differs from ${revisionPhrase(newest.label)}` : ''}
               <span className="hidden bench:inline"> · Esc, then Tab leaves the editor</span>
             </>
           }
-          onJump={(range) => editor.current?.jumpTo(range)}
+          onJump={jumpTo}
           onFix={(fix) => editor.current?.fix(fix)}
           onAccept={(finding, reason) => {
             const fix = acceptFix(text, finding, reason.replaceAll(/\s+/g, ' ').trim())

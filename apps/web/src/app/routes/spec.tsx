@@ -6,6 +6,7 @@ import { useProject } from '#features/projects/api/projects.ts'
 import { useSession } from '#features/session/api/session.ts'
 import { specQuery } from '#features/spec/api/spec.ts'
 import { queryClient } from '#lib/query-client.ts'
+import { useAddress } from '#lib/search-params.ts'
 import { useProjectNumber } from '#lib/route-params.ts'
 import { SpecSheet } from './spec-sheet.tsx'
 
@@ -18,15 +19,18 @@ export function Component() {
   const number = useProjectNumber()
   const project = useProject(number)
   const { user } = useSession()
-  const document = useQuery(specQuery(number))
+  const { get } = useAddress()
+  const rev = get('rev')
+  const document = useQuery(specQuery(number, rev))
   const reference = useQuery(referenceQuery)
   if (document.data) {
     return (
       <SpecSheet
-        key={`${user.id} ${number}`}
+        key={`${user.id} ${number} ${rev ?? ''}`}
         project={project}
         user={user.id}
         document={document.data}
+        rev={rev}
         reference={reference}
       />
     )

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { draftsOf, dropDraft, keepDraft } from './draft-store.ts'
+import { draftsOf, dropDraft, keepDraft, keepVersion, keptVersion } from './draft-store.ts'
 
 const shelf = (): Storage => {
   const kept = new Map<string, string>()
@@ -53,5 +53,27 @@ describe('drafts of a spec', () => {
       throw new Error('quota')
     }
     expect(keepDraft(store, owner, { slot: 'a', text: 'x', baseVersion: 1, at: '' })).toBe(false)
+  })
+
+  it('keeps the version that a draft was begun on for as long as a draft leans on it', () => {
+    const store = shelf()
+    const version = (number: number) => ({
+      text: `text ${number}`,
+      version: number,
+      savedAt: '2026-11-01T10:00:00Z',
+      savedBy: { id: 'u2', name: 'Ines Halloway', initials: 'IH' },
+    })
+    const at = '2026-11-01T10:00:00Z'
+    keepDraft(store, owner, { slot: 'a', text: 'mine', baseVersion: 4, at, part: 'before merging' })
+    keepVersion(store, owner, version(4))
+    keepDraft(store, owner, { slot: 'b', text: 'both', baseVersion: 5, at, part: 'merged', mergedFrom: 4 })
+    keepVersion(store, owner, version(5))
+    dropDraft(store, owner, 'a')
+    // The merge still needs what both sides were begun on.
+    expect(keptVersion(store, owner, 4)?.text).toBe('text 4')
+    expect(keptVersion(store, owner, 5)).toEqual(version(5))
+    dropDraft(store, owner, 'b')
+    expect(keptVersion(store, owner, 4)).toBeNull()
+    expect(store.length).toBe(0)
   })
 })

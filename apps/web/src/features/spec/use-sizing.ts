@@ -4,11 +4,18 @@ import { sizeText } from './api/spec.ts'
 
 const DELAY = 300
 
+/** Results with the text that they are of, and the ISO instant of the answer. */
+export interface SizedText {
+  readonly result: ProjectResult
+  readonly text: string
+  readonly at: string
+}
+
 export interface Sizing {
   /** The newest answer, whatever it says. */
-  readonly latest: { readonly result: ProjectResult; readonly text: string; readonly at: string } | null
+  readonly latest: SizedText | null
   /** The newest answer that has vessels: shown greyed while the text is being sized again or cannot be read. */
-  readonly good: { readonly result: ProjectResult; readonly text: string; readonly at: string } | null
+  readonly good: SizedText | null
   readonly error: unknown
 }
 

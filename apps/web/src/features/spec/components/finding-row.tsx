@@ -1,5 +1,4 @@
-import { changedLines } from '@coldfill/spec'
-import { useMemo, useState, type FormEvent } from 'react'
+import { useId, useRef, useState, type FormEvent } from 'react'
 import { Link } from 'react-router-dom'
 import { Button } from '#components/ui/button.tsx'
 import { TextField } from '#components/ui/field.tsx'
@@ -7,6 +6,7 @@ import { Prose } from '#components/ui/prose.tsx'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
 import { paths } from '#config/paths.ts'
 import type { Finding } from '#lib/sized-project.ts'
+import { FixPreview } from './fix-preview.tsx'
 
 interface Props {
   /** The text that the finding is about, to show what a fix would change. */
@@ -55,16 +55,14 @@ const Accept = ({
   )
 }
 
-/** The lines that a fix takes out and puts in, in words. */
-const changeWords = (text: string, fix: Finding['fixes'][number]): string =>
-  changedLines(text, fix.edits)
-    .flatMap(({ was, now }) => [...was.map((line) => `− ${line.trim()}`), ...now.map((line) => `+ ${line.trim()}`)])
-    .join('\n')
-
 /** A finding in words: what, why, how to mend it, and the way to its place. */
 export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix, onAccept }: Props) => {
   const [accepting, setAccepting] = useState(false)
-  const titles = useMemo(() => new Map(finding.fixes.map((fix) => [fix, changeWords(text, fix)])), [finding, text])
+  // A fix is known by its title: each reading of the text makes the fixes anew.
+  const [looked, setLooked] = useState<string | null>(null)
+  const shown = readOnly ? undefined : finding.fixes.find(({ title }) => title === looked)
+  const id = useId()
+  const buttons = useRef<HTMLDivElement>(null)
   return (
     <li className={`flex gap-2.5 border-b border-hair px-3 py-1.5 ${chosen ? 'bg-steel-wash' : ''}`}>
       <span className="pt-0.5">
@@ -98,10 +96,17 @@ export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix
           />
         ) : null}
         {readOnly || accepting || finding.accepted !== undefined ? null : (
-          <div className="flex flex-wrap gap-2 empty:hidden">
+          <div ref={buttons} className="flex flex-wrap gap-2 empty:hidden">
             {finding.fixes.map((fix) => (
-              <Button key={fix.title} small className="mt-1" title={titles.get(fix)} onClick={() => onFix(fix)}>
-                {fix.title}
+              <Button
+                key={fix.title}
+                small
+                className="mt-1"
+                aria-expanded={shown === fix}
+                aria-controls={shown === fix ? id : undefined}
+                onClick={() => setLooked(shown === fix ? null : fix.title)}
+              >
+                <Prose text={fix.title} />
               </Button>
             ))}
             {finding.severity === 'warning' ? (
@@ -111,6 +116,22 @@ export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix
             ) : null}
           </div>
         )}
+        {shown ? (
+          <FixPreview
+            key={shown.title}
+            id={id}
+            text={text}
+            fix={shown}
+            onMake={() => {
+              setLooked(null)
+              onFix(shown)
+            }}
+            onCancel={() => {
+              setLooked(null)
+              buttons.current?.querySelector<HTMLElement>('[aria-expanded=true]')?.focus()
+            }}
+          />
+        ) : null}
       </div>
       <Link
         to={paths.help(finding.code)}

@@ -1,43 +1,35 @@
 import { Band } from '#components/ui/band.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { plural } from '#lib/format.ts'
-import type { useSpecDraft } from '../use-spec-draft.ts'
+import type { SpecDraft } from '../use-spec-draft.ts'
 
-const Value = ({ title, text }: { readonly title: string; readonly text: string | null }) => (
-  <span className="min-w-0">
-    <span className="text-pencil">{title} </span>
-    <code className="font-mono break-words">{text ?? 'nothing'}</code>
-  </span>
-)
-
-/** What came of a merge by path: how much was taken, and each place that both changed, with both values until one is chosen. */
-export const MergeBand = ({ draft }: { readonly draft: ReturnType<typeof useSpecDraft> }) => {
+/** What came of a merge by path: how much was taken, and how much is left to choose. */
+export const MergeBand = ({
+  draft,
+  onCompare,
+}: {
+  readonly draft: SpecDraft
+  /** Null while both texts stand beside each other already. */
+  readonly onCompare: (() => void) | null
+}) => {
   const { merged } = draft
   if (!merged) return null
-  const { version, taken, conflicts } = merged
+  const { theirs, taken, conflicts } = merged
+  const left = conflicts.length
   return (
     <Band
-      tone={conflicts.length > 0 ? 'warning' : 'good'}
+      tone={left > 0 ? 'warning' : 'good'}
       live="status"
-      title={`Merged with version ${version}: ${plural(taken, 'change')} of theirs ${taken === 1 ? 'is' : 'are'} in the text.`}
-      actions={<Button onClick={draft.endMerge}>{conflicts.length > 0 ? 'Keep mine in the rest' : 'Done'}</Button>}
+      title={`Merged with version ${theirs.version}${taken === null ? '' : `: ${plural(taken, 'change')} of theirs ${taken === 1 ? 'is' : 'are'} in the text`}.`}
+      actions={
+        <>
+          {onCompare ? <Button onClick={onCompare}>Compare both</Button> : null}
+          <Button onClick={draft.endMerge}>{left > 0 ? 'Keep mine in the rest' : 'Done'}</Button>
+        </>
+      }
     >
-      {conflicts.length === 0 ? (
-        'Nothing was changed by both. Your text from before is kept on this device until you throw it away.'
-      ) : (
-        <ul>
-          {conflicts.map((conflict) => (
-            <li key={conflict.path} className="flex flex-wrap items-baseline gap-x-4 gap-y-1 py-0.5">
-              <code className="font-mono font-semibold break-words">{conflict.path}</code>
-              <Value title="yours" text={conflict.mine} />
-              <Value title="theirs" text={conflict.theirs} />
-              <Button small onClick={() => draft.takeTheirsAt(conflict.path)}>
-                Take theirs
-              </Button>
-            </li>
-          ))}
-        </ul>
-      )}
+      {left === 0 ? 'Nothing is left that both changed.' : `${plural(left, 'place')} changed by both: choose each.`}{' '}
+      <span className="max-desk:sr-only">Your text from before the merge is kept on this device until you save.</span>
     </Band>
   )
 }

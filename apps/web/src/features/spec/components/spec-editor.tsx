@@ -4,8 +4,8 @@ import { nextDiagnostic, previousDiagnostic } from '@codemirror/lint'
 import { openSearchPanel } from '@codemirror/search'
 import { EditorState, Prec, type Extension } from '@codemirror/state'
 import { EditorView, keymap, type ViewUpdate } from '@codemirror/view'
-import CodeMirror from '@uiw/react-codemirror'
-import { useCallback, useEffect, useImperativeHandle, useMemo, useState, type Ref } from 'react'
+import CodeMirror, { ExternalChange } from '@uiw/react-codemirror'
+import { useCallback, useEffect, useImperativeHandle, useMemo, useRef, useState, type Ref } from 'react'
 import type { Range, Vocabulary } from '@coldfill/spec'
 import type { Finding } from '#lib/sized-project.ts'
 import { actionMenu, knowFindings } from '../editor/action-menu.ts'
@@ -16,8 +16,10 @@ import { closePanel, helpPanel } from '../editor/help-panel.ts'
 import { languageHelp, showComputed, type Computed } from '../editor/language-help.ts'
 import { nameCommands } from '../editor/name-commands.ts'
 import { resultMargin, showResults } from '../editor/result-margin.ts'
+import { textDifference } from '../editor/text-difference.ts'
 import { editorTheme } from '../editor/theme.ts'
 import type { MarginEntry } from '../margin-lines.ts'
+import type { PushedText } from '../use-spec-draft.ts'
 
 export interface SpecEditorHandle {
   readonly jumpTo: (range: Range) => void
@@ -25,18 +27,23 @@ export interface SpecEditorHandle {
   readonly format: () => void
 }
 
-interface Props {
-  readonly ref: Ref<SpecEditorHandle>
-  readonly text: string
-  readonly onChange: (text: string) => void
-  readonly readOnly: boolean
-  /** Names that completion and hover know; until it is there they are silent. */
-  readonly vocabulary: Vocabulary | undefined
+/** What the language and the last sizing say about the text. */
+export interface ShownBesideText {
   readonly findings: readonly Finding[]
   readonly entries: readonly MarginEntry[]
   readonly stale: boolean
   /** What the last sizing made of a path; for the hover. */
   readonly computed: Computed
+}
+
+interface Props {
+  readonly ref: Ref<SpecEditorHandle>
+  readonly pushed: PushedText
+  readonly onChange: (text: string) => void
+  readonly readOnly: boolean
+  /** Names that completion and hover know; until it is there they are silent. */
+  readonly vocabulary: Vocabulary | undefined
+  readonly shown: ShownBesideText
   /** Zero-based line of the cursor. Must stay the same function. */
   readonly onLine: (line: number) => void
   /** Leads to the whole calculation of a vessel. Must stay the same function. */
@@ -69,19 +76,8 @@ const always: Extension = [
 ]
 
 /** The YAML editor of the spec: findings underlined and marked, results beside the lines. */
-export const SpecEditor = ({
-  ref,
-  text,
-  onChange,
-  readOnly,
-  vocabulary,
-  findings,
-  entries,
-  stale,
-  computed,
-  onLine,
-  onTrace,
-}: Props) => {
+export const SpecEditor = ({ ref, pushed, onChange, readOnly, vocabulary, shown, onLine, onTrace }: Props) => {
+  const { findings, entries, stale, computed } = shown
   const [view, setView] = useState<EditorView | null>(null)
   const jumpTo = useCallback(
     (range: Range) => {
@@ -119,6 +115,15 @@ export const SpecEditor = ({
     [onLine],
   )
 
+  const [first] = useState(pushed.text)
+  const known = useRef(pushed)
+  useEffect(() => {
+    if (known.current === pushed || !view) return
+    known.current = pushed
+    const was = view.state.doc.toString()
+    if (was !== pushed.text)
+      view.dispatch({ changes: textDifference(was, pushed.text), annotations: ExternalChange.of(true) })
+  }, [view, pushed])
   useEffect(() => {
     if (!view) return
     view.dispatch(showFindings(view.state, findings))
@@ -133,7 +138,7 @@ export const SpecEditor = ({
 
   return (
     <CodeMirror
-      value={text}
+      value={first}
       onChange={onChange}
       onUpdate={onUpdate}
       onCreateEditor={setView}

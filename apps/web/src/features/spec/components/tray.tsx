@@ -5,6 +5,7 @@ import { SeverityMark } from '#components/ui/severity-mark.tsx'
 import type { Finding } from '#lib/sized-project.ts'
 import type { MarginEntry } from '../margin-lines.ts'
 import { FindingRow } from './finding-row.tsx'
+import { TrayTabs } from './tray-tabs.tsx'
 
 interface Props {
   readonly text: string
@@ -47,100 +48,78 @@ export const Tray = ({
     { id: 'results' as const, label: `Results ${entries.length}` },
   ]
   return (
-    <section
-      aria-label="Findings and results"
-      className={`flex min-h-0 shrink-0 flex-col border-t-2 border-ink bg-sheet ${tab === null ? '' : 'h-[32%] max-h-72 min-h-40'}`}
-    >
-      <div className="flex min-h-9 shrink-0 flex-wrap items-center gap-x-1 border-b border-hair pr-3 pl-1">
-        <div role="tablist" aria-label="Under the editor" className="flex">
-          {tabs.map(({ id, label }) => (
-            <button
-              key={id}
-              type="button"
-              role="tab"
-              id={`tab-${id}`}
-              aria-selected={tab === id}
-              aria-controls="tray-panel"
-              onClick={() => setTab(tab === id ? null : id)}
-              className={`h-9 px-3 ${tab === id ? 'border-b-[3px] border-b-steel font-semibold' : 'text-pencil hover:text-ink'}`}
-            >
-              {label}
-            </button>
-          ))}
-        </div>
-        <p className="flex items-center gap-2 text-cell" aria-live="polite">
-          {counted(findings)
-            .filter(({ count }) => count > 0)
-            .map(({ severity, count }) => (
-              <span key={severity} className="inline-flex items-center gap-1">
-                <SeverityMark severity={severity} />
-                <span className="figures">{count}</span>
-              </span>
-            ))}
-        </p>
-        <p className="ml-auto py-1 text-cell text-pencil">{status}</p>
-      </div>
-      {tab === null ? null : (
-        <div
-          id="tray-panel"
-          role="tabpanel"
-          aria-labelledby={`tab-${tab}`}
-          tabIndex={0}
-          className="min-h-0 flex-1 overflow-y-auto outline-offset-[-3px]"
-        >
-          {tab === 'findings' ? (
-            findings.length === 0 ? (
-              <p className="px-3 py-2 text-pencil">No finding.</p>
-            ) : (
-              <ul>
-                {findings.map((finding) => (
-                  <FindingRow
-                    key={`${finding.code} ${finding.path} ${finding.range.start.line} ${finding.range.start.character} ${finding.message}`}
-                    text={text}
-                    finding={finding}
-                    why={reasons[finding.code]?.why}
-                    readOnly={readOnly}
-                    chosen={finding.range.start.line === line}
-                    onJump={() => onJump(finding.range)}
-                    onFix={onFix}
-                    onAccept={(reason) => onAccept(finding, reason)}
-                  />
-                ))}
-              </ul>
-            )
-          ) : (
-            <ul aria-busy={stale} className={stale ? 'opacity-60' : ''}>
-              {entries.map((entry) => (
-                <li key={entry.mark} className="flex flex-wrap items-baseline gap-x-4 border-b border-hair px-3 py-1.5">
-                  <button
-                    type="button"
-                    className="w-24 text-left font-mono hover:underline"
-                    onClick={() =>
-                      onJump({ start: { line: entry.line, character: 0 }, end: { line: entry.line, character: 0 } })
-                    }
-                  >
-                    {entry.mark}
-                  </button>
-                  <strong className={`figures font-mono font-semibold ${entry.sized ? '' : 'text-fault'}`}>
-                    {entry.size}
-                  </strong>
-                  {entry.was === null ? null : (
-                    <span className="text-cell text-pencil">
-                      <del>{entry.was}</del> in the last issue
-                    </span>
-                  )}
-                  <span className="figures text-cell text-pencil">{entry.details.join(' · ')}</span>
-                  {entry.trace === null ? null : (
-                    <Link to={entry.trace} className="text-cell" aria-label={`Trace of ${entry.mark}, as saved`}>
-                      Trace
-                    </Link>
-                  )}
-                </li>
+    <TrayTabs
+      label="Findings and results"
+      tabs={tabs}
+      open={tab}
+      onOpen={setTab}
+      beside={
+        <>
+          <p className="flex items-center gap-2 text-cell" aria-live="polite">
+            {counted(findings)
+              .filter(({ count }) => count > 0)
+              .map(({ severity, count }) => (
+                <span key={severity} className="inline-flex items-center gap-1">
+                  <SeverityMark severity={severity} />
+                  <span className="figures">{count}</span>
+                </span>
               ))}
-            </ul>
-          )}
-        </div>
+          </p>
+          <p className="ml-auto py-1 text-cell text-pencil">{status}</p>
+        </>
+      }
+    >
+      {tab === 'findings' ? (
+        findings.length === 0 ? (
+          <p className="px-3 py-2 text-pencil">No finding.</p>
+        ) : (
+          <ul>
+            {findings.map((finding) => (
+              <FindingRow
+                key={`${finding.code} ${finding.path} ${finding.range.start.line} ${finding.range.start.character} ${finding.message}`}
+                text={text}
+                finding={finding}
+                why={reasons[finding.code]?.why}
+                readOnly={readOnly}
+                chosen={finding.range.start.line === line}
+                onJump={() => onJump(finding.range)}
+                onFix={onFix}
+                onAccept={(reason) => onAccept(finding, reason)}
+              />
+            ))}
+          </ul>
+        )
+      ) : (
+        <ul aria-busy={stale} className={stale ? 'opacity-60' : ''}>
+          {entries.map((entry) => (
+            <li key={entry.mark} className="flex flex-wrap items-baseline gap-x-4 border-b border-hair px-3 py-1.5">
+              <button
+                type="button"
+                className="w-24 text-left font-mono hover:underline"
+                onClick={() =>
+                  onJump({ start: { line: entry.line, character: 0 }, end: { line: entry.line, character: 0 } })
+                }
+              >
+                {entry.mark}
+              </button>
+              <strong className={`figures font-mono font-semibold ${entry.sized ? '' : 'text-fault'}`}>
+                {entry.size}
+              </strong>
+              {entry.was === null ? null : (
+                <span className="text-cell text-pencil">
+                  <del>{entry.was}</del> in the last issue
+                </span>
+              )}
+              <span className="figures text-cell text-pencil">{entry.details.join(' · ')}</span>
+              {entry.trace === null ? null : (
+                <Link to={entry.trace} className="text-cell" aria-label={`Trace of ${entry.mark}, as saved`}>
+                  Trace
+                </Link>
+              )}
+            </li>
+          ))}
+        </ul>
       )}
-    </section>
+    </TrayTabs>
   )
 }
