@@ -87,7 +87,10 @@ const ANSWERS: readonly (readonly [key: string, words: string])[] = [
 /** The result in one sentence, in the digits of the schedule. */
 const answer = (vessel: Vessel, { shown }: SubmittalContext): string => {
   if (vessel.status !== 'sized') return `${statusWords[vessel.status]}. ${sentenceCase(vessel.reason ?? '')}`
-  const parts = ANSWERS.filter(([key]) => vessel.results[key]).map(([key, words]) => `${words} ${shown(vessel, key)}`)
+  const usual = ANSWERS.filter(([key]) => vessel.results[key])
+  // A vessel without a volume, as a separator, is said by what its method gives.
+  const given = Object.entries(vessel.results).map(([key, { name }]) => [key, name] as const)
+  const parts = (usual.length > 0 ? usual : given).map(([key, words]) => `${words} ${shown(vessel, key)}`)
   return `${vessel.mark}: ${parts.join(', ')}.`
 }
 

@@ -1,9 +1,10 @@
 import { water } from '@coldfill/engine'
+import { sizeSpec } from '@coldfill/sizing'
 import { strFromU8, unzipSync } from 'fflate'
 import { beforeAll, describe, expect, it } from 'vitest'
 import { lineWidth } from '../docx/letter-widths.ts'
 import { headerText, scheduleKinds, scheduleTable } from '@coldfill/presentation'
-import { clinicProject, documentOptions, reviewedOptions, si } from '../testing/index.ts'
+import { clinicProject, documentOptions, everyVessel, reviewedOptions, si } from '../testing/index.ts'
 import { cautions } from '../words/cautions.ts'
 import { writeSubmittal } from './write-submittal.ts'
 
@@ -80,6 +81,17 @@ describe('the submittal', () => {
     const style = (id: string) => all(styles, 'style').find((xml) => xml.includes(`w:styleId="${id}"`)) ?? ''
     for (const id of ['Figure', 'Caption']) expect(style(id)).toContain('<w:keepNext/>')
     expect(style('FigureCaption')).toContain('<w:keepNext w:val="0"/>')
+  })
+
+  it('says the answer of every vessel, also of one without a volume', async () => {
+    const every = sizeSpec(everyVessel)
+    const written = partsOf(await writeSubmittal(every, documentOptions('US'))).get('word/document.xml') ?? ''
+    const answers = paragraphs(written, 'CalculationAnswer')
+    expect(answers).toHaveLength(every.vessels.length)
+    for (const { mark } of every.vessels)
+      expect(answers.some((answer) => new RegExp(`^${mark}: [a-z].* \\d`).test(answer))).toBe(true)
+    // ASHRAE practice of 10 ft/s: a flash tank has a diameter and no volume.
+    expect(answers.find((answer) => answer.startsWith('FT-1: '))).toMatch(/least diameter [\d.]+ in/)
   })
 
   it('has no page numbers in its lists unless somebody says them', () => {
