@@ -15,6 +15,7 @@ it('fills in what a short redline leaves out', () => {
     quoted: '',
     text: 'Why?',
     mustAnswer: false,
+    officeOnly: false,
     proposedValue: null,
   })
 })

@@ -1,5 +1,13 @@
 import { describe, expect, it } from 'vitest'
-import { ReviewRequest, revisionLabel, revisionSegment, revisionTitle, WithdrawRequest } from './revisions.ts'
+import {
+  IssueForConstructionRequest,
+  IssueForReviewRequest,
+  ReviewRequest,
+  revisionLabel,
+  revisionSegment,
+  revisionTitle,
+  WithdrawRequest,
+} from './revisions.ts'
 
 describe('a review', () => {
   const review = (outcome: string, reason?: string) =>
@@ -24,4 +32,10 @@ it('writes the first issue as - in addresses and reads it back', () => {
   for (const label of ['', 'A', 'AA']) expect(revisionLabel(revisionSegment(label))).toBe(label)
   expect(revisionSegment('')).toBe('-')
   expect([revisionTitle(''), revisionTitle('B')]).toEqual(['First issue', 'Rev B'])
+})
+
+it('leaves the contents that were not chosen to the server, and refuses others', () => {
+  expect(IssueForReviewRequest.parse({ purpose: 'review' })).toEqual({ purpose: 'review', note: '', contents: {} })
+  expect(IssueForConstructionRequest.parse({ contents: { units: 'SI' } })).toEqual({ contents: { units: 'SI' } })
+  expect(IssueForConstructionRequest.safeParse({ contents: { drawings: true } }).success).toBe(false)
 })
