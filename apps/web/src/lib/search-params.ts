@@ -26,6 +26,12 @@ export const useAddress = () => {
   return { get: (key: string) => search.get(key), change }
 }
 
+/** What a link from one sheet to another keeps: the content that is looked at, and the units. */
+export const useKept = () => {
+  const { get } = useAddress()
+  return { rev: get('rev'), units: get('units') }
+}
+
 export type UnitChoice = 'project' | UnitSystem
 const KEY = 'coldfill.units'
 const stored = (): UnitChoice => {

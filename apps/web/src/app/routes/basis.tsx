@@ -22,12 +22,13 @@ import { ContentBand } from '#features/results/components/content-band.tsx'
 import { RevisionSwitch } from '#features/results/components/revision-switch.tsx'
 import { capital } from '#lib/format.ts'
 import { useProjectNumber } from '#lib/route-params.ts'
-import { useAddress } from '#lib/search-params.ts'
+import { useAddress, useKept } from '#lib/search-params.ts'
 
 export function Component() {
   const number = useProjectNumber()
   const project = useProject(number)
   const { get, change } = useAddress()
+  const kept = useKept()
   const rev = get('rev')
   const results = useQuery(resultsQuery(number, rev))
   const redlines = useQuery({ ...redlinesQuery(number, rev), enabled: project.sheets.includes('redlines') })
@@ -75,7 +76,10 @@ export function Component() {
                 {project.sheets.includes('spec') ? (
                   <p className="text-cell">
                     {chosen.overridden ? 'Set at ' : 'Replaced by writing '}
-                    <Link className="font-mono break-words" to={withQuery(paths.spec(number), { path: chosen.path })}>
+                    <Link
+                      className="font-mono break-words"
+                      to={withQuery(paths.spec(number), { ...kept, path: chosen.path })}
+                    >
                       {chosen.path}
                     </Link>
                   </p>

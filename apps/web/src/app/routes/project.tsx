@@ -69,7 +69,8 @@ export function Component() {
     ({ sheet }) =>
       pathname === paths[sheet](number) ||
       pathname.startsWith(`${paths[sheet](number)}/`) ||
-      // The trace of a vessel belongs to its schedule.
+      // A comparison belongs to the spec, and the trace of a vessel to its schedule.
+      (sheet === 'spec' && pathname === paths.compare(number)) ||
       (sheet === 'schedule' && pathname.startsWith(paths.trace(number, ''))),
   )
 

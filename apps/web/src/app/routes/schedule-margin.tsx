@@ -9,6 +9,7 @@ import { placeOf } from '#features/redlines/filters.ts'
 import { TracePanel } from '#features/schedule/components/trace-panel.tsx'
 import { shownValue } from '#features/schedule/drawn-step.ts'
 import type { Row } from '#features/schedule/schedule-table.ts'
+import { useKept } from '#lib/search-params.ts'
 
 interface Props {
   readonly project: Project
@@ -124,6 +125,7 @@ const WithoutTrace = ({
   readonly heading: string
   readonly project: Project
 }) => {
+  const kept = useKept()
   const { vessel } = row
   const text = row.cells[column]?.text
   return (
@@ -151,7 +153,9 @@ const WithoutTrace = ({
         </p>
       ) : null}
       {project.sheets.includes('spec') ? (
-        <Link to={withQuery(paths.spec(project.number), { path: vessel.path })}>Go to {vessel.mark} in the spec</Link>
+        <Link to={withQuery(paths.spec(project.number), { ...kept, path: vessel.path })}>
+          Go to {vessel.mark} in the spec
+        </Link>
       ) : null}
     </div>
   )

@@ -20,7 +20,7 @@ import { HeadroomTable } from '#features/schedule/components/headroom-table.tsx'
 import { WholeTrace } from '#features/schedule/components/whole-trace.tsx'
 import { capital } from '#lib/format.ts'
 import { requireParam, useProjectNumber } from '#lib/route-params.ts'
-import { useAddress, useUnits } from '#lib/search-params.ts'
+import { useAddress, useKept, useUnits } from '#lib/search-params.ts'
 import type { Vessel } from '#lib/sized-project.ts'
 
 /** Results at the head of the page, where the vessel has them. */
@@ -72,7 +72,7 @@ const Page = ({
     }),
     [project.number, result, units, vessel, hasSpec],
   )
-  const { get } = useAddress()
+  const kept = useKept()
   const { hash } = useLocation()
   useEffect(() => {
     const target = hash === '' ? null : document.getElementById(decodeURIComponent(hash.slice(1)))
@@ -108,11 +108,11 @@ const Page = ({
             </a>
           ))}
           {hasSpec ? (
-            <Link to={withQuery(paths.spec(project.number), { path: vessel.path })}>{vessel.mark} in the spec</Link>
+            <Link to={withQuery(paths.spec(project.number), { ...kept, path: vessel.path })}>
+              {vessel.mark} in the spec
+            </Link>
           ) : null}
-          <Link
-            to={withQuery(paths.schedule(project.number), { row: vessel.mark, rev: get('rev'), units: get('units') })}
-          >
+          <Link to={withQuery(paths.schedule(project.number), { ...kept, row: vessel.mark })}>
             {vessel.mark} in the schedule
           </Link>
         </nav>
@@ -175,7 +175,7 @@ const VesselPicker = ({
   readonly number: string
 }) => {
   const navigate = useNavigate()
-  const { get } = useAddress()
+  const kept = useKept()
   if (vessels.length < 2) return null
   return (
     <label className="inline-flex items-center gap-2 text-cell print:hidden">
@@ -184,7 +184,6 @@ const VesselPicker = ({
         value={chosen?.path ?? ''}
         onChange={(event) => {
           const to = vessels.find((vessel) => vessel.path === event.target.value)
-          const kept = { rev: get('rev'), units: get('units') }
           if (to) void navigate(withQuery(paths.trace(number, to.mark), { ...kept, system: to.system }))
         }}
         className="h-8 max-w-48 border border-rule bg-sheet px-1.5 text-ink"
@@ -205,6 +204,7 @@ export function Component() {
   const mark = requireParam(useParams(), 'mark')
   const project = useProject(number)
   const { get } = useAddress()
+  const kept = useKept()
   const results = useQuery(resultsQuery(number, get('rev')))
   const { units, setUnits } = useUnits(results.data?.result.project.units)
   const vessels = results.data?.result.vessels ?? []
@@ -230,7 +230,7 @@ export function Component() {
             <div className="border-t-[3px] border-ink pt-3 text-read">
               <p>There is no {mark} in this content.</p>
               <p className="mt-2">
-                <Link to={paths.schedule(number)}>Go to the schedule</Link>
+                <Link to={withQuery(paths.schedule(number), kept)}>Go to the schedule</Link>
               </p>
             </div>
           )

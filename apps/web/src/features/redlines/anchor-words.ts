@@ -18,7 +18,7 @@ export const anchorLink = (project: string, anchor: Anchor, rev: string | null):
   if (anchor.type === 'cell') return withQuery(paths.schedule(project), { rev, row: anchor.mark, col: anchor.column })
   return anchor.type === 'assumption'
     ? withQuery(paths.basis(project), { rev, assumption: anchor.assumption })
-    : withQuery(paths.spec(project), { path: anchor.path })
+    : withQuery(paths.spec(project), { rev, path: anchor.path })
 }
 
 export const anchorStateWords: Readonly<Record<AnchorState, { readonly word: string; readonly says: string }>> = {

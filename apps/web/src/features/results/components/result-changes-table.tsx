@@ -36,6 +36,7 @@ export const ResultChangesTable = ({ changes, was, now, traceOf }: Props) =>
       }
     >
       {changes.map((change) => {
+        const nowrap = change.moved === null ? '' : 'whitespace-nowrap'
         const to = traceOf?.(change.system, change.mark) ?? null
         return (
           <tr key={`${change.system}/${change.mark} ${change.key}`}>
@@ -44,8 +45,10 @@ export const ResultChangesTable = ({ changes, was, now, traceOf }: Props) =>
               <span className="ml-2 font-sans font-normal text-pencil">{change.system}</span>
             </RowHead>
             <Cell>{capital(change.name)}</Cell>
-            <Cell figures>{change.was ?? '–'}</Cell>
-            <Cell figures>
+            <Cell figures className={nowrap}>
+              {change.was ?? '–'}
+            </Cell>
+            <Cell figures className={nowrap}>
               <strong className="font-semibold">{change.now ?? '–'}</strong>
             </Cell>
             <Cell figures className="whitespace-nowrap">

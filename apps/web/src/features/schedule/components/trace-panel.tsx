@@ -5,6 +5,7 @@ import { Link } from 'react-router-dom'
 import { Formula } from '#components/ui/math.tsx'
 import { paths, withQuery } from '#config/paths.ts'
 import { capital, plural } from '#lib/format.ts'
+import { useKept } from '#lib/search-params.ts'
 import { citationWords, type TraceEntry, type TraceInput, type TraceStep, type Vessel } from '#lib/sized-project.ts'
 import { drawnSymbol, drawStep, shownValue } from '../drawn-step.ts'
 import { operands, upstream } from '../upstream.ts'
@@ -20,20 +21,21 @@ export interface TraceContext {
 
 /** Where an input comes from, as a link where there is a place to go. */
 const Source = ({ input, context }: { readonly input: TraceInput; readonly context: TraceContext }) => {
+  const kept = useKept()
   const { origin } = input
   if (origin.from === 'catalogue') return 'chosen vessel'
   if (origin.from === 'table') return citationWords(origin.citation, context.result.sources)
   if (origin.from === 'assumption') {
     const used = context.result.assumptions.find((assumption) => assumption.id === origin.id)
     return (
-      <Link to={withQuery(paths.basis(context.project), { assumption: origin.id })}>
+      <Link to={withQuery(paths.basis(context.project), { ...kept, assumption: origin.id })}>
         {`assumption ${used?.number ?? origin.id}`}
       </Link>
     )
   }
   const words = input.authored ? `spec: ${input.authored}` : 'spec'
   return context.hasSpec ? (
-    <Link to={withQuery(paths.spec(context.project), { path: origin.path })}>{words}</Link>
+    <Link to={withQuery(paths.spec(context.project), { ...kept, path: origin.path })}>{words}</Link>
   ) : (
     words
   )

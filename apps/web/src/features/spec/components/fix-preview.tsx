@@ -23,6 +23,8 @@ export const FixPreview = ({ id, text, fix, onMake, onCancel }: Props) => {
       ]),
     [text, fix],
   )
+  // What all lines are indented by says nothing here.
+  const inset = Math.min(...lines.map((line) => (line.text.trim() === '' ? Infinity : line.text.search(/\S/u))))
   const rest = lines.length - MOST_SHOWN
   return (
     <div
@@ -44,7 +46,9 @@ export const FixPreview = ({ id, text, fix, onMake, onCancel }: Props) => {
               {line.sign}
             </span>
             <span className="sr-only">{line.sign === '−' ? 'was' : 'now'}</span>
-            <span className="min-w-0 break-words whitespace-pre-wrap">{line.text}</span>
+            <span className="min-w-0 break-words whitespace-pre-wrap">
+              {Number.isFinite(inset) ? line.text.slice(inset) : line.text}
+            </span>
           </li>
         ))}
         {rest > 0 ? <li className="px-1 text-pencil">and {rest} more lines</li> : null}
