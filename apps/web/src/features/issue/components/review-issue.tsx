@@ -50,7 +50,7 @@ export const ReviewIssue = ({ project }: { readonly project: Project }) => {
           of="files for review"
           contents={contents}
           onChange={setContents}
-          hint="Issued files keep what was chosen. Pending redlines are never among them."
+          hint="Issued files keep what was chosen. Pending redlines and those for the office only are never in them."
         />
         <div>
           <Button type="submit" look="main" busy={busy} why={why} showWhy>

@@ -52,7 +52,7 @@ export const ReviewCopy = ({ project, label }: { readonly project: string; reado
     <div className="flex flex-col gap-2">
       <p className="max-w-[80ch] text-pencil">
         The submittal of {revisionPhrase(label)} as a document, each redline a comment at its row with its answers
-        below. Pending redlines are left out.
+        below. Pending redlines and those for the office only are left out.
       </p>
       {copy === null ? <div>{button('Prepare a review copy')}</div> : null}
       {copy?.state === 'preparing' ? (
