@@ -41,15 +41,18 @@ const indexed = (rgba: Uint8Array, width: number, height: number, bits: number):
   const lines = new Uint8Array((width + 1) * height)
   const cut = 8 - bits
   let count = 0
+  // Whole pixels, to be told apart in one look.
+  const whole = new Uint32Array(rgba.slice().buffer)
   let [before, place] = [-1, 0]
-  for (let y = 0, at = 0; y < height; y += 1) {
+  for (let y = 0, pixel = 0; y < height; y += 1) {
     const line = y * (width + 1) + 1
-    for (let x = 0; x < width; x += 1, at += 4) {
-      const [r, g, b] = [rgba[at] ?? 0, rgba[at + 1] ?? 0, rgba[at + 2] ?? 0]
-      const key = ((r >> cut) << (2 * bits)) | ((g >> cut) << bits) | (b >> cut)
+    for (let x = 0; x < width; x += 1, pixel += 1) {
+      const colour = whole[pixel] ?? 0
       // A drawing is mostly ground: a pixel is like the one before it.
-      if (key !== before) {
-        before = key
+      if (colour !== before) {
+        before = colour
+        const [r, g, b] = [rgba[4 * pixel] ?? 0, rgba[4 * pixel + 1] ?? 0, rgba[4 * pixel + 2] ?? 0]
+        const key = ((r >> cut) << (2 * bits)) | ((g >> cut) << bits) | (b >> cut)
         place = places[key] ?? -1
         if (place < 0) {
           if (count === COLOURS) return null
@@ -79,7 +82,7 @@ export const indexedPng = (rgba: Uint8Array, width: number, height: number): Uin
     Uint8Array.from(SIGNATURE),
     chunk('IHDR', head),
     chunk('PLTE', found.palette),
-    chunk('IDAT', zlibSync(found.lines, { level: 5 })),
+    chunk('IDAT', zlibSync(found.lines, { level: 2 })),
     chunk('IEND', new Uint8Array()),
   ]
   const whole = new Uint8Array(parts.reduce((sum, part) => sum + part.length, 0))
