@@ -55,7 +55,7 @@ export const chosenVessel = (vessel: Vessel, { options, captions, width }: Submi
       layoutSymbol(row.symbol),
       sentenceCase(row.name),
       `${numberText(Number(value.toPrecision(DIGITS)))} ${unit}`.trimEnd(),
-      `${change > 0 ? '+' : ''}${numberText(Number(change.toPrecision(3)))} ${volume} a ${unit || 'unit'}`,
+      `${change > 0 ? '+' : ''}${numberText(Number(change.toPrecision(3))).replace(/^-/, '−')} ${volume} a ${unit || 'unit'}`,
       ...(chosen ? [limit === null ? 'any' : `${limitText(limit, value, row.kind)} ${unit}`.trimEnd()] : []),
     ]
   })

@@ -100,6 +100,17 @@ describe('the drawing of pressure against height', () => {
     expect(drawPressures({ ...heating, pressures: [] }, 'US', ON_PAPER)).toBeNull()
   })
 
+  it('keeps the names of the lines clear of the line of the relief valve', () => {
+    const [low, top] = heating.pressures
+    if (!low || !top) throw new Error('the system has two points')
+    // Hot at the top half a psi below the set pressure: the two would stand on each other.
+    const drawn = drawPressures({ ...heating, pressures: [low, { ...top, hot: 49.5 * PSI }] }, 'US', ON_PAPER)
+    const hot = drawn?.shapes.find(({ text }) => text === 'Hot')
+    const relief = drawn?.shapes.find(({ attributes }) => attributes['strokeDasharray'] === '12 4 2 4')
+    const right = Number(hot?.attributes['x']) + wordsWidth('Hot') / 2
+    expect(right).toBeLessThan(Number(relief?.attributes['x1']))
+  })
+
   it('marks the atmosphere where a gauge reads below it, and nowhere else', () => {
     const [low, top] = heating.pressures
     if (!low || !top) throw new Error('the system has two points')

@@ -46,6 +46,15 @@ interface Field {
   readonly up: Pick<Scale, 'at'>
   /** False where everything stands at one height, and there is no axis for it. */
   readonly tall: boolean
+  /** Place of the line of the relief valve, null where there is none. */
+  readonly relief: number | null
+}
+
+/** Middle of a name over a line, moved where the line of the relief valve would run through it. */
+const clearOf = (relief: number | null, x: number, name: string): number => {
+  const room = wordsWidth(name) / 2 + 6
+  if (relief === null || Math.abs(relief - x) >= room) return x
+  return x <= relief ? relief - room : relief + room
 }
 
 /**
@@ -71,10 +80,11 @@ const reading = (
 const lineOf = (
   which: 'cold' | 'hot',
   points: readonly Point[],
-  { frame, across, up, tall }: Field,
+  { frame, across, up, tall, relief }: Field,
   { palette }: DrawingLook,
 ): Shape[] => {
   const colour = which === 'cold' ? palette.steel : palette.ink
+  const name = which === 'cold' ? 'Cold' : 'Hot'
   const place = (point: Point) => [across.at(point[which]), up.at(point.height)] as const
   const top = points.at(-1)
   return [
@@ -98,7 +108,7 @@ const lineOf = (
     }),
     ...(top
       ? [
-          text(across.at(top[which]), up.at(top.height) - 12, which === 'cold' ? 'Cold' : 'Hot', {
+          text(clearOf(relief, across.at(top[which]), name), up.at(top.height) - 12, name, {
             textAnchor: 'middle',
             fill: colour,
             fontWeight: 600,
@@ -112,7 +122,7 @@ const lineOf = (
 /** The side of the pump that moves, while it runs: a fine line, read at its ends. */
 const runningLine = (
   points: readonly Point[],
-  { across, up, tall, frame }: Field,
+  { across, up, tall, frame, relief }: Field,
   { palette }: DrawingLook,
 ): Shape[] => {
   const placed = points.flatMap(({ running, height }) =>
@@ -138,7 +148,7 @@ const runningLine = (
       const isLeft = tall && last !== first && y === last.y && x - 11 - wordsWidth(words) >= frame.left
       return [dot(x, y, palette.pencil, true, palette), reading(x, y, words, isLeft, tall, palette.pencil, palette)]
     }),
-    text(last.x, last.y - 12, 'Pump on', {
+    text(clearOf(relief, last.x, 'Pump on'), last.y - 12, 'Pump on', {
       textAnchor: 'middle',
       fill: palette.pencil,
       fontWeight: 600,
@@ -205,7 +215,7 @@ export const drawPressures = (
   const up = tall
     ? scaleOver(heights, frame.bottom - 24, frame.top + 26, 6)
     : { ...scaleOver([-1, 1], frame.bottom, frame.top, 2), ticks: [] }
-  const field: Field = { frame, across, up, tall }
+  const field: Field = { frame, across, up, tall, relief: relief ? across.at(relief.set) : null }
 
   const way = (key: 'cold' | 'hot' | 'running') =>
     points.map((point) => `${said(point[key] ?? 0)} ${unit} at ${point.label}`).join(', ')
