@@ -65,7 +65,10 @@ const contentXml = (content: CellContent, where: string): { type: string; inside
     return { type: '', inside: `<v>${content.number}</v>` }
   }
   if (content.text === '') return { type: '', inside: '' }
-  return { type: ' t="inlineStr"', inside: `<is><t xml:space="preserve">${escaped(cellText(content.text))}</t></is>` }
+  const words = cellText(content.text)
+  // Only blanks at the ends, or more than one of them, need the mark: it is a tenth of a sheet.
+  const space = /^\s|\s$|\s\s|[\n\t]/.test(words) ? ' xml:space="preserve"' : ''
+  return { type: ' t="inlineStr"', inside: `<is><t${space}>${escaped(words)}</t></is>` }
 }
 
 const LETTERS = 'ABCDEFGHIJKLMNOPQRSTUVWXYZ'
