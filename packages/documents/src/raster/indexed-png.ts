@@ -42,7 +42,8 @@ const indexed = (rgba: Uint8Array, width: number, height: number, bits: number):
   const cut = 8 - bits
   let count = 0
   // Whole pixels, to be told apart in one look.
-  const whole = new Uint32Array(rgba.slice().buffer)
+  const aligned = rgba.byteOffset % 4 === 0 ? rgba : rgba.slice()
+  const whole = new Uint32Array(aligned.buffer, aligned.byteOffset, width * height)
   let [before, place] = [-1, 0]
   for (let y = 0, pixel = 0; y < height; y += 1) {
     const line = y * (width + 1) + 1

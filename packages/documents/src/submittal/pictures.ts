@@ -20,8 +20,8 @@ export interface Pictures {
   readonly acceptance: ReadonlyMap<VesselResult, Picture>
 }
 
-/** Pixels across of the dots, some 144 to the inch of paper: what programs show that do not draw. Time goes by their square. */
-const DOTS = 810
+/** Pixels across of the dots, some 128 to the inch of paper: what programs show that do not draw. Time goes by their square. */
+const DOTS = 720
 
 export const drawPictures = async (result: ProjectResult, { units }: DocumentOptions): Promise<Pictures> => {
   const pngOf = await pngRenderer()
