@@ -24,11 +24,13 @@ const joined = (chunks: readonly Uint8Array[]): Uint8Array => {
 
 /**
  * Packs the parts again in a fixed order with fixed times: the same parts give the same bytes. `edit` may change the text
- * of a part; each is edited, packed and let go before the next, so that a large one is in memory once.
+ * of a part, `swap` the bytes of a picture; each is edited, packed and let go before the next, so that a large one is in
+ * memory once.
  */
 export const fixedArchive = (
   bytes: Uint8Array,
   edit: (name: string, xml: string) => string = (_, xml) => xml,
+  swap: (part: Uint8Array) => Uint8Array = (part) => part,
 ): Uint8Array => {
   const parts = unzipSync(bytes)
   const names = Object.keys(parts)
@@ -46,7 +48,7 @@ export const fixedArchive = (
     const entry = /\.(?:png|jpe?g)$/.test(name) ? new ZipPassThrough(name) : new ZipDeflate(name, { level: LEVEL })
     entry.mtime = EPOCH
     zip.add(entry)
-    entry.push(isText ? encoder.encode(edit(name, decoder.decode(part))) : part, true)
+    entry.push(isText ? encoder.encode(edit(name, decoder.decode(part))) : swap(part), true)
     delete parts[name]
   }
   zip.end()

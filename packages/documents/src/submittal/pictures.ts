@@ -5,39 +5,52 @@ import type { DocumentOptions } from '../document-options.ts'
 import type { Captions } from '../docx/captions.ts'
 import { plainText } from '../docx/plain-text.ts'
 import { STYLE } from '../docx/styles.ts'
-import { pngRenderer } from '../raster/png-of-svg.ts'
+import { drawPngs } from '../raster/draw-pngs.ts'
 
-/** A drawing, and the same as dots for programs that do not draw. */
+/** A drawing, and what stands in for the same as dots, which are drawn while the document is written. */
 export interface Picture {
   readonly drawing: Drawing
   readonly svg: string
-  readonly png: Uint8Array
+  readonly standIn: Uint8Array
 }
 
 /** Drawings of a project by what they show. */
 export interface Pictures {
   readonly pressures: ReadonlyMap<SystemResult, Picture>
   readonly acceptance: ReadonlyMap<VesselResult, Picture>
+  /** Puts the dots where their stand-in is; ready when all are drawn. */
+  readonly dots: Promise<(part: Uint8Array) => Uint8Array>
 }
+
+const STAND_IN = 'dots of drawing '
 
 /** Pixels across of the dots, some 128 to the inch of paper: what programs show that do not draw. Time goes by their square. */
 const DOTS = 720
 
-export const drawPictures = async (result: ProjectResult, { units }: DocumentOptions): Promise<Pictures> => {
-  const pngOf = await pngRenderer()
+export const drawPictures = (result: ProjectResult, { units }: DocumentOptions): Pictures => {
+  const svgs: string[] = []
   const pictures = <T>(things: readonly T[], draw: (thing: T) => Drawing | null): Map<T, Picture> =>
     new Map(
       things.flatMap((thing) => {
         const drawing = draw(thing)
         if (!drawing) return []
         const svg = svgText(drawing, PAPER)
-        return [[thing, { drawing, svg, png: pngOf(svg, DOTS) }] as const]
+        const standIn = new TextEncoder().encode(`${STAND_IN}${svgs.length}`)
+        svgs.push(svg)
+        return [[thing, { drawing, svg, standIn }] as const]
       }),
     )
-  return {
-    pressures: pictures(result.systems, (system) => drawPressures(system, units, ON_PAPER, result.vessels)),
-    acceptance: pictures(result.vessels, (vessel) => drawAcceptance(vessel, units, ON_PAPER)),
-  }
+  const pressures = pictures(result.systems, (system) => drawPressures(system, units, ON_PAPER, result.vessels))
+  const acceptance = pictures(result.vessels, (vessel) => drawAcceptance(vessel, units, ON_PAPER))
+  const decoder = new TextDecoder()
+  const dots = drawPngs({ svgs, width: DOTS }).then((pngs) => (part: Uint8Array): Uint8Array => {
+    if (part.length > STAND_IN.length + 6) return part
+    const words = decoder.decode(part)
+    return words.startsWith(STAND_IN) ? (pngs[Number(words.slice(STAND_IN.length))] ?? part) : part
+  })
+  // Who never asks for them, since writing failed, must not end the process by their failure.
+  dots.catch(() => undefined)
+  return { pressures, acceptance, dots }
 }
 
 /** Pixels of the page, 96 to the inch. */
@@ -45,7 +58,7 @@ const ACROSS = 540
 
 /** A picture in the line, and its caption under it on the same page. */
 export const figure = (
-  { drawing, svg, png }: Picture,
+  { drawing, svg, standIn }: Picture,
   caption: string,
   captions: Captions,
   key?: string,
@@ -58,7 +71,7 @@ export const figure = (
         new ImageRun({
           type: 'svg',
           data: new TextEncoder().encode(svg),
-          fallback: { type: 'png', data: png },
+          fallback: { type: 'png', data: standIn },
           transformation: { width: ACROSS, height: Math.round((ACROSS * height) / width) },
           altText: { title: plainText(title), description: plainText(words), name: plainText(title) },
         }),

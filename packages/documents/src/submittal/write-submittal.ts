@@ -106,6 +106,11 @@ const documentOf = (
 
 const packed = async (document: Document): Promise<Uint8Array> => new Uint8Array(await Packer.toArrayBuffer(document))
 
+const archived = async (document: Document, options: DocumentOptions, pictures: Pictures): Promise<Uint8Array> => {
+  const bytes = await packed(document)
+  return fixedArchive(bytes, settled(dateOf(options.titleBlock)), await pictures.dots)
+}
+
 export interface SubmittalSurroundings {
   /**
    * Lays a .docx file out and says on which page each bookmark stands. With it the contents list has page numbers;
@@ -126,9 +131,12 @@ const withFoundPages = async (
 ): Promise<Uint8Array | null> => {
   const bytes = await packed(documentOf(result, options, pictures, true))
   const settle = settled(dateOf(options.titleBlock))
+  const dots = await pictures.dots
   const archive = (page: (anchor: string) => string) =>
-    fixedArchive(bytes, (name, xml) =>
-      name === 'word/document.xml' ? withPages(settle(name, xml), page) : settle(name, xml),
+    fixedArchive(
+      bytes,
+      (name, xml) => (name === 'word/document.xml' ? withPages(settle(name, xml), page) : settle(name, xml)),
+      dots,
     )
   let pages: ReadonlyMap<string, number>
   try {
@@ -154,12 +162,9 @@ export const writeSubmittal = async (
   options: DocumentOptions,
   { findPages, onNoPages = () => undefined }: SubmittalSurroundings = {},
 ): Promise<Uint8Array> => {
-  const pictures = await drawPictures(result, options)
+  const pictures = drawPictures(result, options)
   const numbered = findPages ? await withFoundPages(result, options, pictures, findPages, onNoPages) : null
-  return (
-    numbered ??
-    fixedArchive(await packed(documentOf(result, options, pictures, false)), settled(dateOf(options.titleBlock)))
-  )
+  return numbered ?? archived(documentOf(result, options, pictures, false), options, pictures)
 }
 
 /**
@@ -168,12 +173,7 @@ export const writeSubmittal = async (
  */
 export const writeReviewCopy = async (result: ProjectResult, options: DocumentOptions): Promise<Uint8Array> => {
   const redlines = options.redlines ?? []
-  const document = documentOf(
-    result,
-    { ...options, redlines },
-    await drawPictures(result, options),
-    false,
-    redlines.length > 0 ? new ReviewComments(redlines) : null,
-  )
-  return fixedArchive(await packed(document), settled(dateOf(options.titleBlock)))
+  const pictures = drawPictures(result, options)
+  const comments = redlines.length > 0 ? new ReviewComments(redlines) : null
+  return archived(documentOf(result, { ...options, redlines }, pictures, false, comments), options, pictures)
 }
