@@ -1,5 +1,5 @@
 import type { Project, Reference, SpecDocument } from '@coldfill/contract'
-import { acceptFix, pathRange, readSpec, type Range } from '@coldfill/spec'
+import { acceptFix, pathRange, type Range } from '@coldfill/spec'
 import type { UseQueryResult } from '@tanstack/react-query'
 import { useCallback, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
 import { useNavigate } from 'react-router-dom'
@@ -16,12 +16,12 @@ import { SpecEditor, type SpecEditorHandle } from '#features/spec/components/spe
 import { Tray } from '#features/spec/components/tray.tsx'
 import { computedValues } from '#features/spec/computed-values.ts'
 import { marginEntries } from '#features/spec/margin-lines.ts'
-import { mergeFindings } from '#features/spec/merge-findings.ts'
 import { keptWords, sizedWords } from '#features/spec/status-words.ts'
-import { useSettled } from '#features/spec/use-settled.ts'
+import { useFindings } from '#features/spec/use-findings.ts'
 import { useSpecDraft } from '#features/spec/use-spec-draft.ts'
 import { messageOf } from '#lib/api-error.ts'
 import { clock } from '#lib/format.ts'
+import type { Finding } from '#lib/sized-project.ts'
 import { useAddress, useUnits } from '#lib/search-params.ts'
 import { revisionPhrase } from '#lib/words.ts'
 import { SpecActions } from './spec-actions.tsx'
@@ -52,8 +52,16 @@ export const SpecSheet = ({ project, user, document, rev, reference }: Props) =>
   const toTrace = useCallback((address: string) => void navigate(address), [navigate])
   const editor = useRef<SpecEditorHandle>(null)
   const jumpTo = useCallback((range: Range) => editor.current?.jumpTo(range), [])
+  const fixIn = useCallback((fix: Finding['fixes'][number]) => editor.current?.fix(fix), [])
+  const accept = useCallback((finding: Finding, reason: string) => {
+    const text = editor.current?.text() ?? ''
+    const fix = acceptFix(text, finding, reason.replaceAll(/\s+/g, ' ').trim())
+    if (fix) editor.current?.fix(fix)
+  }, [])
+  const textOf = useCallback(() => editor.current?.text() ?? '', [])
   const [line, setLine] = useState<number | null>(null)
   const [outline, setOutline] = useState(false)
+  const closeOutline = useCallback(() => setOutline(false), [])
 
   const [wanted, setCompared] = useState<CompareWith | null>(null)
   // What it stood beside may have gone: a draft that was thrown away, a conflict that is settled.
@@ -62,13 +70,9 @@ export const SpecSheet = ({ project, user, document, rev, reference }: Props) =>
   const { latest, good, stale, error, issued, newest } = useSpecResults(project, document, rev, text)
   const { units, setUnits } = useUnits(good?.result.project.units)
 
-  const settled = useSettled(text)
   const vocabulary = reference.data?.vocabulary
-  const reading = useMemo(() => (vocabulary ? readSpec(settled, vocabulary) : null), [settled, vocabulary])
-  const findings = useMemo(
-    () => mergeFindings(reading?.findings ?? [], latest, settled, (path) => pathRange(settled, path)),
-    [reading, latest, settled],
-  )
+  const showAtOnce = useCallback((found: readonly Finding[]) => editor.current?.show(found), [])
+  const { settled, reading, findings } = useFindings(text, vocabulary, latest, showAtOnce)
   // While the text cannot be read the outline and the margin stay as they were.
   const [model, setModel] = useState(reading?.model ?? null)
   if (reading?.model && reading.model !== model) setModel(reading.model)
@@ -170,7 +174,7 @@ export const SpecSheet = ({ project, user, document, rev, reference }: Props) =>
       <div className={`min-h-0 flex-1 flex-col border-t-2 border-ink desk:flex-row ${compared ? 'hidden' : 'flex'}`}>
         <OutlineDrawer
           open={outline}
-          onClose={() => setOutline(false)}
+          onClose={closeOutline}
           text={settled}
           findings={findings}
           entries={entries}
@@ -194,7 +198,7 @@ export const SpecSheet = ({ project, user, document, rev, reference }: Props) =>
       </div>
       {compared ? null : (
         <Tray
-          text={settled}
+          textOf={textOf}
           findings={findings}
           reasons={reference.data?.findingCodes ?? NO_REASONS}
           entries={entries}
@@ -209,11 +213,8 @@ export const SpecSheet = ({ project, user, document, rev, reference }: Props) =>
             </>
           }
           onJump={jumpTo}
-          onFix={(fix) => editor.current?.fix(fix)}
-          onAccept={(finding, reason) => {
-            const fix = acceptFix(text, finding, reason.replaceAll(/\s+/g, ' ').trim())
-            if (fix) editor.current?.fix(fix)
-          }}
+          onFix={fixIn}
+          onAccept={accept}
         />
       )}
     </Sheet>

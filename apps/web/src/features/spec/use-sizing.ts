@@ -2,7 +2,8 @@ import type { ProjectResult } from '@coldfill/contract'
 import { useEffect, useState } from 'react'
 import { sizeText } from './api/spec.ts'
 
-const DELAY = 300
+/** Longer than lies between two keys of somebody who types on, and no longer: results are wanted 400 ms after the last one. */
+const DELAY = 180
 
 /** Results with the text that they are of, and the ISO instant of the answer. */
 export interface SizedText {

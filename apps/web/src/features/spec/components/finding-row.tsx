@@ -1,4 +1,5 @@
-import { useId, useRef, useState, type FormEvent } from 'react'
+import type { Range } from '@coldfill/spec'
+import { memo, useId, useRef, useState, type FormEvent } from 'react'
 import { Link } from 'react-router-dom'
 import { Button } from '#components/ui/button.tsx'
 import { TextField } from '#components/ui/field.tsx'
@@ -10,15 +11,15 @@ import { FixPreview } from './fix-preview.tsx'
 
 interface Props {
   /** The text that the finding is about, to show what a fix would change. */
-  readonly text: string
+  readonly textOf: () => string
   readonly finding: Finding
   /** Why the code matters, from the reference. */
   readonly why: string | undefined
   readonly readOnly: boolean
   readonly chosen: boolean
-  readonly onJump: () => void
+  readonly onJump: (range: Range) => void
   readonly onFix: (fix: Finding['fixes'][number]) => void
-  readonly onAccept: (reason: string) => void
+  readonly onAccept: (finding: Finding, reason: string) => void
 }
 
 const Accept = ({
@@ -55,8 +56,7 @@ const Accept = ({
   )
 }
 
-/** A finding in words: what, why, how to mend it, and the way to its place. */
-export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix, onAccept }: Props) => {
+const Row = ({ textOf, finding, why, readOnly, chosen, onJump, onFix, onAccept }: Props) => {
   const [accepting, setAccepting] = useState(false)
   // A fix is known by its title: each reading of the text makes the fixes anew.
   const [looked, setLooked] = useState<string | null>(null)
@@ -69,7 +69,7 @@ export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix
         <SeverityMark severity={finding.severity} />
       </span>
       <div className="min-w-0 flex-1">
-        <button type="button" onClick={onJump} className="text-left hover:underline">
+        <button type="button" onClick={() => onJump(finding.range)} className="text-left hover:underline">
           <span className="figures mr-2 text-pencil">Line {finding.range.start.line + 1}</span>
           <Prose text={finding.message} />
         </button>
@@ -90,7 +90,7 @@ export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix
           <Accept
             onAccept={(reason) => {
               setAccepting(false)
-              onAccept(reason)
+              onAccept(finding, reason)
             }}
             onCancel={() => setAccepting(false)}
           />
@@ -120,7 +120,7 @@ export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix
           <FixPreview
             key={shown.title}
             id={id}
-            text={text}
+            text={textOf()}
             fix={shown}
             onMake={() => {
               setLooked(null)
@@ -143,3 +143,22 @@ export const FindingRow = ({ text, finding, why, readOnly, chosen, onJump, onFix
     </li>
   )
 }
+
+const sameFinding = (a: Finding, b: Finding): boolean => a === b || JSON.stringify(a) === JSON.stringify(b)
+
+/**
+ * A finding in words: what, why, how to mend it, and the way to its place. Each reading of the text finds everything anew; a row
+ * is drawn again only where it says something else.
+ */
+export const FindingRow = memo(
+  Row,
+  (was, now) =>
+    was.why === now.why &&
+    was.readOnly === now.readOnly &&
+    was.chosen === now.chosen &&
+    was.textOf === now.textOf &&
+    was.onJump === now.onJump &&
+    was.onFix === now.onFix &&
+    was.onAccept === now.onAccept &&
+    sameFinding(was.finding, now.finding),
+)

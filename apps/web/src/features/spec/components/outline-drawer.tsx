@@ -1,4 +1,5 @@
-import { useEffect, useRef, type ComponentProps } from 'react'
+import type { Range } from '@coldfill/spec'
+import { useCallback, useEffect, useRef, type ComponentProps } from 'react'
 import { Outline } from './outline.tsx'
 
 interface Props extends ComponentProps<typeof Outline> {
@@ -19,6 +20,13 @@ export const OutlineDrawer = ({ open, onClose, onJump, ...rest }: Props) => {
   useEffect(() => {
     if (open) drawer.current?.querySelector<HTMLElement>('button')?.focus()
   }, [open])
+  const jump = useCallback(
+    (range: Range) => {
+      if (open && isNarrow()) onClose()
+      onJump(range)
+    },
+    [open, onClose, onJump],
+  )
   return (
     <div
       ref={drawer}
@@ -31,13 +39,7 @@ export const OutlineDrawer = ({ open, onClose, onJump, ...rest }: Props) => {
         document.querySelector<HTMLElement>('[aria-controls=outline]')?.focus()
       }}
     >
-      <Outline
-        {...rest}
-        onJump={(range) => {
-          if (open && isNarrow()) onClose()
-          onJump(range)
-        }}
-      />
+      <Outline {...rest} onJump={jump} />
     </div>
   )
 }

@@ -1,5 +1,5 @@
 import { outlineOf, type OutlineItem, type Range } from '@coldfill/spec'
-import { useMemo, useState } from 'react'
+import { memo, useMemo, useState } from 'react'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
 import { plural } from '#lib/format.ts'
 import type { Finding } from '#lib/sized-project.ts'
@@ -68,8 +68,7 @@ const Item = ({ item, badge, entry, stale, onJump }: ItemProps) => (
 
 const flat = (item: OutlineItem): readonly OutlineItem[] => [item, ...item.children.flatMap(flat)]
 
-/** The building with its fluids, systems and vessels, each with its size and its findings; a way through a long spec. */
-export const Outline = ({ text, findings, entries, stale, onJump }: Props) => {
+const Drawn = ({ text, findings, entries, stale, onJump }: Props) => {
   const [filter, setFilter] = useState<Filter>('all')
   const read = useMemo(() => outlineOf(text), [text])
   // While nothing can be read the outline stays as it was.
@@ -125,3 +124,6 @@ export const Outline = ({ text, findings, entries, stale, onJump }: Props) => {
     </nav>
   )
 }
+
+/** The building with its fluids, systems and vessels, each with its size and its findings; a way through a long spec. */
+export const Outline = memo(Drawn)

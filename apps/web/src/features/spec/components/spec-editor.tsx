@@ -25,6 +25,9 @@ export interface SpecEditorHandle {
   readonly jumpTo: (range: Range) => void
   readonly fix: (fix: Finding['fixes'][number]) => void
   readonly format: () => void
+  readonly text: () => string
+  /** Findings that are shown before the rest of the sheet knows of them. */
+  readonly show: (findings: readonly Finding[]) => void
 }
 
 /** What the language and the last sizing say about the text. */
@@ -89,14 +92,25 @@ export const SpecEditor = ({ ref, pushed, onChange, readOnly, vocabulary, shown,
     },
     [view],
   )
+  const drawn = useRef<readonly Finding[] | null>(null)
+  const show = useCallback(
+    (found: readonly Finding[]) => {
+      if (!view || drawn.current === found) return
+      drawn.current = found
+      view.dispatch(showFindings(view.state, found), knowFindings(found))
+    },
+    [view],
+  )
   useImperativeHandle(
     ref,
     () => ({
       jumpTo,
       fix: (fix) => view && applyFix(view, fix),
       format: () => view && formatText(view),
+      text: () => view?.state.doc.toString() ?? '',
+      show,
     }),
-    [jumpTo, view],
+    [jumpTo, show, view],
   )
 
   const extensions = useMemo(
@@ -124,11 +138,7 @@ export const SpecEditor = ({ ref, pushed, onChange, readOnly, vocabulary, shown,
     if (was !== pushed.text)
       view.dispatch({ changes: textDifference(was, pushed.text), annotations: ExternalChange.of(true) })
   }, [view, pushed])
-  useEffect(() => {
-    if (!view) return
-    view.dispatch(showFindings(view.state, findings))
-    view.dispatch(knowFindings(findings))
-  }, [view, findings])
+  useEffect(() => show(findings), [show, findings])
   useEffect(() => {
     if (view) view.dispatch(showComputed(computed, stale))
   }, [view, computed, stale])

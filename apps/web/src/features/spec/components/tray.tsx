@@ -8,7 +8,8 @@ import { FindingRow } from './finding-row.tsx'
 import { TrayTabs } from './tray-tabs.tsx'
 
 interface Props {
-  readonly text: string
+  /** The text that the findings are about, to show what a fix would change. */
+  readonly textOf: () => string
   readonly findings: readonly Finding[]
   readonly reasons: Readonly<Record<string, { readonly why: string }>>
   readonly entries: readonly MarginEntry[]
@@ -30,7 +31,7 @@ const counted = (findings: readonly Finding[]) =>
 
 /** Under the editor: findings with why and fix, and the sized results in words. */
 export const Tray = ({
-  text,
+  textOf,
   findings,
   reasons,
   entries,
@@ -77,14 +78,14 @@ export const Tray = ({
             {findings.map((finding) => (
               <FindingRow
                 key={`${finding.code} ${finding.path} ${finding.range.start.line} ${finding.range.start.character} ${finding.message}`}
-                text={text}
+                textOf={textOf}
                 finding={finding}
                 why={reasons[finding.code]?.why}
                 readOnly={readOnly}
                 chosen={finding.range.start.line === line}
-                onJump={() => onJump(finding.range)}
+                onJump={onJump}
                 onFix={onFix}
-                onAccept={(reason) => onAccept(finding, reason)}
+                onAccept={onAccept}
               />
             ))}
           </ul>
