@@ -57,32 +57,52 @@ const clearOf = (relief: number | null, x: number, name: string): number => {
   return x <= relief ? relief - room : relief + room
 }
 
+interface Dot {
+  readonly x: number
+  readonly y: number
+  readonly words: string
+  /** Of the lowest point, where the lines end. */
+  readonly isLowest: boolean
+}
+
+/** Places across of the dots at a height. */
+const dotsAt = (height: number, points: readonly Point[], { across }: Field): readonly number[] =>
+  points
+    .filter((point) => point.height === height)
+    .flatMap(({ cold, hot, running }) => [cold, hot, ...(running === null ? [] : [running])])
+    .map((pressure) => across.at(pressure))
+
 /**
- * A value beside its dot. A line falls to the right, so a value stands left of it, and that of the lowest point below to the
- * right; where all is at one height, below.
+ * A value beside its dot. A line falls to the right, so a value stands left of it where neither the edge nor another dot is in
+ * the way, and else below, as that of the lowest point does; where all is at one height, under its dot.
  */
 const reading = (
-  x: number,
-  y: number,
-  words: string,
-  isLeft: boolean,
-  tall: boolean,
+  { x, y, words, isLowest }: Dot,
+  others: readonly number[],
+  { frame, tall }: Field,
   fill: string,
   palette: Palette,
 ): Shape => {
   const ink = { fill, ...halo(palette) }
+  const width = wordsWidth(words)
   if (!tall) return text(x, y + 22, words, { textAnchor: 'middle', ...ink })
-  return isLeft
-    ? text(x - 11, y + 4, words, { textAnchor: 'end', ...ink })
-    : text(x + 8, y + 17, words, { textAnchor: 'start', ...ink })
+  const end = x - 11 - width
+  if (!isLowest && end >= frame.left && !others.some((other) => other < x && other + 8 > end))
+    return text(x - 11, y + 4, words, { textAnchor: 'end', ...ink })
+  // The value of the dot before it stands below to the right, where there is no room for two.
+  const level = isLowest && others.some((other) => other < x && other + width + 12 > x) ? y - 8 : y + 17
+  return x + 8 + width <= frame.right
+    ? text(x + 8, level, words, { textAnchor: 'start', ...ink })
+    : text(x - 8, level, words, { textAnchor: 'end', ...ink })
 }
 
-const lineOf = (
-  which: 'cold' | 'hot',
-  points: readonly Point[],
-  { frame, across, up, tall, relief }: Field,
-  { palette }: DrawingLook,
-): Shape[] => {
+/** Above the highest dot of a line. */
+const NAME_RISE = 12
+/** Where another name is in the way. */
+const SECOND_ROW = 14
+
+const lineOf = (which: 'cold' | 'hot', points: readonly Point[], field: Field, { palette }: DrawingLook): Shape[] => {
+  const { across, up, relief } = field
   const colour = which === 'cold' ? palette.steel : palette.ink
   const name = which === 'cold' ? 'Cold' : 'Hot'
   const place = (point: Point) => [across.at(point[which]), up.at(point.height)] as const
@@ -101,14 +121,15 @@ const lineOf = (
       : []),
     ...points.flatMap((point) => {
       const [x, y] = place(point)
-      const words = said(point[which])
-      // A value at the left edge has no room left of its dot.
-      const isLeft = point !== points[0] && x - 11 - wordsWidth(words) >= frame.left
-      return [dot(x, y, colour, which === 'hot', palette), reading(x, y, words, isLeft, tall, palette.ink, palette)]
+      const value = { x, y, words: said(point[which]), isLowest: point === points[0] }
+      return [
+        dot(x, y, colour, which === 'hot', palette),
+        reading(value, dotsAt(point.height, points, field), field, palette.ink, palette),
+      ]
     }),
     ...(top
       ? [
-          text(clearOf(relief, across.at(top[which]), name), up.at(top.height) - 12, name, {
+          text(clearOf(relief, across.at(top[which]), name), up.at(top.height) - NAME_RISE, name, {
             textAnchor: 'middle',
             fill: colour,
             fontWeight: 600,
@@ -120,23 +141,25 @@ const lineOf = (
 }
 
 /** The side of the pump that moves, while it runs: a fine line, read at its ends. */
-const runningLine = (
-  points: readonly Point[],
-  { across, up, tall, frame, relief }: Field,
-  { palette }: DrawingLook,
-): Shape[] => {
+const runningLine = (points: readonly Point[], field: Field, { palette }: DrawingLook): Shape[] => {
+  const { across, up, relief } = field
   const placed = points.flatMap(({ running, height }) =>
-    running === null ? [] : [{ x: across.at(running), y: up.at(height), words: said(running) }],
+    running === null ? [] : [{ x: across.at(running), y: up.at(height), height, words: said(running) }],
   )
   const [first] = placed
   const last = placed.at(-1)
-  if (!first || !last) return []
-  const ends = first === last ? [first] : [first, last]
+  const top = points.at(-1)
+  if (!first || !last || !top) return []
+  const name = 'Pump on'
+  const x = clearOf(relief, last.x, name)
+  const crowded = (['cold', 'hot'] as const).some(
+    (other) => Math.abs(across.at(top[other]) - x) < (wordsWidth(name) + wordsWidth(other)) / 2 + 8,
+  )
   return [
     ...(placed.length > 1
       ? [
           shape('polyline', {
-            points: pointsOf(placed.map(({ x, y }) => [x, y] as const)),
+            points: pointsOf(placed.map((place) => [place.x, place.y] as const)),
             fill: 'none',
             stroke: palette.pencil,
             strokeWidth: PEN.medium,
@@ -144,11 +167,17 @@ const runningLine = (
           }),
         ]
       : []),
-    ...ends.flatMap(({ x, y, words }) => {
-      const isLeft = tall && last !== first && y === last.y && x - 11 - wordsWidth(words) >= frame.left
-      return [dot(x, y, palette.pencil, true, palette), reading(x, y, words, isLeft, tall, palette.pencil, palette)]
-    }),
-    text(clearOf(relief, last.x, 'Pump on'), last.y - 12, 'Pump on', {
+    ...(first === last ? [first] : [first, last]).flatMap((place) => [
+      dot(place.x, place.y, palette.pencil, true, palette),
+      reading(
+        { ...place, isLowest: place === first },
+        dotsAt(place.height, points, field),
+        field,
+        palette.pencil,
+        palette,
+      ),
+    ]),
+    text(x, last.y - NAME_RISE - (crowded ? SECOND_ROW : 0), name, {
       textAnchor: 'middle',
       fill: palette.pencil,
       fontWeight: 600,
@@ -213,7 +242,7 @@ export const drawPressures = (
     marksAcross(frame),
   )
   const up = tall
-    ? scaleOver(heights, frame.bottom - 24, frame.top + 26, 6)
+    ? scaleOver(heights, frame.bottom - 24, frame.top + 26 + (system.pump ? SECOND_ROW : 0), 6)
     : { ...scaleOver([-1, 1], frame.bottom, frame.top, 2), ticks: [] }
   const field: Field = { frame, across, up, tall, relief: relief ? across.at(relief.set) : null }
 
