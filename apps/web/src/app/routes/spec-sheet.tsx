@@ -142,9 +142,11 @@ export const SpecSheet = ({ project, user, document, rev, reference }: Props) =>
             comparing={compared !== null}
             outline={outline}
             onOutline={() => setOutline(!outline)}
-            onCompare={() =>
-              setCompared(compared ? null : { with: (draft.conflict ?? draft.merged) ? 'theirs' : 'saved' })
-            }
+            onCompare={() => {
+              // A text that may not be edited is compared with other contents, on a sheet of its own.
+              if (readOnly) void navigate(withQuery(paths.compare(number), { b: rev, units: get('units') }))
+              else setCompared(compared ? null : { with: (draft.conflict ?? draft.merged) ? 'theirs' : 'saved' })
+            }}
             onFormat={() => editor.current?.format()}
             onSave={() => void save()}
           />

@@ -27,7 +27,7 @@ export const useSpecResults = (project: Project, document: SpecDocument, rev: st
     good,
     stale: good === null || good.text !== text,
     error: typed.error,
-    issued: issued.data?.result ?? null,
+    issued: readOnly ? null : (issued.data?.result ?? null),
     newest,
   }
 }

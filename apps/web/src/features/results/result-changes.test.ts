@@ -39,7 +39,6 @@ describe('results that moved', () => {
     ).toEqual([
       ['ET-2', 'status', null, 'blocked'],
       ['ET-3', 'status', 'sized', null],
-      ['ET-3', 'required-volume', '5.00 L', null],
       ['ET-1', 'required-volume', '100 L', '300 L'],
     ])
   })

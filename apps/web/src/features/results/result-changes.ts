@@ -55,12 +55,14 @@ const vesselChanges = (
 ): readonly ResultChange[] => {
   const either = now ?? was
   if (!either) return []
-  const keys = [...new Set([...Object.keys(now?.results ?? {}), ...Object.keys(was?.results ?? {})])]
+  // A vessel that comes or goes is one change, whatever it had.
+  if (!was || !now) return wordChange(either, 'status', 'Status', was?.status ?? null, now?.status ?? null)
+  const keys = [...new Set([...Object.keys(now.results), ...Object.keys(was.results)])]
   return [
-    ...wordChange(either, 'status', 'Status', was?.status ?? null, now?.status ?? null),
+    ...wordChange(either, 'status', 'Status', was.status, now.status),
     ...keys.flatMap((key): readonly ResultChange[] => {
-      const before = was?.results[key]
-      const after = now?.results[key]
+      const before = was.results[key]
+      const after = now.results[key]
       if (before && after && same(before.value, after.value)) return []
       const both = before !== undefined && after !== undefined && before.kind === after.kind
       return [
@@ -76,7 +78,7 @@ const vesselChanges = (
         },
       ]
     }),
-    ...wordChange(either, 'selected', 'Chosen vessel', was ? chosenWords(was) : null, now ? chosenWords(now) : null),
+    ...wordChange(either, 'selected', 'Chosen vessel', chosenWords(was), chosenWords(now)),
   ]
 }
 

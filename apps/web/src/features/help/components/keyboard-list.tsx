@@ -10,6 +10,7 @@ const keys: readonly (readonly [string, string])[] = [
   ['Ctrl+Shift+[, Ctrl+Shift+]', 'fold, unfold the block'],
   ['Ctrl+Alt+[, Ctrl+Alt+]', 'fold, unfold everything'],
   ['Ctrl+F', 'search and replace'],
+  ['Alt+N, Alt+P', 'next, previous place that differs, where two texts are compared'],
   ['Esc, then Tab', 'leave the editor'],
 ]
 

@@ -3,7 +3,7 @@ import { keymap, type EditorView } from '@codemirror/view'
 import { type Action, actionsAt, changedLines, type Vocabulary } from '@coldfill/spec'
 import type { Finding } from '#lib/sized-project.ts'
 import { drawnChanges } from './changes.ts'
-import { applyFix } from './finding-marks.ts'
+import { applyFix, rendered } from './finding-marks.ts'
 import { element, openPanel, panelFrame, say } from './help-panel.ts'
 
 const setFindings = StateEffect.define<readonly Finding[]>()
@@ -30,7 +30,7 @@ const menu = (view: EditorView, actions: readonly Action[]) => {
     const row = element(
       'li',
       'cursor-pointer px-2 py-0.5 aria-selected:bg-steel aria-selected:text-sheet',
-      [action.title],
+      [rendered(action.title)],
       {
         role: 'option',
         id: `action-${index}`,

@@ -124,7 +124,7 @@ const applyFix = (view: EditorView, fix: { readonly edits: readonly TextEdit[] }
 const wordsOf = (finding: Finding): string => (finding.hint ? `${finding.message} ${finding.hint}` : finding.message)
 
 /** Text of the spec, between backticks, is set in its type. */
-const rendered = (text: string): Node => {
+export const rendered = (text: string): HTMLElement => {
   const holder = document.createElement('span')
   text.split('`').forEach((part, at) => {
     const piece = document.createElement(at % 2 === 0 ? 'span' : 'code')
@@ -144,7 +144,10 @@ const diagnosticOf = (state: EditorState, finding: Finding): Diagnostic => {
     source: finding.code,
     message: wordsOf(finding),
     renderMessage: () => rendered(wordsOf(finding)),
-    actions: finding.fixes.map((fix) => ({ name: fix.title, apply: (view) => applyFix(view, fix) })),
+    actions: finding.fixes.map((fix) => ({
+      name: fix.title.replaceAll('`', ''),
+      apply: (view) => applyFix(view, fix),
+    })),
   }
 }
 
