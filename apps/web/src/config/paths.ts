@@ -19,6 +19,10 @@ export const paths = {
   you: () => '/you',
 }
 
+/** What changed between two contents; `now` left out is the working copy. Each is the part of an address that names a revision. */
+export const comparePath = (number: string, was: string, now?: string): string =>
+  withQuery(paths.compare(number), { a: was, b: now })
+
 /** Adds query parameters to an address; empty ones are left out. */
 export const withQuery = (
   path: string,

@@ -1,10 +1,12 @@
-import { revisionTitle, type Project, type Revision } from '@coldfill/contract'
+import { revisionSegment, revisionTitle, type Project, type Revision } from '@coldfill/contract'
 import { useState, type FormEvent, type ReactNode } from 'react'
+import { Link } from 'react-router-dom'
 import { Failure } from '#components/failure.tsx'
 import { Button } from '#components/ui/button.tsx'
 import { TextArea } from '#components/ui/field.tsx'
 import { RevisionTriangle } from '#components/ui/review-marks.tsx'
 import { StateWord } from '#components/ui/state-word.tsx'
+import { comparePath } from '#config/paths.ts'
 import { clock, day } from '#lib/format.ts'
 import { useAction } from '#lib/use-action.ts'
 import { withdraw } from '../api/issue.ts'
@@ -69,6 +71,7 @@ export const RevisionEntry = ({
     const files = revision.files.filter((file) => file.set === set)
     return files.length > 0 ? [{ set, files }] : []
   })
+  const before = project.revisions[project.revisions.findIndex(({ id }) => id === revision.id) + 1]
   return (
     <article aria-label={revisionTitle(revision.label)} className="mb-8 border-t-[3px] border-ink pt-3">
       <header className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2">
@@ -90,6 +93,14 @@ export const RevisionEntry = ({
           </>
         ) : null}
         {' · '}engine {revision.engine}
+        {before ? (
+          <>
+            {' · '}
+            <Link to={comparePath(project.number, revisionSegment(before.label), revisionSegment(revision.label))}>
+              changes since {revisionTitle(before.label)}
+            </Link>
+          </>
+        ) : null}
       </p>
       {revision.note ? <p className="mt-1 max-w-[80ch] whitespace-pre-wrap">{revision.note}</p> : null}
       {revision.constructionIssue?.override ? (

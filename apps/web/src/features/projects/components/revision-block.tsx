@@ -1,10 +1,24 @@
-import { OUTCOME_LABELS, revisionSegment, type Project } from '@coldfill/contract'
+import { OUTCOME_LABELS, revisionSegment, revisionTitle, type Project } from '@coldfill/contract'
 import { Link } from 'react-router-dom'
 import { Cell, HeadCell, RowHead, RuledTable } from '#components/ui/ruled-table.tsx'
 import { RevisionTriangle } from '#components/ui/review-marks.tsx'
 import { StateWord } from '#components/ui/state-word.tsx'
-import { paths, withQuery } from '#config/paths.ts'
+import { comparePath, paths, withQuery } from '#config/paths.ts'
 import { day } from '#lib/format.ts'
+
+/** The way to what changed since the revision before, which stands below it. */
+const WhatChanged = ({ project, place }: { readonly project: Project; readonly place: number }) => {
+  const [revision, before] = [project.revisions[place], project.revisions[place + 1]]
+  if (!revision || !before) return null
+  return (
+    <Link
+      className="block"
+      to={comparePath(project.number, revisionSegment(before.label), revisionSegment(revision.label))}
+    >
+      Changes since {revisionTitle(before.label)}
+    </Link>
+  )
+}
 
 /** Revision block of a title block: newest first. */
 export const RevisionBlock = ({ project }: { readonly project: Project }) => (
@@ -22,7 +36,7 @@ export const RevisionBlock = ({ project }: { readonly project: Project }) => (
       </tr>
     }
   >
-    {project.revisions.map((revision) => (
+    {project.revisions.map((revision, place) => (
       <tr key={revision.id}>
         <RowHead className="font-mono">
           <Link
@@ -35,7 +49,10 @@ export const RevisionBlock = ({ project }: { readonly project: Project }) => (
         <Cell figures={false} className="figures whitespace-nowrap">
           {day(revision.issuedAt)}
         </Cell>
-        <Cell className="max-w-[40ch]">{revision.note || '—'}</Cell>
+        <Cell className="max-w-[40ch]">
+          {revision.note || '—'}
+          <WhatChanged project={project} place={place} />
+        </Cell>
         <Cell>
           <StateWord state={revision.state} />
         </Cell>
