@@ -15,3 +15,4 @@ export {
   type ScheduleRow,
   type ScheduleTable,
 } from './schedules/schedule-table.ts'
+export { findingWords } from './finding-words.ts'

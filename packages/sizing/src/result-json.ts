@@ -51,7 +51,8 @@ export const resultJson = (result: ProjectResult) => ({
   engine: result.engine,
   spec: result.spec,
   vessels: result.vessels.map(vesselJson),
-  findings: result.findings,
+  // The text says the quantities; their values are for documents in other units.
+  findings: result.findings.map(({ quantities: _, ...finding }) => finding),
   assumptions: result.assumptions.map((assumption) => ({
     id: assumption.id,
     value: assumption.value,

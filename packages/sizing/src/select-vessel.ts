@@ -7,15 +7,11 @@ import {
   selectRow,
   type Selection,
 } from '@coldfill/engine'
-import { formatQuantity, type Kind } from '@coldfill/units'
 import { gaugeFromSpec } from './calculate-sections.ts'
 import { stampReasons } from './checks/stamp.ts'
 import { column, densityAsFilled } from './pressure-model.ts'
 import type { ResultValue, SelectedVessel } from './result.ts'
-import { report, type VesselContext } from './vessel-context.ts'
-
-const show = (context: VesselContext, kind: Kind, value: number): string =>
-  formatQuantity({ kind, value }, context.spec.project.units?.value ?? 'US')
+import { report, show, type VesselContext } from './vessel-context.ts'
 
 /** Pressure that the vessel has to stand, gauge Pa: the relief setting at its height, or its highest pressure. */
 const pressureToStand = (

@@ -8,7 +8,6 @@ import {
   type RunOutcome,
   type TraceSection,
 } from '@coldfill/engine'
-import { formatQuantity } from '@coldfill/units'
 import type { Finding, SpecModel, SystemModel, VesselModel } from '@coldfill/spec'
 import { chooseMethod } from './choose-method.ts'
 import type { AssumptionRegister } from './assumption-register.ts'
@@ -20,7 +19,7 @@ import { headroomRows } from './headroom-rows.ts'
 import { type PressureModel, pressureModel } from './pressure-model.ts'
 import type { HeadroomRow, ResultValue, SelectedVessel, VesselResult, VesselStatus } from './result.ts'
 import { checkBack, selectVessel, weighVessel } from './select-vessel.ts'
-import { report, type VesselContext } from './vessel-context.ts'
+import { report, show, type VesselContext } from './vessel-context.ts'
 
 interface Outcome {
   readonly status: VesselStatus
@@ -79,9 +78,8 @@ const outsideFluid = (context: VesselContext): Outcome | null => {
     if (!located) continue
     const kelvin = located.value.value
     if (kelvin >= fluid.validity.least && kelvin <= fluid.validity.most) continue
-    const show = (value: number) =>
-      formatQuantity({ kind: 'temperature', value }, context.spec.project.units?.value ?? 'US')
-    const message = `${located.value.authored ?? show(kelvin)} is outside the range of the data for ${fluid.label}, ${show(fluid.validity.least)} to ${show(fluid.validity.most)}.`
+    const temperature = (value: number) => show(context, 'temperature', value)
+    const message = `${located.value.authored ?? temperature(kelvin)} is outside the range of the data for ${fluid.label}, ${temperature(fluid.validity.least)} to ${temperature(fluid.validity.most)}.`
     const hint =
       fluid.base === 'water'
         ? 'Check the temperature; water data hold from the freezing point up.'
@@ -175,6 +173,7 @@ export const sizeVessel = (input: SizingInput): SizedVessel => {
     missing: [],
     blocked: [],
     findings: [],
+    said: [],
   }
   const choice = chooseMethod(context)
   const quantity = vessel.fields.quantity?.value ?? 1

@@ -1,6 +1,15 @@
 import type { Calculation, Fluid, GivenValue } from '@coldfill/engine'
-import type { Finding, Located, Range, Severity, SpecModel, SystemModel, VesselModel } from '@coldfill/spec'
-import type { Quantity } from '@coldfill/units'
+import type {
+  Finding,
+  Located,
+  Range,
+  SaidQuantity,
+  Severity,
+  SpecModel,
+  SystemModel,
+  VesselModel,
+} from '@coldfill/spec'
+import { formatQuantity, type Kind, type Quantity } from '@coldfill/units'
 import type { AssumptionRegister } from './assumption-register.ts'
 import { engineeringCodes, type EngineeringCode } from './engineering-codes.ts'
 
@@ -19,6 +28,15 @@ export interface VesselContext {
   /** Reasons, each with a finding of its own already, why the vessel cannot be sized. */
   readonly blocked: string[]
   readonly findings: Finding[]
+  /** Quantities said since the last finding. */
+  readonly said: SaidQuantity[]
+}
+
+/** A quantity for a message, in the units of the project; the finding that has it in its words keeps its value. */
+export const show = (context: VesselContext, kind: Kind, value: number): string => {
+  const text = formatQuantity({ kind, value }, context.spec.project.units?.value ?? 'US')
+  context.said.push({ text, kind, value })
+  return text
 }
 
 /** A value written in the spec as an input of a calculation. */
@@ -46,6 +64,8 @@ interface FindingDetails {
 /** Adds an engineering finding; without a place of its own it stands at the mark of the vessel. */
 export const report = (context: VesselContext, code: EngineeringCode, details: FindingDetails): void => {
   const at = details.at ?? context.vessel
+  const words = `${details.message} ${details.hint}`
+  const quantities = context.said.splice(0).filter(({ text }) => words.includes(text))
   context.findings.push({
     code,
     severity: details.severity ?? engineeringCodes[code].severity,
@@ -55,5 +75,6 @@ export const report = (context: VesselContext, code: EngineeringCode, details: F
     range: at.range,
     related: details.related ?? [],
     fixes: [],
+    ...(quantities.length > 0 ? { quantities } : {}),
   })
 }

@@ -1,3 +1,5 @@
+import type { Kind } from '@coldfill/units'
+
 /** Zero-based line and UTF-16 character, as in the language server protocol. */
 export interface Position {
   readonly line: number
@@ -19,6 +21,13 @@ export interface Fix {
   readonly edits: readonly { readonly range: Range; readonly text: string }[]
 }
 
+/** A quantity as it stands in a message, so that documents in other units can say it in theirs. SI value of the kind. */
+export interface SaidQuantity {
+  readonly text: string
+  readonly kind: Kind
+  readonly value: number
+}
+
 /** Something to tell the author of a spec. Collected, never thrown. */
 export interface Finding {
   /** `CF-Y…` syntax, `CF-S…` spec, `CF-E…` engineering. */
@@ -34,6 +43,8 @@ export interface Finding {
   readonly range: Range
   readonly related: readonly { readonly message: string; readonly path: string; readonly range: Range }[]
   readonly fixes: readonly Fix[]
+  /** Quantities of message and hint that the program worked out; what a person wrote stands as written. */
+  readonly quantities?: readonly SaidQuantity[]
   /** Reason with which a person accepted the finding, where one did. */
   readonly accepted?: string
 }

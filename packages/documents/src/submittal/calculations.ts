@@ -16,7 +16,7 @@ import { equationParagraph, equationThenText, paragraph, runningText, stepParagr
 import { STYLE } from '../docx/styles.ts'
 import { table } from '../docx/table.ts'
 import { basisWords } from '../words/basis-words.ts'
-import { sentenceCase, statusWords, valueText } from '@coldfill/presentation'
+import { findingWords, sentenceCase, statusWords, valueText } from '@coldfill/presentation'
 import { gaugeRemark } from '../words/pressure-words.ts'
 import { chosenVessel } from './chosen-vessel.ts'
 import { figure } from './pictures.ts'
@@ -130,9 +130,10 @@ const vesselLines = (vessel: Vessel, context: SubmittalContext, first: boolean):
     paragraph(answer(vessel, context), STYLE.answer),
     ...(picture ? figure(picture, `${vessel.mark}, water in the vessel against pressure`, captions) : []),
     ...(vessel.status === 'sized' ? chosenVessel(vessel, context) : []),
-    ...findings.map((finding) =>
-      paragraph(`${sentenceCase(finding.severity)} ${finding.code}: ${finding.message} ${finding.hint}`, STYLE.remark),
-    ),
+    ...findings.map((finding) => {
+      const { message, hint } = findingWords(finding, options.units)
+      return paragraph(`${sentenceCase(finding.severity)} ${finding.code}: ${message} ${hint}`, STYLE.remark)
+    }),
     ...calculation.sections.flatMap((section) => sectionLines(section, vessel, calculation, context)),
     ...checkLines(vessel, calculation, context),
   ]

@@ -1,11 +1,12 @@
 import { paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
 import { pathWords } from '../words/path-words.ts'
-import { sentenceCase } from '@coldfill/presentation'
+import { findingWords, sentenceCase } from '@coldfill/presentation'
+import type { ProjectResult } from '@coldfill/sizing'
 import type { Section } from './section.ts'
 
 /** Open findings, and warnings that a person accepted with a reason. */
-export const findings: Section = ({ result, headings, captions, width }) => {
+export const findings: Section = ({ result, options, headings, captions, width }) => {
   const accepted = result.findings.filter((finding) => finding.accepted !== undefined)
   const open = result.findings.filter((finding) => finding.accepted === undefined)
   const columns = [
@@ -14,6 +15,8 @@ export const findings: Section = ({ result, headings, captions, width }) => {
     { heading: 'Where', width: 23 },
     { heading: 'Finding', width: 32 },
   ]
+  const message = (finding: ProjectResult['findings'][number]) => findingWords(finding, options.units).message
+  const hint = (finding: ProjectResult['findings'][number]) => findingWords(finding, options.units).hint
   return [
     headings.heading('Findings', 1),
     ...(open.length === 0
@@ -26,7 +29,7 @@ export const findings: Section = ({ result, headings, captions, width }) => {
             width,
             strongFirst: true,
             columns: [...columns, { heading: 'What to do', width: 24 }],
-            rows: open.map((f) => [f.code, sentenceCase(f.severity), pathWords(f.path), f.message, f.hint]),
+            rows: open.map((f) => [f.code, sentenceCase(f.severity), pathWords(f.path), message(f), hint(f)]),
           }),
         ]),
     ...(accepted.length === 0
@@ -44,7 +47,7 @@ export const findings: Section = ({ result, headings, captions, width }) => {
               f.code,
               sentenceCase(f.severity),
               pathWords(f.path),
-              f.message,
+              message(f),
               f.accepted ?? '',
             ]),
           }),

@@ -2,7 +2,7 @@ import type { ProjectResult } from '@coldfill/sizing'
 import type { Workbook } from 'exceljs'
 import type { DocumentOptions } from '../document-options.ts'
 import { pathWords } from '../words/path-words.ts'
-import { sentenceCase } from '@coldfill/presentation'
+import { findingWords, sentenceCase } from '@coldfill/presentation'
 import { addSheet, writeTitle } from './sheet.ts'
 import { setPrintArea, writeTable } from './text-table.ts'
 
@@ -37,16 +37,17 @@ export const writeFindings = (
     name: 'Findings',
     columns: COLUMNS,
     at,
-    rows: findings.map((finding) =>
-      [
+    rows: findings.map((finding) => {
+      const { message, hint } = findingWords(finding, options.units)
+      return [
         finding.code,
         sentenceCase(finding.severity),
         pathWords(finding.path),
-        finding.message,
-        finding.hint,
+        message,
+        hint,
         finding.accepted ?? '',
-      ].map((text) => ({ text })),
-    ),
+      ].map((text) => ({ text }))
+    }),
   })
   setPrintArea(sheet, COLUMNS.length, next)
 }

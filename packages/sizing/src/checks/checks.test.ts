@@ -284,6 +284,16 @@ describe('engineering findings', () => {
     expect(end.line > start.line || end.character > start.character).toBe(true)
   })
 
+  it('keep the quantities of their words, for documents in other units', () => {
+    const { findings } = sizeSpec(hydronic({ pressure: '{ static-height: 15 m, relief-valve: 4 bar }' }))
+    const charge = findings.find(({ code }) => code === 'CF-E048')
+    const [quantity, ...others] = charge?.quantities ?? []
+    expect(others).toEqual([])
+    expect(charge?.message).toContain(quantity?.text ?? 'none')
+    // 15 m of water at 10 °C and 4 psi: 15 · 999.7 · 9.80665 + 27,579 = 174.6 kPa.
+    expect((quantity?.value ?? 0) / 1000).toBeCloseTo(174.6, 0)
+  })
+
   it('are all raised by a spec here, or it is said why none can', () => {
     const covered = new Set([...cases.map(([code]) => code), ...Object.keys(elsewhere)])
     expect(Object.keys(engineeringCodes).filter((code) => !covered.has(code))).toEqual([])

@@ -1,8 +1,7 @@
 import { codeMinimumCheck, type Method, site } from '@coldfill/engine'
-import { formatQuantity } from '@coldfill/units'
 import { adoptsCodeMinimum } from '../adopted-codes.ts'
 import type { ResultValue } from '../result.ts'
-import { fromSpec, report, type VesselContext } from '../vessel-context.ts'
+import { fromSpec, report, show, type VesselContext } from '../vessel-context.ts'
 
 /** The least volume of the adopted mechanical code beside a heating vessel that another method sized. */
 export const checkCodeMinimum = (
@@ -31,18 +30,17 @@ export const checkCodeMinimum = (
   const check = codeMinimumCheck(fill, highest, construction === 'plain steel' ? 'plain steel' : 'charged')
   const outcome = calculation.run(check, { t_k: fromSpec(temperature) })
   const entry = calculation.entry('V_k')
-  const show = (value: number) => formatQuantity({ kind: 'volume', value }, spec.project.units?.value ?? 'US')
   if (outcome.warnings.length > 0) {
     report(context, 'CF-E013', {
       severity: 'note',
-      message: `${vessel.mark}: the code equation is stated for 160 to 280 °F and this system is outside it; the minimum of ${show(entry.value)} is shown all the same.`,
+      message: `${vessel.mark}: the code equation is stated for 160 to 280 °F and this system is outside it; the minimum of ${show(context, 'volume', entry.value)} is shown all the same.`,
       hint: 'Ask the authority having jurisdiction which minimum it applies.',
     })
   }
   if (required.value < entry.value) {
     report(context, 'CF-E045', {
-      message: `${vessel.mark} needs ${show(required.value)}, but the minimum of the adopted mechanical code is ${show(entry.value)}.`,
-      hint: `Schedule at least ${show(entry.value)}.`,
+      message: `${vessel.mark} needs ${show(context, 'volume', required.value)}, but the minimum of the adopted mechanical code is ${show(context, 'volume', entry.value)}.`,
+      hint: `Schedule at least ${show(context, 'volume', entry.value)}.`,
     })
   }
   return { 'code-minimum-volume': { kind: 'volume', value: entry.value, name: entry.name, entry: entry.id } }

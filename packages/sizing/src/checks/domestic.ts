@@ -1,8 +1,8 @@
 import { adoptsPlumbingCap } from '../adopted-codes.ts'
 import { gaugeFromSpec } from '../calculate-sections.ts'
 import type { ResultValue } from '../result.ts'
-import { report, type VesselContext } from '../vessel-context.ts'
-import { PSI, show } from './hydronic.ts'
+import { report, show, type VesselContext } from '../vessel-context.ts'
+import { PSI } from './hydronic.ts'
 
 /** Pressures that a reviewing engineer checks at a thermal expansion tank. `atmosphere` in Pa abs. */
 export const checkDomestic = (

@@ -1,9 +1,8 @@
 import { ashraeExpansionCheck, type Method, saturationPressure } from '@coldfill/engine'
-import { formatQuantity, type Kind } from '@coldfill/units'
 import { gaugeFromSpec } from '../calculate-sections.ts'
 import { column, pressureAt, type PressureModel, pressureModel, pressureWhenRunning } from '../pressure-model.ts'
 import type { ResultValue } from '../result.ts'
-import { report, type VesselContext } from '../vessel-context.ts'
+import { report, show, type VesselContext } from '../vessel-context.ts'
 
 export const PSI = 6894.757293168361
 const BOILING = 373.15
@@ -15,9 +14,6 @@ const MEMBRANE = 343.15
 const USUAL_RATING = (240 + 459.67) / 1.8
 
 type Results = Readonly<Record<string, ResultValue>>
-
-export const show = (context: VesselContext, kind: Kind, value: number): string =>
-  formatQuantity({ kind, value }, context.spec.project.units?.value ?? 'US')
 
 /** A charge that is written and is not the fill pressure; or the word that the factory charge must be changed. */
 const checkCharge = (context: VesselContext, results: Results, atmosphere: number): void => {

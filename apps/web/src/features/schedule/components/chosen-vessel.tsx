@@ -1,3 +1,4 @@
+import { findingWords } from '@coldfill/presentation'
 import { formatQuantity, type Kind, type UnitSystem } from '@coldfill/units'
 import { Link } from 'react-router-dom'
 import { Prose } from '#components/ui/prose.tsx'
@@ -115,9 +116,9 @@ export const ChosenVessel = ({
             <Link className="font-mono text-cell" to={paths.help(finding.code)}>
               {finding.code}
             </Link>{' '}
-            <Prose text={finding.message} />{' '}
+            <Prose text={findingWords(finding, units).message} />{' '}
             <span className="text-pencil">
-              <Prose text={finding.hint} />
+              <Prose text={findingWords(finding, units).hint} />
             </span>
           </span>
         </p>
