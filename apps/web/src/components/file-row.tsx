@@ -11,7 +11,7 @@ const kinds = {
 /** A file of a revision: what it is, size, fingerprint, and the way to get it. */
 export const FileRow = ({ file }: { readonly file: RevisionFile }) => (
   <li className="border-b border-hair py-2.5">
-    <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
+    <div className="flex items-center justify-between gap-x-6 gap-y-2 max-desk:flex-col max-desk:items-start">
       <div className="min-w-0">
         <p className="font-semibold break-words">{file.name}</p>
         <p className="text-cell text-pencil">

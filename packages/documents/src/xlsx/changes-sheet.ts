@@ -18,24 +18,27 @@ const COLUMNS = [
   { heading: 'Change', width: 12, align: 'right' as const },
 ]
 
-/** Results that differ from the issue before this one; the letter of this revision stands beside each. */
+/** Results that differ from the issue before this one, if there is one; the letter of this revision stands beside each. */
 export const writeChanges = (
   workbook: Workbook,
   name: string,
   { project }: ProjectResult,
   options: DocumentOptions,
-  { revision, changed }: NonNullable<DocumentOptions['comparison']>,
 ): void => {
+  const { comparison } = options
+  const changed = comparison?.changed ?? []
   const sheet = addSheet(workbook, name, project, options, {
     orientation: 'landscape',
     widths: COLUMNS.map((column) => column.width),
   })
   const at = writeTitle(
     sheet,
-    comparisonTitle(revision),
-    changed.length === 0
-      ? 'No result of any vessel differs.'
-      : `Every result that differs, as of ${revisionWords(options.titleBlock.revision)}. What is not listed has not changed.`,
+    comparison ? comparisonTitle(comparison.revision) : 'Revision changes',
+    !comparison
+      ? 'There is no issue before this one to compare with.'
+      : changed.length === 0
+        ? 'No result of any vessel differs.'
+        : `Every result that differs, as of ${revisionWords(options.titleBlock.revision)}. What is not listed has not changed.`,
     options,
   )
   const side = (value: ChangedEntry['was'], kind: string): CellContent => {

@@ -29,12 +29,12 @@ export const writeFindings = (
   const { findings } = result
   const at = writeTitle(
     sheet,
-    'Findings',
+    'Checks',
     findings.length === 0 ? 'No check found anything.' : 'What the checks of the spec and of the sizing found.',
     options,
   )
   const next = writeTable(sheet, {
-    name: 'Findings',
+    name: 'Checks',
     columns: COLUMNS,
     at,
     rows: findings.map((finding) => {

@@ -43,9 +43,10 @@ describe('the schedule workbook', () => {
       'Thermal expansion tanks',
       'ET-1',
       'TET-1',
+      'Revision changes',
       'Readings',
       'Assumptions',
-      'Findings',
+      'Checks',
       'Sources',
       'Fluid data',
     ])

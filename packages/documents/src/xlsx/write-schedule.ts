@@ -49,10 +49,10 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
   const calculations = result.vessels
     .filter((vessel) => vessel.trace.length > 0)
     .map((vessel) => ({ name: names.take(vessel.mark), vessel }))
-  const changes = options.comparison ? names.take('Revision changes') : null
+  const changes = names.take('Revision changes')
   const readings = names.take('Readings')
   const assumptions = names.take('Assumptions')
-  const findings = names.take('Findings')
+  const findings = names.take('Checks')
   const sources = names.take('Sources')
   const fluidData = names.take('Fluid data')
   const contents: ContentsEntry[] = [
@@ -64,7 +64,7 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
       sheet: name,
       about: `Calculation of ${vessel.mark}, ${sentenceCase(vessel.kind).toLowerCase()}, ${vessel.serves}`,
     })),
-    ...(changes === null ? [] : [{ sheet: changes, about: 'Results that differ from the issue before this one' }]),
+    { sheet: changes, about: 'Results that differ from the issue before this one' },
     { sheet: readings, about: 'What is to be read on site, with cells to write it into' },
     { sheet: assumptions, about: 'Numbered register of the defaults that the results lean on' },
     { sheet: findings, about: 'What the checks found, and what was accepted with a reason' },
@@ -104,7 +104,7 @@ export const writeSchedule = async (result: ProjectResult, options: DocumentOpti
     vessels.set(`${vessel.system}/${vessel.mark}`, { sheet: name, cells: sheet.cells })
   }
   for (const { table, name } of schedules) writeScheduleSheet(workbook, name, table, vessels, project, options)
-  if (changes !== null && options.comparison) writeChanges(workbook, changes, result, options, options.comparison)
+  writeChanges(workbook, changes, result, options)
   writeReadings(workbook, readings, result, options, vessels)
   const cellNames = namedCells(result, vessels)
   writeAssumptions(workbook, assumptions, result, options)
