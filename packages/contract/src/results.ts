@@ -20,6 +20,8 @@ export const Results = z.object({
   revision: z.string().nullable(),
   contentHash: z.string(),
   result: ProjectResult,
+  /** Who put a value in the place of an assumption, and when; those alone that are known. */
+  assumptionChanges: z.array(z.object({ assumption: z.string(), by: z.string(), at: z.string() })),
   /** Against the revision before this one; null where there is none. */
   changedSince: z.object({ revision: z.string(), vessels: z.array(ChangedResult) }).nullable(),
 })

@@ -72,6 +72,13 @@ export interface ChangedEntry {
   readonly now: number | string | null
 }
 
+/** Who put a value in the place of an assumption. `date` is an ISO date. */
+export interface AssumptionChangeEntry {
+  readonly assumption: string
+  readonly by: string
+  readonly date: string
+}
+
 /** A picture of the office; pixels say its proportions. */
 export interface Logo {
   readonly data: Uint8Array
@@ -93,6 +100,8 @@ export interface DocumentOptions {
   readonly outcomes?: readonly string[]
   /** Redlines with their answers, in order of number. */
   readonly redlines?: readonly RedlineEntry[]
+  /** Who changed which assumption; the reason stands in the result. */
+  readonly assumptionChanges?: readonly AssumptionChangeEntry[]
   /** Results that differ from the issue before this one, whose revision is named. */
   readonly comparison?: { readonly revision: string; readonly changed: readonly ChangedEntry[] }
   /** Why and by whom an issue for construction was made over a gate that did not pass. */

@@ -1,5 +1,6 @@
 export {
   CONSTRUCTION_STATUS,
+  type AssumptionChangeEntry,
   type ChangedEntry,
   type DispositionEntry,
   type DocumentOptions,

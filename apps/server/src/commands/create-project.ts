@@ -9,7 +9,9 @@ import { withTx } from '../db/with-tx.ts'
 import { AppError, badBody, notAllowed } from '../errors.ts'
 import { projectAccess, requireInside, seesWorkingCopy } from '../policies/project-access.ts'
 import type { Principal } from '../sign-in/sessions.ts'
+import { noteAssumptionChanges } from './note-assumption-changes.ts'
 import { recordEvent } from './record-event.ts'
+import { sizedText } from './save-spec.ts'
 
 export const DEFAULT_EXAMPLE = 'fernhollow'
 
@@ -47,6 +49,7 @@ export const createProject = async (
       : request.from === 'example'
         ? await exampleSpec(deps.examplesFolder, request.example ?? DEFAULT_EXAMPLE)
         : await copiedSpec(deps, principal, request.from.copy)
+  const sized = await sizedText(deps, text)
   const now = deps.clock()
   return withTx(deps.db, async (tx) => {
     const [project] = await tx
@@ -63,6 +66,7 @@ export const createProject = async (
       )
     await tx.insert(members).values({ projectId: project.id, userId: principal.userId, roles: ['consultant'] })
     await tx.insert(specs).values({ projectId: project.id, text, savedAt: now, savedBy: principal.userId })
+    if (sized) await noteAssumptionChanges(tx, project.id, sized, principal.userId, now)
     await recordEvent(tx, principal, now, { action: 'project opened', project: project.number, detail: project.title })
     return project.number
   })

@@ -1,10 +1,12 @@
 import { and, eq } from 'drizzle-orm'
 import type { SaveSpecRequest } from '@coldfill/contract'
+import type { ProjectResult } from '@coldfill/sizing'
 import type { Deps } from '../deps.ts'
 import { projects, specs, users } from '../db/schema/index.ts'
 import { withTx } from '../db/with-tx.ts'
 import { AppError } from '../errors.ts'
 import type { ProjectAccess } from '../policies/project-access.ts'
+import { noteAssumptionChanges } from './note-assumption-changes.ts'
 import { recordEvent } from './record-event.ts'
 
 export interface SavedSpec {
@@ -14,17 +16,23 @@ export interface SavedSpec {
   readonly savedBy: { readonly id: string; readonly name: string; readonly initials: string }
 }
 
-/** Title and client as the text says them; a text that cannot be sized says neither and is saved all the same. */
-const headerOf = async ({ sizing }: Deps, text: string): Promise<{ title?: string; client?: string }> => {
+/** What the text says; null for one that cannot be sized, which is saved all the same. */
+export const sizedText = async ({ sizing }: Pick<Deps, 'sizing'>, text: string): Promise<ProjectResult | null> => {
   try {
-    const { project } = (await sizing.size(text)).result
-    return {
-      ...(project.title.trim() === '' ? {} : { title: project.title.trim().slice(0, 120) }),
-      ...(project.client.trim() === '' ? {} : { client: project.client.trim().slice(0, 120) }),
-    }
+    const { result } = await sizing.size(text)
+    return result.readable ? result : null
   } catch (error) {
-    if (error instanceof AppError && error.status === 422) return {}
+    if (error instanceof AppError && error.status === 422) return null
     throw error
+  }
+}
+
+/** Title and client as the text says them. */
+const headerOf = (result: ProjectResult | null): { title?: string; client?: string } => {
+  const [title = '', client = ''] = [result?.project.title.trim(), result?.project.client.trim()]
+  return {
+    ...(title === '' ? {} : { title: title.slice(0, 120) }),
+    ...(client === '' ? {} : { client: client.slice(0, 120) }),
   }
 }
 
@@ -34,7 +42,8 @@ const headerOf = async ({ sizing }: Deps, text: string): Promise<{ title?: strin
  */
 export const saveSpec = async (deps: Deps, access: ProjectAccess, request: SaveSpecRequest): Promise<SavedSpec> => {
   const now = deps.clock()
-  const header = await headerOf(deps, request.text)
+  const sized = await sizedText(deps, request.text)
+  const header = headerOf(sized)
   const { principal, project } = access
   const me = { id: principal.userId, name: principal.name, initials: principal.initials }
   return withTx(deps.db, async (tx) => {
@@ -63,6 +72,7 @@ export const saveSpec = async (deps: Deps, access: ProjectAccess, request: SaveS
       )
     }
     if (Object.keys(header).length > 0) await tx.update(projects).set(header).where(eq(projects.id, project.id))
+    if (sized) await noteAssumptionChanges(tx, project.id, sized, me.id, now)
     await recordEvent(tx, principal, now, {
       action: 'spec saved',
       project: project.number,

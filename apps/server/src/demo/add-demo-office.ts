@@ -1,6 +1,7 @@
 import { readFile } from 'node:fs/promises'
 import { join } from 'node:path'
 import { exampleCatalogueFile } from '../catalogue/example-catalogue.ts'
+import { noteAssumptionChanges } from '../commands/note-assumption-changes.ts'
 import { putCatalogue } from '../commands/put-catalogue.ts'
 import { blankSpec } from '../blank-spec.ts'
 import type { Clock } from '../clock.ts'
@@ -52,12 +53,12 @@ export const addDemoOffice = async ({ db, clock, passwords, sizing, examplesFold
         office.projects.map(async (project) => {
           const text = await specOf(examplesFolder, project)
           // The header of the spec is welcome, not needed: a start does not fail for it.
-          const header = await sizing.size(text).then(
-            ({ result }) => result.project,
-            () => ({ title: '', client: '' }),
+          const sized = await sizing.size(text).then(
+            ({ result }) => result,
+            () => null,
           )
-          const title = header.title === '' ? project.title : header.title
-          return { number: project.number, title, client: header.client, text }
+          const title = sized?.project.title || project.title
+          return { number: project.number, title, client: sized?.project.client ?? '', text, sized }
         }),
       ),
     })),
@@ -86,7 +87,7 @@ export const addDemoOffice = async ({ db, clock, passwords, sizing, examplesFold
       if (catalogue && administrator) given.push({ name: administrator.name, office: { id: office.id, name } })
       const idOf = new Map(added.map((user) => [user.email, user.id]))
       const consultant = people.find(({ roles }) => roles.includes('consultant'))
-      for (const [index, { number, title, client, text }] of opened.entries()) {
+      for (const [index, { number, title, client, text, sized }] of opened.entries()) {
         const [project] = await tx
           .insert(projects)
           .values({ officeId: office.id, number, title, client, createdAt: new Date(now.getTime() + index) })
@@ -94,6 +95,7 @@ export const addDemoOffice = async ({ db, clock, passwords, sizing, examplesFold
         const savedBy = idOf.get(consultant?.email ?? '')
         if (!project || savedBy === undefined) throw new Error('The demo project was not written.')
         await tx.insert(specs).values({ projectId: project.id, text, savedAt: now, savedBy })
+        if (sized) await noteAssumptionChanges(tx, project.id, sized, savedBy, now)
         for (const { email, roles } of people) {
           const userId = idOf.get(email)
           if (roles.length > 0 && userId !== undefined)

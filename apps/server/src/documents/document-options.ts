@@ -1,6 +1,7 @@
 import { OUTCOME_LABELS } from '@coldfill/contract'
 import type { DispositionEntry, DocumentOptions, RedlineEntry, RevisionEntry } from '@coldfill/documents'
 import type { ProjectResult } from '@coldfill/sizing'
+import type { AssumptionChange } from '../review/assumption-changes.ts'
 import type { MakingRow, ProjectFacts, RevisionRow } from '../review/project-facts.ts'
 import { isAccepting, standingDispositions } from '../review/standing.ts'
 import type { StoredTitleBlock } from '../title-block/stored-title-block.ts'
@@ -58,6 +59,7 @@ export type Order = Pick<
 /** Parts of a document that are read from the store. */
 export interface Enclosed {
   readonly comparison: DocumentOptions['comparison']
+  readonly assumptionChanges: readonly AssumptionChange[]
   /** Null where the order asks for none. */
   readonly redlines: readonly RedlineEntry[] | null
   /** The office's title block of the order; null where it has none of its own. */
@@ -75,7 +77,7 @@ export const documentOptions = (
   revision: RevisionRow,
   order: Order,
   result: ProjectResult,
-  { comparison, redlines, titleBlock }: Enclosed,
+  { comparison, assumptionChanges, redlines, titleBlock }: Enclosed,
 ): DocumentOptions => {
   const forConstruction = order.set === 'construction'
   const accepting = standingDispositions(facts, revision).filter(({ row, stale }) => !stale && isAccepting(row))
@@ -97,6 +99,7 @@ export const documentOptions = (
     },
     revisions: revisionBlock(facts, revision, order),
     ...(comparison ? { comparison } : {}),
+    assumptionChanges: assumptionChanges.map(({ assumption, by, at }) => ({ assumption, by, date: day(at) })),
     ...(redlines ? { redlines } : {}),
     ...(titleBlock?.logo ? { logo: titleBlock.logo } : {}),
     ...(titleBlock && titleBlock.paper !== 'by units' ? { paper: titleBlock.paper } : {}),

@@ -3,6 +3,7 @@ import type { DocumentOptions } from '@coldfill/documents'
 import type { ProjectResult } from '@coldfill/sizing'
 import type { Database } from '../db/client.ts'
 import { offices, projects, revisions } from '../db/schema/index.ts'
+import { changedAssumptions } from '../review/assumption-changes.ts'
 import { changedResults } from '../review/changed-results.ts'
 import { frozenContent } from '../review/frozen.ts'
 import { type ProjectFacts, projectFacts, type RevisionRow } from '../review/project-facts.ts'
@@ -45,6 +46,7 @@ export const gatherDocuments = async (
       revision: before.label,
       changed: changedResults((await frozenContent(db, before.id)).result, result),
     },
+    assumptionChanges: await changedAssumptions(db, found.project.id, result, revision.issuedAt),
     redlines: order.withRedlines ? await redlineEntries(db, facts, revision, redlinesAt) : null,
     titleBlock: await storedTitleBlock(db, order.titleBlockId),
   })

@@ -1,11 +1,19 @@
 import { leadIn, paragraph } from '../docx/paragraph.ts'
 import { table } from '../docx/table.ts'
+import { changedBy } from '../words/assumption-words.ts'
 import { citationWords } from '../words/source-words.ts'
 import { sentenceCase } from '@coldfill/presentation'
+import type { ProjectResult } from '@coldfill/sizing'
+import type { DocumentOptions } from '../document-options.ts'
 import type { Section } from './section.ts'
 
+const changeWords = (assumption: ProjectResult['assumptions'][number], options: DocumentOptions): string => {
+  const by = changedBy(assumption, options)
+  return by === '' ? `Set in the spec: ${assumption.reason}` : `Set in the spec by ${by}: ${assumption.reason}`
+}
+
 /** The numbered register of every default that the results lean on, and of what replaced one. */
-export const assumptions: Section = ({ result, headings, captions, comments, width }) => {
+export const assumptions: Section = ({ result, options, headings, captions, comments, width }) => {
   const { assumptions: used } = result
   if (used.length === 0) {
     return [
@@ -50,7 +58,7 @@ export const assumptions: Section = ({ result, headings, captions, comments, wid
           ? assumption.value
           : `${assumption.value} (default ${assumption.defaultValue})`,
         citationWords(assumption.source, result),
-        assumption.overridden && assumption.reason ? `Set in the spec: ${assumption.reason}` : assumption.because,
+        assumption.overridden && assumption.reason ? changeWords(assumption, options) : assumption.because,
         assumption.usedBy.join(', '),
       ]),
     }),

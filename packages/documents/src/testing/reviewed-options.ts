@@ -22,6 +22,7 @@ export const reviewedOptions = (units: UnitSystem, status = 'Issued for construc
     },
     { reviewer: 'B. Lark', outcome: 'Accepted as noted', reason: 'See redline 2.', date: '2026-11-30' },
   ],
+  assumptionChanges: [{ assumption: 'relief-margin.hydronic', by: 'A. Rowan', date: '2026-11-18' }],
   redlines: [
     {
       number: 1,

@@ -1,6 +1,7 @@
 import type { ProjectResult } from '@coldfill/sizing'
 import type { Workbook } from 'exceljs'
 import type { DocumentOptions } from '../document-options.ts'
+import { changedBy } from '../words/assumption-words.ts'
 import { citationWords } from '../words/source-words.ts'
 import { sentenceCase } from '@coldfill/presentation'
 import { addSheet, writeTitle } from './sheet.ts'
@@ -14,6 +15,7 @@ const COLUMNS = [
   { heading: 'Source', width: 34 },
   { heading: 'Why', width: 38 },
   { heading: 'Reason for the change', width: 24 },
+  { heading: 'Changed by', width: 16 },
   { heading: 'Used by', width: 18 },
 ]
 
@@ -47,6 +49,7 @@ export const writeAssumptions = (
         citationWords(assumption.source, result),
         assumption.because,
         assumption.reason ?? '',
+        changedBy(assumption, options),
         assumption.usedBy.join(', '),
       ].map((text) => ({ text })),
     ),

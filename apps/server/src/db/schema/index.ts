@@ -1,3 +1,4 @@
+export * from './assumption-changes.ts'
 export * from './audit-events.ts'
 export * from './catalogues.ts'
 export * from './dispositions.ts'

@@ -4,6 +4,7 @@ import type { Deps } from '../../deps.ts'
 import { accessIn } from '../../middleware/require-project.ts'
 import { queryText } from '../../parse-request.ts'
 import { seesWorkingCopy } from '../../policies/project-access.ts'
+import { changedAssumptions } from '../../review/assumption-changes.ts'
 import { changedResults } from '../../review/changed-results.ts'
 import { revisionOrNewest } from '../../review/find-revision.ts'
 import { frozenContent } from '../../review/frozen.ts'
@@ -20,15 +21,22 @@ export const resultsRouter = (deps: Deps): Router =>
       before
         ? { revision: before.label, vessels: changedResults((await frozenContent(deps.db, before.id)).result, now) }
         : null
+    const changes = async (result: Results['result'], until: Date | null): Promise<Results['assumptionChanges']> =>
+      (await changedAssumptions(deps.db, access.project.id, result, until)).map(({ at, ...change }) => ({
+        ...change,
+        at: at.toISOString(),
+      }))
     if (rev === undefined && seesWorkingCopy(access)) {
       const { result, contentHash } = await workingCopy(deps.db, deps.sizing, access.project)
       const changedSince = await since(facts.revisions[0], result)
-      res.json({ revision: null, contentHash, result, changedSince } satisfies Results)
+      const assumptionChanges = await changes(result, null)
+      res.json({ revision: null, contentHash, result, assumptionChanges, changedSince } satisfies Results)
       return
     }
     const revision = revisionOrNewest(facts, rev)
     const { result, contentHash } = await frozenContent(deps.db, revision.id)
     const before = facts.revisions.find(({ sequence }) => sequence < revision.sequence)
     const changedSince = await since(before, result)
-    res.json({ revision: revision.label, contentHash, result, changedSince } satisfies Results)
+    const assumptionChanges = await changes(result, revision.issuedAt)
+    res.json({ revision: revision.label, contentHash, result, assumptionChanges, changedSince } satisfies Results)
   })

@@ -105,7 +105,7 @@ export function Component() {
       }}
     >
       <Loaded query={results} what="Loading the basis">
-        {({ result }) => (
+        {({ result, assumptionChanges }) => (
           <div className="flex max-w-5xl flex-col gap-8">
             <p className="text-read">
               Every value that the spec leaves open, with its source and its reason. A value written in the spec takes
@@ -123,6 +123,7 @@ export function Component() {
                       key={assumption.id}
                       assumption={assumption}
                       sources={result.sources}
+                      change={assumptionChanges.find((change) => change.assumption === assumption.id)}
                       chosen={assumption.id === chosenId}
                       onChoose={() => {
                         choose(assumption.id)
