@@ -24,6 +24,11 @@ it('gives each value before and after, at full precision', () => {
   })
 })
 
+it('takes a value that is written in other units for the same', () => {
+  // 2.0684271879504 bar are 30 psi to the last digit that is kept.
+  expect(changedResults(sized(), sized({ relief: '2.0684271879504 bar' }))).toEqual([])
+})
+
 it('lists a vessel that is new, and one that is gone behind the others', () => {
   const changed = changedResults(sized({ marks: ['ET-1'] }), sized({ marks: ['ET-2'] }))
   const status = changed.filter(({ key }) => key === 'status')

@@ -3,8 +3,17 @@ import type { ProjectResult, VesselResult } from '@coldfill/sizing'
 
 const keyOf = (vessel: VesselResult): string => `${vessel.system}/${vessel.mark}`
 
-const selectedWords = (vessel: VesselResult | undefined): string | null =>
-  vessel?.selected ? `${vessel.selected.maker} ${vessel.selected.model} × ${vessel.selected.quantity}` : null
+const chosenWords = (vessel: VesselResult | undefined): string | null => {
+  const selected = vessel?.selected
+  return selected
+    ? `${selected.quantity > 1 ? `${selected.quantity} × ` : ''}${selected.maker} ${selected.model}`
+    : null
+}
+
+/** Rounding of the last bit, as between two ways of writing a value, is no change. */
+const same = (a: ChangedResult['was'], b: ChangedResult['was']): boolean =>
+  a === b ||
+  (typeof a === 'number' && typeof b === 'number' && Math.abs(a - b) <= 1e-9 * Math.max(Math.abs(a), Math.abs(b)))
 
 const compareVessel = (was: VesselResult | undefined, now: VesselResult | undefined): ChangedResult[] => {
   const either = now ?? was
@@ -18,7 +27,7 @@ const compareVessel = (was: VesselResult | undefined, now: VesselResult | undefi
     before: ChangedResult['was'],
     after: ChangedResult['now'],
   ): void => {
-    if (before !== after) changed.push({ system, mark, key, name, kind, was: before, now: after })
+    if (!same(before, after)) changed.push({ system, mark, key, name, kind, was: before, now: after })
   }
   note('status', 'Status', 'words', was?.status ?? null, now?.status ?? null)
   for (const key of new Set([...Object.keys(was?.results ?? {}), ...Object.keys(now?.results ?? {})])) {
@@ -32,7 +41,7 @@ const compareVessel = (was: VesselResult | undefined, now: VesselResult | undefi
       after?.value ?? null,
     )
   }
-  note('selected', 'Selected vessel', 'words', selectedWords(was), selectedWords(now))
+  note('selected', 'Chosen vessel', 'words', chosenWords(was), chosenWords(now))
   return changed
 }
 
