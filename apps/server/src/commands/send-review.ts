@@ -57,7 +57,7 @@ export const sendReview = async (
     await recordEvent(tx, principal, now, {
       action: 'disposition set',
       project: project.number,
-      detail: `${revisionTitle(row.label)}: ${OUTCOME_LABELS[review.outcome]}${review.reason === '' ? '' : `. Reason: ${review.reason}`}. Redlines published: ${published.length}`,
+      detail: `${revisionTitle(row.label)}: ${OUTCOME_LABELS[review.outcome]}; redlines published: ${published.length}${review.reason === '' ? '' : `. Reason: ${review.reason}`}`,
     })
     await queueMail(
       tx,
