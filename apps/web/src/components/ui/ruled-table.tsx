@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react'
+import { Scrollable } from './scrollable.tsx'
 
 /** A plain ruled table: heavy rule over the head, medium under it, hair lines between rows. */
 export const RuledTable = ({
@@ -12,13 +13,13 @@ export const RuledTable = ({
   readonly children: ReactNode
   readonly className?: string
 }) => (
-  <div className="relative max-w-full overflow-x-auto" tabIndex={-1}>
+  <Scrollable label={caption} className="relative">
     <table className={`w-full border-t-[3px] border-ink text-cell ${className}`}>
       <caption className="sr-only">{caption}</caption>
       <thead>{head}</thead>
       <tbody>{children}</tbody>
     </table>
-  </div>
+  </Scrollable>
 )
 
 export const HeadCell = ({

@@ -7,6 +7,7 @@ import {
 } from '@coldfill/spec'
 import { useMemo } from 'react'
 import { Prose } from '#components/ui/prose.tsx'
+import { Scrollable } from '#components/ui/scrollable.tsx'
 import { capital } from '#lib/format.ts'
 
 /** Lists longer than this are folded away. */
@@ -62,7 +63,9 @@ const Key = ({ entry }: { readonly entry: ReferenceKey }) => {
           {entry.section === undefined ? null : (
             <>
               {' '}
-              <a href={`#key-${entry.section}`}>Its keys</a>
+              <a className="underline" href={`#key-${entry.section}`}>
+                Its keys
+              </a>
             </>
           )}
         </p>
@@ -101,9 +104,12 @@ const Section = ({
       )}
     </p>
     {example === undefined ? null : (
-      <pre className="mt-1 overflow-x-auto border border-hair bg-well px-3 py-2 font-mono text-[12.5px] leading-[18px]">
-        {example}
-      </pre>
+      <Scrollable
+        label="Example"
+        className="mt-1 border border-hair bg-well px-3 py-2 font-mono text-[12.5px] leading-[18px]"
+      >
+        <pre className="w-max">{example}</pre>
+      </Scrollable>
     )}
     {section.keys.length > 0 ? (
       <dl className="mt-1 border-t-2 border-ink">
@@ -121,9 +127,9 @@ export const SpecReference = ({ vocabulary }: { readonly vocabulary: Vocabulary 
   const examples = useMemo(() => new Map(kinds.map(({ section, example }) => [section, example])), [kinds])
   return (
     <>
-      <nav aria-label="Sections of the spec" className="mb-4 flex flex-wrap gap-x-4 gap-y-1 text-cell">
+      <nav aria-label="Sections of the spec" className="mb-4 flex flex-wrap gap-x-4 gap-y-0 text-cell">
         {sections.map(({ id, title }) => (
-          <a key={id} href={`#key-${id}`}>
+          <a key={id} href={`#key-${id}`} className="py-1">
             {title}
           </a>
         ))}

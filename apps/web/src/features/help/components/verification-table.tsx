@@ -1,5 +1,6 @@
 import type { Verification, VerificationFigure } from '@coldfill/contract'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
+import { Scrollable } from '#components/ui/scrollable.tsx'
 import { capital } from '#lib/format.ts'
 import { deviationWords, toleranceWords } from '../verification-filter.ts'
 
@@ -66,7 +67,7 @@ const FigureRow = ({ figure }: { readonly figure: VerificationFigure }) => (
 
 /** The manual as one table, so that columns align from source to source. */
 export const VerificationTable = ({ groups }: { readonly groups: Verification['groups'] }) => (
-  <div className="max-w-full overflow-x-auto print:overflow-visible">
+  <Scrollable label="Verification" className="print:overflow-visible">
     <table className="w-full min-w-220 table-fixed border-t-[3px] border-ink text-cell">
       <caption className="sr-only">Figures of publications, and what the program computes</caption>
       <colgroup>
@@ -114,5 +115,5 @@ export const VerificationTable = ({ groups }: { readonly groups: Verification['g
         </tbody>
       ))}
     </table>
-  </div>
+  </Scrollable>
 )
