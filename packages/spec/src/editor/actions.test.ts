@@ -106,6 +106,11 @@ describe('what mends a finding', () => {
     expect(after(text, 'blader', 'Mend all 2 findings of CF-S007')).toBe(baseSpec)
   })
 
+  it('puts a line with a tab below the key that opens its block, however far in that stands', () => {
+    const text = 'coldfill: 1\nsystems:\n  A:\n    service: steam\n    vessels:\n\tV-1: { kind: flash tank }\n'
+    expect(after(text, '\tV-1', 'Write spaces for tabs')).toContain('    vessels:\n      V-1: { kind: flash tank }\n')
+  })
+
   it('writes spaces for every tab in the indentation', () => {
     const text = within(
       '      static-height: 42 ft\n      top-margin',

@@ -128,6 +128,32 @@ const insideBraces = (report: Report, text: string, span: Span): void => {
   )
 }
 
+/** How far up the line that a tab stands below is looked for: every line of a text may have its tab. */
+const LINES_UP = 20
+
+/** The line above that says something; empty where none is near. */
+const lineAbove = (text: string, offset: number): string => {
+  let end = lineStart(text, offset) - 1
+  for (let n = 0; n < LINES_UP && end >= 0; n += 1) {
+    const start = lineStart(text, end)
+    const line = text.slice(start, end)
+    if (/^\s*[^\s#]/u.test(line)) return line
+    end = start - 1
+  }
+  return ''
+}
+
+/**
+ * Spaces for tabs: two each; or, below a key that opens a block further in, two more than that key, for the tabs of an editor
+ * say nothing of how wide they were meant.
+ */
+const widthForTabs = (text: string, tabs: Span): number => {
+  const each = 2 * (tabs.end - tabs.start)
+  const opening = /^( *)(?:- )?[^#]*:\s*(?:#.*)?$/u.exec(lineAbove(text, tabs.start))
+  const indent = opening?.[1]?.length ?? -1
+  return each <= indent ? indent + 2 : each
+}
+
 /** Puts what the YAML parser stumbled over into words for a person who writes specs. */
 export const reportYamlProblem = (report: Report, text: string, error: YAMLError): void => {
   const span = { start: error.pos[0], end: Math.min(error.pos[1], text.length) }
@@ -151,7 +177,7 @@ export const reportYamlProblem = (report: Report, text: string, error: YAMLError
         {
           message: 'A tab indents this line. YAML takes spaces only.',
           hint: 'Write two spaces for each level.',
-          fixes: [{ title: 'Write spaces for tabs', span: tabs, text: '  '.repeat(tabs.end - tabs.start) }],
+          fixes: [{ title: 'Write spaces for tabs', span: tabs, text: ' '.repeat(widthForTabs(text, tabs)) }],
         },
       )
     }
