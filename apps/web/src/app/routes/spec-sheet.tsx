@@ -1,12 +1,13 @@
-import type { Project, Reference, SpecDocument } from '@coldfill/contract'
+import type { Project, Redline, Reference, SpecDocument } from '@coldfill/contract'
 import { acceptFix, pathRange, type Range } from '@coldfill/spec'
-import type { UseQueryResult } from '@tanstack/react-query'
+import { useQuery, type UseQueryResult } from '@tanstack/react-query'
 import { useCallback, useEffect, useEffectEvent, useMemo, useRef, useState } from 'react'
 import { useNavigate } from 'react-router-dom'
 import { Failure } from '#components/failure.tsx'
 import { Sheet } from '#components/layouts/sheet.tsx'
 import { Band } from '#components/ui/band.tsx'
 import { paths, withQuery } from '#config/paths.ts'
+import { redlinesQuery } from '#features/redlines/api/redlines.ts'
 import { RevisionSwitch } from '#features/results/components/revision-switch.tsx'
 import { UnitsSwitch } from '#features/results/components/units-switch.tsx'
 import { otherText, type CompareWith } from '#features/spec/compare-with.ts'
@@ -38,6 +39,7 @@ interface Props {
 }
 
 const NO_REASONS = {}
+const NONE: readonly Redline[] = []
 const lineRange = (line: number): Range => ({ start: { line, character: 0 }, end: { line, character: 0 } })
 
 export const SpecSheet = ({ project, user, document, rev, reference }: Props) => {
@@ -68,6 +70,10 @@ export const SpecSheet = ({ project, user, document, rev, reference }: Props) =>
   const compared = wanted !== null && otherText(wanted, draft) !== null ? wanted : null
 
   const { latest, good, stale, error, issued, newest } = useSpecResults(project, document, rev, text)
+  const redlines = useQuery({
+    ...redlinesQuery(number, rev),
+    enabled: project.revisions.length > 0 && project.sheets.includes('redlines'),
+  })
   const { units, setUnits } = useUnits(good?.result.project.units)
 
   const vocabulary = reference.data?.vocabulary
@@ -181,6 +187,7 @@ export const SpecSheet = ({ project, user, document, rev, reference }: Props) =>
           findings={findings}
           entries={entries}
           stale={stale}
+          redlines={redlines.data ?? NONE}
           onJump={jumpTo}
         />
         <div className="relative min-h-0 min-w-0 flex-1">

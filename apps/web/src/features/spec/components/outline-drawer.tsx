@@ -31,7 +31,7 @@ export const OutlineDrawer = ({ open, onClose, onJump, ...rest }: Props) => {
     <div
       ref={drawer}
       id="outline"
-      className={`min-h-0 shrink-0 bg-sheet max-desk:h-[55%] max-desk:border-b-2 max-desk:border-ink desk:w-52 zones:block ${open ? '' : 'hidden'}`}
+      className={`min-h-0 shrink-0 bg-sheet max-desk:h-[55%] max-desk:border-b-2 max-desk:border-ink desk:w-58 zones:block ${open ? '' : 'hidden'}`}
       onKeyDown={(event) => {
         if (event.key !== 'Escape' || !open) return
         event.preventDefault()

@@ -1,3 +1,4 @@
+import type { Redline } from '@coldfill/contract'
 import { outlineOf, type OutlineItem, type Range } from '@coldfill/spec'
 import { memo, useMemo, useState } from 'react'
 import { SeverityMark } from '#components/ui/severity-mark.tsx'
@@ -5,16 +6,26 @@ import { plural } from '#lib/format.ts'
 import type { Finding } from '#lib/sized-project.ts'
 import type { MarginEntry } from '../margin-lines.ts'
 import { badgesOf, type Badge } from '../outline-badges.ts'
+import { redlinesOf } from '../redlined.ts'
 
 interface Props {
   readonly text: string
   readonly findings: readonly Finding[]
   readonly entries: readonly MarginEntry[]
   readonly stale: boolean
+  /** Those of the newest issue, or of the one that is shown. */
+  readonly redlines: readonly Redline[]
   readonly onJump: (range: Range) => void
 }
 
-type Filter = 'all' | 'findings' | 'changed'
+type Filter = 'all' | 'findings' | 'changed' | 'redlines'
+
+const NOTHING: Readonly<Record<Filter, string>> = {
+  all: 'Nothing is written yet.',
+  findings: 'No finding.',
+  changed: 'Nothing differs from the last issue.',
+  redlines: 'No open redline.',
+}
 
 const Badges = ({ badge }: { readonly badge: Badge | undefined }) =>
   badge ? (
@@ -24,9 +35,22 @@ const Badges = ({ badge }: { readonly badge: Badge | undefined }) =>
     </span>
   ) : null
 
+/** The flag of a redline, with how many there are. */
+const Redlined = ({ count }: { readonly count: number }) =>
+  count === 0 ? null : (
+    <span
+      title={plural(count, 'open redline')}
+      className="figures inline-flex h-4 min-w-4 shrink-0 items-center justify-center bg-redline px-1 font-mono text-[10px] font-semibold text-sheet"
+    >
+      <span className="sr-only">{plural(count, 'open redline')}</span>
+      <span aria-hidden="true">{count}</span>
+    </span>
+  )
+
 interface ItemProps {
   readonly item: OutlineItem
   readonly badge: Badge | undefined
+  readonly redlines: number
   readonly entry: MarginEntry | undefined
   readonly stale: boolean
   readonly onJump: (range: Range) => void
@@ -34,7 +58,7 @@ interface ItemProps {
 
 const insets = { building: 'pl-3', fluid: 'pl-3', system: 'pl-3', vessel: 'pl-6' } as const
 
-const Item = ({ item, badge, entry, stale, onJump }: ItemProps) => (
+const Item = ({ item, badge, redlines, entry, stale, onJump }: ItemProps) => (
   <button
     type="button"
     onClick={() => onJump(item.range)}
@@ -57,6 +81,7 @@ const Item = ({ item, badge, entry, stale, onJump }: ItemProps) => (
             {entry.size}
           </span>
         ) : null}
+        <Redlined count={redlines} />
         <Badges badge={badge} />
       </span>
     </span>
@@ -68,13 +93,17 @@ const Item = ({ item, badge, entry, stale, onJump }: ItemProps) => (
 
 const flat = (item: OutlineItem): readonly OutlineItem[] => [item, ...item.children.flatMap(flat)]
 
-const Drawn = ({ text, findings, entries, stale, onJump }: Props) => {
+const Drawn = ({ text, findings, entries, stale, redlines, onJump }: Props) => {
   const [filter, setFilter] = useState<Filter>('all')
   const read = useMemo(() => outlineOf(text), [text])
   // While nothing can be read the outline stays as it was.
   const [outline, setOutline] = useState(read)
   if (read && read !== outline) setOutline(read)
   const badges = useMemo(() => (outline ? badgesOf(outline, findings) : new Map<string, Badge>()), [outline, findings])
+  const redlined = useMemo(
+    () => (outline ? redlinesOf(outline, redlines) : new Map<string, number>()),
+    [outline, redlines],
+  )
   if (!outline)
     return (
       <nav aria-label="Outline" className="h-full border-r border-hair py-2">
@@ -84,15 +113,19 @@ const Drawn = ({ text, findings, entries, stale, onJump }: Props) => {
   const entryOf = (item: OutlineItem) =>
     item.sort === 'vessel' ? entries.find((entry) => entry.line === item.range.start.line) : undefined
   const items = flat(outline)
-  const holds = (item: OutlineItem): boolean =>
-    filter === 'all' ||
-    (filter === 'findings' ? badges.has(item.path) : Boolean(entryOf(item)?.was)) ||
-    item.children.some(holds)
+  const answers: Readonly<Record<Filter, (item: OutlineItem) => boolean>> = {
+    all: () => true,
+    findings: ({ path }) => badges.has(path),
+    changed: (item) => Boolean(entryOf(item)?.was),
+    redlines: ({ path }) => redlined.has(path),
+  }
+  const holds = (item: OutlineItem): boolean => answers[filter](item) || item.children.some(holds)
   const shown = items.filter((item) => (item === outline && filter === 'all') || (item !== outline && holds(item)))
   const filters = [
     { id: 'all' as const, label: 'All' },
     { id: 'findings' as const, label: 'Findings' },
     { id: 'changed' as const, label: 'Changed' },
+    { id: 'redlines' as const, label: 'Redlines' },
   ]
   return (
     <nav aria-label="Outline" className="flex h-full flex-col border-r border-hair">
@@ -103,21 +136,24 @@ const Drawn = ({ text, findings, entries, stale, onJump }: Props) => {
             type="button"
             aria-pressed={filter === id}
             onClick={() => setFilter(id)}
-            className={`h-7 flex-1 text-cell ${filter === id ? 'border-b-[3px] border-b-steel font-semibold' : 'text-pencil hover:text-ink'}`}
+            className={`h-7 flex-auto px-1 text-cell ${filter === id ? 'border-b-[3px] border-b-steel font-semibold' : 'text-pencil hover:text-ink'}`}
           >
             {label}
           </button>
         ))}
       </div>
       <ul className="min-h-0 flex-1 overflow-y-auto py-1">
-        {shown.length === 0 ? (
-          <li className="px-3 text-cell text-pencil">
-            {filter === 'changed' ? 'Nothing differs from the last issue.' : 'No finding.'}
-          </li>
-        ) : null}
+        {shown.length === 0 ? <li className="px-3 text-cell text-pencil">{NOTHING[filter]}</li> : null}
         {shown.map((item) => (
           <li key={item.path}>
-            <Item item={item} badge={badges.get(item.path)} entry={entryOf(item)} stale={stale} onJump={onJump} />
+            <Item
+              item={item}
+              badge={badges.get(item.path)}
+              redlines={redlined.get(item.path) ?? 0}
+              entry={entryOf(item)}
+              stale={stale}
+              onJump={onJump}
+            />
           </li>
         ))}
       </ul>
