@@ -200,7 +200,7 @@ describe('any text', () => {
             expect(lineIndex.offset(range.end)).toBeGreaterThanOrEqual(lineIndex.offset(range.start))
         },
       ),
-      { numRuns: 1_000 },
+      { numRuns: 1_000, examples: [['  \uFEFF#kind: __proto__: '], ['\u00A0#k: a: b\u00A0']] },
     )
   })
 })

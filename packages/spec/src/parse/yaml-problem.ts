@@ -5,11 +5,11 @@ import { reportTightColon, tightColon } from './tight-colon.ts'
 
 const lineOf = (text: string, offset: number): Span => ({ start: lineStart(text, offset), end: lineEnd(text, offset) })
 
-/** What is written on a line, without indentation, dash and comment. */
+/** What is written on a line, without indentation, dash and comment. Only blanks and tabs indent in YAML; a byte order mark does not. */
 const written = (text: string, line: Span): Span => {
   const source = text.slice(line.start, line.end)
-  const lead = /^\s*(?:-\s+)?/u.exec(source)?.[0].length ?? 0
-  const body = source.slice(lead).replace(/(?:^|\s)#.*$/u, '')
+  const lead = /^[ \t\r]*(?:-[ \t]+)?/u.exec(source)?.[0].length ?? 0
+  const body = source.slice(lead).replace(/(?:^|[ \t])#.*$/u, '')
   return { start: line.start + lead, end: line.start + lead + body.trimEnd().length }
 }
 
@@ -79,7 +79,7 @@ const implicitKey = (report: Report, text: string, span: Span): void => {
 
 const twoColons = (report: Report, text: string, span: Span): void => {
   const line = lineOf(text, span.start)
-  const value = { start: span.start, end: written(text, line).end }
+  const value = { start: span.start, end: Math.max(span.start, written(text, line).end) }
   const source = text.slice(value.start, value.end)
   if (!/:(?:\s|$)/u.test(source)) {
     indented(report, text, nextWritten(text, span.start) ?? value)
