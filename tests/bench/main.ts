@@ -100,7 +100,7 @@ const straight = best(30, () => {
 })
 const engine = best(15, () => sizeProject(thousand))
 // The best of many single runs is one in which no garbage was collected; a run of 10,000 never gets by without. So both
-// pay for their own: ten runs of 1,000 in succession against one of 10,000.
+// pay for their own: ten runs of 1,000 in succession against one of 10,000. The stricter figure, best against best, stands beside it.
 let inARow = Infinity
 let engineTen = Infinity
 for (let round = 0; round < 8; round += 1) {
@@ -131,6 +131,11 @@ const rows: readonly (readonly [string, string, boolean])[] = [
     '… within 25 times the same arithmetic straight out',
     `${(engine / straight).toFixed(1)} × (${straight.toFixed(2)} ms)`,
     engine < 25 * straight,
+  ],
+  [
+    '10,000 within 11 times of 1,000 (the best single run of each)',
+    `${(engineTen / engine).toFixed(1)} ×`,
+    engineTen < 11 * engine,
   ],
   [
     '10,000 within 11 times of 1,000 (the mean of ten in succession)',
